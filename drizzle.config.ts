@@ -1,0 +1,9 @@
+import { defineConfig } from "drizzle-kit";
+
+export default defineConfig({
+  dialect: "postgresql",
+  schema: "./db/schema",
+  out: "./drizzle",
+  casing: "snake_case",
+  migrations: { prefix: "timestamp" },
+});

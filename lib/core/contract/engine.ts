@@ -1,0 +1,60 @@
+import * as z from "zod";
+import { EngineFigure, HealthyReading, Key } from "../tree/schema";
+import { Id, Moment } from "./id";
+
+/** What an engine is: features of the tree it has, and its maker's figures. An absent key means "don't know". */
+export const EngineProfile = z.strictObject({
+  features: z.record(Key, Key).default({}),
+  figures: z.partialRecord(EngineFigure, z.number().positive()).default({}),
+  healthy: z.partialRecord(HealthyReading, z.number()).default({}),
+  maker: z.string().trim().max(80).optional(),
+  model: z.string().trim().max(80).optional(),
+  serialNumber: z.string().trim().max(80).optional(),
+  cylinders: z.number().int().min(1).max(12).optional(),
+  ratedKw: z.number().positive().max(2000).optional(),
+});
+export type EngineProfile = z.infer<typeof EngineProfile>;
+
+export const NewBoat = z.strictObject({
+  id: Id,
+  name: z.string().trim().min(1).max(80),
+  /** Minutes that a call for help costs here, where they differ from the defaults. */
+  callMinutes: z.strictObject({ alongside: z.number().positive(), atAnchor: z.number().positive(), underWay: z.number().positive() }).partial().default({}),
+});
+export type NewBoat = z.infer<typeof NewBoat>;
+
+export const Boat = NewBoat.extend({ version: z.number().int(), createdAt: Moment });
+export type Boat = z.infer<typeof Boat>;
+
+export const NewEngine = z.strictObject({
+  id: Id,
+  boatId: Id,
+  /** "main engine", "port", "starboard". */
+  name: z.string().trim().min(1).max(80),
+  hasHourMeter: z.boolean().default(true),
+  /** For an engine without a meter: hours run in a usual year, from which hours are estimated. */
+  estimatedHoursPerYear: z.number().positive().max(8760).optional(),
+  profile: EngineProfile.prefault({}),
+});
+export type NewEngine = z.infer<typeof NewEngine>;
+
+export const Engine = NewEngine.extend({
+  version: z.number().int(),
+  createdAt: Moment,
+  boatName: z.string(),
+  /** The last reading; null before the first. */
+  hours: z.number().nonnegative().nullable(),
+  hoursAreEstimated: z.boolean(),
+  hoursReadAt: Moment.nullable(),
+});
+export type Engine = z.infer<typeof Engine>;
+
+/** A reading of the hour meter. `reset`: the meter was replaced or set back; hours go on from `reading`. */
+export const HourReading = z.strictObject({
+  id: Id,
+  engineId: Id,
+  reading: z.number().nonnegative().max(200_000),
+  readAt: Moment,
+  reset: z.boolean().default(false),
+});
+export type HourReading = z.infer<typeof HourReading>;

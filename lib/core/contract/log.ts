@@ -1,0 +1,63 @@
+import * as z from "zod";
+import { Key } from "../tree/schema";
+import { Id, Moment } from "./id";
+import { OutcomeKind, OutcomePayload } from "./event";
+
+/** A repair done without a diagnosis, written into the engine's log afterwards. `causes` and remedies may be in the person's own words. */
+export const NewRepair = OutcomePayload.omit({ outcome: true }).extend({
+  id: Id,
+  engineId: Id,
+  doneAt: Moment,
+  outcome: OutcomeKind.extract(["cured", "held"]),
+  symptoms: z.array(Key).max(12).default([]),
+});
+export type NewRepair = z.infer<typeof NewRepair>;
+
+/** One line of an engine's log: the outcome of a diagnosis, or a repair. A projection that can be rebuilt. */
+export const LogEntry = z.strictObject({
+  id: Id,
+  engineId: Id,
+  engineName: z.string(),
+  boatName: z.string(),
+  /** null for a repair logged without a diagnosis. */
+  diagnosisId: Id.nullable(),
+  at: Moment,
+  engineHours: z.number().nullable(),
+  hoursAreEstimated: z.boolean(),
+  symptoms: z.array(z.strictObject({ key: Key, title: z.string() })),
+  outcome: OutcomeKind.nullable().describe("null while the diagnosis is open"),
+  cause: z.strictObject({ key: Key.nullable(), title: z.string(), system: Key.nullable() }).nullable(),
+  remedy: z.strictObject({ key: Key.nullable(), title: z.string() }).nullable(),
+  proof: z.string().nullable(),
+  minutes: z.number().nullable(),
+  parts: z.array(z.strictObject({ key: Key.optional(), title: z.string(), quantity: z.number() })),
+  note: z.string().nullable(),
+  by: z.string(),
+  /** Hours until the same cause came back on this engine; null while it has not. */
+  cameBackAfterHours: z.number().nullable(),
+  /** Hours it has held so far; null where it came back or hours are unknown. */
+  heldHours: z.number().nullable(),
+  /** Was this cause here before on this engine? How many times, this one counted. */
+  timesHere: z.number().int().min(0),
+});
+export type LogEntry = z.infer<typeof LogEntry>;
+
+/** The same cause again on the same engine after a cure: a fact, said from the second case. */
+export const RepeatFault = z.strictObject({
+  engineId: Id,
+  cause: Key,
+  title: z.string(),
+  system: Key.nullable(),
+  count: z.number().int().min(2),
+  /** Engine hours at each case, first to last; null where unknown. */
+  hours: z.array(z.number().nullable()),
+  dates: z.array(Moment),
+  /** Hours between the cases; empty where hours are not known. */
+  gapsHours: z.array(z.number()),
+  gapsDays: z.array(z.number()),
+  /** Cases whose cure before them had not been proved. */
+  unprovedBefore: z.number().int().min(0),
+  /** What lies upstream: causes of the tree, with how often they bring it on, and roots in words. */
+  upstream: z.array(z.strictObject({ cause: Key.nullable(), title: z.string(), share: z.number().nullable() })),
+});
+export type RepeatFault = z.infer<typeof RepeatFault>;

@@ -1,0 +1,103 @@
+import type { Answer, DiagnosisEvent, Multiplier, OutcomePayload, RemedyResult } from "../contract/event";
+import type { EngineProfile } from "../contract/engine";
+import type { EngineState, Reading, Signal, Situation, StopRule, Who } from "../tree/schema";
+
+/**
+ * What one screen of a diagnosis shows: everything that follows from the tree
+ * and the log of events, worked out in one place (view() in show.ts), the same
+ * on the phone, on the server and in the printed hand-over.
+ */
+export type DiagnosisView = {
+  begun: boolean;
+  situation: Situation;
+  person: Who;
+  profile: EngineProfile;
+  multipliers: readonly Multiplier[];
+  symptoms: readonly { key: string; title: string; present: boolean }[];
+  /** Everything said so far, oldest first, for the list one tap away. */
+  said: readonly Said[];
+  /** Steps answered in two ways at once by two devices: belief uses neither until one is picked. */
+  conflicts: readonly { step: string; title: string; answers: readonly { event: string; says: string; device: string }[] }[];
+  /** Rules to be asked now, before anything else. */
+  rulesToAsk: readonly RuleShown[];
+  /** Rules in force: stay on each later screen until cleared. */
+  rulesInForce: readonly RuleShown[];
+  /** null: the log has ended, rules have yet to be asked, or nothing is left but to call. */
+  step: StepShown | null;
+  possible: Possible;
+  crankSeconds: number;
+  outcome: (OutcomePayload & { event: string; at: string }) | null;
+  /** The cause that a tried remedy cured, for the outcome form. */
+  curedCause: { cause: string; remedy: string; temporary: boolean; proof: string | null } | null;
+  runsAgain: boolean;
+};
+
+export type Said = {
+  event: string;
+  kind: DiagnosisEvent["kind"];
+  /** The check, remedy, rule or symptom. */
+  key: string | null;
+  title: string;
+  /** "Black specks or slime", "31 kPa: high", "Can't tell", "No change". */
+  says: string;
+  at: string;
+  device: string;
+  note: string | null;
+  photos: readonly string[];
+  mayChange: boolean;
+};
+
+export type RuleShown = { key: string; title: string; kind: StopRule["kind"]; ask: string | null; because: string; says: readonly string[]; runOn: boolean; clearedWhen: string | null };
+
+export type CautionShown = { key: string; signal: Signal; says: string };
+
+export type StepShown = {
+  kind: "check" | "remedy" | "call";
+  key: string;
+  title: string;
+  /** Why this step, in words from the numbers. */
+  why: string;
+  minutes: number;
+  engine: EngineState;
+  tools: readonly string[];
+  parts: readonly { key: string; title: string; quantity: number }[];
+  /** "if fitted": the profile does not say whether this engine has it. */
+  ifFitted: boolean;
+  cautions: readonly CautionShown[];
+  /** Safety first and last steps stand in the list, in place, marked. */
+  steps: readonly { text: string; safety: boolean }[];
+  ask: string;
+  answers: readonly { finding: string; title: string; withdraws: string | null }[];
+  reading: (Pick<Reading, "quantity" | "unit" | "from" | "to"> & { bands: readonly { finding: string; title: string; from: number; to: number }[] }) | null;
+  /** Seconds of cranking that it asks for, and what is left before the exhaust must be drained. */
+  cranks: number | null;
+  proof: string | null;
+  temporary: boolean;
+  who: Who;
+};
+
+export type Possible = {
+  /** Likeliest first; `of100` adds up to 100 over causes, others and unknown. */
+  causes: readonly PossibleCause[];
+  /** How many causes are folded into "others", and their share. */
+  others: { count: number; of100: number };
+  unknown: { share: number; of100: number };
+};
+
+export type PossibleCause = {
+  key: string;
+  title: string;
+  is: string;
+  share: number;
+  of100: number;
+  speaksFor: readonly EvidenceShown[];
+  speaksAgainst: readonly EvidenceShown[];
+  notChecked: readonly { check: string; title: string }[];
+  behind: readonly { cause: string; title: string; share: number }[];
+};
+
+/** `factor`: by how much this evidence moved the odds of the cause. */
+export type EvidenceShown = { title: string; says: string; factor: number };
+
+export type StepAnswer = Answer;
+export type StepResult = RemedyResult;
