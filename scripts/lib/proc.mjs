@@ -1,0 +1,149 @@
+// Process helpers. Node built-ins only: these run before `npm ci`.
+import { spawn } from "node:child_process";
+import { accessSync, constants, existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from "node:fs";
+import net from "node:net";
+import path from "node:path";
+
+export const root = path.resolve(import.meta.dirname, "../..");
+export const isRoot = process.getuid?.() === 0;
+const t0 = Date.now();
+export const log = (msg) => console.log(`[${((Date.now() - t0) / 1000).toFixed(1)}s] ${msg}`);
+export class UserError extends Error {}
+
+export function which(name, extraDirs = []) {
+  for (const dir of [...extraDirs, ...(process.env.PATH ?? "").split(path.delimiter), "/usr/sbin", "/sbin"]) {
+    if (!dir) continue;
+    const file = path.join(dir, name);
+    try {
+      accessSync(file, constants.X_OK);
+      return file;
+    } catch {}
+  }
+  return null;
+}
+
+/** Runs to the end; throws on a non-zero exit unless `check: false`. */
+export function run(cmd, args, { check = true, ...opts } = {}) {
+  return new Promise((resolve, reject) => {
+    const child = spawn(cmd, args, { cwd: root, stdio: "inherit", ...opts });
+    let out = "";
+    child.stdout?.on("data", (d) => (out += d));
+    child.stderr?.on("data", (d) => (out += d));
+    child.on("error", reject);
+    child.on("close", (code, signal) => {
+      if (check && code !== 0) reject(new Error(`${cmd} ${args.join(" ")} ended with ${signal ?? code}\n${out}`));
+      else resolve({ code, signal, out });
+    });
+  });
+}
+
+const setpriv = process.platform === "linux" ? which("setpriv") : null;
+
+/**
+ * A long-running child in a session of its own (so a Ctrl+C in the terminal reaches only us
+ * and we decide the order of shutdown) that the kernel signals when we die, even by kill -9
+ * (prctl PR_SET_PDEATHSIG through util-linux's setpriv, where that exists).
+ */
+export function daemon(cmd, args, { deathSignal = "TERM", as, ...opts } = {}) {
+  if (setpriv) {
+    const drop = as ? [`--reuid=${as.uid}`, `--regid=${as.gid}`, "--clear-groups"] : [];
+    return spawn(setpriv, [...drop, `--pdeathsig=${deathSignal}`, "--", cmd, ...args], { detached: true, cwd: root, ...opts });
+  }
+  return spawn(cmd, args, { detached: true, cwd: root, ...(as ?? {}), ...opts });
+}
+
+export function exited(child) {
+  if (child.exitCode !== null || child.signalCode !== null) return Promise.resolve();
+  return new Promise((r) => child.once("exit", r));
+}
+
+/** Signal, then kill after a grace period; resolves when it is gone. */
+export async function stop(child, signal = "SIGTERM", graceMs = 10_000) {
+  if (!child || child.exitCode !== null || child.signalCode !== null) return;
+  child.kill(signal);
+  const timer = setTimeout(() => child.kill("SIGKILL"), graceMs);
+  await exited(child);
+  clearTimeout(timer);
+}
+
+export function alive(pid) {
+  try {
+    process.kill(pid, 0);
+    return true;
+  } catch (e) {
+    return e.code === "EPERM";
+  }
+}
+
+/** "pid:starttime" names one process even after its pid is used again. */
+export function processTag(pid) {
+  try {
+    const stat = readFileSync(`/proc/${pid}/stat`, "utf8");
+    return `${pid}:${stat.slice(stat.lastIndexOf(")") + 2).split(" ")[19]}`;
+  } catch {
+    return alive(pid) ? `${pid}:?` : null;
+  }
+}
+
+/** One at a time in this checkout; a lock whose holder has died is taken over. */
+export async function withLock(name, work) {
+  const file = path.join(root, `.data/${name}.lock`);
+  mkdirSync(path.dirname(file), { recursive: true });
+  for (let told = false; ;) {
+    try {
+      writeFileSync(file, processTag(process.pid), { flag: "wx" });
+      break;
+    } catch (e) {
+      if (e.code !== "EEXIST") throw e;
+      const tag = existsSync(file) ? readFileSync(file, "utf8") : "";
+      if (tag && processTag(Number(tag.split(":")[0])) !== tag) rmSync(file, { force: true });
+      else {
+        if (!told) log(`waiting for another run (${name})`);
+        told = true;
+        await new Promise((r) => setTimeout(r, 300));
+      }
+    }
+  }
+  try {
+    return await work();
+  } finally {
+    rmSync(file, { force: true });
+  }
+}
+
+function canListen(port, host) {
+  return new Promise((resolve) => {
+    const s = net.createServer();
+    s.once("error", () => resolve(null));
+    s.listen({ port, host, exclusive: true }, () => {
+      const p = s.address().port;
+      s.close(() => resolve(p));
+    });
+  });
+}
+
+/** `preferred` where nothing listens there (on any address), else a port the kernel picks. */
+export async function freePort(preferred = 0, host = "127.0.0.1") {
+  if (preferred && (await canListen(preferred, host)) && (await canListen(preferred, "::").then((p) => p ?? true))) return preferred;
+  return await canListen(0, host);
+}
+
+/** Installs Debian packages when a program is missing; explains what to do when it can't. */
+export async function ensureDebian(present, packages, why) {
+  if (present()) return;
+  const hint = `${why} is missing. Install it, for example: apt-get install ${packages.join(" ")}`;
+  if (!isRoot || !existsSync("/usr/bin/apt-get")) throw new UserError(hint);
+  log(`installing ${packages.join(" ")} with apt-get`);
+  const env = { ...process.env, DEBIAN_FRONTEND: "noninteractive" };
+  const apt = async (...args) => {
+    for (const end = Date.now() + 300_000; ; await new Promise((r) => setTimeout(r, 1000))) {
+      const { code, out } = await run("apt-get", ["-q", ...args], { env, stdio: "pipe", check: false });
+      if (code === 0) return;
+      // Another run (or unattended-upgrades) has apt at this moment. DPkg::Lock::Timeout does not cover `update`.
+      if (!/Could not get lock|Unable to lock/.test(out) || Date.now() > end) throw new Error(`apt-get ${args.join(" ")}:\n${out}`);
+    }
+  };
+  await apt("update");
+  if (!present()) await apt("install", "-y", "--no-install-recommends", ...packages);
+  if (!present()) throw new UserError(hint);
+}
