@@ -1,75 +1,78 @@
 // npm start: everything from a fresh clone to a running site. Node built-ins only up to ensureNodeModules().
 import path from "node:path";
+import { claimCheckout } from "./lib/checkout.mjs";
 import { ensureNodeModules } from "./lib/npm.mjs";
 import { startPostgres } from "./lib/postgres.mjs";
 import { freePort, log, root, stop, UserError } from "./lib/proc.mjs";
+import { stopping } from "./lib/stopping.mjs";
 
-let web, pg, mail, closing;
-async function shutdown(code, why) {
-  if (closing) return;
-  closing = true;
-  if (why) log(why);
-  await stop(web); // first what uses the database
-  await mail?.stop();
-  await pg?.stop();
-  process.exit(code);
-}
-for (const [signal, code] of [
-  ["SIGINT", 130],
-  ["SIGTERM", 143],
-  ["SIGHUP", 129],
-])
-  process.on(signal, () => shutdown(code, `${signal}: stopping`));
-// npm itself killed hard: nobody is left to stop us, so we go too.
-const parent = process.ppid;
-if (process.env.npm_lifecycle_event) setInterval(() => process.ppid !== parent && shutdown(1, "npm is gone: stopping"), 1000).unref();
+const { add, end } = stopping();
 
 try {
-  const major = Number(process.versions.node.split(".")[0]);
-  if (major < 20) throw new UserError(`Node.js 20 or newer is needed; this is ${process.version}.`);
-  await ensureNodeModules();
-  const { build, claimCheckout, secrets, seed, serve } = await import("./lib/app.mjs");
-  const { migrate } = await import("./lib/migrate.mjs");
+  const [major, minor] = process.versions.node.split(".").map(Number);
+  if (major < 20 || (major === 20 && minor < 19)) throw new UserError(`Gudgeon needs Node.js 20.19 or newer; this is ${process.version}.`);
   const announce = claimCheckout();
-  secrets();
+  await ensureNodeModules();
+  const { build } = await import("./lib/build.mjs");
+  const { serve } = await import("./lib/serve.mjs");
 
-  let databaseUrl = process.env.DATABASE_URL;
   const database = (async () => {
-    if (!databaseUrl) {
-      pg = await startPostgres({ dir: path.join(root, ".data/postgres") });
-      pg.child.once("exit", () => shutdown(1, "PostgreSQL ended"));
-      databaseUrl = pg.url;
-    }
-    await migrate(databaseUrl);
-    await seed(databaseUrl);
-    log("the database is ready");
+    const { prepareDatabase } = await import("./lib/database.mjs");
+    return prepareDatabase(process.env.DATABASE_URL ?? (await ownServer()), { demo: process.env.DEMO !== "0" });
   })();
-  const results = await Promise.allSettled([build(), database]);
-  for (const r of results) if (r.status === "rejected") throw r.reason;
-  const dir = results[0].value;
+  const [built, urls] = await Promise.allSettled([build(), database]);
+  for (const result of [built, urls]) if (result.status === "rejected") throw result.reason;
 
-  const env = {};
-  if (!process.env.SMTP_URL) {
-    const { startMail } = await import("./lib/mail.mjs");
-    mail = await startMail({
-      dir: path.join(root, ".data/mail"),
-      onMail: (m) => log(`mail to ${m.to}: ${m.subject} (kept in .data/mail)`),
-    });
-    env.SMTP_URL = mail.url;
-  }
   const host = process.env.HOST ?? "127.0.0.1";
-  const wanted = Number(process.env.PORT ?? 3000);
-  const port = await freePort(wanted, host);
-  if (port !== wanted) {
-    if (process.env.PORT) throw new UserError(`Port ${wanted} is taken.`);
-    log(`port ${wanted} is taken; using ${port}`);
-  }
-  const site = await serve({ dir, port, host, databaseUrl, env });
-  web = site.child;
-  web.once("exit", () => shutdown(1, "the web server ended"));
+  const port = await portFor(host);
+  const env = { ...urls.value.env, FILES_DIR: process.env.FILES_DIR ?? path.join(root, ".data/files"), ...(await ownMailbox()) };
+  const site = await serve({ dir: built.value, port, host, env });
+  add(() => stop(site.child));
+  site.child.once("exit", () => end(1, "the web server ended"));
   announce(site.url);
   log(`ready: ${site.url}`);
+  if (urls.value.demo) console.log(demoSignIns(urls.value.demo, site.url, env.MAIL_DIR));
 } catch (e) {
   console.error(e instanceof UserError ? e.message : e);
-  await shutdown(1);
+  await end(1);
+}
+
+async function ownServer() {
+  const server = await startPostgres({ dir: path.join(root, ".data/postgres"), database: "gudgeon" });
+  add(() => server.stop());
+  server.child.once("exit", () => end(1, "PostgreSQL ended; its log is in .data/postgres/server.log"));
+  log("PostgreSQL runs on loopback, its data in .data/postgres");
+  return server.url;
+}
+
+/** PORT, or 3000, or the next free one; a PORT that was asked for and is taken is an error. */
+async function portFor(host) {
+  const wanted = Number(process.env.PORT ?? 3000);
+  const port = await freePort(wanted, host);
+  if (port === wanted) return port;
+  if (process.env.PORT) throw new UserError(`Port ${wanted} is taken. Set PORT to a free one, or leave it out.`);
+  log(`port ${wanted} is taken; using ${port}`);
+  return port;
+}
+
+/** Without SMTP_URL, mail stays here: a mailbox on loopback, shown on /dev/mail. */
+async function ownMailbox() {
+  if (process.env.SMTP_URL) return {};
+  const { startMail } = await import("./lib/mail.mjs");
+  const dir = path.join(root, ".data/mail");
+  const mail = await startMail({ dir, onMail: (m) => log(`mail to ${m.to}: ${m.subject} (kept in .data/mail, shown on /dev/mail)`) });
+  add(() => mail.stop());
+  return { SMTP_URL: mail.url, MAIL_DIR: dir };
+}
+
+function demoSignIns({ people, password }, url, mailDir) {
+  const lines = people.map((p) => `  ${p.email.padEnd(28)} ${p.roles.join(", ")}`);
+  return [
+    "",
+    `Demo sign-ins, all with the password "${password}":`,
+    ...lines,
+    mailDir ? `Mail that was sent: ${url}/dev/mail` : "",
+    "Stop with Ctrl-C.",
+    "",
+  ].join("\n");
 }

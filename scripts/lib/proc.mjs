@@ -6,8 +6,11 @@ import path from "node:path";
 
 export const root = path.resolve(import.meta.dirname, "../..");
 export const isRoot = process.getuid?.() === 0;
+/** A program that npm installed. */
+export const bin = (name) => path.join(root, "node_modules/.bin", name);
 const t0 = Date.now();
 export const log = (msg) => console.log(`[${((Date.now() - t0) / 1000).toFixed(1)}s] ${msg}`);
+/** A failure whose message says what to do; shown without a stack. */
 export class UserError extends Error {}
 
 export function which(name, extraDirs = []) {
