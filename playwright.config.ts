@@ -9,7 +9,7 @@ export default defineConfig({
   fullyParallel: true,
   workers: 2,
   retries: 0,
-  timeout: 30_000,
+  timeout: 60_000,
   expect: { timeout: 10_000 },
   forbidOnly: Boolean(process.env.CI),
   reporter: [["list"], ["json", { outputFile: `${run}/playwright.json` }]],
@@ -19,7 +19,7 @@ export default defineConfig({
     launchOptions: {
       executablePath: process.env.CHROMIUM_PATH ?? "/usr/bin/chromium", // Debian's; nothing is downloaded
       args: [
-        "--no-sandbox", // chromium refuses its sandbox as root
+        "--no-sandbox", // Chromium refuses its sandbox as root
         "--disable-gpu",
         "--disable-quic",
         "--no-first-run",
@@ -31,7 +31,18 @@ export default defineConfig({
     },
   },
   projects: [
-    { name: "setup", testMatch: /.*\.setup\.ts/ },
-    { name: "chromium", dependencies: ["setup"], use: { browserName: "chromium", viewport: { width: 1280, height: 800 } } },
+    { name: "sign-in", testMatch: /.*\.setup\.ts/ },
+    {
+      name: "phone",
+      testMatch: /.*\.phone\.spec\.ts/,
+      dependencies: ["sign-in"],
+      use: { browserName: "chromium", viewport: { width: 390, height: 844 }, hasTouch: true },
+    },
+    {
+      name: "desk",
+      testMatch: /^(?!.*\.phone).*\.spec\.ts/,
+      dependencies: ["sign-in"],
+      use: { browserName: "chromium", viewport: { width: 1440, height: 900 } },
+    },
   ],
 });

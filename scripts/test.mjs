@@ -1,128 +1,124 @@
-// npm test: lint, types, unit and database tests, then the built site in a browser. A fresh clone will do.
+// npm test: format, lint, types, unit and database tests, then the built site in a browser. A fresh clone will do.
+// `npm test -- tests/e2e/one.spec.ts` hands its arguments to Playwright.
 import { cpSync, mkdirSync, readFileSync, rmSync } from "node:fs";
 import path from "node:path";
 import { ensureNodeModules } from "./lib/npm.mjs";
 import { startPostgres } from "./lib/postgres.mjs";
-import { ensureDebian, freePort, log, root, run, stop, which } from "./lib/proc.mjs";
+import { bin, ensureDebian, freePort, log, root, run, stop, which } from "./lib/proc.mjs";
+import { stopping } from "./lib/stopping.mjs";
 
-const bin = (name) => path.join(root, "node_modules/.bin", name);
-const started = [];
-let closing;
-async function cleanUp() {
-  closing ??= (async () => {
-    for (const s of started.reverse()) await s().catch((e) => console.error(e));
-  })();
-  return closing;
-}
-for (const [signal, code] of [
-  ["SIGINT", 130],
-  ["SIGTERM", 143],
-  ["SIGHUP", 129],
-])
-  process.on(signal, () => cleanUp().then(() => process.exit(code)));
-const parent = process.ppid;
-if (process.env.npm_lifecycle_event) setInterval(() => process.ppid !== parent && cleanUp().then(() => process.exit(1)), 1000).unref();
-
+const { add, end } = stopping();
 const total = { passed: 0, failed: 0, skipped: 0 };
 const times = [];
-async function step(name, work) {
+
+/** Runs one part and takes its time; false when it failed. */
+async function part(name, work) {
   log(`— ${name}`);
-  const t = Date.now();
-  let ok = false;
+  const began = Date.now();
+  let ok = true;
   try {
-    ok = (await work()) !== false;
+    await work();
   } catch (e) {
+    ok = false;
     console.error(e.message ?? e);
   }
-  times.push(`${name} ${((Date.now() - t) / 1000).toFixed(1)} s`);
+  times.push(`${name} ${((Date.now() - began) / 1000).toFixed(1)} s`);
   return ok;
 }
-/** A step that counts as one test: lint, types. */
-const check = async (name, cmd, args) =>
-  (await step(name, () => run(process.execPath, [bin(cmd), ...args]))) ? total.passed++ : total.failed++;
-const env = {
-  ...process.env,
-  NEXT_TELEMETRY_DISABLED: "1",
-  AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: "true",
-  FORCE_COLOR: process.env.FORCE_COLOR ?? "0",
-};
-Object.assign(process.env, env);
+/** A part that counts as one test. */
+const check = async (name, work) => ((await part(name, work)) ? total.passed++ : total.failed++);
+const tool = (name, ...args) => run(process.execPath, [bin(name), ...args]);
+
 // Everything that this run writes: two runs side by side must not share a file.
 const scratch = path.join(root, `.data/test-run-${process.pid}`);
 mkdirSync(scratch, { recursive: true });
-process.env.RUN_DIR = scratch;
+Object.assign(process.env, {
+  RUN_DIR: scratch,
+  NEXT_TELEMETRY_DISABLED: "1",
+  AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: "true",
+  FORCE_COLOR: process.env.FORCE_COLOR ?? "0",
+});
 const report = (file) => JSON.parse(readFileSync(path.join(scratch, file), "utf8"));
+const chromium = () => process.env.CHROMIUM_PATH ?? which("chromium") ?? which("chromium-browser") ?? which("google-chrome");
 
 try {
-  await step("npm ci", ensureNodeModules);
-  const chromium = () => process.env.CHROMIUM_PATH ?? which("chromium") ?? which("chromium-browser") ?? which("google-chrome");
-  await step("Debian packages", () => ensureDebian(chromium, ["chromium", "fonts-liberation"], "Chromium (or set CHROMIUM_PATH)"));
+  const ready =
+    (await part("npm ci", ensureNodeModules)) &&
+    (await part("Debian packages", () => ensureDebian(chromium, ["chromium", "fonts-liberation"], "Chromium (or set CHROMIUM_PATH)")));
+  if (ready) {
+    await part("route types", () => tool("next", "typegen"));
+    await check("schema and migrations agree", schemaAgrees);
+    await check("format", () => tool("prettier", "--check", "--log-level", "warn", "."));
+    await check("lint", () => tool("eslint", ".", "--max-warnings", "0"));
+    await check("types", () => tool("tsc", "--noEmit"));
+    process.env.TYPES_CHECKED = "1";
+    await part("vitest", () => tool("vitest", "run").catch(() => {}));
+    countVitest();
+    if (await part("site", startSite)) {
+      await part("playwright", () => tool("playwright", "test", ...process.argv.slice(2)).catch(() => {}));
+      countPlaywright();
+    } else total.failed++;
+  } else total.failed++;
+} catch (e) {
+  console.error(e);
+  total.failed++;
+}
+if (total.failed) log(`what the browser saw: ${path.relative(root, path.join(scratch, "test-results"))}`);
+log(times.join(", "));
+const code = total.failed || !total.passed ? 1 : 0;
+await end(code, "", () => {
+  if (!code) rmSync(scratch, { recursive: true, force: true });
+  console.log(`${total.passed} passed, ${total.failed} failed${total.skipped ? `, ${total.skipped} skipped` : ""}`);
+});
 
-  await step("route types", () => run(process.execPath, [bin("next"), "typegen"]));
-  // The migrations say what src/db/schema.ts says. (drizzle-kit exits 0 even when it wanted to ask something.)
-  const same = await step("schema and migrations agree", async () => {
-    cpSync(path.join(root, "drizzle"), path.join(scratch, "drizzle"), { recursive: true });
-    const out = path.relative(root, path.join(scratch, "drizzle"));
-    const args = ["generate", "--dialect", "postgresql", "--schema", "src/db/schema.ts", "--out", out, "--casing", "snake_case"];
-    const { out: said } = await run(process.execPath, [bin("drizzle-kit"), ...args], { stdio: ["ignore", "pipe", "pipe"] });
-    if (!said.includes("No schema changes")) throw new Error(`Run: npx drizzle-kit generate\n${said}`);
+/** The migrations say what db/schema says. drizzle-kit exits 0 even when it wanted to ask something. */
+async function schemaAgrees() {
+  cpSync(path.join(root, "drizzle"), path.join(scratch, "drizzle"), { recursive: true });
+  const out = path.relative(root, path.join(scratch, "drizzle"));
+  const args = ["generate", "--dialect", "postgresql", "--schema", "db/schema", "--out", out, "--casing", "snake_case"];
+  const { out: said } = await run(process.execPath, [bin("drizzle-kit"), ...args], { stdio: ["ignore", "pipe", "pipe"] });
+  if (!said.includes("No schema changes")) throw new Error(`Run: npm run db:generate\n${said}`);
+}
+
+async function startSite() {
+  const { build } = await import("./lib/build.mjs");
+  const { prepareDatabase } = await import("./lib/database.mjs");
+  const { startMail } = await import("./lib/mail.mjs");
+  const { serve } = await import("./lib/serve.mjs");
+  const dir = await build();
+  const server = await startPostgres({ dir: path.join(scratch, "postgres"), database: "gudgeon", ephemeral: true });
+  add(() => server.stop());
+  const { env } = await prepareDatabase(server.url, { demo: true });
+  const mailDir = path.join(scratch, "mail");
+  const mail = await startMail({ dir: mailDir });
+  add(() => mail.stop());
+  const site = await serve({
+    dir,
+    port: await freePort(),
+    env: { ...env, SMTP_URL: mail.url, MAIL_DIR: mailDir, FILES_DIR: path.join(scratch, "files") },
   });
-  total[same ? "passed" : "failed"]++;
-  await check("eslint", "eslint", [".", "--max-warnings", "0"]);
-  await check("tsc", "tsc", ["--noEmit"]);
-  process.env.TYPES_CHECKED = "1";
+  add(() => stop(site.child));
+  Object.assign(process.env, { BASE_URL: site.url, MAIL_DIR: mailDir, CHROMIUM_PATH: chromium() });
+}
 
-  await step("vitest", () => run(process.execPath, [bin("vitest"), "run", ...(process.env.CI ? ["--coverage"] : [])]).catch(() => {}));
+function countVitest() {
   try {
     const v = report("vitest.json");
     total.passed += v.numPassedTests;
-    total.failed += v.numFailedTests + (v.success || v.numFailedTests ? 0 : 1); // a suite that does not load fails no test
+    total.failed += v.numFailedTests + (v.success || v.numFailedTests ? 0 : 1); // a file that does not load fails no test
     total.skipped += v.numPendingTests + v.numTodoTests;
   } catch {
     total.failed++;
   }
-
-  const { build, seed, serve } = await import("./lib/app.mjs");
-  const { migrate } = await import("./lib/migrate.mjs");
-  const { startMail } = await import("./lib/mail.mjs");
-  let dir;
-  const up =
-    (await step("build", async () => {
-      dir = await build();
-    })) &&
-    (await step("start", async () => {
-      const pg = await startPostgres({ dir: path.join(scratch, "pg"), ephemeral: true });
-      started.push(() => pg.stop());
-      await migrate(pg.url);
-      await seed(pg.url);
-      const mail = await startMail({ dir: path.join(scratch, "mail") });
-      started.push(() => mail.stop());
-      const site = await serve({
-        dir,
-        port: await freePort(),
-        databaseUrl: pg.url,
-        env: { SMTP_URL: mail.url, FILES_DIR: path.join(scratch, "files") },
-      });
-      started.push(() => stop(site.child));
-      Object.assign(process.env, { BASE_URL: site.url, MAIL_DIR: path.join(scratch, "mail"), CHROMIUM_PATH: chromium() });
-    }));
-  if (up) {
-    await step("playwright", () => run(process.execPath, [bin("playwright"), "test", ...process.argv.slice(2)]).catch(() => {}));
-    try {
-      const { stats } = report("playwright.json");
-      total.passed += stats.expected;
-      total.failed += stats.unexpected + stats.flaky;
-      total.skipped += stats.skipped;
-      if (!stats.expected) total.failed++;
-    } catch {
-      total.failed++;
-    }
-  } else total.failed++;
-} finally {
-  await cleanUp();
 }
-if (total.failed) log(`what the browser saw: ${path.relative(root, path.join(scratch, "test-results"))}`);
-else rmSync(scratch, { recursive: true, force: true });
-log(times.join(", "));
-console.log(`${total.passed} passed, ${total.failed} failed${total.skipped ? `, ${total.skipped} skipped` : ""}`);
-process.exit(total.failed || !total.passed ? 1 : 0);
+
+function countPlaywright() {
+  try {
+    const { stats } = report("playwright.json");
+    total.passed += stats.expected;
+    total.failed += stats.unexpected + stats.flaky + (stats.expected ? 0 : 1);
+    total.skipped += stats.skipped;
+  } catch {
+    total.failed++;
+  }
+}

@@ -1,15 +1,17 @@
 // Orderly ends: last started, first stopped; nothing left running, whatever ended us.
 
 /**
- * Collects what has to be stopped. `stopping(end)` returns { add, end }; signals, and npm itself being killed, end it too.
+ * Collects what has to be stopped: `add(stop)`. `end(code, why, last)` stops it all, runs `last` and exits; signals,
+ * and npm itself being killed, end it too.
  */
 export function stopping() {
   const stops = [];
   let ending;
-  const end = (code, why) => {
+  const end = (code, why, last) => {
     ending ??= (async () => {
       if (why) console.log(why);
       for (const stop of stops.reverse()) await stop().catch((e) => console.error(e));
+      last?.();
       process.exit(code);
     })();
     return ending;
@@ -24,5 +26,5 @@ export function stopping() {
   // npm killed hard: nobody is left to stop us, so we go too.
   const parent = process.ppid;
   if (process.env.npm_lifecycle_event) setInterval(() => process.ppid !== parent && end(1, "npm is gone: stopping"), 1000).unref();
-  return { add: (stop) => stops.push(stop), end, isEnding: () => Boolean(ending) };
+  return { add: (stop) => stops.push(stop), end };
 }
