@@ -62,7 +62,14 @@ export const EngineFigure = z.enum(["ratedRpm", "noLoadRpm", "idleRpm", "opening
 export type EngineFigure = z.infer<typeof EngineFigure>;
 
 /** This engine's own readings when well. */
-export const HealthyReading = z.enum(["topRpmInGear", "filterVacuumKpa", "startSeconds", "crankingVolts", "cruiseTemperatureC", "oilPressureKpa"]);
+export const HealthyReading = z.enum([
+  "topRpmInGear",
+  "filterVacuumKpa",
+  "startSeconds",
+  "crankingVolts",
+  "cruiseTemperatureC",
+  "oilPressureKpa",
+]);
 export type HealthyReading = z.infer<typeof HealthyReading>;
 
 /** The edge of a band: a number in the reading's unit, a factor of an engine figure, or this engine's healthy reading plus a number. */
@@ -73,7 +80,21 @@ export const Edge = z.union([
 ]);
 export type Edge = z.infer<typeof Edge>;
 
-export const Quantity = z.enum(["pressure", "temperature", "voltage", "current", "resistance", "speed", "time", "volume", "flow", "length", "ratio", "density", "count"]);
+export const Quantity = z.enum([
+  "pressure",
+  "temperature",
+  "voltage",
+  "current",
+  "resistance",
+  "speed",
+  "time",
+  "volume",
+  "flow",
+  "length",
+  "ratio",
+  "density",
+  "count",
+]);
 export type Quantity = z.infer<typeof Quantity>;
 
 export const Reading = z.strictObject({
@@ -112,10 +133,7 @@ export const SafetyFlags = z.strictObject({
 });
 export type SafetyFlags = z.infer<typeof SafetyFlags>;
 
-const Precedence = z.union([
-  z.strictObject({ check: Key, finding: Key.optional() }),
-  z.strictObject({ remedy: Key }),
-]);
+const Precedence = z.union([z.strictObject({ check: Key, finding: Key.optional() }), z.strictObject({ remedy: Key })]);
 
 /** What checks and remedies have in common: a thing that hands do. */
 const step = {

@@ -1,0 +1,57 @@
+import { parseArgs } from "node:util";
+import path from "node:path";
+import { readTree, type TreeRead } from "./read-tree";
+
+/** Says whether a tree is sound: every flaw with its place, then the counts. */
+export async function check(args: string[]): Promise<number> {
+  const { values, positionals } = parseArgs({
+    args,
+    allowPositionals: true,
+    options: { json: { type: "boolean" }, links: { type: "boolean" } },
+  });
+  const folder = positionals[0];
+  if (folder === undefined) {
+    console.error("Say which folder: npm run tree -- check trees/small-marine-diesel");
+    return 2;
+  }
+  const read = await readTree(folder);
+  const errors = read.flaws.filter((flaw) => flaw.severity === "error").length;
+  if (values.json) for (const line of figures(read, errors)) console.log(JSON.stringify(line));
+  else {
+    for (const flaw of read.flaws) console.log(flawLines(folder, flaw));
+    if (read.tree !== null)
+      console.log(
+        counts(read)
+          .map(([name, count]) => `${count} ${name}`)
+          .join(", "),
+      );
+    console.log(
+      errors === 0
+        ? `The tree is sound${read.flaws.length > 0 ? `; ${read.flaws.length} to look at` : ""}.`
+        : `${errors} ${errors === 1 ? "error" : "errors"}.`,
+    );
+  }
+  return errors === 0 ? 0 : 1;
+}
+
+function flawLines(folder: string, { severity, rule, node, says, mend, place }: TreeRead["flaws"][number]): string {
+  const where = place === null ? folder : `${path.join(folder, place.file)}:${place.line}`;
+  return `${where}  ${severity} (${rule})\n  ${node === null ? "" : `${node.kind} ${node.key}: `}${says}${mend === undefined ? "" : `\n  ${mend}`}`;
+}
+
+function counts({ tree }: TreeRead): [string, number][] {
+  if (tree === null) return [];
+  return [
+    ["symptoms", tree.symptoms.length],
+    ["causes", tree.causes.length],
+    ["checks", tree.checks.length],
+    ["readings", tree.checks.filter((check) => check.reading !== undefined).length],
+    ["remedies", tree.remedies.length],
+    ["cautions", tree.cautions.length],
+    ["stopRules", tree.stopRules.length],
+    ["knownCases", tree.knownCases.length],
+  ];
+}
+
+const figures = (read: TreeRead, errors: number) =>
+  [...counts(read), ["errors", errors] as const].map(([figure, value]) => ({ figure, value }));
