@@ -29,6 +29,8 @@ export const LogEntry = z.strictObject({
   cause: z.strictObject({ key: Key.nullable(), title: z.string(), system: Key.nullable() }).nullable(),
   remedy: z.strictObject({ key: Key.nullable(), title: z.string() }).nullable(),
   proof: z.string().nullable(),
+  /** The remedy only gets one home: the cause stays open. */
+  temporary: z.boolean(),
   minutes: z.number().nullable(),
   parts: z.array(z.strictObject({ key: Key.optional(), title: z.string(), quantity: z.number() })),
   note: z.string().nullable(),
@@ -51,6 +53,7 @@ export const RepeatFault = z.strictObject({
   count: z.number().int().min(2),
   /** Engine hours at each case, first to last; null where unknown. */
   hours: z.array(z.number().nullable()),
+  hoursAreEstimated: z.boolean(),
   dates: z.array(Moment),
   /** Hours between the cases; empty where hours are not known. */
   gapsHours: z.array(z.number()),
