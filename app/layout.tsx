@@ -18,7 +18,10 @@ export default function RootLayout({ children }: { children: ReactNode }) {
         <script dangerouslySetInnerHTML={{ __html: LIGHT_SCRIPT }} />
       </head>
       <body>
-        <a href="#main" className="visually-hidden focus:absolute focus:z-50 focus:m-2 focus:rounded-lg focus:bg-sheet focus:px-4 focus:py-3">
+        <a
+          href="#main"
+          className="visually-hidden focus:absolute focus:z-50 focus:m-2 focus:rounded-lg focus:bg-sheet focus:px-4 focus:py-3"
+        >
           Skip to the page itself
         </a>
         {children}

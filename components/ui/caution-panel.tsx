@@ -16,7 +16,10 @@ export function CautionPanel({ signal, children }: { signal: SignalWord; childre
     >
       {signal !== "notice" && <Triangle grave={grave} />}
       <p>
-        <b className={clsx("tracking-[0.03em]", grave ? "text-lead" : signal === "caution" ? "text-buoy" : "text-ink")}>{signal.toUpperCase()}</b> {children}
+        <b className={clsx("tracking-[0.03em]", grave ? "text-lead" : signal === "caution" ? "text-buoy" : "text-ink")}>
+          {signal.toUpperCase()}
+        </b>{" "}
+        {children}
       </p>
     </div>
   );

@@ -3,7 +3,13 @@
 import { X } from "lucide-react";
 import { useEffect, useId, useRef, type ReactNode } from "react";
 
-type Props = { open: boolean; onClose: () => void; title: ReactNode; children: ReactNode; /** Rises from the lower edge, within a thumb's reach. */ sheet?: boolean };
+type Props = {
+  open: boolean;
+  onClose: () => void;
+  title: ReactNode;
+  children: ReactNode;
+  /** Rises from the lower edge, within a thumb's reach. */ sheet?: boolean;
+};
 
 /** The browser's own dialog: it holds the focus, closes on Escape and needs no style that a strict content policy forbids. */
 export function Dialog({ open, onClose, title, children, sheet = false }: Props) {
@@ -34,7 +40,11 @@ export function Dialog({ open, onClose, title, children, sheet = false }: Props)
             <h2 id={heading} className="pt-2">
               {title}
             </h2>
-            <button type="button" onClick={onClose} className="inline-flex min-h-12 min-w-12 flex-none items-center justify-center rounded-lg border-[1.5px] border-edge bg-sheet">
+            <button
+              type="button"
+              onClick={onClose}
+              className="inline-flex min-h-12 min-w-12 flex-none items-center justify-center rounded-lg border-[1.5px] border-edge bg-sheet"
+            >
               <X aria-hidden size={22} />
               <span className="visually-hidden">Close</span>
             </button>

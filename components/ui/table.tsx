@@ -1,9 +1,21 @@
 import { clsx } from "clsx";
 import type { ReactNode } from "react";
 
-export type Column<Row> = { key: string; title: ReactNode; cell: (row: Row) => ReactNode; /** Figures off an instrument, set right. */ figure?: boolean };
+export type Column<Row> = {
+  key: string;
+  title: ReactNode;
+  cell: (row: Row) => ReactNode;
+  /** Figures off an instrument, set right. */ figure?: boolean;
+};
 
-type Props<Row> = { caption: string; hideCaption?: boolean; columns: readonly Column<Row>[]; rows: readonly Row[]; rowKey: (row: Row) => string; empty: ReactNode };
+type Props<Row> = {
+  caption: string;
+  hideCaption?: boolean;
+  columns: readonly Column<Row>[];
+  rows: readonly Row[];
+  rowKey: (row: Row) => string;
+  empty: ReactNode;
+};
 
 /** A table that people read; it scrolls sideways within itself, never the page, and says so when it is empty. */
 export function Table<Row>({ caption, hideCaption = false, columns, rows, rowKey, empty }: Props<Row>) {

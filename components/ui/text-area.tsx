@@ -2,7 +2,13 @@ import { clsx } from "clsx";
 import type { ComponentProps, ReactNode } from "react";
 import { Field, inputLook } from "./field";
 
-type Props = Omit<ComponentProps<"textarea">, "id"> & { id: string; label: ReactNode; hint?: ReactNode; error?: string | undefined; optional?: boolean };
+type Props = Omit<ComponentProps<"textarea">, "id"> & {
+  id: string;
+  label: ReactNode;
+  hint?: ReactNode;
+  error?: string | undefined;
+  optional?: boolean;
+};
 
 /** Several lines of text. */
 export function TextArea({ id, label, hint, error, optional = false, className, rows = 3, ...rest }: Props) {
