@@ -40,6 +40,8 @@ export const OutcomePayload = z.strictObject({
   /** How the cure was proved; absent: it was not. */
   proof: z.string().trim().max(500).optional(),
   engineHours: z.number().nonnegative().max(200_000).optional(),
+  /** The meter was replaced or set back since the last reading: a lower figure is meant. */
+  meterReset: z.literal(true).optional(),
   minutes: z.number().nonnegative().max(100_000).optional(),
   parts: z.array(z.strictObject({ key: Key.optional(), title: z.string().trim().min(1).max(200), quantity: z.number().positive().max(1000) })).default([]),
   note: z.string().max(4000).optional(),
