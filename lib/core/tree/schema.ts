@@ -118,6 +118,8 @@ export type Who = z.infer<typeof Who>;
 export const SafetyFlags = z.strictObject({
   /** Seconds of cranking that this step asks for. */
   cranks: z.number().int().min(1).max(60).optional(),
+  /** The stop is held while it cranks: the engine must not fire. */
+  fuelOff: z.literal(true).optional(),
   opensRawWater: z.literal(true).optional(),
   opensHoseBelowWater: z.literal(true).optional(),
   opensCoolant: z.literal(true).optional(),

@@ -1,0 +1,54 @@
+import type { EngineProfile } from "../contract/engine";
+import type { AppliesTo, Check, Feature, Remedy, Situation } from "./schema";
+import { treatedAsRail } from "./treated-as-rail";
+
+/**
+ * The share of engines like this one that a node applies to: 0, it does not;
+ * 1, it does; between, when the profile does not know a feature, by that
+ * feature's shares (the step then says "if fitted").
+ */
+export function shareOfEngines(
+  appliesTo: AppliesTo | undefined,
+  profile: Pick<EngineProfile, "features">,
+  situation: Situation,
+  features: readonly Feature[],
+): number {
+  if (appliesTo?.situations !== undefined && !appliesTo.situations.includes(situation)) return 0;
+  let share = 1;
+  for (const [key, wanted] of Object.entries(appliesTo?.features ?? {})) {
+    const known = profile.features[key];
+    if (known !== undefined) share *= wanted.includes(known) ? 1 : 0;
+    else
+      share *= shareOfOptions(
+        features.find((feature) => feature.key === key),
+        wanted,
+      );
+  }
+  return share;
+}
+
+/**
+ * The same for a check or remedy, with the one rule that no share may soften:
+ * where a high-pressure union is opened, an engine that is common rail, has
+ * unit injectors or may have either is left to the workshop.
+ */
+export function shareOfStep(
+  step: Pick<Check | Remedy, "appliesTo" | "flags" | "who">,
+  profile: Pick<EngineProfile, "features">,
+  situation: Situation,
+  features: readonly Feature[],
+): number {
+  if (step.flags.opensHighPressureFuel && step.who !== "workshop" && treatedAsRail(profile)) return 0;
+  return shareOfEngines(step.appliesTo, profile, situation, features);
+}
+
+/** How many of all engines have one of these options, from 0 to 1: the options without a share part what the others leave. */
+function shareOfOptions(feature: Feature | undefined, wanted: readonly string[]): number {
+  if (feature === undefined) return 0.5;
+  const named = feature.options.reduce((sum, option) => sum + (option.share ?? 0), 0);
+  const unnamed = feature.options.filter((option) => option.share === undefined).length;
+  const rest = unnamed === 0 ? 0 : Math.max(0, 1 - named) / unnamed;
+  const total = named + rest * unnamed;
+  const sum = feature.options.filter((option) => wanted.includes(option.key)).reduce((all, option) => all + (option.share ?? rest), 0);
+  return total === 0 ? 0 : sum / total;
+}
