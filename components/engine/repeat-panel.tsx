@@ -1,0 +1,76 @@
+import type { RepeatFault } from "@/lib/core/contract/log";
+
+const round = (n: number) => Math.round(n).toLocaleString("en-GB");
+
+/** A fault that came back: the fact, its gaps as a picture and in words, and what lies upstream. */
+export function RepeatPanel({ repeat }: { repeat: RepeatFault }) {
+  const inHours = repeat.gapsHours.length > 0;
+  const gaps = inHours ? repeat.gapsHours : repeat.gapsDays;
+  const unit = inHours ? "h" : "d";
+  const first = repeat.hours[0];
+  const last = repeat.hours[repeat.hours.length - 1];
+  const over =
+    inHours && typeof first === "number" && typeof last === "number"
+      ? `${round(last - first)} hours`
+      : `${round(sum(repeat.gapsDays))} days`;
+  return (
+    <section className="grid gap-5 rounded-xl border-[1.5px] border-lead bg-lead-wash px-4 py-4 sm:px-5 md:grid-cols-[1fr_20rem]">
+      <div>
+        <p className="text-sm font-bold text-lead">Came back</p>
+        <h2>
+          {repeat.title}: {repeat.count} times in {over}
+        </h2>
+        <p className="mt-1.5">
+          {inHours ? "Running hours" : "Days"} between them: {gaps.map((g) => round(g)).join(", ")}.{" "}
+          {repeat.unprovedBefore > 0 && `${round(repeat.unprovedBefore)} of the cures before had not been proved. `}
+          {gaps.length < 3 ? "Too few to tell whether it is getting worse." : ""}
+        </p>
+        {repeat.upstream.length > 0 && (
+          <p className="mt-1.5">
+            Putting this right cures the symptom, not what brings it on. Look upstream at{" "}
+            {repeat.upstream.map((u, i) => (
+              <span key={u.title}>
+                {i > 0 && (i === repeat.upstream.length - 1 ? " or " : ", ")}
+                <b>{lower(u.title)}</b>
+              </span>
+            ))}
+            .
+          </p>
+        )}
+      </div>
+      <GapBars gaps={gaps} unit={unit} />
+    </section>
+  );
+}
+
+/** Bars as high as the gaps are long; the figures stand under them, so the picture adds nothing a reader would miss. */
+function GapBars({ gaps, unit }: { gaps: readonly number[]; unit: "h" | "d" }) {
+  const shown = gaps.slice(-8);
+  const longest = Math.max(...shown, 1);
+  return (
+    <figure>
+      <div className="flex h-24 items-end gap-2" aria-hidden>
+        {shown.map((gap, i) => (
+          <div key={i} className="flex h-full flex-1 flex-col justify-end text-center">
+            <svg className="w-full flex-1" viewBox="0 0 10 100" preserveAspectRatio="none">
+              <rect
+                x={0}
+                y={100 - Math.max(4, (gap / longest) * 100)}
+                width={10}
+                height={Math.max(4, (gap / longest) * 100)}
+                fill="var(--lead)"
+              />
+            </svg>
+            <span className="text-sm text-ink-2">{round(gap)}</span>
+          </div>
+        ))}
+      </div>
+      <figcaption className="mt-1 text-center text-sm text-ink-2">
+        {unit === "h" ? "running hours" : "days"} from one to the next
+      </figcaption>
+    </figure>
+  );
+}
+
+const sum = (numbers: readonly number[]) => numbers.reduce((a, b) => a + b, 0);
+const lower = (text: string) => text.charAt(0).toLowerCase() + text.slice(1);

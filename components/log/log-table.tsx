@@ -1,0 +1,52 @@
+import Link from "next/link";
+import { Table, type Column } from "@/components/ui/table";
+import { EmptyState } from "@/components/ui/empty-state";
+import type { LogEntry } from "@/lib/core/contract/log";
+import { Day } from "./day";
+import { Standing } from "./standing";
+
+type Props = {
+  fleetId: string;
+  entries: readonly LogEntry[];
+  caption: string;
+  /** Over several engines: say which. */ namesEngine?: boolean;
+};
+
+/** The log as a table: what was reported, found and done, and how it stands. */
+export function LogTable({ fleetId, entries, caption, namesEngine = false }: Props) {
+  const columns: Column<LogEntry>[] = [
+    { key: "when", title: "When", cell: (e) => <LogLink fleetId={fleetId} entry={e} /> },
+    ...(namesEngine ? [{ key: "engine", title: "Engine", cell: (e: LogEntry) => `${e.boatName}, ${e.engineName}` }] : []),
+    {
+      key: "hours",
+      title: "Engine hours",
+      figure: true,
+      cell: (e) => (e.engineHours === null ? "–" : `${e.hoursAreEstimated ? "~" : ""}${Math.round(e.engineHours)}`),
+    },
+    { key: "reported", title: "Reported", cell: (e) => e.symptoms.map((s) => s.title).join(", ") || "–" },
+    { key: "found", title: "Found", cell: (e) => e.cause?.title ?? "–" },
+    { key: "cured", title: "Cured by", cell: (e) => e.remedy?.title ?? "–" },
+    { key: "minutes", title: "Minutes", figure: true, cell: (e) => (e.minutes === null ? "–" : Math.round(e.minutes)) },
+    { key: "standing", title: "Standing", cell: (e) => <Standing entry={e} /> },
+  ];
+  return (
+    <Table
+      caption={caption}
+      hideCaption
+      columns={columns}
+      rows={entries}
+      rowKey={(e) => e.id}
+      empty={<EmptyState title="Nothing logged yet">A diagnosis that is ended, or a repair that is written in, stands here.</EmptyState>}
+    />
+  );
+}
+
+function LogLink({ fleetId, entry }: { fleetId: string; entry: LogEntry }) {
+  const day = <Day at={entry.at} />;
+  if (entry.diagnosisId === null) return day;
+  return (
+    <Link className="link" prefetch={false} href={`/f/${fleetId}/log/${entry.diagnosisId}`}>
+      {day}
+    </Link>
+  );
+}

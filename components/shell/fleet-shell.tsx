@@ -1,0 +1,51 @@
+import type { ReactNode } from "react";
+import { Mark } from "@/components/ui/mark";
+import { LightSwitch } from "@/components/ui/light-switch";
+import { FleetNav } from "./fleet-nav";
+
+type Props = {
+  fleet: { id: string; name: string };
+  /** Other fleets this person is in; with one fleet there is nothing to choose. */
+  fleets: readonly { id: string; name: string }[];
+  personName: string;
+  children: ReactNode;
+};
+
+/** The frame round everything that needs the server: the way about at the left, on a phone folded into the top. */
+export function FleetShell({ fleet, fleets, personName, children }: Props) {
+  return (
+    <div className="min-h-dvh lg:grid lg:grid-cols-[13rem_1fr]">
+      <header className="no-print bg-deep text-on-deep lg:min-h-dvh lg:px-3.5 lg:py-5">
+        <div className="flex items-center gap-2.5 px-4 py-2 lg:mb-6 lg:px-1 lg:py-0">
+          <Mark />
+          <span className="text-xl font-bold">Gudgeon</span>
+          <span className="ml-auto lg:hidden">
+            <LightSwitch />
+          </span>
+        </div>
+        <details className="group lg:hidden">
+          <summary className="flex min-h-12 list-none items-center justify-between border-t border-on-deep/25 px-4 font-semibold">
+            <span>{fleet.name}</span>
+            <span aria-hidden className="group-open:rotate-180">
+              ⌄
+            </span>
+            <span className="visually-hidden">Menu</span>
+          </summary>
+          <div className="px-2 pb-3">
+            <FleetNav fleet={fleet} fleets={fleets} personName={personName} />
+          </div>
+        </details>
+        <div className="hidden lg:block">
+          <p className="px-3 pb-2 text-sm opacity-85">{fleet.name}</p>
+          <FleetNav fleet={fleet} fleets={fleets} personName={personName} />
+          <div className="pt-6">
+            <LightSwitch />
+          </div>
+        </div>
+      </header>
+      <main id="main" className="mx-auto w-full max-w-6xl px-4 pt-5 pb-16 lg:px-9 lg:pt-7">
+        {children}
+      </main>
+    </div>
+  );
+}
