@@ -47,7 +47,16 @@ export type Said = {
   mayChange: boolean;
 };
 
-export type RuleShown = { key: string; title: string; kind: StopRule["kind"]; ask: string | null; because: string; says: readonly string[]; runOn: boolean; clearedWhen: string | null };
+export type RuleShown = {
+  key: string;
+  title: string;
+  kind: StopRule["kind"];
+  ask: string | null;
+  because: string;
+  says: readonly string[];
+  runOn: boolean;
+  clearedWhen: string | null;
+};
 
 export type CautionShown = { key: string; signal: Signal; says: string };
 
@@ -68,7 +77,11 @@ export type StepShown = {
   steps: readonly { text: string; safety: boolean }[];
   ask: string;
   answers: readonly { finding: string; title: string; withdraws: string | null }[];
-  reading: (Pick<Reading, "quantity" | "unit" | "from" | "to"> & { bands: readonly { finding: string; title: string; from: number; to: number }[] }) | null;
+  reading:
+    | (Pick<Reading, "quantity" | "unit" | "from" | "to"> & {
+        bands: readonly { finding: string; title: string; from: number; to: number }[];
+      })
+    | null;
   /** Seconds of cranking that it asks for, and what is left before the exhaust must be drained. */
   cranks: number | null;
   proof: string | null;

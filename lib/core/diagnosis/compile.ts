@@ -1,0 +1,111 @@
+import { shareOfEngines } from "../tree/applies";
+import type { Cause, Check, FaultTree, Remedy } from "../tree/schema";
+import { BASE_RATES } from "../tree/strength";
+import { treatedAsRail } from "../tree/treated-as-rail";
+import { probabilityOf } from "./cause-row";
+import { compileCheck } from "./compile-check";
+import { COSTS, fixedMinutes } from "./costs";
+import type { Model, RemedyModel, Setting, StepModel } from "./model";
+import { symptomShares } from "./symptom-shares";
+import { whoMay } from "./who-may";
+
+/** Prior share of "something not in this tree". */
+const UNKNOWN = 0.05;
+/** A remedy cures a cause that it has no link to 1 time in 100. */
+const UNLINKED_CURE = 0.01;
+
+/**
+ * Makes a tree ready for arithmetic: what does not apply to this engine here is
+ * left out, words become numbers, and "something not in this tree" joins as the
+ * last hypothesis. Rules [B1]-[B4], [K1], [M1], [W1]-[W4]; rows [L1]-[L6]; symptoms [S1]-[S3].
+ */
+export function compile(tree: FaultTree, setting: Setting): Model {
+  const shareFor = (node: { appliesTo?: Cause["appliesTo"] }): number =>
+    shareOfEngines(node.appliesTo, setting.profile, setting.situation, tree.features);
+  const causes = tree.causes.filter((cause) => weightOf(cause, shareFor(cause), setting) > 0);
+  const weights = Float64Array.from(causes, (cause) => weightOf(cause, shareFor(cause), setting));
+  const prior = withUnknown(weights);
+  const stepOf = (step: Check | Remedy): StepModel => stepModel(step, shareFor(step), setting);
+  const checks = tree.checks
+    .map((check) => ({ check, step: stepOf(check) }))
+    .filter(({ step }) => step.share > 0)
+    .map(({ check, step }) => compileCheck(check, step, causes, prior));
+  const remedies = tree.remedies.map((remedy) => compileRemedy(remedy, stepOf(remedy), causes)).filter((remedy) => remedy.share > 0);
+  return {
+    tree,
+    setting,
+    causes,
+    hypotheses: [...causes.map((cause) => [cause.key]), []],
+    causeAt: placesOf(causes),
+    unknownAt: causes.length,
+    logPrior: prior.map(Math.log),
+    symptoms: new Map(tree.symptoms.map(({ key }) => [key, withUnknownPlace(symptomShares(key, causes, weights).shares)])),
+    checks,
+    checkAt: placesOf(checks),
+    remedies,
+    remedyAt: placesOf(remedies),
+    callMinutes: setting.callMinutes ?? COSTS.call[setting.situation],
+  };
+}
+
+const placesOf = (items: readonly { key: string }[]): ReadonlyMap<string, number> => new Map(items.map((item, index) => [item.key, index]));
+
+const baseOf = (base: Cause["base"]): number => (typeof base === "number" ? base : BASE_RATES[base]);
+
+/** Base rate among the engines it applies to, times their share, times what this engine's log says. */
+function weightOf(cause: Cause, share: number, setting: Setting): number {
+  const moved = setting.multipliers?.find((multiplier) => multiplier.cause === cause.key)?.times ?? 1;
+  return baseOf(cause.base) * share * moved;
+}
+
+function withUnknown(weights: Float64Array): Float64Array {
+  const total = weights.reduce((sum, weight) => sum + weight, 0);
+  const prior = new Float64Array(weights.length + 1);
+  weights.forEach((weight, index) => (prior[index] = (weight / total) * (1 - UNKNOWN)));
+  // A tree with nothing that applies still has its unknown.
+  prior[weights.length] = weights.length > 0 ? UNKNOWN : 1;
+  return prior;
+}
+
+function withUnknownPlace(shares: Float64Array): Float64Array {
+  const all = new Float64Array(shares.length + 1).fill(1);
+  all.set(shares);
+  return all;
+}
+
+function stepModel(step: Check | Remedy, share: number, setting: Setting): StepModel {
+  const missing = isMissing(step, setting.notAboard ?? []);
+  const alongside = setting.situation === "alongside";
+  const unionsAllowed = !step.flags.opensHighPressureFuel || !treatedAsRail(setting.profile);
+  return {
+    key: step.key,
+    share,
+    offered: unionsAllowed && whoMay(step, setting.person, setting.situation) && (!missing || alongside),
+    minutes: fixedMinutes(step, setting.situation) + (missing && alongside ? COSTS.fetchAlongside : 0),
+  };
+}
+
+function isMissing(step: Check | Remedy, notAboard: readonly string[]): boolean {
+  const parts = "parts" in step ? step.parts.flatMap((part) => [part.key, part.title]) : [];
+  return [...step.tools, ...parts].some((item) => notAboard.includes(item));
+}
+
+function compileRemedy(remedy: Remedy, step: StepModel, causes: readonly Cause[]): RemedyModel {
+  const cure = new Float64Array(causes.length + 1).fill(UNLINKED_CURE);
+  // Nothing in the tree cures what is not in the tree.
+  cure[causes.length] = 0;
+  const linkedAt: number[] = [];
+  causes.forEach((cause, index) => {
+    const strength = cause.curedBy[remedy.key];
+    if (strength === undefined) return;
+    cure[index] = probabilityOf(strength);
+    linkedAt.push(index);
+  });
+  return {
+    ...step,
+    remedy,
+    cure,
+    linkedAt: Int32Array.from(linkedAt),
+    linkedCure: Float64Array.from(linkedAt, (index) => cure[index] ?? 0),
+  };
+}

@@ -1,0 +1,26 @@
+import type { RemedyResult } from "../contract/event";
+import type { EngineState } from "../tree/schema";
+import type { EngineStanding } from "./costs";
+
+/** All that is known of one fault, in the tree's keys. Order never matters, but for pins: the symptom reported first leads. */
+export type Evidence = {
+  readonly symptoms: readonly { readonly symptom: string; readonly present: boolean }[];
+  /** `finding` null: asked, and it could not be told. */
+  readonly findings: readonly { readonly check: string; readonly finding: string | null }[];
+  readonly remedies: readonly { readonly remedy: string; readonly result: RemedyResult }[];
+  /** How things stand for the next step; absent: cold, stopped, nothing open, nothing forbidden. */
+  readonly standing?: Standing;
+};
+
+export type Standing = EngineStanding & {
+  /** Engine states that stop rules in force, or the symptoms themselves, rule out. */
+  readonly ruledOut: ReadonlySet<EngineState>;
+  /** A rule in force says to call or to hand over. */
+  readonly mustCall: boolean;
+  /** Checks that would lift a rule in force. */
+  readonly clearing: readonly string[];
+};
+
+export const NO_EVIDENCE: Evidence = { symptoms: [], findings: [], remedies: [] };
+
+export const AT_REST: Standing = { hot: false, running: false, open: new Set(), ruledOut: new Set(), mustCall: false, clearing: [] };

@@ -1,0 +1,61 @@
+import type { Evidence } from "./evidence";
+import type { CheckModel, Model } from "./model";
+
+export type Heard = { readonly check: CheckModel; readonly finding: number };
+
+/**
+ * The findings that count, in the order of their keys: each known to the model,
+ * and of those that see the same thing only the loudest (ties: the first key).
+ * Rules [E2], [E3].
+ */
+export function heard(model: Model, findings: Evidence["findings"]): readonly Heard[] {
+  const all: Heard[] = [];
+  for (const { check: key, finding } of findings) {
+    const check = model.checks[model.checkAt.get(key) ?? -1];
+    const at = finding === null ? undefined : check?.findingAt.get(finding);
+    if (check && at !== undefined) all.push({ check, finding: at });
+  }
+  all.sort((a, b) => (a.check.key < b.check.key ? -1 : 1));
+  const loudestOf = new Map<string, Heard>();
+  for (const one of all) {
+    const sight = one.check.check.sameSight;
+    if (sight === undefined) continue;
+    const before = loudestOf.get(sight);
+    if (!before || loudness(one) > loudness(before)) loudestOf.set(sight, one);
+  }
+  return all.filter((one) => one.check.check.sameSight === undefined || loudestOf.get(one.check.check.sameSight) === one);
+}
+
+const loudness = (one: Heard): number => one.check.loudness[one.finding] ?? 0;
+
+/** Which findings of the check say again what has been reported; empty: none does. */
+export function restating(check: CheckModel, reported: ReadonlySet<string>): readonly number[] {
+  const again: number[] = [];
+  check.check.findings.forEach((finding, index) => finding.restates !== undefined && reported.has(finding.restates) && again.push(index));
+  return again;
+}
+
+/** Symptoms reported as present. */
+export const reportedIn = (evidence: Pick<Evidence, "symptoms">): ReadonlySet<string> =>
+  new Set(evidence.symptoms.filter((one) => one.present).map((one) => one.symptom));
+
+/**
+ * ln of what a finding weighs for each hypothesis, added to `into`. A finding
+ * that restates a reported symptom weighs nothing; where several do, only the
+ * choice between them counts. Rule [E4].
+ */
+export function addFinding(one: Heard, reported: ReadonlySet<string>, into: Float64Array): void {
+  const row = one.check.logRows[one.finding];
+  if (!row) return;
+  const again = restating(one.check, reported);
+  if (!again.includes(one.finding)) {
+    for (let index = 0; index < into.length; index++) into[index] = (into[index] ?? 0) + (row[index] ?? 0);
+    return;
+  }
+  if (again.length === 1) return;
+  for (let index = 0; index < into.length; index++) {
+    let among = 0;
+    for (const finding of again) among += one.check.rows[finding]?.[index] ?? 0;
+    into[index] = (into[index] ?? 0) + (row[index] ?? 0) - Math.log(among);
+  }
+}

@@ -1,0 +1,72 @@
+import type { EngineProfile } from "../contract/engine";
+import type { Multiplier } from "../contract/event";
+import type { Cause, Check, FaultTree, Remedy, Situation, Who } from "../tree/schema";
+
+/** What a tree is compiled for: this engine, here, with these hands. */
+export type Setting = {
+  readonly profile: Pick<EngineProfile, "features" | "figures" | "healthy">;
+  readonly situation: Situation;
+  readonly person: Who;
+  readonly multipliers?: readonly Multiplier[];
+  /** What a call for help costs here, in minutes; absent: COSTS.call. */
+  readonly callMinutes?: number;
+  /** Tools and parts that are not aboard, as the tree names them. */
+  readonly notAboard?: readonly string[];
+};
+
+/** What a compiled check and a compiled remedy have in common. */
+export type StepModel = {
+  readonly key: string;
+  /** Share of engines like this one that have what it works on; under 1 the step says "if fitted". */
+  readonly share: number;
+  /** May it be asked of this person, here, with what is aboard? What is not offered may still be told. */
+  readonly offered: boolean;
+  /** fixedMinutes, and the fetching of what is not aboard. */
+  readonly minutes: number;
+};
+
+export type CheckModel = StepModel & {
+  readonly check: Check;
+  readonly findingAt: ReadonlyMap<string, number>;
+  readonly sound: Float64Array;
+  /** rows[finding][hypothesis] = P(finding given hypothesis). */
+  readonly rows: readonly Float64Array[];
+  readonly logRows: readonly Float64Array[];
+  /** Sum over findings of P ln P for each hypothesis, so that information needs no logarithm a cause. */
+  readonly negEntropy: Float64Array;
+  /** How loud each finding speaks: the largest change of log-odds against a sound engine over all causes. */
+  readonly loudness: Float64Array;
+  /** Has any cause a link to it? */
+  readonly linked: boolean;
+};
+
+export type RemedyModel = StepModel & {
+  readonly remedy: Remedy;
+  /** cure[hypothesis] = P(cured given hypothesis). */
+  readonly cure: Float64Array;
+  /** The hypotheses with a link, and their chance. */
+  readonly linkedAt: Int32Array;
+  readonly linkedCure: Float64Array;
+};
+
+/**
+ * A tree ready for arithmetic. Hypotheses are sets of causes: single ones now,
+ * the last one empty for "something not in this tree". Pairs may join them.
+ */
+export type Model = {
+  readonly tree: FaultTree;
+  readonly setting: Setting;
+  readonly causes: readonly Cause[];
+  readonly hypotheses: readonly (readonly string[])[];
+  readonly causeAt: ReadonlyMap<string, number>;
+  /** Index of "something not in this tree". */
+  readonly unknownAt: number;
+  readonly logPrior: Float64Array;
+  /** P(symptom given hypothesis); the unknown's place is not used, see believe(). */
+  readonly symptoms: ReadonlyMap<string, Float64Array>;
+  readonly checks: readonly CheckModel[];
+  readonly checkAt: ReadonlyMap<string, number>;
+  readonly remedies: readonly RemedyModel[];
+  readonly remedyAt: ReadonlyMap<string, number>;
+  readonly callMinutes: number;
+};
