@@ -19,9 +19,17 @@ export const NewBoat = z.strictObject({
   id: Id,
   name: z.string().trim().min(1).max(80),
   /** Minutes that a call for help costs here, where they differ from the defaults. */
-  callMinutes: z.strictObject({ alongside: z.number().positive(), atAnchor: z.number().positive(), underWay: z.number().positive() }).partial().default({}),
+  callMinutes: z
+    .strictObject({ alongside: z.number().positive(), atAnchor: z.number().positive(), underWay: z.number().positive() })
+    .partial()
+    .default({}),
 });
 export type NewBoat = z.infer<typeof NewBoat>;
+
+export const BoatChange = NewBoat.omit({ id: true, callMinutes: true })
+  .extend({ callMinutes: NewBoat.shape.callMinutes.unwrap() })
+  .partial();
+export type BoatChange = z.infer<typeof BoatChange>;
 
 export const Boat = NewBoat.extend({ version: z.number().int(), createdAt: Moment });
 export type Boat = z.infer<typeof Boat>;
@@ -38,12 +46,26 @@ export const NewEngine = z.strictObject({
 });
 export type NewEngine = z.infer<typeof NewEngine>;
 
+/** What is left out stays; a profile is replaced whole. null: the yearly hours are not known after all. */
+export const EngineChange = z
+  .strictObject({
+    boatId: Id,
+    name: NewEngine.shape.name,
+    hasHourMeter: z.boolean(),
+    estimatedHoursPerYear: z.number().positive().max(8760).nullable(),
+    profile: EngineProfile,
+  })
+  .partial();
+export type EngineChange = z.infer<typeof EngineChange>;
+
 export const Engine = NewEngine.extend({
   version: z.number().int(),
   createdAt: Moment,
   boatName: z.string(),
   /** The last reading; null before the first. */
   hours: z.number().nonnegative().nullable(),
+  /** As `hours`, but counted on over a replaced meter: what the log counts in. */
+  hoursSinceNew: z.number().nonnegative().nullable(),
   hoursAreEstimated: z.boolean(),
   hoursReadAt: Moment.nullable(),
 });
