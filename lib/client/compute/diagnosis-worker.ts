@@ -1,0 +1,21 @@
+import { view } from "@/lib/core/diagnosis/show";
+import type { FaultTree } from "@/lib/core/tree/schema";
+import type { Ask, Told } from "./protocol";
+
+/** The diagnosis core off the screen's thread: a tap is drawn at once, whatever the next step costs to find. */
+const trees = new Map<string, FaultTree>();
+const tell = (told: Told): void => self.postMessage(told);
+
+self.onmessage = ({ data }: MessageEvent<Ask>) => {
+  if (data.ask === "keep-tree") {
+    trees.set(data.version, data.tree);
+    return;
+  }
+  const tree = trees.get(data.version);
+  if (!tree) return tell({ id: data.id, failure: "the tree is not on this phone" });
+  try {
+    tell({ id: data.id, view: view(tree, [...data.events]) });
+  } catch (failure) {
+    tell({ id: data.id, failure: failure instanceof Error ? failure.message : String(failure) });
+  }
+};

@@ -1,0 +1,49 @@
+import type { DiagnosisEvent } from "@/lib/core/contract/event";
+import type { DiagnosisView } from "@/lib/core/diagnosis/view";
+import type { FaultTree } from "@/lib/core/tree/schema";
+import type { Ask, Told } from "./protocol";
+
+/** Asks the diagnosis core what to show; in a worker, or here where the browser has none. */
+export class Reasoner {
+  #worker: Worker | null = null;
+  #kept = new Set<string>();
+  #waiting = new Map<number, { done: (view: DiagnosisView) => void; failed: (why: Error) => void }>();
+  #next = 1;
+
+  async view(version: string, tree: FaultTree, events: readonly DiagnosisEvent[]): Promise<DiagnosisView> {
+    const worker = this.#start();
+    if (!worker) return (await import("@/lib/core/diagnosis/show")).view(tree, [...events]);
+    if (!this.#kept.has(version)) {
+      this.#kept.add(version);
+      worker.postMessage({ ask: "keep-tree", version, tree } satisfies Ask);
+    }
+    const id = this.#next++;
+    return new Promise((done, failed) => {
+      this.#waiting.set(id, { done, failed });
+      worker.postMessage({ ask: "view", id, version, events } satisfies Ask);
+    });
+  }
+
+  #start(): Worker | null {
+    if (this.#worker) return this.#worker;
+    try {
+      this.#worker = new Worker(new URL("./diagnosis-worker.ts", import.meta.url), { type: "module" });
+    } catch {
+      return null;
+    }
+    this.#worker.onmessage = ({ data }: MessageEvent<Told>) => {
+      const waiting = this.#waiting.get(data.id);
+      this.#waiting.delete(data.id);
+      if ("view" in data) waiting?.done(data.view);
+      else waiting?.failed(new Error(data.failure));
+    };
+    this.#worker.onerror = () => {
+      // A worker that died takes its questions with it; the next question starts another.
+      this.#worker = null;
+      this.#kept.clear();
+      for (const { failed } of this.#waiting.values()) failed(new Error("the reckoning stopped; it starts again with the next answer"));
+      this.#waiting.clear();
+    };
+    return this.#worker;
+  }
+}

@@ -1,0 +1,107 @@
+import { Observable } from "../observable";
+import type { PhoneStore } from "../store/phone-store";
+import { backoffSeconds } from "./backoff";
+import { pull } from "./pull";
+import { push } from "./push";
+import { NoAnswer } from "./request";
+import { NOTHING_YET, type Standing } from "./standing";
+
+const FRESH_MS = 60_000;
+
+/**
+ * Moves the outbox ashore and brings what is new, whenever there is a chance of
+ * it: at the start, when a signal returns, when the page is looked at again, after
+ * each entry, and after a growing pause. The screen never waits for it.
+ */
+export class Exchange {
+  readonly standing = new Observable<Standing>(NOTHING_YET);
+  readonly #store: PhoneStore;
+  readonly #fleetId: string;
+  #running = false;
+  #again = false;
+  #failures = 0;
+  #timer: ReturnType<typeof setTimeout> | null = null;
+  #pulledAt = 0;
+  #ended = false;
+
+  constructor(store: PhoneStore, fleetId: string) {
+    this.#store = store;
+    this.#fleetId = fleetId;
+  }
+
+  /** Starts listening; the function it gives back stops. */
+  start(): () => void {
+    this.#ended = false;
+    const back = () => this.nudge(true);
+    const seen = () => document.visibilityState === "visible" && this.nudge(true);
+    const stopWatching = this.#store.changes.watch(() => void this.#count());
+    window.addEventListener("online", back);
+    document.addEventListener("visibilitychange", seen);
+    this.nudge(true);
+    return () => {
+      this.#ended = true;
+      stopWatching();
+      window.removeEventListener("online", back);
+      document.removeEventListener("visibilitychange", seen);
+      if (this.#timer) clearTimeout(this.#timer);
+    };
+  }
+
+  /** Try now. `hopeful`: something has changed, so the pause starts over. */
+  nudge(hopeful = false): void {
+    if (hopeful) this.#failures = 0;
+    this.#again = true;
+    if (!this.#running) void this.#run();
+  }
+
+  async #run(): Promise<void> {
+    this.#running = true;
+    if (this.#timer) clearTimeout(this.#timer);
+    while (this.#again && !this.#ended) {
+      this.#again = false;
+      await this.#count();
+      this.#say({ sending: this.standing.get().waiting > 0 });
+      try {
+        await oneTabAtATime(`gudgeon.exchange.${this.#fleetId}`, () => this.#exchange());
+        this.#failures = 0;
+        this.#say({ sending: false, trouble: null, ashoreAt: new Date().toISOString() });
+      } catch (failure) {
+        this.#failures += 1;
+        this.#say({ sending: false, trouble: troubleOf(failure) });
+        this.#timer = setTimeout(() => this.nudge(), backoffSeconds(this.#failures, Math.random()) * 1000);
+      }
+      await this.#count();
+    }
+    this.#running = false;
+  }
+
+  async #exchange(): Promise<void> {
+    await push(this.#store, this.#fleetId);
+    if (Date.now() - this.#pulledAt < FRESH_MS) return;
+    await pull(this.#store, this.#fleetId);
+    this.#pulledAt = Date.now();
+  }
+
+  async #count(): Promise<void> {
+    const [events, photos] = await Promise.all([this.#store.unsentEvents(), this.#store.unsentPhotos()]);
+    this.#say({ waiting: events.length + photos.length });
+  }
+
+  #say(part: Partial<Standing>): void {
+    const now = this.standing.get();
+    const next = { ...now, ...part };
+    if ((Object.keys(next) as (keyof Standing)[]).some((key) => next[key] !== now[key])) this.standing.set(next);
+  }
+}
+
+function troubleOf(failure: unknown): Standing["trouble"] {
+  if (!(failure instanceof NoAnswer)) return "server";
+  if (failure.status === 0) return "no-signal";
+  if (failure.status === 401) return "sign-in";
+  return failure.status === 403 || failure.status === 404 ? "not-in-fleet" : "server";
+}
+
+async function oneTabAtATime(name: string, work: () => Promise<void>): Promise<void> {
+  if (!("locks" in navigator)) return work();
+  await navigator.locks.request(name, work);
+}
