@@ -16,6 +16,8 @@ export class PhoneStore {
   readonly device: string;
   /** Counts up with every change of events, here or in another tab. */
   readonly changes = new Observable(0);
+  /** Counts up when the fleet or a tree on this phone is renewed. */
+  readonly factsChanges = new Observable(0);
   /** True while the last write did not reach the disk: the screen says so. */
   readonly unsaved = new Observable(false);
   readonly #database: Database;
@@ -155,7 +157,7 @@ export class PhoneStore {
 
   async keepPhone(phone: Phone): Promise<void> {
     await this.#database.run((connection) => connection.put("facts", { phone, at: new Date().toISOString() }, "phone"));
-    this.#tell();
+    this.factsChanges.set(this.factsChanges.get() + 1);
   }
 
   async tree(versionId: string): Promise<FaultTree | undefined> {
@@ -164,7 +166,7 @@ export class PhoneStore {
 
   async keepTree(id: string, tree: FaultTree): Promise<void> {
     await this.#database.run((connection) => connection.put("trees", { id, tree }));
-    this.#tell();
+    this.factsChanges.set(this.factsChanges.get() + 1);
   }
 
   draft(engineId: string): Promise<Draft | undefined> {
