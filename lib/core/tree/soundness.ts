@@ -1,8 +1,33 @@
 import type { Flaw } from "./flaw";
+import { bandRules } from "./rules/bands";
+import { causeRules } from "./rules/causes";
+import { findingRules } from "./rules/findings";
+import { keyRules } from "./rules/keys";
+import { knownCaseRules } from "./rules/known-cases";
+import { orderRules } from "./rules/order";
+import { reachRules } from "./rules/reach";
+import type { Rule } from "./rules/rule";
+import { safetyRules } from "./rules/safety";
+import { stopRuleRules } from "./rules/stop-rules";
+import { symptomRules } from "./rules/symptoms";
 import type { FaultTree } from "./schema";
 
-/** Everything wrong with a tree that its shape alone does not show: errors first, in the order of the rules. */
+/** All that a sound tree keeps to beyond its shape. */
+export const RULES: readonly Rule[] = [
+  ...keyRules,
+  ...reachRules,
+  ...findingRules,
+  ...bandRules,
+  ...causeRules,
+  ...orderRules,
+  ...symptomRules,
+  ...safetyRules,
+  ...stopRuleRules,
+  ...knownCaseRules,
+];
+
+/** Everything wrong with a tree that its shape alone does not show: errors first, then in the order of the rules. */
 export function findFlaws(tree: FaultTree): Flaw[] {
-  void tree;
-  return [];
+  const flaws = RULES.flatMap(({ name, severity, find }) => find(tree).map((found): Flaw => ({ severity, rule: name, ...found })));
+  return [...flaws.filter(({ severity }) => severity === "error"), ...flaws.filter(({ severity }) => severity === "look-at")];
 }

@@ -1,0 +1,57 @@
+import { probabilityOf } from "../../diagnosis/cause-row";
+import type { FaultTree } from "../schema";
+import { BASE_RATES } from "../strength";
+import { symptomNode, type Found, type Rule } from "./rule";
+
+/** How often a cause shows a symptom it has no link to, and the most that all such causes may hold after a first symptom. */
+const STRAY = { shown: 0.001, most: 0.05 };
+
+/** As a search sees it: case, signs and spaces do not count. */
+const plain = (phrase: string): string =>
+  phrase
+    .toLowerCase()
+    .replaceAll(/[^\p{L}\p{N}]+/gu, " ")
+    .trim();
+
+function phrasesTwice(tree: FaultTree): Found[] {
+  const owners = new Map<string, string>();
+  return tree.symptoms.flatMap(({ key, phrases }) =>
+    phrases.flatMap((phrase) => {
+      const owner = owners.get(plain(phrase));
+      owners.set(plain(phrase), owner ?? key);
+      if (owner === undefined) return [];
+      const says =
+        owner === key
+          ? `the phrase "${phrase}" stands twice.`
+          : `the phrase "${phrase}" belongs to symptom ${owner} too, so a search cannot tell them apart.`;
+      return [{ node: symptomNode(key), says, mend: "Keep it where it fits better." }];
+    }),
+  );
+}
+
+/** After one symptom, causes that have no link to it should hardly count; where they do, their share is scaled down. */
+function straysThatWeighTooMuch(tree: FaultTree): Found[] {
+  return tree.symptoms.flatMap(({ key }) => {
+    let [linked, strays] = [0, 0];
+    for (const { base, shows } of tree.causes) {
+      const weight = typeof base === "number" ? base : BASE_RATES[base];
+      const shown = shows[key];
+      if (shown === undefined) strays += weight * STRAY.shown;
+      else linked += weight * probabilityOf(shown);
+    }
+    const share = strays / (linked + strays);
+    if (linked === 0 || share <= STRAY.most) return [];
+    return [
+      {
+        node: symptomNode(key),
+        says: `causes without a link to it would hold ${Math.round(share * 100)} % after it; they are scaled down to ${STRAY.most * 100} %.`,
+        mend: "See whether a cause that shows it is missing, or is too rare.",
+      },
+    ];
+  });
+}
+
+export const symptomRules: readonly Rule[] = [
+  { name: "phrase-twice", severity: "error", find: phrasesTwice },
+  { name: "strays-heavy", severity: "look-at", find: straysThatWeighTooMuch },
+];
