@@ -233,6 +233,8 @@ export const Symptom = z.strictObject({
   system: Key,
   /** What people really say, misspelt too. */
   phrases: z.array(Line).min(5),
+  /** Engine states that cannot be had while it lasts: an engine that does not start shows nothing under load. */
+  rulesOut: z.array(EngineState).optional(),
   sources: Citations,
 });
 export type Symptom = z.infer<typeof Symptom>;
