@@ -1,13 +1,26 @@
 import { check } from "./check";
+import { schema } from "./schema";
 
 const usage = `npm run tree -- check DIR [--json] [--links]
-  Is the tree sound? Ends with 1 on errors.`;
+  Is the tree sound? Names every flaw with its file and line; ends with 1 on errors.
+  --links: how far each linked finding speaks for its cause.
+npm run tree -- schema
+  Writes trees/fault-tree.schema.json anew.`;
 
-const commands: Record<string, (args: string[]) => Promise<number>> = { check };
+const commands: Record<string, (args: string[]) => Promise<number>> = { check, schema };
 
 const [name = "", ...args] = process.argv.slice(2);
 const command = commands[name];
 if (command === undefined) {
   console.error(usage);
-  process.exitCode = name === "" || name === "help" || name === "--help" ? 0 : 2;
-} else process.exitCode = await command(args);
+  process.exitCode = name === "help" || name === "--help" ? 0 : 2;
+} else {
+  try {
+    process.exitCode = await command(args);
+  } catch (error) {
+    // parseArgs' refusals are for the person who typed; anything else is a fault of ours and keeps its stack.
+    const mistyped = error instanceof Error && "code" in error && String(error.code).startsWith("ERR_PARSE_ARGS");
+    console.error(mistyped ? `${error.message}\n${usage}` : error);
+    process.exitCode = mistyped ? 2 : 1;
+  }
+}

@@ -10,7 +10,7 @@ export function findingsOfSpan(check: Pick<Check, "reading">, spec: string): str
   if (to === undefined) return [from];
   const order = [...new Set(check.reading?.bands.map(({ finding }) => finding) ?? [])];
   const [first, last] = [order.indexOf(from), order.indexOf(to)];
-  return first < 0 || last <= first ? null : order.slice(first, last + 1);
+  return first < 0 || last < 0 || first === last ? null : order.slice(Math.min(first, last), Math.max(first, last) + 1);
 }
 
 /** Each kind of engine that the bands tell apart, as one option of each feature they name. */
@@ -77,13 +77,11 @@ function bandsThatDoNotCover(tree: FaultTree): Found[] {
         .join(", ");
       return fault === null ? [] : [whose === "" ? fault : `for ${whose}: ${fault}`];
     });
-    return faults
-      .slice(0, 1)
-      .map((fault) => ({
-        node: checkNode(check),
-        says: `${fault}.`,
-        mend: "Write the bands lowest first, each beginning where the one before ends, from the scale's end to its other end.",
-      }));
+    return faults.slice(0, 1).map((fault) => ({
+      node: checkNode(check),
+      says: `${fault}.`,
+      mend: "Write the bands lowest first, each beginning where the one before ends, from the scale's end to its other end.",
+    }));
   });
 }
 

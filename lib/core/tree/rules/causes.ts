@@ -99,7 +99,7 @@ function spansUnknown(tree: FaultTree): Found[] {
         mend:
           check.reading === undefined
             ? "Only a check with a reading has bands: name its findings one by one."
-            : 'Write the lower band first: "low..high".',
+            : 'Name the two outer bands: "low..high".',
       })),
   );
 }
