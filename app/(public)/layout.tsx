@@ -1,10 +1,13 @@
 import type { ReactNode } from "react";
 import Link from "next/link";
+import { connection } from "next/server";
 import { LightSwitch } from "@/components/ui/light-switch";
 import { Mark } from "@/components/ui/mark";
 
 /** The frame of pages for people who are not signed in. */
-export default function PublicLayout({ children }: { children: ReactNode }) {
+export default async function PublicLayout({ children }: { children: ReactNode }) {
+  // Made for each request, so that it can carry the nonce that its scripts are allowed by.
+  await connection();
   return (
     <div className="flex min-h-dvh flex-col">
       <header className="bg-deep text-on-deep">
