@@ -25,7 +25,7 @@ export async function pull(store: PhoneStore, fleetId: string): Promise<void> {
     // Open here and not there: another phone has ended it, and its last words are on the server.
     if (!open.has(summary.id)) await takeInFromServer(store, fleetId, summary.id).catch(unlessMissing);
   }
-  for (const version of versions) if (!(await store.tree(version))) await store.keepTree(version, await fetchTree(version));
+  for (const version of versions) if (!(await store.tree(version))) await store.keepTree(version, await fetchTree(fleetId, version));
 }
 
 /** @throws NoAnswer */
@@ -43,8 +43,8 @@ function known(event: unknown): DiagnosisEvent[] {
 }
 
 /** @throws NoAnswer */
-export async function fetchTree(versionId: string): Promise<FaultTree> {
-  const answer = (await request(`/api/v1/trees/versions/${versionId}`)) as FaultTree | { document: FaultTree };
+export async function fetchTree(fleetId: string, versionId: string): Promise<FaultTree> {
+  const answer = (await request(`/api/v1/fleets/${fleetId}/trees/versions/${versionId}`)) as FaultTree | { document: FaultTree };
   return "document" in answer ? answer.document : answer;
 }
 

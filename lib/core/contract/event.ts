@@ -43,7 +43,9 @@ export const OutcomePayload = z.strictObject({
   /** The meter was replaced or set back since the last reading: a lower figure is meant. */
   meterReset: z.literal(true).optional(),
   minutes: z.number().nonnegative().max(100_000).optional(),
-  parts: z.array(z.strictObject({ key: Key.optional(), title: z.string().trim().min(1).max(200), quantity: z.number().positive().max(1000) })).default([]),
+  parts: z
+    .array(z.strictObject({ key: Key.optional(), title: z.string().trim().min(1).max(200), quantity: z.number().positive().max(1000) }))
+    .default([]),
   note: z.string().max(4000).optional(),
 });
 export type OutcomePayload = z.infer<typeof OutcomePayload>;
@@ -66,7 +68,13 @@ const kinds = {
   "situation-changed": z.strictObject({ situation: Situation }),
   answered: z.strictObject({ check: Key, answer: Answer, note: z.string().max(4000).optional(), photos: z.array(Id).max(12).default([]) }),
   "rule-answered": z.strictObject({ rule: Key, answer: z.enum(["yes", "no", "cleared"]) }),
-  "remedy-tried": z.strictObject({ remedy: Key, result: RemedyResult, proof: z.string().max(500).optional(), note: z.string().max(4000).optional(), photos: z.array(Id).max(12).default([]) }),
+  "remedy-tried": z.strictObject({
+    remedy: Key,
+    result: RemedyResult,
+    proof: z.string().max(500).optional(),
+    note: z.string().max(4000).optional(),
+    photos: z.array(Id).max(12).default([]),
+  }),
   /** The starter turned for so long; `ran`: the engine then ran, which clears the exhaust of water. */
   cranked: z.strictObject({ seconds: z.number().min(0).max(600), ran: z.boolean() }),
   "feature-told": z.strictObject({ feature: Key, option: Key }),
@@ -90,7 +98,7 @@ const base = {
   diagnosisId: Id,
   device: Id,
   /** Counts up on that device within the diagnosis, from 1. */
-  sequence: z.number().int().min(1),
+  sequence: z.number().int().min(1).max(2_147_483_647),
   madeAt: Moment,
   /** The newest events this device had seen of the other devices, by device: how far it knew their log. */
   seen: z.record(Id, z.number().int().min(0)).default({}),
@@ -132,4 +140,3 @@ export type EventReceipt = z.infer<typeof EventReceipt>;
 /** An event as the server keeps it. */
 export const StoredEvent = z.intersection(DiagnosisEvent, z.object({ receivedAt: Moment, by: Id, byName: z.string() }));
 export type StoredEvent = z.infer<typeof StoredEvent>;
-

@@ -2,6 +2,7 @@ import * as z from "zod";
 import { Key } from "../tree/schema";
 import { Id, Moment } from "./id";
 import { OutcomeKind, OutcomePayload } from "./event";
+import { PageQuery } from "./page";
 
 /** A repair done without a diagnosis, written into the engine's log afterwards. `causes` and remedies may be in the person's own words. */
 export const NewRepair = OutcomePayload.omit({ outcome: true }).extend({
@@ -64,3 +65,13 @@ export const RepeatFault = z.strictObject({
   upstream: z.array(z.strictObject({ cause: Key.nullable(), title: z.string(), share: z.number().nullable() })),
 });
 export type RepeatFault = z.infer<typeof RepeatFault>;
+
+/** What the log can be narrowed to. `outcome` "open": diagnoses that have not ended. */
+export const LogQuery = PageQuery.extend({
+  engineId: Id.optional(),
+  boatId: Id.optional(),
+  cause: Key.optional(),
+  system: Key.optional(),
+  outcome: z.enum([...OutcomeKind.options, "open"]).optional(),
+});
+export type LogQuery = z.infer<typeof LogQuery>;

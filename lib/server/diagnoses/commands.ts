@@ -1,0 +1,143 @@
+import "server-only";
+import { and, eq, inArray, or } from "drizzle-orm";
+import { diagnoses, diagnosisEvents } from "@/db/schema/diagnoses";
+import { engines } from "@/db/schema/boats";
+import { DiagnosisEvent, type EventOf, type EventReceipt } from "@/lib/core/contract/event";
+import { Problem } from "@/lib/core/contract/problem";
+import type { FaultTree } from "@/lib/core/tree/schema";
+import type { FleetScope } from "@/lib/server/auth/scope";
+import { projectDiagnosis } from "@/lib/server/log/project-diagnosis";
+import { canonical } from "@/lib/server/trees/content-hash";
+import { documentOf, findTreeVersion } from "@/lib/server/trees/queries";
+import { refusalOf } from "./check-event";
+import { eventOf, rowOf } from "./stored-events";
+
+/** An event as it came, of which only the id is sure. */
+export type PostedEvent = { id: string } & Record<string, unknown>;
+
+/**
+ * Takes in events of one diagnosis from a device's outbox. Each gets a receipt:
+ * stored, a duplicate of one that is here, or rejected with the reason; one bad
+ * event holds up no other. Sent twice, late, out of order or from two phones the
+ * log ends the same, and the projection with it, in this transaction.
+ *
+ * @throws Problem 404 when the diagnosis is not in this fleet and none of the events begins it
+ */
+export async function recordEvents(scope: FleetScope<"diagnosis:write">, diagnosisId: string, posted: readonly PostedEvent[]): Promise<EventReceipt[]> {
+  const receipts = new Map<string, EventReceipt>();
+  const reject = (id: string, because: string) => receipts.set(id, { id, result: "rejected", because });
+
+  const events: DiagnosisEvent[] = [];
+  for (const one of posted) {
+    const parsed = DiagnosisEvent.safeParse(one);
+    if (!parsed.success) reject(one.id, `It cannot be read: ${parsed.error.issues.map((i) => `${i.path.join(".")}: ${i.message}`).slice(0, 3).join("; ")}`);
+    else if (parsed.data.diagnosisId !== diagnosisId) reject(one.id, "It belongs to another diagnosis.");
+    else events.push(parsed.data);
+  }
+
+  const begun = events.filter((event) => event.kind === "begun").sort(byDeviceAndSequence);
+  for (const event of begun) await begin(scope, event);
+  const [diagnosis] = await scope.tx
+    .select()
+    .from(diagnoses)
+    .where(and(eq(diagnoses.fleetId, scope.fleetId), eq(diagnoses.id, diagnosisId)))
+    .for("update"); // two phones at once: the second projects both
+  if (!diagnosis) {
+    const because = begun[0] && (await beginRefusal(scope, begun[0]));
+    if (!because) throw Problem.notFound();
+    for (const event of events) reject(event.id, because);
+    return posted.map((one) => receipts.get(one.id) as EventReceipt);
+  }
+
+  const tree = await documentOf(scope, diagnosis.shippedVersionId ? { id: diagnosis.shippedVersionId, from: "shipped" } : { id: diagnosis.ownVersionId ?? "", from: "own" });
+  const fresh = await sortOut(scope, diagnosisId, events, tree, receipts);
+  if (fresh.length > 0) {
+    await scope.tx.insert(diagnosisEvents).values(fresh.map((event) => rowOf(scope, event)));
+    await projectDiagnosis(scope, diagnosisId);
+  }
+  return posted.map((one) => receipts.get(one.id) as EventReceipt);
+}
+
+/** Writes a receipt for each event and gives back those to store. */
+async function sortOut(scope: FleetScope, diagnosisId: string, events: readonly DiagnosisEvent[], tree: FaultTree, receipts: Map<string, EventReceipt>): Promise<DiagnosisEvent[]> {
+  if (events.length === 0) return [];
+  const rows = await scope.tx
+    .select()
+    .from(diagnosisEvents)
+    .where(
+      and(
+        eq(diagnosisEvents.fleetId, scope.fleetId),
+        or(eq(diagnosisEvents.diagnosisId, diagnosisId), inArray(diagnosisEvents.id, events.map((event) => event.id))),
+      ),
+    );
+  const known = new Map(rows.map((row) => [row.id, eventOf(row)]));
+  const places = new Map(rows.map((row) => [placeOf(row), row.id]));
+  let begunBy = rows.find((row) => row.kind === "begun" && row.diagnosisId === diagnosisId)?.id;
+  const fresh: DiagnosisEvent[] = [];
+  for (const event of [...events].sort(byDeviceAndSequence)) {
+    const before = known.get(event.id);
+    const because = before
+      ? sameEvent(before, event)
+        ? null
+        : "Another event has this id already."
+      : places.has(placeOf(event))
+        ? "Another event has this place in the device's sequence already."
+        : event.kind === "begun" && begunBy
+          ? "This diagnosis has begun already."
+          : refusalOf(event, tree);
+    if (because) receipts.set(event.id, { id: event.id, result: "rejected", because });
+    else if (before) receipts.set(event.id, receipts.get(event.id) ?? { id: event.id, result: "duplicate" });
+    else {
+      receipts.set(event.id, { id: event.id, result: "stored" });
+      known.set(event.id, event);
+      places.set(placeOf(event), event.id);
+      if (event.kind === "begun") begunBy = event.id;
+      fresh.push(event);
+    }
+  }
+  // Rolls back a diagnosis that was made a moment ago for a beginning that could not be kept.
+  if (!begunBy) throw Problem.conflict("The event that begins this diagnosis was refused: its id or its place in the sequence is taken.");
+  return fresh;
+}
+
+/** Makes the diagnosis that an event begins, pinned to its tree version; nothing when it is there already or cannot be. */
+async function begin(scope: FleetScope<"diagnosis:write">, event: EventOf<"begun">): Promise<void> {
+  if (await beginRefusal(scope, event)) return;
+  const version = await findTreeVersion(scope, event.payload.treeVersionId);
+  if (!version) return;
+  const at = new Date(event.madeAt);
+  await scope.tx
+    .insert(diagnoses)
+    .values({
+      fleetId: scope.fleetId,
+      id: event.diagnosisId,
+      engineId: event.payload.engineId,
+      ...(version.from === "shipped" ? { shippedVersionId: version.id } : { ownVersionId: version.id }),
+      begunAt: at,
+      begunBy: scope.actor.userId,
+      symptoms: event.payload.symptoms,
+      lastEventAt: at,
+    })
+    .onConflictDoNothing();
+}
+
+async function beginRefusal(scope: FleetScope, event: EventOf<"begun">): Promise<string | null> {
+  const [engine] = await scope.tx
+    .select({ id: engines.id })
+    .from(engines)
+    .where(and(eq(engines.fleetId, scope.fleetId), eq(engines.id, event.payload.engineId)));
+  if (!engine) return "There is no such engine in this fleet.";
+  const version = await findTreeVersion(scope, event.payload.treeVersionId);
+  if (!version) return "There is no such version of the fault tree.";
+  return refusalOf(event, await documentOf(scope, version));
+}
+
+const placeOf = (event: { diagnosisId: string; device: string; sequence: number }) => `${event.diagnosisId} ${event.device} ${event.sequence}`;
+
+/** The same event, whatever zone its moment is written in. */
+const sameEvent = (a: DiagnosisEvent, b: DiagnosisEvent) => canonical(comparable(a)) === canonical(comparable(b));
+const comparable = (event: DiagnosisEvent) => ({ ...event, madeAt: Date.parse(event.madeAt) });
+
+function byDeviceAndSequence(a: DiagnosisEvent, b: DiagnosisEvent): number {
+  return a.device < b.device ? -1 : a.device > b.device ? 1 : a.sequence - b.sequence;
+}

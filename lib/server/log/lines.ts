@@ -1,0 +1,98 @@
+import "server-only";
+import { and, eq, inArray } from "drizzle-orm";
+import { boats, engines } from "@/db/schema/boats";
+import { people } from "@/db/schema/fleets";
+import { logEntries } from "@/db/schema/log-entries";
+import type { LogEntry } from "@/lib/core/contract/log";
+import type { EngineClock } from "@/lib/core/recurrence/engine-clock";
+import type { CaseEntry } from "@/lib/core/recurrence/spells";
+import { standings } from "@/lib/core/recurrence/standing";
+import type { FleetScope } from "@/lib/server/auth/scope";
+import { clocksOf, hoursNow, type EngineRow } from "@/lib/server/engines/clocks";
+
+type EntryRow = typeof logEntries.$inferSelect;
+export type LineRow = { entry: EntryRow; engineName: string; boatName: string; by: string };
+
+/** Rows of the log with the names that stand beside them; the caller narrows, orders and limits. */
+export const selectLines = (scope: FleetScope) =>
+  scope.tx
+    .select({ entry: logEntries, engineName: engines.name, boatName: boats.name, by: people.name })
+    .from(logEntries)
+    .innerJoin(engines, and(eq(engines.fleetId, logEntries.fleetId), eq(engines.id, logEntries.engineId)))
+    .innerJoin(boats, and(eq(boats.fleetId, engines.fleetId), eq(boats.id, engines.boatId)))
+    .innerJoin(people, and(eq(people.fleetId, logEntries.fleetId), eq(people.userId, logEntries.by)))
+    .$dynamic();
+
+/** Rows as lines of the log: with hours since new, and what became of each cure. */
+export async function linesOf(scope: FleetScope, rows: readonly LineRow[]): Promise<LogEntry[]> {
+  const history = await readHistory(scope, [...new Set(rows.map((row) => row.entry.engineId))]);
+  const became = standings(history.cases, history.hoursNow);
+  return rows.map(({ entry, engineName, boatName, by }) => {
+    const { hours, estimated } = hoursOf(entry, history.clocks.get(entry.engineId));
+    const standing = became.get(entry.id) ?? { cameBackAfterHours: null, heldHours: null, timesHere: 0 };
+    return {
+      id: entry.id,
+      engineId: entry.engineId,
+      engineName,
+      boatName,
+      diagnosisId: entry.diagnosisId,
+      at: entry.at.toISOString(),
+      engineHours: hours,
+      hoursAreEstimated: estimated,
+      symptoms: entry.symptoms,
+      outcome: entry.outcome,
+      cause: causeOf(entry),
+      remedy: entry.remedyTitle === null ? null : { key: entry.remedyKey, title: entry.remedyTitle },
+      proof: entry.proof,
+      temporary: entry.temporary,
+      minutes: entry.minutes,
+      parts: entry.parts,
+      note: entry.note,
+      by,
+      ...standing,
+    };
+  });
+}
+
+export type History = { cases: CaseEntry[]; clocks: Map<string, EngineClock>; hoursNow: (engineId: string) => number | null };
+
+/** Everything about these engines that repeat faults hang on; all engines of the fleet when none are named. */
+export async function readHistory(scope: FleetScope, engineIds?: readonly string[]): Promise<History> {
+  if (engineIds?.length === 0) return { cases: [], clocks: new Map(), hoursNow: () => null };
+  const ofThese = engineIds && inArray(engines.id, [...engineIds]);
+  const rows = await scope.tx.select().from(engines).where(and(eq(engines.fleetId, scope.fleetId), ofThese));
+  const clocks = await clocksOf(scope, rows);
+  const { id, engineId, at, outcome, causeKey, causeTitle, causeSystem, proof, temporary, engineHours } = logEntries;
+  const entries = await scope.tx
+    .select({ id, engineId, at, outcome, causeKey, causeTitle, causeSystem, proof, temporary, engineHours })
+    .from(logEntries)
+    .where(and(eq(logEntries.fleetId, scope.fleetId), engineIds && inArray(logEntries.engineId, [...engineIds])));
+  const byId = new Map<string, EngineRow>(rows.map((row) => [row.id, row]));
+  return {
+    clocks,
+    hoursNow: (engineId) => {
+      const [engine, clock] = [byId.get(engineId), clocks.get(engineId)];
+      return engine && clock ? hoursNow(engine, clock) : null;
+    },
+    cases: entries.map((entry) => {
+      const { hours, estimated } = hoursOf(entry, clocks.get(entry.engineId));
+      return {
+        id: entry.id,
+        engineId: entry.engineId,
+        at: entry.at.toISOString(),
+        engineHours: hours,
+        hoursAreEstimated: estimated,
+        outcome: entry.outcome,
+        cause: causeOf(entry),
+        proof: entry.proof,
+        temporary: entry.temporary,
+      };
+    }),
+  };
+}
+
+const hoursOf = (entry: Pick<EntryRow, "at">, clock: EngineClock | undefined) => clock?.at(entry.at.toISOString()) ?? { hours: null, estimated: false };
+
+function causeOf(entry: Pick<EntryRow, "causeKey" | "causeTitle" | "causeSystem">): LogEntry["cause"] {
+  return entry.causeTitle === null ? null : { key: entry.causeKey, title: entry.causeTitle, system: entry.causeSystem };
+}
