@@ -1,4 +1,5 @@
-import { causeRow, probabilityOf, soundRow } from "@/lib/core/tree/rows";
+import { causeRow, probabilityOf } from "@/lib/core/diagnosis/cause-row";
+import { soundRow } from "@/lib/core/diagnosis/sound-row";
 import { BASE_RATES } from "@/lib/core/tree/strength";
 import type { Cause, Check, FaultTree, Remedy, Symptom } from "@/lib/core/tree/schema";
 
@@ -31,9 +32,9 @@ export function graphOf(tree: FaultTree, symptomKey: string, limit: number): Tre
       const check = tree.checks.find((c) => c.key === checkKey);
       if (!check) return [];
       const sound = soundRow(check);
-      const row = causeRow(check, links);
+      const row = causeRow(check, links, sound);
       return check.findings
-        .map((f) => ({ check: checkKey, finding: f.key, cause: cause.key, ratio: (row.get(f.key) ?? 0) / (sound.get(f.key) ?? 1) }))
+        .map((f, i) => ({ check: checkKey, finding: f.key, cause: cause.key, ratio: (row[i] ?? 0) / (sound[i] ?? 1) }))
         .filter((link) => link.ratio >= TELLING);
     }),
   );

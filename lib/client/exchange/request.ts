@@ -1,4 +1,5 @@
 import * as z from "zod";
+import { ProblemBody, type FieldError } from "@/lib/core/contract/problem";
 
 // The content security policy forbids making code from strings; zod would try, and be refused.
 z.config({ jitless: true });
@@ -7,16 +8,21 @@ z.config({ jitless: true });
 export class NoAnswer extends Error {
   readonly status: number;
   readonly because: string;
+  /** Which fields were not right. */
+  readonly errors: readonly FieldError[];
+  /** With a 412: the thing as it is now. */
+  readonly current: unknown;
 
   /** `status` 0: nothing came back at all. */
-  constructor(status: number, because: string) {
+  constructor(status: number, because: string, problem: Pick<ProblemBody, "errors" | "current"> = {}) {
     super(because);
     this.status = status;
     this.because = because;
+    this.errors = problem.errors ?? [];
+    this.current = problem.current;
   }
 }
 
-const Problem = z.object({ title: z.string(), detail: z.string().optional() });
 const PATIENCE_MS = 20_000;
 
 /** One request to the server. @throws NoAnswer with the status and the problem's words, or status 0 where there is no signal. */
@@ -29,9 +35,22 @@ export async function request(path: string, init: RequestInit = {}): Promise<unk
   }
   const body: unknown = await response.json().catch(() => null);
   if (response.ok) return body;
-  const problem = Problem.safeParse(body);
-  throw new NoAnswer(response.status, problem.success ? (problem.data.detail ?? problem.data.title) : `answer ${response.status}`);
+  const problem = ProblemBody.partial({ type: true, status: true, detail: true }).safeParse(body);
+  if (!problem.success) throw new NoAnswer(response.status, `answer ${response.status}`);
+  throw new NoAnswer(response.status, problem.data.detail ?? problem.data.title, problem.data);
 }
 
-export const sendJson = (path: string, body: unknown): Promise<unknown> =>
-  request(path, { method: "POST", headers: { "content-type": "application/json" }, body: JSON.stringify(body) });
+type Sending = {
+  method?: "POST" | "PUT" | "PATCH";
+  /** The version that the change was made to; somebody else's change since then is a 412. */
+  version?: number;
+};
+
+/** Sends a thing as JSON. @throws NoAnswer */
+export const sendJson = (path: string, body: unknown, { method = "POST", version }: Sending = {}): Promise<unknown> =>
+  request(path, { method, headers: { "content-type": "application/json", ...ifMatch(version) }, body: JSON.stringify(body) });
+
+/** Takes away the version that was seen, or with a 412 nothing. @throws NoAnswer */
+export const remove = (path: string, version: number): Promise<unknown> => request(path, { method: "DELETE", headers: ifMatch(version) });
+
+const ifMatch = (version: number | undefined): Record<string, string> => (version === undefined ? {} : { "if-match": `"${version}"` });
