@@ -4,20 +4,14 @@ import Link from "next/link";
 import { usePathname } from "next/navigation";
 import { clsx } from "clsx";
 
-type Props = { fleet: { id: string; name: string }; fleets: readonly { id: string; name: string }[]; personName: string };
+type Props = { fleet: { id: string; name: string } | null; fleets: readonly { id: string; name: string }[]; personName: string };
 
-/** The rooms of a fleet, one word a noun. */
+/** The rooms of a fleet, one word a noun. Outside a fleet: the fleets to choose from. */
 export function FleetNav({ fleet, fleets, personName }: Props) {
   const here = usePathname();
-  const home = `/f/${fleet.id}`;
-  const places = [
-    { href: `/diagnose?fleet=${fleet.id}`, title: "Diagnose", isHere: false },
-    { href: home, title: "Boats", isHere: here === home || here.startsWith(`${home}/boats`) || here.startsWith(`${home}/engines`) },
-    { href: `${home}/log`, title: "Logged diagnoses", isHere: here.startsWith(`${home}/log`) },
-    { href: `${home}/trees`, title: "Fault trees", isHere: here.startsWith(`${home}/trees`) },
-    { href: `${home}/people`, title: "People", isHere: here.startsWith(`${home}/people`) },
-    { href: "/account", title: personName, isHere: here.startsWith("/account") },
-  ];
+  const account = { href: "/account", title: personName, isHere: here.startsWith("/account") };
+  const places = fleet ? [...roomsOf(fleet.id, here), account] : [account];
+  const others = fleets.filter((f) => f.id !== fleet?.id);
   return (
     <nav aria-label="Fleet">
       <ul className="grid gap-0.5">
@@ -34,22 +28,31 @@ export function FleetNav({ fleet, fleets, personName }: Props) {
           </li>
         ))}
       </ul>
-      {fleets.length > 1 && (
+      {others.length > 0 && (
         <div className="pt-4">
-          <p className="px-3 text-sm opacity-85">Your other fleets</p>
+          <p className="px-3 text-sm">{fleet ? "Your other fleets" : "Your fleets"}</p>
           <ul>
-            {fleets
-              .filter((f) => f.id !== fleet.id)
-              .map((f) => (
-                <li key={f.id}>
-                  <Link href={`/f/${f.id}`} prefetch={false} className="flex min-h-12 items-center rounded-lg px-3 text-sm">
-                    {f.name}
-                  </Link>
-                </li>
-              ))}
+            {others.map((f) => (
+              <li key={f.id}>
+                <Link href={`/f/${f.id}`} prefetch={false} className="flex min-h-12 items-center rounded-lg px-3 text-sm">
+                  {f.name}
+                </Link>
+              </li>
+            ))}
           </ul>
         </div>
       )}
     </nav>
   );
+}
+
+function roomsOf(fleetId: string, here: string) {
+  const home = `/f/${fleetId}`;
+  return [
+    { href: `/diagnose?fleet=${fleetId}`, title: "Diagnose", isHere: false },
+    { href: home, title: "Boats", isHere: here === home || here.startsWith(`${home}/boats`) || here.startsWith(`${home}/engines`) },
+    { href: `${home}/log`, title: "Logged diagnoses", isHere: here.startsWith(`${home}/log`) },
+    { href: `${home}/trees`, title: "Fault trees", isHere: here.startsWith(`${home}/trees`) },
+    { href: `${home}/people`, title: "People", isHere: here.startsWith(`${home}/people`) },
+  ];
 }

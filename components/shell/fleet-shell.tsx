@@ -4,7 +4,8 @@ import { LightSwitch } from "@/components/ui/light-switch";
 import { FleetNav } from "./fleet-nav";
 
 type Props = {
-  fleet: { id: string; name: string };
+  /** null: a page that belongs to the person and to no fleet. */
+  fleet: { id: string; name: string } | null;
   /** Other fleets this person is in; with one fleet there is nothing to choose. */
   fleets: readonly { id: string; name: string }[];
   personName: string;
@@ -25,7 +26,7 @@ export function FleetShell({ fleet, fleets, personName, children }: Props) {
         </div>
         <details className="group lg:hidden">
           <summary className="flex min-h-12 list-none items-center justify-between border-t border-on-deep/25 px-4 font-semibold">
-            <span>{fleet.name}</span>
+            <span>{fleet?.name ?? personName}</span>
             <span aria-hidden className="group-open:rotate-180">
               ⌄
             </span>
@@ -36,14 +37,14 @@ export function FleetShell({ fleet, fleets, personName, children }: Props) {
           </div>
         </details>
         <div className="hidden lg:block">
-          <p className="px-3 pb-2 text-sm opacity-85">{fleet.name}</p>
+          {fleet && <p className="px-3 pb-2 text-sm">{fleet.name}</p>}
           <FleetNav fleet={fleet} fleets={fleets} personName={personName} />
           <div className="pt-6">
             <LightSwitch />
           </div>
         </div>
       </header>
-      <main id="main" className="mx-auto w-full max-w-6xl px-4 pt-5 pb-16 lg:px-9 lg:pt-7">
+      <main id="main" className="mx-auto w-full min-w-0 max-w-6xl px-4 pt-5 pb-16 lg:px-9 lg:pt-7">
         {children}
       </main>
     </div>
