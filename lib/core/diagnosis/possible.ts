@@ -1,0 +1,51 @@
+import { probabilityOf } from "./cause-row";
+import type { Evidence } from "./evidence";
+import type { Model } from "./model";
+import { ofHundred } from "./of-hundred";
+import { speaksOf, type Speaks } from "./speaks";
+import type { Possible, PossibleCause } from "./view";
+
+/** Causes from this share up are named, so that none named stands at 0 of 100; the rest is folded. */
+const NAMED_FROM = 0.01;
+const NAMED_MOST = 12;
+const NOT_CHECKED_MOST = 4;
+
+/** What is still possible, as counts out of 100, with what speaks for and against each. Rules [X1]-[X3]. */
+export function possible(model: Model, evidence: Evidence, shares: Float64Array): Possible {
+  const ranked = model.causes
+    .map((cause, index) => ({ cause, index, share: shares[index] ?? 0 }))
+    .sort((a, b) => b.share - a.share || (a.cause.key < b.cause.key ? -1 : 1));
+  const named = ranked.filter(({ share }) => share >= NAMED_FROM).slice(0, NAMED_MOST);
+  const folded = ranked.slice(named.length);
+  const unknown = shares[model.unknownAt] ?? 0;
+  const counts = ofHundred([...named.map(({ share }) => share), folded.reduce((sum, { share }) => sum + share, 0), unknown]);
+  const speaks = speaksOf(model, evidence, shares);
+  return {
+    causes: named.map(({ index, share }, place) => causeShown(model, evidence, index, share, counts[place] ?? 0, speaks(index))),
+    others: { count: folded.length, of100: counts[named.length] ?? 0 },
+    unknown: { share: unknown, of100: counts[named.length + 1] ?? 0 },
+  };
+}
+
+function causeShown(model: Model, evidence: Evidence, index: number, share: number, of100: number, speaks: Speaks): PossibleCause {
+  const cause = model.causes[index]!;
+  const asked = new Set(evidence.findings.map(({ check }) => check));
+  const notChecked = model.checks
+    .filter((check) => cause.gives[check.key] !== undefined && check.offered && !asked.has(check.key))
+    .slice(0, NOT_CHECKED_MOST);
+  const behind = Object.entries(cause.broughtOnBy).flatMap(([key, strength]) => {
+    const root = model.tree.causes.find((one) => one.key === key);
+    return root ? [{ cause: key, title: root.title, share: probabilityOf(strength) }] : [];
+  });
+  return {
+    key: cause.key,
+    title: cause.title,
+    is: cause.is,
+    share,
+    of100,
+    speaksFor: speaks.for,
+    speaksAgainst: speaks.against,
+    notChecked: notChecked.map(({ check }) => ({ check: check.key, title: check.title })),
+    behind: behind.sort((a, b) => b.share - a.share || (a.cause < b.cause ? -1 : 1)),
+  };
+}

@@ -1,0 +1,114 @@
+import type { Evidence } from "./evidence";
+import { reportedIn } from "./finding-weight";
+import type { CheckModel, Model } from "./model";
+import type { NextStep } from "./next-step";
+import { outcomesOf } from "./outcomes";
+import { minutesSaid } from "./words";
+
+/**
+ * Why this step, in words made from the numbers that chose it: what it tells
+ * apart, what a finding would leave, what it costs. Rule [X4].
+ *
+ * @param clears titles of the rules in force that the step can lift.
+ */
+export function whyStep(model: Model, evidence: Evidence, step: NextStep, clears: readonly string[]): string {
+  const parts = [leadOf(model, evidence, step, clears), tellsOf(model, evidence, step), costOf(model, step)];
+  return parts.filter((part) => part !== "").join(" ");
+}
+
+function titleOf(model: Model, ref: { kind: "check" | "remedy" | "call"; key: string }): string {
+  if (ref.kind === "check") return model.checks[model.checkAt.get(ref.key) ?? -1]?.check.title ?? ref.key;
+  return model.remedies[model.remedyAt.get(ref.key) ?? -1]?.remedy.title ?? ref.key;
+}
+
+function leadOf(model: Model, evidence: Evidence, step: NextStep, clears: readonly string[]): string {
+  if (step.gateTo) return `This has to come before "${titleOf(model, step.gateTo)}".`;
+  switch (step.because) {
+    case "clears-a-rule":
+      return clears.length > 0 ? `Only this shows whether it still holds: ${clears.join("; ")}.` : "A stop rule says so.";
+    case "what-changed":
+      return "A fault often follows what was touched last, and thinking back costs least.";
+    case "pinned": {
+      const symptom = evidence.symptoms.find(
+        ({ symptom, present }) => present && model.checks[model.checkAt.get(step.key) ?? -1]?.check.firstFor[symptom] !== undefined,
+      );
+      const title = model.tree.symptoms.find(({ key }) => key === symptom?.symptom)?.title;
+      return title === undefined ? "The tree puts this early." : `The tree puts this early for "${title}".`;
+    }
+    case "cheaper-than-trying":
+      return "Looking on is still cheaper than trying parts or calling.";
+    case "nothing-better":
+      return "Nothing left to look at or to try here is likely to pay for its time.";
+    case "likely-cure":
+    case "tells-most":
+      return "";
+  }
+}
+
+const of100 = (share: number): string => {
+  const count = Math.round(share * 100);
+  return count === 0 ? "under 1 of 100" : `${count} of 100`;
+};
+
+function tellsOf(model: Model, evidence: Evidence, step: NextStep): string {
+  if (step.kind === "call") return "";
+  if (step.kind === "remedy") {
+    const cure = model.remedies[model.remedyAt.get(step.key) ?? -1]?.cure ?? new Float64Array(0);
+    const chance = cure.reduce((sum, one, index) => sum + one * (step.shares[index] ?? 0), 0);
+    return `It would cure ${of100(chance)} engines like this one, and if it does not, that tells something too.`;
+  }
+  const check = model.checks[model.checkAt.get(step.key) ?? -1];
+  return check ? separates(model, evidence, check, step.shares) : "";
+}
+
+type Swing = {
+  readonly index: number;
+  readonly most: { finding: number; share: number };
+  readonly least: { finding: number; share: number };
+};
+
+/** The cause that the check moves most, and what its findings would leave of it. */
+function separates(model: Model, evidence: Evidence, check: CheckModel, shares: Float64Array): string {
+  const swings = swingsOf(model, evidence, check, shares);
+  const [first] = swings;
+  if (!first || first.most.share - first.least.share < 0.005) return "";
+  const rival = swings.find((other) => other.most.finding !== first.most.finding && other.most.share - other.least.share > 0.02);
+  const cause = (swing: Swing): string => `"${model.causes[swing.index]?.title ?? ""}"`;
+  const finding = (at: number): string => `"${check.check.findings[at]?.title ?? ""}"`;
+  const lead = rival
+    ? `It tells ${cause(first)} from ${cause(rival)}.`
+    : `It tells most about ${cause(first)}, now ${of100(shares[first.index] ?? 0)}.`;
+  return `${lead} ${finding(first.most.finding)} would put ${rival ? cause(first) : "it"} at ${of100(first.most.share)}, ${finding(first.least.finding)} at ${of100(first.least.share)}.`;
+}
+
+function swingsOf(model: Model, evidence: Evidence, check: CheckModel, shares: Float64Array): readonly Swing[] {
+  const { weigh } = outcomesOf(model, check, reportedIn(evidence));
+  const totals = weigh.map((row) => row.reduce((sum, weight, index) => sum + weight * (shares[index] ?? 0), 0));
+  const swings = model.causes.map((_, index): Swing => {
+    const then = weigh.map((row, finding) => ({ finding, share: ((shares[index] ?? 0) * (row[index] ?? 0)) / (totals[finding] || 1) }));
+    const byShare = [...then].sort((a, b) => b.share - a.share);
+    const none = { finding: 0, share: 0 };
+    return { index, most: byShare[0] ?? none, least: byShare.at(-1) ?? none };
+  });
+  return swings.sort((a, b) => b.most.share - b.least.share - (a.most.share - a.least.share) || a.index - b.index);
+}
+
+function costOf(model: Model, step: NextStep): string {
+  if (step.kind === "call") return "";
+  const known =
+    step.kind === "check"
+      ? model.checks[model.checkAt.get(step.key) ?? -1]?.check
+      : model.remedies[model.remedyAt.get(step.key) ?? -1]?.remedy;
+  if (!known) return "";
+  const { flags } = known;
+  const opens =
+    known.opens ||
+    flags.opensRawWater ||
+    flags.opensCoolant ||
+    flags.opensFuelDirty ||
+    flags.opensFuelClean ||
+    flags.opensHighPressureFuel ||
+    flags.opensHoseBelowWater;
+  const minutes = minutesSaid(step.minutes);
+  return `Costs ${minutes}${opens || step.kind === "remedy" ? "" : "; nothing has to be opened"}.`;
+}

@@ -1,0 +1,83 @@
+import { shareOfEngines } from "../tree/applies";
+import type { DiagnosisEvent, EventOf } from "../contract/event";
+import type { EngineState, FaultTree, StopRule } from "../tree/schema";
+import { crankSeconds } from "./crank-seconds";
+import { findingFrom } from "./read-answer";
+import type { DiagnosisState } from "./fold";
+
+/** A rule that names no engine states forbids what its kind means. Rule [T5]. */
+const FORBIDS: Readonly<Record<StopRule["kind"], readonly EngineState[]>> = {
+  stop: ["cranking", "idling", "under-load"],
+  "no-crank": ["cranking", "idling", "under-load"],
+  call: [],
+  "hand-over": [],
+};
+
+/** Engine states that a rule takes away; an engine that may not be cranked cannot be started either. */
+export function forbidden(rule: StopRule): readonly EngineState[] {
+  const named = rule.forbids.length > 0 ? rule.forbids : FORBIDS[rule.kind];
+  return named.includes("cranking") ? [...new Set<EngineState>([...named, "idling", "under-load"])] : named;
+}
+
+const applying = (tree: FaultTree, state: DiagnosisState): readonly StopRule[] =>
+  tree.stopRules.filter((rule) => shareOfEngines(rule.appliesTo, state.profile, state.situation, tree.features) > 0);
+
+/** Rules to be asked before anything else: those that go with the symptoms told, and have no answer yet. Rule [T1]. */
+export function rulesToAsk(tree: FaultTree, state: DiagnosisState): readonly StopRule[] {
+  const reported = new Set(state.symptoms.filter((one) => one.present).map((one) => one.symptom));
+  const inForce = new Set(rulesInForce(tree, state));
+  return applying(tree, state).filter(
+    (rule) =>
+      rule.ask !== undefined &&
+      !inForce.has(rule) &&
+      (rule.when.symptoms === "*" || rule.when.symptoms.some((symptom) => reported.has(symptom))) &&
+      answersTo(rule, state).length === 0,
+  );
+}
+
+/** Rules in force: told, found or cranked into force, and not cleared since by someone who knew. Rules [T2], [T3]. */
+export function rulesInForce(tree: FaultTree, state: DiagnosisState): readonly StopRule[] {
+  const seconds = crankSeconds(tree, state);
+  return applying(tree, state).filter(
+    (rule) =>
+      (rule.when.crankSeconds !== undefined && seconds >= rule.when.crankSeconds) ||
+      triggers(tree, rule, state).some((trigger) => !isCleared(tree, rule, trigger, state)),
+  );
+}
+
+function answersTo(rule: StopRule, state: DiagnosisState): readonly EventOf<"rule-answered">[] {
+  return [...state.live].filter(
+    (event): event is EventOf<"rule-answered"> => event.kind === "rule-answered" && event.payload.rule === rule.key,
+  );
+}
+
+/** Findings as they stand, and in conflict: what might be dangerous counts until someone picks. */
+function findingsOf(
+  tree: FaultTree,
+  state: DiagnosisState,
+): readonly { event: DiagnosisEvent; check: string; finding: string | null; settled: boolean }[] {
+  const told = [...state.answers.values()].map((event) => ({ event, settled: true }));
+  const disputed = state.conflicts.flat().flatMap((event) => (event.kind === "answered" ? [{ event, settled: false }] : []));
+  return [...told, ...disputed].map(({ event, settled }) => ({
+    event,
+    settled,
+    check: event.payload.check,
+    finding: findingFrom(tree, state, event),
+  }));
+}
+
+function triggers(tree: FaultTree, rule: StopRule, state: DiagnosisState): readonly DiagnosisEvent[] {
+  const said = answersTo(rule, state).filter((event) => event.payload.answer === "yes");
+  const found = findingsOf(tree, state).filter(({ check, finding }) =>
+    rule.when.findings.some((ref) => ref.check === check && ref.finding === finding),
+  );
+  return [...said, ...found.map(({ event }) => event)];
+}
+
+function isCleared(tree: FaultTree, rule: StopRule, trigger: DiagnosisEvent, state: DiagnosisState): boolean {
+  const byHand = rule.clearedWhen === undefined ? [] : answersTo(rule, state).filter((event) => event.payload.answer === "cleared");
+  const byFinding = findingsOf(tree, state).filter(
+    ({ check, finding, settled }) => settled && rule.clearedBy.some((ref) => ref.check === check && ref.finding === finding),
+  );
+  return [...byHand, ...byFinding.map(({ event }) => event)].some((event) => state.order.before(trigger, event));
+}
