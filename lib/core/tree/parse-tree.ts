@@ -63,7 +63,12 @@ function plainSays(issue: Issue, field: string): Pick<Flaw, "says" | "mend"> {
   if (issue.code === "too_small" || issue.code === "too_big")
     return {
       says: `"${field}" is ${sizeSays(issue)}.`,
-      mend: issue.code === "too_small" ? "Add what is missing." : "Shorten it, or split it.",
+      mend:
+        typeof issue.input === "number"
+          ? "Write a number in that range."
+          : issue.code === "too_small"
+            ? "Add what is missing."
+            : "Shorten it, or split it.",
     };
   return { says: `"${field}" is ${shown(issue.input)}: ${issue.message}.`, mend: "Write it in that form." };
 }

@@ -117,6 +117,6 @@ function offsetOf(yaml: Document.Parsed, inFile: readonly (string | number)[]): 
 function yamlMend(code: string): string {
   if (code === "DUPLICATE_KEY") return "Keep one of the two lines with the same key.";
   if (code === "TAB_AS_INDENT") return "Indent with spaces.";
-  if (code === "BAD_INDENT" || code === "BLOCK_AS_IMPLICIT_KEY") return 'Check the indent here; text with a colon and a space, or that begins with a sign such as "*" or "@", needs quotes.';
+  if (code === "BAD_INDENT" || code === "BLOCK_AS_IMPLICIT_KEY") return 'Check indent and brackets here; text with a colon and a space, or that begins with a sign such as "*" or "@", needs quotes.';
   return "Check this line and the one before it: indent, quotes, brackets.";
 }

@@ -64,6 +64,9 @@ function causesThatShowNothing(tree: FaultTree): Found[] {
     }));
 }
 
+/** Features that the safety steps ask for, whether or not a node of the tree does. */
+const ASKED_FOR_SAFETY = ["injection", "exhaust"];
+
 function partsNobodyUses(tree: FaultTree): Found[] {
   const used = new Set(referencesOf(tree).map(({ to, key }) => `${to} ${key}`));
   const unused = (kind: "system" | "feature" | "source", nodes: readonly { key: string }[]) =>
@@ -74,7 +77,14 @@ function partsNobodyUses(tree: FaultTree): Found[] {
         says: "nothing in the tree uses it.",
         mend: "Take it out, unless something is still to come.",
       }));
-  return [...unused("system", tree.systems), ...unused("feature", tree.features), ...unused("source", tree.sources)];
+  return [
+    ...unused("system", tree.systems),
+    ...unused(
+      "feature",
+      tree.features.filter(({ key }) => !ASKED_FOR_SAFETY.includes(key)),
+    ),
+    ...unused("source", tree.sources),
+  ];
 }
 
 export const reachRules: readonly Rule[] = [
