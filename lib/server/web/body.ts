@@ -1,7 +1,7 @@
 import "server-only";
 import { Problem } from "@/lib/core/contract/problem";
 
-const mediaType = (request: Request) => (request.headers.get("content-type") ?? "").split(";")[0]?.trim().toLowerCase() ?? "";
+export const mediaType = (request: Request) => (request.headers.get("content-type") ?? "").split(";")[0]?.trim().toLowerCase() ?? "";
 
 /** The body's bytes, read no further than `maxBytes`. */
 export async function readBytes(request: Request, accepted: readonly string[], maxBytes: number): Promise<Uint8Array> {

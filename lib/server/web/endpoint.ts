@@ -5,7 +5,7 @@ import { Problem } from "@/lib/core/contract/problem";
 import { Id } from "@/lib/core/contract/id";
 import { prove, type FleetScope } from "../auth/scope";
 import { sessionIdOf } from "../auth/session-cookie";
-import { readBytes, readJson } from "./body";
+import { mediaType, readBytes, readJson } from "./body";
 import { refuseCrossSite } from "./cross-site";
 import { problemResponse } from "./failure";
 import { ifMatchVersion, parse } from "./parse";
@@ -24,20 +24,48 @@ export type EndpointSpec = {
   /** A change that two people may make at once: needs If-Match, hands `version` on. */
   versioned?: boolean;
   /** Takes bytes of these kinds instead of JSON. */
-  raw?: { accepts: readonly string[]; maxBytes: number };
+  raw?: Raw;
   maxBytes?: number;
 };
 
-type Infer<S> = S extends z.ZodType ? z.output<S> : undefined;
-type Given<S> = S extends z.ZodType ? z.input<S> : void;
+export type Raw = { accepts: readonly string[]; maxBytes: number };
+export type Nothing = z.ZodUndefined;
 
 /** What `run` is handed beside its scope. */
-export type Call<S extends EndpointSpec> = {
-  params: Infer<S["params"]>;
-  query: Infer<S["query"]>;
-  input: Infer<S["input"]>;
-  version: S["versioned"] extends true ? number : undefined;
-  bytes: S["raw"] extends object ? { body: Uint8Array; mediaType: string } : undefined;
+export type Call<
+  Params extends z.ZodType,
+  Query extends z.ZodType,
+  Input extends z.ZodType,
+  Versioned extends boolean,
+  R extends Raw | undefined,
+> = {
+  params: z.output<Params>;
+  query: z.output<Query>;
+  input: z.output<Input>;
+  version: Versioned extends true ? number : undefined;
+  bytes: R extends Raw ? { body: Uint8Array; mediaType: string } : undefined;
+};
+
+/** The answer: in the shape of `output`, or a Response of one's own. */
+export type Answer<Output extends z.ZodType> = Promise<(Output extends Nothing ? void : z.input<Output>) | Response>;
+
+/** A spec whose shapes are known, so that `run` is checked against them. */
+export type Shaped<
+  Who extends EndpointSpec["permission"],
+  Params extends z.ZodType,
+  Query extends z.ZodType,
+  Input extends z.ZodType,
+  Output extends z.ZodType,
+  Versioned extends boolean,
+  R extends Raw | undefined,
+> = Pick<EndpointSpec, "summary" | "status" | "maxBytes"> & {
+  permission: Who;
+  params?: Params;
+  query?: Query;
+  input?: Input;
+  output?: Output;
+  versioned?: Versioned;
+  raw?: R;
 };
 
 export type Context = { params: Promise<Record<string, string>> };
@@ -52,18 +80,29 @@ const DEFAULT_MAX_BYTES = 1_000_000;
  */
 export function endpoint<
   P extends Permission,
-  const S extends EndpointSpec & { permission: P; params: z.ZodObject<{ fleetId: typeof Id }> },
->(spec: S & { run(scope: FleetScope<P>, call: Call<S>): Promise<Given<S["output"]> | Response> }): Handler {
-  return handler(spec, async (request, params) => {
+  Params extends z.ZodObject<{ fleetId: typeof Id }>,
+  Query extends z.ZodType = Nothing,
+  Input extends z.ZodType = Nothing,
+  Output extends z.ZodType = Nothing,
+  Versioned extends boolean = false,
+  R extends Raw | undefined = undefined,
+>(
+  spec: Shaped<P, Params, Query, Input, Output, Versioned, R> & {
+    params: Params;
+    run: (scope: FleetScope<P>, call: Call<Params, Query, Input, Versioned, R>) => Answer<Output>;
+  },
+): Handler {
+  return handler(spec as EndpointSpec, async (request, params) => {
     const sessionId = await sessionIdOf(request.headers);
     if (!sessionId) throw Problem.signedOut();
     // An address that cannot be one of ours is not found, like one that is not.
     const where = spec.params.safeParse(params);
     if (!where.success) throw Problem.notFound();
     // Strangers and people who may not are turned away before their body is read, and no transaction waits for a slow sender.
-    const pass = await prove({ sessionId }, where.data.fleetId, spec.permission);
-    const call = (await readCall(request, spec, where.data)) as Call<S>;
-    return reply(await pass.enter((scope) => spec.run(scope, call)), spec);
+    const { fleetId } = where.data as { fleetId: string };
+    const pass = await prove({ sessionId }, fleetId, spec.permission);
+    const call = await readCall<Call<Params, Query, Input, Versioned, R>>(request, spec as EndpointSpec, where.data);
+    return reply(await pass.enter((scope) => spec.run(scope, call)), spec as EndpointSpec);
   });
 }
 
@@ -79,14 +118,11 @@ export function handler(spec: EndpointSpec, work: (request: Request, params: Rec
   return Object.assign(handle, { spec });
 }
 
-/** Everything of a request that is checked before anything is done: size, kind, shape, version. */
-export async function readCall(request: Request, spec: EndpointSpec, params: unknown): Promise<Record<keyof Call<EndpointSpec>, unknown>> {
+/** Everything of a request that is checked before anything is done: size, kind, shape, version. The spec's shapes make what it returns a C. */
+export async function readCall<C>(request: Request, spec: EndpointSpec, params: unknown): Promise<C> {
   const version = spec.versioned ? ifMatchVersion(request.headers) : undefined;
   const query = spec.query && parse(spec.query, Object.fromEntries(new URL(request.url).searchParams));
   const input = spec.input && parse(spec.input, await readJson(request, spec.maxBytes ?? DEFAULT_MAX_BYTES));
-  const bytes = spec.raw && {
-    body: await readBytes(request, spec.raw.accepts, spec.raw.maxBytes),
-    mediaType: (request.headers.get("content-type") ?? "").split(";")[0]?.trim().toLowerCase() ?? "",
-  };
-  return { params, query, input, version, bytes };
+  const bytes = spec.raw && { body: await readBytes(request, spec.raw.accepts, spec.raw.maxBytes), mediaType: mediaType(request) };
+  return { params, query, input, version, bytes } as C;
 }

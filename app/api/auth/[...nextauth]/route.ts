@@ -1,0 +1,3 @@
+import { handlers } from "@/lib/server/auth/next-auth";
+
+export const { GET, POST } = handlers;

@@ -1,0 +1,18 @@
+import "server-only";
+import { isIPv6 } from "node:net";
+
+/**
+ * The network address a request came from, as far as it can be known, for counting tries. Behind proxies that add to
+ * X-Forwarded-For, TRUSTED_PROXIES says how many: what stands before theirs may be made up. With none set the first
+ * entry is taken, which a caller can choose; the limits by account hold without it.
+ */
+export function clientAddress(headers: Headers): string {
+  const hops = (headers.get("x-forwarded-for") ?? "")
+    .split(",")
+    .map((hop) => hop.trim())
+    .filter(Boolean);
+  const trusted = Number(process.env.TRUSTED_PROXIES ?? 0);
+  const address = (trusted > 0 ? hops.at(-trusted) : hops[0]) ?? "unknown";
+  // One household has a whole /64.
+  return isIPv6(address) && !address.startsWith("::ffff:") ? address.split(":").slice(0, 4).join(":") : address.slice(0, 64);
+}
