@@ -26,7 +26,7 @@ function show(night: boolean): void {
 }
 
 /** One tap between day and night light; kept on this device. */
-export function LightSwitch({ className = "" }: { className?: string }) {
+export function LightSwitch({ className = "", compact = false }: { className?: string; compact?: boolean }) {
   const night = useSyncExternalStore(
     subscribe,
     () => document.documentElement.dataset.light === "night",
@@ -48,7 +48,7 @@ export function LightSwitch({ className = "" }: { className?: string }) {
       className={`inline-flex min-h-12 min-w-12 items-center justify-center gap-2 rounded-lg px-3 text-sm ${className}`}
     >
       <Icon aria-hidden size={20} />
-      <span>{night ? "Day light" : "Night light"}</span>
+      <span className={compact ? "visually-hidden" : undefined}>{night ? "Day light" : "Night light"}</span>
     </button>
   );
 }

@@ -12,7 +12,7 @@ export class Reasoner {
 
   async view(version: string, tree: FaultTree, events: readonly DiagnosisEvent[]): Promise<DiagnosisView> {
     const worker = this.#start();
-    if (!worker) return (await import("@/lib/core/diagnosis/show")).view(tree, [...events]);
+    if (!worker) return (await import("@/lib/core/diagnosis/show")).view(tree, events);
     if (!this.#kept.has(version)) {
       this.#kept.add(version);
       worker.postMessage({ ask: "keep-tree", version, tree } satisfies Ask);

@@ -1,0 +1,69 @@
+"use client";
+
+import { useState } from "react";
+import type { Answer } from "@/lib/core/contract/event";
+import type { StepShown } from "@/lib/core/diagnosis/view";
+import { useGuard } from "@/lib/client/screen/use-guard";
+import { AnswerButton } from "./answer-button";
+import { NoteAndPhotos } from "./note-and-photos";
+import { ReadingAnswer } from "./reading-answer";
+
+export type Given = { answer: Answer; says: string; withdraws: string | null; note: string; photos: readonly string[] };
+
+type Props = {
+  of: string;
+  ask: string;
+  answers: StepShown["answers"];
+  reading: StepShown["reading"];
+  ifFitted: boolean;
+  onAnswer: (given: Given) => Promise<void>;
+};
+
+/** The question and its answers. Each tap is kept at once; there is no send button to forget. */
+export function AnswerForm({ of, ask, answers, reading, ifFitted, onAnswer }: Props) {
+  const [note, setNote] = useState("");
+  const [photos, setPhotos] = useState<readonly string[]>([]);
+  const [given, setGiven] = useState<string | null>(null);
+  const guard = useGuard();
+  const withBands = reading !== null && reading.bands.length > 0;
+  const give = (answer: Answer, says: string, withdraws: string | null = null) =>
+    guard(() => {
+      if (given !== null) return;
+      setGiven(says);
+      void onAnswer({ answer, says, withdraws, note: note.trim(), photos });
+    });
+  return (
+    <div role="group" aria-labelledby={`ask-${of}`}>
+      <h2 id={`ask-${of}`} className="mt-5 mb-2 text-lg font-semibold tracking-normal">
+        {ask}
+      </h2>
+      {withBands && (
+        <ReadingAnswer of={of} scale={reading} given={given !== null} onRead={(value, unit, says) => give({ value, unit }, says)} />
+      )}
+      {withBands && <p className="mt-4 mb-2 text-sm text-ink-2">No figure to be had? Say it in words.</p>}
+      <div className="grid gap-2">
+        {answers.map((answer) => (
+          <AnswerButton
+            key={answer.finding}
+            chosen={given === answer.title}
+            onTap={() => give({ finding: answer.finding }, answer.title, answer.withdraws)}
+          >
+            {answer.title}
+          </AnswerButton>
+        ))}
+        {ifFitted && (
+          <AnswerButton quiet chosen={given === "Not fitted"} onTap={() => give({ notFitted: true }, "Not fitted")}>
+            Not fitted on this engine
+          </AnswerButton>
+        )}
+        <AnswerButton quiet chosen={given === "Can't tell"} onTap={() => give({ cannotTell: true }, "Can't tell")}>
+          Can&rsquo;t tell, or can&rsquo;t get to it
+        </AnswerButton>
+      </div>
+      <NoteAndPhotos of={of} note={note} onNote={setNote} photos={photos} onPhotos={setPhotos} />
+      <p role="status" className="mt-2 min-h-6 text-sm text-ink-2">
+        {given === null ? "" : "Kept. The next step is being worked out."}
+      </p>
+    </div>
+  );
+}

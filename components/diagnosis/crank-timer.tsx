@@ -1,0 +1,69 @@
+"use client";
+
+import { useState } from "react";
+import { useTicking } from "@/lib/client/screen/use-ticking";
+import { Button } from "@/components/ui/button";
+import { Chip } from "@/components/ui/chip";
+import { clock } from "./clock";
+import { useHere } from "./here";
+
+const BURST_SECONDS = 10;
+const REST_SECONDS = 60;
+
+/** Cranking in bursts with rests between. What is cranked adds up over all steps until the engine runs, since it fills a wet exhaust. */
+export function CrankTimer() {
+  const { view, record } = useHere();
+  const [burst, setBurst] = useState<number | null>(null);
+  const [rest, setRest] = useState<number | null>(null);
+  const cranking = useTicking(burst);
+  const resting = useTicking(rest);
+  const restLeft = resting === null ? 0 : Math.max(0, REST_SECONDS - resting);
+  const stop = (ran: boolean) => {
+    if (burst === null) return;
+    const seconds = Math.min(600, Math.round((Date.now() - burst) / 1000));
+    setBurst(null);
+    setRest(ran ? null : Date.now());
+    void record("cranked", { seconds, ran });
+  };
+  return (
+    <section aria-label="Cranking" className="rounded-xl border-[1.5px] border-edge bg-sheet p-3.5">
+      <div className="flex flex-wrap items-center justify-between gap-2">
+        <p className="font-semibold">Crank no more than {BURST_SECONDS} s at a time</p>
+        <Chip tone={view.crankSeconds >= 20 ? "lead" : "quiet"}>{Math.round(view.crankSeconds)} s since it last ran</Chip>
+      </div>
+      {cranking !== null ? (
+        <>
+          <p className="dial my-2 text-3xl">{cranking.toFixed(1)} s</p>
+          <p role="alert" className="min-h-6 font-semibold text-lead">
+            {cranking >= BURST_SECONDS ? "Stop cranking. Let the starter rest." : ""}
+          </p>
+          <div className="mt-1 grid grid-cols-2 gap-3">
+            <Button size="large" tone="strong" onClick={() => stop(false)}>
+              Stopped
+            </Button>
+            <Button size="large" onClick={() => stop(true)}>
+              It runs
+            </Button>
+          </div>
+        </>
+      ) : (
+        <>
+          <p role="status" className="my-1 text-sm">
+            {restLeft > 0 ? (
+              <>
+                Let the starter rest: <span className="dial">{clock(restLeft)}</span>
+              </>
+            ) : rest !== null ? (
+              "Rested. Crank again if it is needed."
+            ) : (
+              "Tap when you turn the key; tap again when you let go."
+            )}
+          </p>
+          <Button size="large" wide tone={restLeft > 0 ? "plain" : "strong"} onClick={() => setBurst(Date.now())}>
+            {restLeft > 0 ? "Cranking all the same" : "Cranking now"}
+          </Button>
+        </>
+      )}
+    </section>
+  );
+}

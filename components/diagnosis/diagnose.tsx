@@ -1,0 +1,36 @@
+"use client";
+
+import { useEffect, useState } from "react";
+import { Reasoner } from "@/lib/client/compute/reasoner";
+import { Surface } from "@/lib/client/screen/surface";
+import { useAddress, type Address } from "@/lib/client/screen/use-address";
+import { useObservable } from "@/lib/client/screen/use-observable";
+import { Fleet } from "./fleet";
+import { Frame } from "./frame";
+import { NotReady } from "./not-ready";
+
+/** The skipper's path, from the choice of an engine to the outcome. */
+export function Diagnose() {
+  const { address, go, back } = useAddress();
+  if (!address)
+    return (
+      <Frame ready={null} who="Gudgeon">
+        <p>Opening what is kept on this phone.</p>
+      </Frame>
+    );
+  return <Awake address={address} go={go} back={back} />;
+}
+
+type Props = { address: Address; go: ReturnType<typeof useAddress>["go"]; back: () => void };
+
+function Awake({ address, go, back }: Props) {
+  const [surface] = useState(() => new Surface());
+  const [reasoner] = useState(() => new Reasoner());
+  const [fleetWanted] = useState(address.fleet);
+  useEffect(() => surface.start(fleetWanted), [surface, fleetWanted]);
+  const state = useObservable(surface.state);
+  if (state.kind !== "ready") return <NotReady kind={state.kind} />;
+  return (
+    <Fleet key={`${state.person.userId} ${state.person.fleetId}`} ready={state} reasoner={reasoner} address={address} go={go} back={back} />
+  );
+}

@@ -1,0 +1,33 @@
+"use client";
+
+import { useState } from "react";
+import { Button } from "@/components/ui/button";
+import { TextField } from "@/components/ui/text-field";
+import { useHere } from "./here";
+
+/** A tool or a part that is not aboard: the checks and repairs that need it are then left alone. */
+export function NotAboard({ onSaid }: { onSaid: () => void }) {
+  const { view, record, setUndo } = useHere();
+  const [words, setWords] = useState("");
+  const say = (item: string) => {
+    void record("not-aboard", { item }).then((event) => setUndo({ event: event.id, says: `Not aboard: ${item}`, withdraws: null }));
+    onSaid();
+  };
+  const items = view.step ? [...view.step.tools, ...view.step.parts.map(({ title }) => title)] : [];
+  return (
+    <details className="rounded-[10px] border-[1.5px] border-edge bg-sheet px-3.5">
+      <summary className="flex min-h-16 items-center font-semibold">A tool or part is not aboard</summary>
+      <div className="grid gap-2 pb-3.5">
+        {items.map((item) => (
+          <Button key={item} wide onClick={() => say(item)}>
+            {item}
+          </Button>
+        ))}
+        <TextField id="not-aboard" label="Another thing" value={words} maxLength={200} onChange={(event) => setWords(event.target.value)} />
+        <Button wide disabled={words.trim() === ""} onClick={() => say(words.trim())}>
+          Not aboard
+        </Button>
+      </div>
+    </details>
+  );
+}

@@ -1,0 +1,87 @@
+"use client";
+
+import { useCallback, useMemo, useState } from "react";
+import type { Reasoner } from "@/lib/client/compute/reasoner";
+import type { Ready } from "@/lib/client/screen/surface";
+import type { Address, useAddress } from "@/lib/client/screen/use-address";
+import { useDiagnosis } from "@/lib/client/screen/use-diagnosis";
+import type { Phone } from "@/lib/core/contract/phone";
+import { LinkButton } from "@/components/ui/link-button";
+import { Notice } from "@/components/ui/notice";
+import { DiagnosisFrame } from "./diagnosis-frame";
+import { Frame } from "./frame";
+import { HereContext, type Here } from "./here";
+import { Screen } from "./screen";
+
+type Props = {
+  id: string;
+  ready: Ready;
+  reasoner: Reasoner;
+  phone: Phone;
+  address: Address;
+  go: ReturnType<typeof useAddress>["go"];
+  back: () => void;
+};
+
+/** One diagnosis: reads it from the store and hands it to its screens. */
+export function OpenDiagnosis({ id, ready, reasoner, phone, address, go, back }: Props) {
+  const state = useDiagnosis(ready, reasoner, id);
+  const [undo, setUndo] = useState<Here["undo"]>(null);
+  const goHere = useCallback<Here["go"]>((at, which, how) => go({ d: id, at, which: which ?? null }, how), [go, id]);
+  const { summary, tree, view } = state;
+  const engine = phone.engines.find((one) => one.id === summary?.engineId);
+  const here = useMemo<Here | null>(
+    () =>
+      engine && tree && view && summary
+        ? {
+            ready,
+            phone,
+            engine,
+            tree,
+            view,
+            summary,
+            events: state.events,
+            thinking: state.thinking,
+            address,
+            go: goHere,
+            back,
+            record: state.record,
+            undo,
+            setUndo,
+          }
+        : null,
+    [ready, phone, engine, tree, view, summary, state.events, state.thinking, address, goHere, back, state.record, undo],
+  );
+  if (here)
+    return (
+      <HereContext.Provider value={here}>
+        <DiagnosisFrame>
+          <Screen />
+        </DiagnosisFrame>
+      </HereContext.Provider>
+    );
+  return (
+    <Frame ready={ready} who={phone.fleet.name}>
+      {state.missing ? (
+        <div className="grid gap-4">
+          <Notice tone="look" title="This diagnosis is not on this phone">
+            It was begun on another phone, or belongs to another fleet. With a signal it is fetched from the server.
+          </Notice>
+          <LinkButton href="/diagnose" tone="strong">
+            To the engines
+          </LinkButton>
+        </div>
+      ) : state.failure ? (
+        <Notice tone="bad" title="The next step could not be worked out" live>
+          Your answers are kept. {state.failure}
+        </Notice>
+      ) : tree === null ? (
+        <Notice tone="look" title="The fault tree of this diagnosis is not on this phone">
+          It comes with the next signal; the answers are kept.
+        </Notice>
+      ) : (
+        <p role="status">Opening the diagnosis.</p>
+      )}
+    </Frame>
+  );
+}

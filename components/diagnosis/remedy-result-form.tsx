@@ -1,0 +1,75 @@
+"use client";
+
+import { useState } from "react";
+import type { RemedyResult } from "@/lib/core/contract/event";
+import { useGuard } from "@/lib/client/screen/use-guard";
+import { TextField } from "@/components/ui/text-field";
+import { AnswerButton } from "./answer-button";
+import { NoteAndPhotos } from "./note-and-photos";
+
+export type Tried = { result: RemedyResult; proof: string | null; note: string; photos: readonly string[]; says: string };
+
+const RESULTS: readonly { result: RemedyResult; title: string }[] = [
+  { result: "cured", title: "Cured" },
+  { result: "better", title: "Better, not cured" },
+  { result: "no-change", title: "No change" },
+  { result: "could-not", title: "Could not do it" },
+];
+
+/** Did it cure it, and how was that proved? A cure is only believed once it has been tried under load. */
+export function RemedyResultForm({ of, proof, onResult }: { of: string; proof: string | null; onResult: (tried: Tried) => Promise<void> }) {
+  const [note, setNote] = useState("");
+  const [photos, setPhotos] = useState<readonly string[]>([]);
+  const [cured, setCured] = useState(false);
+  const [words, setWords] = useState("");
+  const [given, setGiven] = useState(false);
+  const guard = useGuard();
+  const give = (result: RemedyResult, says: string, how: string | null) =>
+    guard(() => {
+      if (given) return;
+      setGiven(true);
+      void onResult({ result, says, proof: how, note: note.trim(), photos });
+    });
+  return (
+    <div>
+      <h2 className="mt-5 mb-2 text-lg font-semibold tracking-normal">Did it cure it?</h2>
+      <div className="grid gap-2">
+        {RESULTS.map(({ result, title }) => (
+          <AnswerButton
+            key={result}
+            chosen={result === "cured" && cured}
+            onTap={() => (result === "cured" ? guard(() => setCured(true)) : give(result, title, null))}
+          >
+            {title}
+          </AnswerButton>
+        ))}
+      </div>
+      <div aria-live="polite">
+        {cured && (
+          <section aria-label="How was that proved?" className="mt-4 rounded-xl border-[1.5px] border-sound bg-sound-wash p-3.5">
+            <h2 className="text-lg">How was that proved?</h2>
+            {proof && <p className="mt-1 mb-2">{proof}</p>}
+            <div className="grid gap-2">
+              {proof && <AnswerButton onTap={() => give("cured", "Cured, proved", proof)}>Done, and it held</AnswerButton>}
+              <TextField
+                id={`proof-${of}`}
+                label="Proved another way"
+                optional
+                value={words}
+                maxLength={500}
+                onChange={(event) => setWords(event.target.value)}
+              />
+              {words.trim().length > 2 && (
+                <AnswerButton onTap={() => give("cured", "Cured, proved", words.trim())}>Proved as written</AnswerButton>
+              )}
+              <AnswerButton quiet onTap={() => give("cured", "Cured, not proved yet", null)}>
+                Not proved yet
+              </AnswerButton>
+            </div>
+          </section>
+        )}
+      </div>
+      <NoteAndPhotos of={of} note={note} onNote={setNote} photos={photos} onPhotos={setPhotos} />
+    </div>
+  );
+}

@@ -1,0 +1,22 @@
+import type { RuleShown } from "@/lib/core/diagnosis/view";
+
+/** What to do while a rule is in force, first thing first, and the one exception to it. */
+export function RuleSays({ rule }: { rule: RuleShown }) {
+  return (
+    <div className="mt-3 rounded-lg border-[1.5px] border-lead bg-lead-wash px-3 py-2.5">
+      <p className="font-semibold text-lead">{rule.title}</p>
+      <ol className="mt-1 list-decimal pl-6 marker:font-bold">
+        {rule.says.map((line) => (
+          <li key={line} className="my-1">
+            {line}
+          </li>
+        ))}
+      </ol>
+      {rule.runOn && (
+        <p className="mt-2 text-sm">
+          <b>The one exception:</b> if stopping now endangers people or boat, run on at the lowest useful power to safety, call, then stop.
+        </p>
+      )}
+    </div>
+  );
+}

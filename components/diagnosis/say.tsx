@@ -1,0 +1,143 @@
+"use client";
+
+import { useMemo, useState } from "react";
+import { symptomFinder } from "@/lib/client/find-symptoms";
+import type { Ready } from "@/lib/client/screen/surface";
+import type { Address, useAddress } from "@/lib/client/screen/use-address";
+import { useDraft } from "@/lib/client/screen/use-draft";
+import { useGuard } from "@/lib/client/screen/use-guard";
+import { useTree } from "@/lib/client/screen/use-phone";
+import { begin } from "@/lib/client/begin";
+import type { Engine } from "@/lib/core/contract/engine";
+import type { Phone } from "@/lib/core/contract/phone";
+import type { Situation } from "@/lib/core/tree/schema";
+import { Button } from "@/components/ui/button";
+import { Segmented } from "@/components/ui/segmented";
+import { BoatFirst } from "./boat-first";
+import { Frame } from "./frame";
+import { ScreenHeading } from "./screen-heading";
+import { SymptomHits } from "./symptom-hits";
+import { SymptomList } from "./symptom-list";
+
+type Props = { ready: Ready; phone: Phone; engine: Engine; address: Address; go: ReturnType<typeof useAddress>["go"]; back: () => void };
+
+const NUMBERS = ["", "this one", "these two", "these three", "these four", "these five", "these six"];
+
+/** Where the boat is and what is wrong, in the person's own words. */
+export function Say({ ready, phone, engine, go }: Props) {
+  const tree = useTree(ready.store, phone.treeVersion.id);
+  const onlyMechanic = phone.roles.includes("mechanic") && phone.roles.length === 1;
+  const [draft, change] = useDraft(ready.store, engine.id, onlyMechanic);
+  const [asked, setAsked] = useState(false);
+  const [listOpen, setListOpen] = useState(false);
+  const guard = useGuard();
+  const find = useMemo(() => symptomFinder(tree?.symptoms ?? []), [tree]);
+  const hits = useMemo(() => find(draft?.complaint ?? ""), [find, draft?.complaint]);
+  const who = `${engine.boatName}, ${engine.name}`;
+  const line = (
+    <button type="button" className="min-h-12 underline underline-offset-4" onClick={() => go({ at: "engines" })}>
+      Another engine
+    </button>
+  );
+  if (!draft || !tree)
+    return (
+      <Frame ready={ready} who={who} line={line}>
+        <p role="status">
+          {tree === null ? "The fault tree is not on this phone yet. It comes with the next signal." : "Opening the fault tree."}
+        </p>
+      </Frame>
+    );
+
+  const fits = new Map(hits.map((hit) => [hit.key, hit.fits]));
+  const isPicked = (key: string) => draft.chosen[key] ?? fits.get(key) ?? false;
+  const picked = tree.symptoms.map(({ key }) => key).filter(isPicked);
+  const toggle = (key: string) => change({ chosen: { ...draft.chosen, [key]: !isPicked(key) } });
+  const shown = [...hits.map(({ key }) => key), ...picked.filter((key) => !fits.has(key))];
+  const other = phone.engines.find((one) => one.boatId === engine.boatId && one.id !== engine.id);
+  const needsSafety = draft.situation === "under-way" && !draft.boatIsSafe;
+
+  const goOn = () => {
+    setAsked(true);
+    const { situation } = draft;
+    if (!situation || needsSafety) return;
+    guard(() => {
+      void begin({ store: ready.store, phone, engine, tree, draft: { ...draft, situation }, symptoms: picked }).then((d) => {
+        ready.exchange.nudge();
+        go({ d, at: "rules" });
+      });
+    });
+  };
+
+  return (
+    <Frame ready={ready} who={who} line={line}>
+      <Segmented<Situation>
+        name="situation"
+        legend="Where is the boat?"
+        options={[
+          { value: "alongside", title: "alongside" },
+          { value: "at-anchor", title: "at anchor" },
+          { value: "under-way", title: "under way" },
+        ]}
+        value={draft.situation}
+        onChange={(situation) => change({ situation })}
+      />
+      {asked && !draft.situation && (
+        <p role="alert" className="mt-2 font-semibold text-lead">
+          Say where the boat is first. It decides what is safe to try.
+        </p>
+      )}
+      {draft.situation === "under-way" && <BoatFirst safe={draft.boatIsSafe} onSafe={(boatIsSafe) => change({ boatIsSafe })} />}
+      <div className="mt-6">
+        <ScreenHeading of={engine.id}>What is the engine doing, or not doing?</ScreenHeading>
+      </div>
+      <label htmlFor="complaint" className="mt-1 block text-sm text-ink-2">
+        In your own words. Several things in one line will do.
+      </label>
+      <textarea
+        id="complaint"
+        rows={2}
+        value={draft.complaint}
+        onChange={(event) => change({ complaint: event.target.value })}
+        maxLength={1000}
+        autoCapitalize="none"
+        className="mt-2 w-full rounded-xl border-2 border-fill bg-sheet p-3.5 text-xl"
+      />
+      <SymptomHits symptoms={tree.symptoms} keys={shown} isPicked={isPicked} onToggle={toggle} said={draft.complaint.trim().length > 2} />
+      <button type="button" aria-expanded={listOpen} className="link mt-2 min-h-12" onClick={() => setListOpen(!listOpen)}>
+        {listOpen ? "Close the list" : "Pick from a list by system"}
+      </button>
+      {listOpen && <SymptomList tree={tree} isPicked={isPicked} onToggle={toggle} />}
+      {other && picked.length > 0 && (
+        <div className="mt-5">
+          <Segmented
+            name="other-engine"
+            legend={`Does the other one do it: ${other.name}?`}
+            options={[
+              { value: "does-not", title: "No" },
+              { value: "does", title: "Yes, it does too" },
+            ]}
+            value={draft.otherEngine}
+            onChange={(otherEngine) => change({ otherEngine })}
+          />
+        </div>
+      )}
+      <label className="mt-4 flex min-h-12 items-center gap-3">
+        <input
+          type="checkbox"
+          className="size-6 accent-fill"
+          checked={draft.mechanic}
+          onChange={(event) => change({ mechanic: event.target.checked })}
+        />
+        A mechanic is at the engine
+      </label>
+      {needsSafety && asked && (
+        <p role="alert" className="mt-2 font-semibold text-lead">
+          See to the boat first, then say so above.
+        </p>
+      )}
+      <Button tone="strong" size="large" wide className="mt-4" onClick={goOn}>
+        {picked.length === 0 ? "Go on without a symptom" : `Go on with ${NUMBERS[picked.length] ?? `these ${picked.length}`}`}
+      </Button>
+    </Frame>
+  );
+}

@@ -1,0 +1,37 @@
+import type { Symptom } from "@/lib/core/tree/schema";
+import { SymptomRow } from "./symptom-row";
+
+type Props = {
+  symptoms: readonly Symptom[];
+  keys: readonly string[];
+  isPicked: (key: string) => boolean;
+  onToggle: (key: string) => void;
+  said: boolean;
+};
+
+/** What the words may mean. The nearest are ticked; a tap unticks. */
+export function SymptomHits({ symptoms, keys, isPicked, onToggle, said }: Props) {
+  const found = keys.flatMap((key) => symptoms.filter((symptom) => symptom.key === key));
+  return (
+    <div aria-live="polite">
+      {found.length > 0 && (
+        <div className="mt-2.5 overflow-hidden rounded-xl border-[1.5px] border-edge bg-sheet">
+          {found.map((symptom) => (
+            <SymptomRow
+              key={symptom.key}
+              title={symptom.title}
+              detail={symptom.detail}
+              picked={isPicked(symptom.key)}
+              onToggle={() => onToggle(symptom.key)}
+            />
+          ))}
+        </div>
+      )}
+      {found.length === 0 && said && (
+        <p className="mt-3 text-sm">
+          The tree has nothing in these words. Pick the nearest from the list below, or go on without: the checks then start wider.
+        </p>
+      )}
+    </div>
+  );
+}

@@ -1,0 +1,42 @@
+"use client";
+
+import { useHere } from "./here";
+
+/** What was just answered, with a way back from it. It asks nothing. */
+export function UndoBar() {
+  const { undo, setUndo, record, view } = useHere();
+  if (!undo) return null;
+  const withdrawn = undo.withdraws ? view.symptoms.find(({ key, present }) => key === undo.withdraws && present) : undefined;
+  return (
+    <div role="status" className="mb-4 rounded-lg border border-rule bg-sheet px-3 py-1 text-sm">
+      <div className="flex flex-wrap items-center justify-between gap-x-3">
+        <span>{undo.says}</span>
+        <button
+          type="button"
+          className="link min-h-12 min-w-12 font-semibold"
+          onClick={() => {
+            setUndo(null);
+            void record("taken-back", { event: undo.event });
+          }}
+        >
+          Undo
+        </button>
+      </div>
+      {withdrawn && (
+        <p className="pb-1">
+          This speaks against &ldquo;{withdrawn.title}&rdquo;.{" "}
+          <button
+            type="button"
+            className="link min-h-12"
+            onClick={() => {
+              setUndo({ ...undo, withdraws: null });
+              void record("symptom-told", { symptom: withdrawn.key, present: false });
+            }}
+          >
+            Take that symptom back
+          </button>
+        </p>
+      )}
+    </div>
+  );
+}
