@@ -1,0 +1,56 @@
+import { randomBytes } from "node:crypto";
+import { NextResponse, type NextRequest } from "next/server";
+import { LIGHT_SCRIPT } from "@/components/ui/light-script";
+import { sessionIdOf, siteIsSecure } from "@/lib/server/auth/session-cookie";
+import { contentSecurityPolicy, scriptHash, securityHeaders } from "@/lib/server/web/content-security";
+import { isStaticPage, staticScriptHashes } from "@/lib/server/web/static-scripts";
+
+const needsSignIn = (pathname: string) => pathname === "/account" || pathname.startsWith("/account/") || pathname.startsWith("/f/");
+
+const development = process.env.NODE_ENV === "development";
+const lightScript = scriptHash(LIGHT_SCRIPT);
+
+/** Names the inline scripts that this page may run. */
+function scriptsOf(pathname: string): { scripts: string[]; nonce: string | null } {
+  if (isStaticPage(pathname)) {
+    const hashes = staticScriptHashes();
+    if (hashes) return { scripts: [lightScript, ...hashes], nonce: null };
+    // A page that was built without its hashes would not come alive; in development there are none.
+    if (development) return { scripts: ["'unsafe-inline'"], nonce: null };
+    console.error("script-hashes.json is missing: the static pages run without their scripts being named");
+    return { scripts: ["'unsafe-inline'"], nonce: null };
+  }
+  const nonce = randomBytes(16).toString("base64");
+  return { scripts: [lightScript, `'nonce-${nonce}'`], nonce };
+}
+
+/**
+ * Sets the security headers and turns signed-out visitors away early. That is a courtesy, by the cookie's signature
+ * only: each page and each route proves for itself. (Not Auth.js' own wrapper: it signs the cookie anew on every
+ * request, and one under way while somebody signs out would sign them in again.)
+ */
+export async function proxy(request: NextRequest): Promise<NextResponse> {
+  const { pathname, search } = request.nextUrl;
+  const secure = siteIsSecure();
+  const { scripts, nonce } = scriptsOf(pathname);
+  const policy = contentSecurityPolicy({ scripts, development, secure });
+
+  if (needsSignIn(pathname) && !(await sessionIdOf(request.headers))) {
+    const to = new URL("/sign-in", request.nextUrl);
+    to.searchParams.set("next", pathname + search);
+    return withHeaders(NextResponse.redirect(to), policy, secure);
+  }
+  // Next reads the nonce from the request's policy and puts it on its own scripts.
+  const headers = new Headers(request.headers);
+  if (nonce) headers.set("content-security-policy", policy);
+  else headers.delete("content-security-policy");
+  return withHeaders(NextResponse.next({ request: { headers } }), policy, secure);
+}
+
+function withHeaders(response: NextResponse, policy: string, secure: boolean): NextResponse {
+  response.headers.set("content-security-policy", policy);
+  for (const [name, value] of Object.entries(securityHeaders(secure))) response.headers.set(name, value);
+  return response;
+}
+
+export const config = { matcher: ["/((?!_next/static/|_next/image).*)"] };
