@@ -1,6 +1,8 @@
 import { parseArgs } from "node:util";
 import path from "node:path";
-import { readTree, type TreeRead } from "./read-tree";
+import { linkRatios } from "@/lib/core/tree/link-ratios";
+import type { FaultTree } from "@/lib/core/tree/schema";
+import { readTree, Refusal, type TreeRead } from "./read-tree";
 
 /** Says whether a tree is sound: every flaw with its place, then the counts. */
 export async function check(args: string[]): Promise<number> {
@@ -10,11 +12,9 @@ export async function check(args: string[]): Promise<number> {
     options: { json: { type: "boolean" }, links: { type: "boolean" } },
   });
   const folder = positionals[0];
-  if (folder === undefined) {
-    console.error("Say which folder: npm run tree -- check trees/small-marine-diesel");
-    return 2;
-  }
+  if (folder === undefined) throw new Refusal("Say which folder: npm run tree -- check trees/small-marine-diesel");
   const read = await readTree(folder);
+  if (values.links && read.tree !== null) console.log(linkLines(read.tree).join("\n"));
   const errors = read.flaws.filter((flaw) => flaw.severity === "error").length;
   if (values.json) for (const line of figures(read, errors)) console.log(JSON.stringify(line));
   else {
@@ -55,3 +55,16 @@ function counts({ tree }: TreeRead): [string, number][] {
 
 const figures = (read: TreeRead, errors: number) =>
   [...counts(read), ["errors", errors] as const].map(([figure, value]) => ({ figure, value }));
+
+/** A line a cause, and under it a line a linked check with what its findings say. */
+function linkLines(tree: FaultTree): string[] {
+  const ratios = linkRatios(tree);
+  const digits = (value: number) => (value >= 10 ? value.toFixed(0) : value.toFixed(value >= 1 ? 1 : 2));
+  return tree.causes.flatMap((cause) => [
+    `${cause.title} (${cause.key})`,
+    ...Object.keys(cause.gives).map((check) => {
+      const row = ratios.filter((link) => link.cause === cause.key && link.check === check);
+      return `    ${check}: ${row.map(({ finding, withCause, sound, ratio }) => `${finding} ${withCause.toFixed(2)} against ${sound.toFixed(2)}, x${digits(ratio)}`).join("; ")}`;
+    }),
+  ]);
+}

@@ -40,3 +40,16 @@ function pathOf(document: Record<string, unknown>, node: Flaw["node"]): (string 
   }
   return ["key"];
 }
+
+/** Something to say to the person who typed the command; no fault of the program. */
+export class Refusal extends Error {}
+
+/** The tree, where it is sound enough to reason with. */
+export async function readTreeOrSay(folder: string | undefined): Promise<FaultTree> {
+  if (folder === undefined) throw new Refusal("Say which folder: trees/small-marine-diesel, for example.");
+  const { tree, flaws } = await readTree(folder);
+  const errors = flaws.filter(({ severity }) => severity === "error").length;
+  if (tree === null || errors > 0)
+    throw new Refusal(`The tree in ${folder} has ${errors} ${errors === 1 ? "error" : "errors"}: see npm run tree -- check ${folder}`);
+  return tree;
+}

@@ -1,6 +1,5 @@
 import type { EngineProfile } from "../contract/engine";
-import type { AppliesTo, Check, Feature, Remedy, Situation } from "./schema";
-import { treatedAsRail } from "./treated-as-rail";
+import type { AppliesTo, Feature, Situation } from "./schema";
 
 /**
  * The share of engines like this one that a node applies to: 0, it does not;
@@ -25,21 +24,6 @@ export function shareOfEngines(
       );
   }
   return share;
-}
-
-/**
- * The same for a check or remedy, with the one rule that no share may soften:
- * where a high-pressure union is opened, an engine that is common rail, has
- * unit injectors or may have either is left to the workshop.
- */
-export function shareOfStep(
-  step: Pick<Check | Remedy, "appliesTo" | "flags" | "who">,
-  profile: Pick<EngineProfile, "features">,
-  situation: Situation,
-  features: readonly Feature[],
-): number {
-  if (step.flags.opensHighPressureFuel && step.who !== "workshop" && treatedAsRail(profile)) return 0;
-  return shareOfEngines(step.appliesTo, profile, situation, features);
 }
 
 /** How many of all engines have one of these options, from 0 to 1: the options without a share part what the others leave. */

@@ -1,6 +1,7 @@
 import { describe, expect, test } from "vitest";
-import { shareOfEngines, shareOfStep } from "@/lib/core/tree/applies";
+import { shareOfEngines } from "@/lib/core/tree/applies";
 import type { Feature } from "@/lib/core/tree/schema";
+import { treatedAsRail } from "@/lib/core/tree/treated-as-rail";
 
 const feature = (key: string, options: Feature["options"]): Feature => ({ key, title: key, ask: `${key}?`, options });
 const features = [
@@ -51,18 +52,12 @@ describe("the share of engines a node applies to", () => {
   });
 });
 
-describe("a step that opens a high-pressure union", () => {
-  const unions = { flags: { opensHighPressureFuel: true as const }, who: "mechanic" as const };
-
-  test.each(["common-rail", "unit-injectors", undefined])("is not for an engine with %s injection", (injection) => {
-    const profile: { features: Record<string, string> } = { features: injection === undefined ? {} : { injection } };
-    expect(shareOfStep(unions, profile, "alongside", features)).toBe(0);
-  });
-
-  test.each(["in-line-pump", "rotary-pump"])("is for an engine with %s injection", (injection) => {
-    expect(shareOfStep(unions, { features: { injection } }, "alongside", features)).toBe(1);
-  });
-
-  test("is the workshop's to judge", () =>
-    expect(shareOfStep({ ...unions, who: "workshop" }, nothingKnown, "alongside", features)).toBe(1));
+test.each([
+  ["in-line-pump", false],
+  ["rotary-pump", false],
+  ["unit-injectors", true],
+  ["common-rail", true],
+  [undefined, true],
+])("injection %s: treated as a rail, %s", (injection, rail) => {
+  expect(treatedAsRail({ features: injection === undefined ? {} : { injection } })).toBe(rail);
 });

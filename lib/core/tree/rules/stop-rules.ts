@@ -28,7 +28,7 @@ const neverCleared = (tree: FaultTree): Found[] =>
     'Name the finding that does under "clearedBy", or what a person has to say under "clearedWhen".',
   );
 
-/** What each kind of rule has to keep people from. */
+/** What each kind of rule has to keep people from; a rule that names no states forbids what its kind means. */
 const MUST_FORBID: Readonly<Partial<Record<StopRule["kind"], readonly EngineState[]>>> = {
   stop: ["cranking", "idling", "under-load"],
   "no-crank": ["cranking"],
@@ -37,7 +37,7 @@ const MUST_FORBID: Readonly<Partial<Record<StopRule["kind"], readonly EngineStat
 function forbidsTooLittle(tree: FaultTree): Found[] {
   return tree.stopRules.flatMap((rule) => {
     const missing = (MUST_FORBID[rule.kind] ?? []).filter((state) => !rule.forbids.includes(state));
-    return missing.length === 0
+    return rule.forbids.length === 0 || missing.length === 0
       ? []
       : [
           {
