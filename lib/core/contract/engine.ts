@@ -80,3 +80,7 @@ export const HourReading = z.strictObject({
   reset: z.boolean().default(false),
 });
 export type HourReading = z.infer<typeof HourReading>;
+
+/** A reading in a list. `hours`: hours since new then. `doubtful`: it does not fit the others, so it is not counted. */
+export const ListedReading = HourReading.extend({ hours: z.number().nullable(), doubtful: z.boolean() });
+export type ListedReading = z.infer<typeof ListedReading>;

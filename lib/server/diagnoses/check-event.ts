@@ -20,7 +20,9 @@ export function refusalOf(event: DiagnosisEvent, tree: FaultTree): string | null
       return unknown("remedy", event.payload.remedy, tree.remedies);
     case "feature-told": {
       const feature = tree.features.find((f) => f.key === event.payload.feature);
-      return feature ? unknown(`option of "${feature.key}"`, event.payload.option, feature.options) : unknown("feature", event.payload.feature, []);
+      return feature
+        ? unknown(`option of "${feature.key}"`, event.payload.option, feature.options)
+        : unknown("feature", event.payload.feature, []);
     }
     case "ended": {
       const { cause, remedy } = event.payload;
@@ -46,7 +48,8 @@ function answerRefusal({ check: key, answer }: Answered, tree: FaultTree): strin
   if (!unit) return `"${answer.unit}" is not a unit known here.`;
   if (unit.quantity !== reading.quantity) return `"${answer.unit}" does not measure ${reading.quantity}, which "${check.title}" asks for.`;
   const value = convert(answer.value, answer.unit, reading.unit);
-  if (value < reading.from || value > reading.to) return `${answer.value} ${answer.unit} is off the scale of "${check.title}": ${reading.from} to ${reading.to} ${reading.unit}.`;
+  if (value < reading.from || value > reading.to)
+    return `${answer.value} ${answer.unit} is off the scale of "${check.title}": ${reading.from} to ${reading.to} ${reading.unit}.`;
   return null;
 }
 

@@ -8,6 +8,7 @@ import type { FaultTree } from "@/lib/core/tree/schema";
 import type { FleetScope } from "@/lib/server/auth/scope";
 import { projectDiagnosis } from "@/lib/server/log/project-diagnosis";
 import { canonical } from "@/lib/server/trees/content-hash";
+import { pinnedVersion } from "@/lib/server/trees/pinned-version";
 import { documentOf, findTreeVersion } from "@/lib/server/trees/queries";
 import { refusalOf } from "./check-event";
 import { eventOf, rowOf } from "./stored-events";
@@ -23,14 +24,25 @@ export type PostedEvent = { id: string } & Record<string, unknown>;
  *
  * @throws Problem 404 when the diagnosis is not in this fleet and none of the events begins it
  */
-export async function recordEvents(scope: FleetScope<"diagnosis:write">, diagnosisId: string, posted: readonly PostedEvent[]): Promise<EventReceipt[]> {
+export async function recordEvents(
+  scope: FleetScope<"diagnosis:write">,
+  diagnosisId: string,
+  posted: readonly PostedEvent[],
+): Promise<EventReceipt[]> {
   const receipts = new Map<string, EventReceipt>();
   const reject = (id: string, because: string) => receipts.set(id, { id, result: "rejected", because });
 
   const events: DiagnosisEvent[] = [];
   for (const one of posted) {
     const parsed = DiagnosisEvent.safeParse(one);
-    if (!parsed.success) reject(one.id, `It cannot be read: ${parsed.error.issues.map((i) => `${i.path.join(".")}: ${i.message}`).slice(0, 3).join("; ")}`);
+    if (!parsed.success)
+      reject(
+        one.id,
+        `It cannot be read: ${parsed.error.issues
+          .map((i) => `${i.path.join(".")}: ${i.message}`)
+          .slice(0, 3)
+          .join("; ")}`,
+      );
     else if (parsed.data.diagnosisId !== diagnosisId) reject(one.id, "It belongs to another diagnosis.");
     else events.push(parsed.data);
   }
@@ -49,7 +61,7 @@ export async function recordEvents(scope: FleetScope<"diagnosis:write">, diagnos
     return posted.map((one) => receipts.get(one.id) as EventReceipt);
   }
 
-  const tree = await documentOf(scope, diagnosis.shippedVersionId ? { id: diagnosis.shippedVersionId, from: "shipped" } : { id: diagnosis.ownVersionId ?? "", from: "own" });
+  const tree = await documentOf(scope, pinnedVersion(diagnosis));
   const fresh = await sortOut(scope, diagnosisId, events, tree, receipts);
   if (fresh.length > 0) {
     await scope.tx.insert(diagnosisEvents).values(fresh.map((event) => rowOf(scope, event)));
@@ -59,7 +71,13 @@ export async function recordEvents(scope: FleetScope<"diagnosis:write">, diagnos
 }
 
 /** Writes a receipt for each event and gives back those to store. */
-async function sortOut(scope: FleetScope, diagnosisId: string, events: readonly DiagnosisEvent[], tree: FaultTree, receipts: Map<string, EventReceipt>): Promise<DiagnosisEvent[]> {
+async function sortOut(
+  scope: FleetScope,
+  diagnosisId: string,
+  events: readonly DiagnosisEvent[],
+  tree: FaultTree,
+  receipts: Map<string, EventReceipt>,
+): Promise<DiagnosisEvent[]> {
   if (events.length === 0) return [];
   const rows = await scope.tx
     .select()
@@ -67,7 +85,13 @@ async function sortOut(scope: FleetScope, diagnosisId: string, events: readonly 
     .where(
       and(
         eq(diagnosisEvents.fleetId, scope.fleetId),
-        or(eq(diagnosisEvents.diagnosisId, diagnosisId), inArray(diagnosisEvents.id, events.map((event) => event.id))),
+        or(
+          eq(diagnosisEvents.diagnosisId, diagnosisId),
+          inArray(
+            diagnosisEvents.id,
+            events.map((event) => event.id),
+          ),
+        ),
       ),
     );
   const known = new Map(rows.map((row) => [row.id, eventOf(row)]));
@@ -132,7 +156,8 @@ async function beginRefusal(scope: FleetScope, event: EventOf<"begun">): Promise
   return refusalOf(event, await documentOf(scope, version));
 }
 
-const placeOf = (event: { diagnosisId: string; device: string; sequence: number }) => `${event.diagnosisId} ${event.device} ${event.sequence}`;
+const placeOf = (event: { diagnosisId: string; device: string; sequence: number }) =>
+  `${event.diagnosisId} ${event.device} ${event.sequence}`;
 
 /** The same event, whatever zone its moment is written in. */
 const sameEvent = (a: DiagnosisEvent, b: DiagnosisEvent) => canonical(comparable(a)) === canonical(comparable(b));

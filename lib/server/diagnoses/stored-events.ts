@@ -10,7 +10,17 @@ export type EventRow = typeof diagnosisEvents.$inferSelect;
 /** The event as its device made it. */
 export function eventOf(row: EventRow): DiagnosisEvent {
   const { id, diagnosisId, device, sequence, kind, payload, seen, supersedes } = row;
-  return { id, diagnosisId, device, sequence, kind, payload, seen, madeAt: row.madeAt.toISOString(), ...(supersedes ? { supersedes } : {}) } as DiagnosisEvent;
+  return {
+    id,
+    diagnosisId,
+    device,
+    sequence,
+    kind,
+    payload,
+    seen,
+    madeAt: row.madeAt.toISOString(),
+    ...(supersedes ? { supersedes } : {}),
+  } as DiagnosisEvent;
 }
 
 export function rowOf(scope: FleetScope, event: DiagnosisEvent): typeof diagnosisEvents.$inferInsert {

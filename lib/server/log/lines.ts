@@ -60,7 +60,10 @@ export type History = { cases: CaseEntry[]; clocks: Map<string, EngineClock>; ho
 export async function readHistory(scope: FleetScope, engineIds?: readonly string[]): Promise<History> {
   if (engineIds?.length === 0) return { cases: [], clocks: new Map(), hoursNow: () => null };
   const ofThese = engineIds && inArray(engines.id, [...engineIds]);
-  const rows = await scope.tx.select().from(engines).where(and(eq(engines.fleetId, scope.fleetId), ofThese));
+  const rows = await scope.tx
+    .select()
+    .from(engines)
+    .where(and(eq(engines.fleetId, scope.fleetId), ofThese));
   const clocks = await clocksOf(scope, rows);
   const { id, engineId, at, outcome, causeKey, causeTitle, causeSystem, proof, temporary, engineHours } = logEntries;
   const entries = await scope.tx
@@ -91,7 +94,8 @@ export async function readHistory(scope: FleetScope, engineIds?: readonly string
   };
 }
 
-const hoursOf = (entry: Pick<EntryRow, "at">, clock: EngineClock | undefined) => clock?.at(entry.at.toISOString()) ?? { hours: null, estimated: false };
+const hoursOf = (entry: Pick<EntryRow, "at">, clock: EngineClock | undefined) =>
+  clock?.at(entry.at.toISOString()) ?? { hours: null, estimated: false };
 
 function causeOf(entry: Pick<EntryRow, "causeKey" | "causeTitle" | "causeSystem">): LogEntry["cause"] {
   return entry.causeTitle === null ? null : { key: entry.causeKey, title: entry.causeTitle, system: entry.causeSystem };

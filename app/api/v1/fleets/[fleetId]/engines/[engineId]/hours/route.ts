@@ -1,0 +1,28 @@
+import * as z from "zod";
+import { HourReading, ListedReading } from "@/lib/core/contract/engine";
+import { Id } from "@/lib/core/contract/id";
+import { listOf } from "@/lib/core/contract/page";
+import { addHourReading } from "@/lib/server/engines/commands";
+import { listHourReadings } from "@/lib/server/engines/queries";
+import { endpoint } from "@/lib/server/web/endpoint";
+import { inPlace } from "@/lib/server/web/in-place";
+
+const params = z.object({ fleetId: Id, engineId: Id });
+
+export const GET = endpoint({
+  permission: "fleet:read",
+  summary: "Readings of the engine's hour meter, newest first",
+  params,
+  output: listOf(ListedReading),
+  run: async (scope, { params }) => ({ items: await listHourReadings(scope, params.engineId) }),
+});
+
+export const POST = endpoint({
+  permission: "engine:write",
+  summary: "Write down what the hour meter shows",
+  params,
+  input: HourReading,
+  output: HourReading,
+  status: 201,
+  run: (scope, { params, input }) => addHourReading(scope, inPlace("engineId", params.engineId, input)),
+});

@@ -1,0 +1,75 @@
+import "server-only";
+import { and, asc, eq } from "drizzle-orm";
+import { diagnoses } from "@/db/schema/diagnoses";
+import { hourReadings } from "@/db/schema/boats";
+import { logEntries } from "@/db/schema/log-entries";
+import type { LogEntry, NewRepair } from "@/lib/core/contract/log";
+import { Problem } from "@/lib/core/contract/problem";
+import type { FleetScope } from "@/lib/server/auth/scope";
+import { getEngine } from "@/lib/server/engines/queries";
+import { documentOf, getCurrentTreeVersion } from "@/lib/server/trees/queries";
+import { namesOf, unknownIn } from "./outcome-names";
+import { projectDiagnosis } from "./project-diagnosis";
+import { getLogEntry } from "./queries";
+
+/** Writes a repair into an engine's log that was done without a diagnosis. Sent twice it is one line. */
+export async function logRepair(scope: FleetScope<"log:write">, repair: NewRepair): Promise<LogEntry> {
+  await getEngine(scope, repair.engineId);
+  const tree = await documentOf(scope, await getCurrentTreeVersion(scope));
+  const errors = unknownIn(repair, tree);
+  if (errors.length > 0) throw Problem.invalid(errors);
+  const at = new Date(repair.doneAt);
+  const [stored] = await scope.tx
+    .insert(logEntries)
+    .values({
+      fleetId: scope.fleetId,
+      id: repair.id,
+      engineId: repair.engineId,
+      at,
+      outcome: repair.outcome,
+      ...namesOf(repair, repair.symptoms, tree),
+      proof: repair.proof ?? null,
+      engineHours: repair.engineHours ?? null,
+      minutes: repair.minutes ?? null,
+      parts: repair.parts,
+      note: repair.note ?? null,
+      by: scope.actor.userId,
+    })
+    .onConflictDoNothing()
+    .returning({ id: logEntries.id });
+  if (!stored) {
+    const there = await getLogEntry(scope, repair.id);
+    const same =
+      there.diagnosisId === null &&
+      there.engineId === repair.engineId &&
+      Date.parse(there.at) === at.getTime() &&
+      there.outcome === repair.outcome;
+    if (!same) throw Problem.conflict("Another line of the log has this id already.");
+    return there;
+  }
+  if (repair.engineHours !== undefined) {
+    await scope.tx
+      .insert(hourReadings)
+      .values({
+        fleetId: scope.fleetId,
+        id: repair.id,
+        engineId: repair.engineId,
+        reading: repair.engineHours,
+        readAt: at,
+        by: scope.actor.userId,
+      })
+      .onConflictDoNothing();
+  }
+  return getLogEntry(scope, repair.id);
+}
+
+/** Works out every diagnosis' line of the log anew from its events, as after a mend of the fold. Gives the number of diagnoses. */
+export async function rebuildLog(scope: FleetScope<"log:write">): Promise<number> {
+  const rows = await scope.tx
+    .select({ id: diagnoses.id })
+    .from(diagnoses)
+    .where(and(eq(diagnoses.fleetId, scope.fleetId)))
+    .orderBy(asc(diagnoses.id));
+  for (const { id } of rows) await projectDiagnosis(scope, id);
+  return rows.length;
+}
