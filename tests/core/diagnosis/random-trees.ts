@@ -59,18 +59,16 @@ export const anyCase: fc.Arbitrary<{ tree: FaultTree; evidence: Evidence }> = an
             ),
           ),
         ),
-      remedies: fc
-        .subarray(tree.remedies)
-        .chain((some) =>
-          fc.tuple(
-            ...some.map((one) =>
-              fc.record({
-                remedy: fc.constant(one.key),
-                result: fc.constantFrom("better" as const, "no-change" as const, "could-not" as const),
-              }),
-            ),
+      remedies: fc.subarray(tree.remedies).chain((some) =>
+        fc.tuple(
+          ...some.map((one) =>
+            fc.record({
+              remedy: fc.constant(one.key),
+              result: fc.constantFrom("better" as const, "no-change" as const, "could-not" as const),
+            }),
           ),
         ),
+      ),
     })
     .map((evidence) => ({ tree, evidence })),
 );

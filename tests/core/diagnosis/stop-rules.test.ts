@@ -1,0 +1,117 @@
+import { describe, expect, it } from "vitest";
+import { crankSeconds } from "../../../lib/core/diagnosis/crank-seconds";
+import { fold } from "../../../lib/core/diagnosis/fold";
+import { forbidden, rulesInForce, rulesToAsk } from "../../../lib/core/diagnosis/stop-rules";
+import { view } from "../../../lib/core/diagnosis/show";
+import { Device } from "./logs";
+import { cause, check, remedy, stopRule, symptom, tree } from "./small-trees";
+
+const hot = stopRule("hot", {
+  when: { symptoms: ["overheat"], findings: [{ check: "gauge", finding: "red" }] },
+  ask: "Is the needle in the red?",
+  clearedBy: [{ check: "hand", finding: "cool" }],
+});
+const flood = stopRule("flood", {
+  kind: "no-crank",
+  when: { symptoms: [], findings: [], crankSeconds: 30 },
+  forbids: ["cranking"],
+  clearedWhen: "The exhaust has been drained",
+});
+const always = stopRule("fire", {
+  kind: "call",
+  when: { symptoms: "*", findings: [] },
+  ask: "Is there smoke below?",
+  forbids: [],
+  runOnIfStoppingEndangers: false,
+});
+const small = tree({
+  symptoms: [symptom("overheat")],
+  stopRules: [hot, flood, always],
+  checks: [
+    check("gauge", ["green", "red"], { engine: "idling" }),
+    check("hand", ["cool", "hot"]),
+    check("crank", ["turns", "slow"], { engine: "cranking", flags: { cranks: 10 } }),
+    check("load", ["fine", "odd"], { engine: "under-load", minutes: 1 }),
+  ],
+  remedies: [remedy("mend", { minutes: 60 }), remedy("mend-b", { minutes: 60 })],
+  causes: [
+    cause("a", { shows: { overheat: "usually" }, gives: { load: { odd: "x60" }, crank: { slow: "x20" } }, curedBy: { mend: "usually" } }),
+    cause("b", { shows: { overheat: "usually" }, curedBy: { "mend-b": "usually" } }),
+  ],
+});
+const keys = (rules: readonly { key: string }[]) => rules.map(({ key }) => key);
+
+describe("stop rules", () => {
+  it("[T1] are asked with their symptoms before anything else, once", () => {
+    const phone = new Device(1);
+    const begun = phone.begin({ symptoms: ["overheat"] });
+    expect(keys(rulesToAsk(small, fold([begun])))).toEqual(["hot", "fire"]);
+    expect(view(small, [begun]).step).toBeNull();
+    const no = [phone.tell("rule-answered", { rule: "hot", answer: "no" }), phone.tell("rule-answered", { rule: "fire", answer: "no" })];
+    expect(rulesToAsk(small, fold([begun, ...no]))).toEqual([]);
+    expect(view(small, [begun, ...no]).step).not.toBeNull();
+  });
+
+  it("[T2] come into force on a finding at once", () => {
+    const phone = new Device(1);
+    expect(keys(rulesInForce(small, fold([phone.begin(), phone.answer("gauge", "red")])))).toEqual(["hot"]);
+  });
+
+  it("[T3] only the clearing finding, told by someone who knew, lifts them", () => {
+    const [phone, other] = [new Device(1), new Device(2)];
+    const yes = phone.tell("rule-answered", { rule: "hot", answer: "yes" });
+    const log = [phone.begin(), yes];
+    expect(keys(rulesInForce(small, fold(log)))).toEqual(["hot"]);
+    expect(keys(rulesInForce(small, fold([...log, phone.tell("rule-answered", { rule: "hot", answer: "no" })])))).toEqual(["hot"]);
+    expect(keys(rulesInForce(small, fold([...log, phone.tell("rule-answered", { rule: "hot", answer: "cleared" })])))).toEqual(["hot"]);
+    expect(keys(rulesInForce(small, fold([...log, other.answer("hand", "cool")])))).toEqual(["hot"]);
+    expect(keys(rulesInForce(small, fold([...log, phone.answer("hand", "cool")])))).toEqual([]);
+    expect(
+      keys(rulesInForce(small, fold([...log, phone.tell("rule-answered", { rule: "hot", answer: "no" }, { supersedes: yes.id })]))),
+    ).toEqual([]);
+  });
+
+  it("[T3] a danger that one of two devices saw holds until they agree", () => {
+    const [one, two] = [new Device(1), new Device(2)];
+    const log = [one.answer("gauge", "red"), two.answer("gauge", "green")];
+    expect(fold(log).conflicts).toHaveLength(1);
+    expect(keys(rulesInForce(small, fold(log)))).toEqual(["hot"]);
+  });
+
+  it("[T4] every second of cranking counts until the engine runs or the exhaust is drained", () => {
+    const phone = new Device(1);
+    const log = [phone.begin(), phone.tell("cranked", { seconds: 8, ran: false }), phone.answer("crank", "slow")];
+    expect(crankSeconds(small, fold(log))).toBe(18);
+    const more = [...log, phone.answer("crank", "turns", { supersedes: log[2]!.id }), phone.tell("cranked", { seconds: 12, ran: false })];
+    expect(crankSeconds(small, fold(more))).toBe(20);
+    const over = [...more, phone.tell("cranked", { seconds: 10, ran: false })];
+    expect(keys(rulesInForce(small, fold(over)))).toEqual(["flood"]);
+    const drained = [...over, phone.tell("rule-answered", { rule: "flood", answer: "cleared" })];
+    expect(crankSeconds(small, fold(drained))).toBe(0);
+    expect(rulesInForce(small, fold(drained))).toEqual([]);
+    expect(crankSeconds(small, fold([...over, phone.tell("cranked", { seconds: 2, ran: true })]))).toBe(0);
+    expect(crankSeconds(small, fold([...over, phone.answer("load", "fine")]))).toBe(0);
+  });
+
+  it("[T5] steps in engine states that they forbid are gone", () => {
+    expect(forbidden(flood)).toEqual(["cranking", "idling", "under-load"]);
+    const phone = new Device(1);
+    const log = [phone.begin({ symptoms: ["overheat"] }), phone.tell("rule-answered", { rule: "fire", answer: "no" })];
+    const calm = view(small, [...log, phone.tell("rule-answered", { rule: "hot", answer: "no" })]);
+    expect(calm.step?.key).toBe("load");
+    const danger = view(small, [...log, phone.tell("rule-answered", { rule: "hot", answer: "yes" })]);
+    expect(danger.rulesInForce[0]).toMatchObject({ key: "hot", runOn: true });
+    expect(danger.step?.key).toBe("hand");
+    expect(danger.step?.why).toContain("hot");
+  });
+
+  it("[T6] a rule that says to call leaves nothing but the call", () => {
+    const phone = new Device(1);
+    const log = [
+      phone.begin({ symptoms: ["overheat"] }),
+      phone.tell("rule-answered", { rule: "hot", answer: "no" }),
+      phone.tell("rule-answered", { rule: "fire", answer: "yes" }),
+    ];
+    expect(view(small, log).step?.kind).toBe("call");
+  });
+});
