@@ -1,7 +1,7 @@
+import type { FindingLink } from "../../../lib/core/tree/finding-link";
 import { describe, expect, it } from "vitest";
 import { causeRow } from "../../../lib/core/diagnosis/cause-row";
 import { soundRow } from "../../../lib/core/diagnosis/sound-row";
-import type { FindingLink } from "../../../lib/core/tree/schema";
 import { check, finding } from "./small-trees";
 
 const look = check("look", ["fine", "odd", "worse"]);

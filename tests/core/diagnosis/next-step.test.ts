@@ -171,7 +171,7 @@ describe("the next step", () => {
     const inLine = { ...setting.profile, features: { injection: "in-line-pump" } };
     expect(step(union, { symptoms: weak }, { profile: inLine }).key).toBe("look");
     expect(step(union, { symptoms: weak }, { profile: inLine, person: "skipper-in-port" }).kind).toBe("remedy");
-    for (const features of [{}, { injection: "common-rail" }, { injection: "unit-injectors" }])
+    for (const features of [{} as Record<string, string>, { injection: "common-rail" }, { injection: "unit-injectors" }])
       for (const person of ["mechanic", "workshop"] as const)
         expect(step(union, { symptoms: weak }, { profile: { ...setting.profile, features }, person }).kind).toBe("remedy");
   });

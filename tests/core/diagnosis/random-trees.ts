@@ -1,6 +1,7 @@
 import fc from "fast-check";
 import type { Evidence } from "../../../lib/core/diagnosis/evidence";
-import type { FaultTree, FindingLink } from "../../../lib/core/tree/schema";
+import type { FaultTree } from "../../../lib/core/tree/schema";
+import type { FindingLink } from "../../../lib/core/tree/finding-link";
 import { cause, check, remedy, symptom, tree } from "./small-trees";
 
 const LINKS: readonly FindingLink[] = ["x60", "x20", "x5", "x1/3", "x1/10", "usually", "often", "sometimes", 0.4, "seldom"];
