@@ -1,5 +1,6 @@
+import { type Strength } from "../tree/finding-link";
 import { STRENGTHS } from "../tree/strength";
-import type { FaultTree, Strength } from "../tree/schema";
+import type { FaultTree } from "../tree/schema";
 import type { Upstream } from "./came-back";
 
 /** What the tree says lies upstream of its causes (rule B5): causes that bring one on, likeliest first, then roots in words. */

@@ -1,5 +1,6 @@
 import type { EngineProfile } from "../contract/engine";
-import type { Check, FaultTree, Remedy, SafetyFlags, Signal } from "./schema";
+import type { Check, FaultTree, Remedy, Signal } from "./schema";
+import type { SafetyFlags } from "./safety-flags";
 import { treatedAsRail } from "./treated-as-rail";
 
 /** A signal word in the sense of ANSI Z535: danger kills or maims, warning could, caution could injure or do damage. */

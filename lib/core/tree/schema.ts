@@ -1,5 +1,7 @@
 import * as z from "zod";
-import { BASE_RATES, STRENGTHS, type BaseRate, type StrengthWord } from "./strength";
+import { SafetyFlags } from "./safety-flags";
+import { FindingLink, Strength } from "./finding-link";
+import { BASE_RATES, type BaseRate } from "./strength";
 
 /**
  * The fault tree as a document: the one shape that is written as YAML, stored,
@@ -19,20 +21,6 @@ const Line = z.string().trim().min(1).max(200);
 /** A source's key, then where in it: "en2 p. 3-23". "judgement" and "common-practice" are sources too. */
 export const Citation = z.string().regex(/^[a-z0-9]+(-[a-z0-9]+)*( .+)?$/, "a citation is a source's key, then where in it");
 const Citations = z.array(Citation).min(1);
-
-const words = Object.keys(STRENGTHS) as [StrengthWord, ...StrengthWord[]];
-
-/** A word of the scale, or a probability where there is a figure. */
-export const Strength = z.union([z.enum(words), z.number().gt(0).lt(1)]);
-export type Strength = z.infer<typeof Strength>;
-
-/** Evidence as the trade grades it: so many times the odds that a sound engine shows this finding ("x20", "x1/3"). */
-export const OddsFactor = z.string().regex(/^x(1\/)?[1-9][0-9]*(\.[0-9]+)?$/, 'a factor reads like "x20" or "x1/3"');
-export type OddsFactor = z.infer<typeof OddsFactor>;
-
-/** How a cause shifts one finding: said as a strength, or as a factor on a sound engine's odds. */
-export const FindingLink = z.union([Strength, OddsFactor]);
-export type FindingLink = z.infer<typeof FindingLink>;
 
 export const Situation = z.enum(["alongside", "at-anchor", "under-way"]);
 export type Situation = z.infer<typeof Situation>;
@@ -113,27 +101,6 @@ export type EngineState = z.infer<typeof EngineState>;
 
 export const Who = z.enum(["skipper-at-sea", "skipper-in-port", "mechanic", "workshop"]);
 export type Who = z.infer<typeof Who>;
-
-/** What a step does that can hurt; first and last steps and cautions are written from these, once (safety-steps.ts). */
-export const SafetyFlags = z.strictObject({
-  /** Seconds of cranking that this step asks for. */
-  cranks: z.number().int().min(1).max(60).optional(),
-  /** The stop is held while it cranks: the engine must not fire. */
-  fuelOff: z.literal(true).optional(),
-  opensRawWater: z.literal(true).optional(),
-  opensHoseBelowWater: z.literal(true).optional(),
-  opensCoolant: z.literal(true).optional(),
-  opensFuelDirty: z.literal(true).optional(),
-  opensFuelClean: z.literal(true).optional(),
-  opensHighPressureFuel: z.literal(true).optional(),
-  beltsExposed: z.literal(true).optional(),
-  handsAtShaft: z.literal(true).optional(),
-  hotParts: z.literal(true).optional(),
-  worksOnBattery: z.literal(true).optional(),
-  inWater: z.literal(true).optional(),
-  underLoad: z.literal(true).optional(),
-});
-export type SafetyFlags = z.infer<typeof SafetyFlags>;
 
 const Precedence = z.union([z.strictObject({ check: Key, finding: Key.optional() }), z.strictObject({ remedy: Key })]);
 

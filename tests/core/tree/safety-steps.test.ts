@@ -1,6 +1,7 @@
 import { describe, expect, test } from "vitest";
 import { cautionsOf, safetyOf } from "@/lib/core/tree/safety-steps";
-import { SafetyFlags, type EngineState } from "@/lib/core/tree/schema";
+import { type EngineState } from "@/lib/core/tree/schema";
+import { SafetyFlags } from "@/lib/core/tree/safety-flags";
 
 const wet = { features: { exhaust: "wet", injection: "in-line-pump" } };
 const dry = { features: { exhaust: "dry", injection: "in-line-pump" } };

@@ -1,6 +1,7 @@
 import { factorOf, probabilityOf } from "../../diagnosis/cause-row";
 import { linkRatios } from "../link-ratios";
-import type { Cause, Check, FaultTree, Strength } from "../schema";
+import type { Cause, Check, FaultTree } from "../schema";
+import type { Strength } from "../finding-link";
 import { causeNode, findLoop, twice, type Found, type Rule } from "./rule";
 import { findingsOfSpan } from "./bands";
 

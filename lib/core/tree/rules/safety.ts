@@ -1,4 +1,5 @@
-import type { EngineState, FaultTree, SafetyFlags } from "../schema";
+import type { EngineState, FaultTree } from "../schema";
+import type { SafetyFlags } from "../safety-flags";
 import { stepNode, stepsOf, type Found, type Rule, type StepNode } from "./rule";
 
 type Contradiction = { holds: (flags: SafetyFlags, engine: EngineState) => boolean; says: string; mend: string };
