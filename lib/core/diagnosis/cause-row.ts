@@ -1,5 +1,5 @@
 import type { Check } from "../tree/schema";
-import { type FindingLink } from "../tree/finding-link";
+import type { FindingLink } from "../tree/finding-link";
 import { STRENGTHS } from "../tree/strength";
 import { scaledToOne } from "./sound-row";
 

@@ -1,4 +1,4 @@
-import { type Strength } from "../tree/finding-link";
+import type { Strength } from "../tree/finding-link";
 import { STRENGTHS } from "../tree/strength";
 import type { FaultTree } from "../tree/schema";
 import type { Upstream } from "./came-back";
