@@ -14,6 +14,9 @@ npm run tree -- schema
 
 const commands: Record<string, (args: string[]) => Promise<number>> = { check, schema, show };
 
+// Whoever reads us may stop early (| head): that is no fault.
+process.stdout.on("error", (error: NodeJS.ErrnoException) => process.exit(error.code === "EPIPE" ? 0 : 1));
+
 const [name = "", ...args] = process.argv.slice(2);
 const command = commands[name];
 if (command === undefined) {
