@@ -11,7 +11,13 @@ const pure = (name: string, extra: object = {}) => ({
   resolve: { alias },
   test: { name, include: [`tests/${name}/**/*.test.ts`], environment: "node", ...extra },
 });
-const withDatabase = { globalSetup: ["tests/support/postgres-setup.ts"], testTimeout: 20_000, hookTimeout: 30_000 };
+const withDatabase = {
+  globalSetup: ["tests/support/postgres-setup.ts"],
+  testTimeout: 20_000,
+  hookTimeout: 30_000,
+  // It imports "next/server" without an ending, which Node alone does not find.
+  server: { deps: { inline: ["next-auth"] } },
+};
 
 export default defineConfig({
   test: {

@@ -6,7 +6,7 @@
 // DATABASE_URL arrives at the same ones, and nothing has to be kept.
 import { createHmac } from "node:crypto";
 import pg from "pg";
-import { log, UserError } from "./proc.mjs";
+import { UserError } from "./proc.mjs";
 
 /** Seen by the identity role alone; they stand outside the fleet wall because they are read before a fleet is known. */
 export const IDENTITY_TABLES = ["users", "credentials", "sessions", "one_time_tokens", "attempts", "memberships", "invitations"];
@@ -75,8 +75,7 @@ async function ensureLogin(client, name, password) {
     await client.query(sql);
   } catch (e) {
     if (e.code !== "42501") throw e;
-    log(`the owner of the database may not make roles`);
-    throw new UserError(`Run this once as a superuser, then start again:\n  ${sql};`);
+    throw new UserError(`The owner of the database may not make roles. Run this once as a superuser, then start again:\n  ${sql};`);
   }
 }
 

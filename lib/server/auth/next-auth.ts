@@ -28,8 +28,8 @@ const nextAuth = NextAuth({
   useSecureCookies: siteIsSecure(),
   pages: { signIn: "/sign-in", error: "/sign-in", signOut: "/account" },
   logger: {
-    // A wrong password is no error of the server. (By type, not by name: names are minified.)
-    error: (error) => ((error as AuthError).type === "CredentialsSignin" ? undefined : console.error(error)),
+    // A wrong password or a forged form is no error of the server. (By type, not by name: names are minified.)
+    error: (error) => (["CredentialsSignin", "MissingCSRF"].includes((error as AuthError).type) ? undefined : console.error(error)),
   },
   providers: [
     Credentials({
