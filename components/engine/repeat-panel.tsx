@@ -1,28 +1,19 @@
 import type { RepeatFault } from "@/lib/core/contract/log";
-
-const round = (n: number) => Math.round(n).toLocaleString("en-GB");
+import { repeatInWords, wholeNumber } from "./repeat-in-words";
 
 /** A fault that came back: the fact, its gaps as a picture and in words, and what lies upstream. */
 export function RepeatPanel({ repeat }: { repeat: RepeatFault }) {
   const inHours = repeat.gapsHours.length > 0;
   const gaps = inHours ? repeat.gapsHours : repeat.gapsDays;
   const unit = inHours ? "h" : "d";
-  const first = repeat.hours[0];
-  const last = repeat.hours[repeat.hours.length - 1];
-  const over =
-    inHours && typeof first === "number" && typeof last === "number"
-      ? `${round(last - first)} hours`
-      : `${round(sum(repeat.gapsDays))} days`;
   return (
     <section className="grid gap-5 rounded-xl border-[1.5px] border-lead bg-lead-wash px-4 py-4 sm:px-5 md:grid-cols-[1fr_20rem]">
       <div>
         <p className="text-sm font-bold text-lead">Came back</p>
-        <h2>
-          {repeat.title}: {repeat.count} times in {over}
-        </h2>
+        <h2>{repeatInWords(repeat)}</h2>
         <p className="mt-1.5">
-          {inHours ? "Running hours" : "Days"} between them: {gaps.map((g) => round(g)).join(", ")}.{" "}
-          {repeat.unprovedBefore > 0 && `${round(repeat.unprovedBefore)} of the cures before had not been proved. `}
+          {inHours ? "Running hours" : "Days"} between them: {gaps.map((g) => wholeNumber(g)).join(", ")}.{" "}
+          {repeat.unprovedBefore > 0 && `${wholeNumber(repeat.unprovedBefore)} of the cures before had not been proved. `}
           {gaps.length < 3 ? "Too few to tell whether it is getting worse." : ""}
         </p>
         {repeat.upstream.length > 0 && (
@@ -61,7 +52,7 @@ function GapBars({ gaps, unit }: { gaps: readonly number[]; unit: "h" | "d" }) {
                 fill="var(--lead)"
               />
             </svg>
-            <span className="text-sm text-ink-2">{round(gap)}</span>
+            <span className="text-sm text-ink-2">{wholeNumber(gap)}</span>
           </div>
         ))}
       </div>
@@ -72,5 +63,4 @@ function GapBars({ gaps, unit }: { gaps: readonly number[]; unit: "h" | "d" }) {
   );
 }
 
-const sum = (numbers: readonly number[]) => numbers.reduce((a, b) => a + b, 0);
 const lower = (text: string) => text.charAt(0).toLowerCase() + text.slice(1);

@@ -1,0 +1,74 @@
+"use client";
+
+import { zodResolver } from "@hookform/resolvers/zod";
+import { useRouter } from "next/navigation";
+import { useState } from "react";
+import { useForm, useWatch } from "react-hook-form";
+import { uuidv7 } from "uuidv7";
+import * as z from "zod";
+import { FormEnd } from "@/components/form/form-end";
+import { typedNumber } from "@/components/form/typed-number";
+import { useSave } from "@/components/form/use-save";
+import { TextField } from "@/components/ui/text-field";
+import { sendJson } from "@/lib/client/exchange/request";
+import type { Feature } from "@/lib/core/tree/schema";
+import { ClockFields } from "./clock-fields";
+import { EngineValues, engineValues, NOTHING_KNOWN } from "./engine-values";
+import { ProfileFields } from "./profile-fields";
+
+type Props = { fleetId: string; boatId: string; suggestedName: string; features: readonly Feature[] };
+
+const Reading = z.object({ reading: typedNumber({ from: 0, to: 200_000 }) });
+const FormValues = z.intersection(EngineValues, Reading);
+
+/** A new engine. Its name is enough to begin; the profile can wait. */
+export function NewEngineForm({ fleetId, boatId, suggestedName, features }: Props) {
+  const router = useRouter();
+  // Made once: sent twice, it is one engine with one reading.
+  const [{ id, readingId }] = useState(() => ({ id: uuidv7(), readingId: uuidv7() }));
+  const { saving, refusal, save } = useSave();
+  const form = useForm({
+    resolver: zodResolver(FormValues),
+    defaultValues: { ...engineValues({ ...NOTHING_KNOWN, name: suggestedName }, features), reading: "" },
+  });
+  const meter = useWatch({ control: form.control, name: "meter" });
+  const { errors } = form.formState;
+  const submit = form.handleSubmit(async ({ name, hasHourMeter, estimatedHoursPerYear, profile, reading }) => {
+    const engines = `/api/v1/fleets/${fleetId}/engines`;
+    const outcome = await save(async () => {
+      const hoursAYear = estimatedHoursPerYear === null ? {} : { estimatedHoursPerYear };
+      await sendJson(engines, { id, boatId, name, hasHourMeter, ...hoursAYear, profile });
+      if (hasHourMeter && reading !== null) {
+        await sendJson(`${engines}/${id}/hours`, { id: readingId, engineId: id, reading, readAt: new Date().toISOString() });
+      }
+    });
+    if ("answer" in outcome) router.push(`/f/${fleetId}/engines/${id}`);
+  });
+  // The shared fields know the engine's part of the form; the reading is this form's own.
+  const register = form.register as unknown as Parameters<typeof ClockFields>[0]["register"];
+  return (
+    <form className="grid max-w-4xl gap-6" onSubmit={submit} noValidate>
+      <div className="grid max-w-xl gap-5">
+        <ClockFields register={register} errors={errors} meter={meter} />
+        {meter === "yes" && (
+          <TextField
+            id="first-reading"
+            label="What does the meter show now, in hours?"
+            optional
+            inputMode="decimal"
+            autoComplete="off"
+            error={errors.reading?.message}
+            {...form.register("reading")}
+          />
+        )}
+      </div>
+      <details open={Boolean(errors.figures || errors.healthy || errors.cylinders || errors.ratedKw) || undefined}>
+        <summary className="flex min-h-12 items-center font-semibold">Say more about it now (it can wait)</summary>
+        <div className="mt-3 grid gap-7">
+          <ProfileFields features={features} register={register} errors={errors} />
+        </div>
+      </details>
+      <FormEnd submit="Add the engine" saving={saving} refusal={refusal} wrong={Object.keys(errors).length > 0} />
+    </form>
+  );
+}
