@@ -1,0 +1,327 @@
+/**
+ * Where each edge of a reading's bands comes from. `published`: the text was
+ * seen, source, table and page stand beside the figure; `from-memory`: a
+ * published figure recalled and not looked up again; `common-practice`: what
+ * mechanics go by, without a text. `within`: how far the tree's round number
+ * may lie from the figure, in the reading's unit.
+ */
+export type BandFigure = {
+  edge: string;
+  /** The source's own number and unit, or the two ends of its range. */
+  figure: number | readonly [number, number];
+  unit: string;
+  within?: number;
+  standing: "published" | "from-memory" | "common-practice";
+  /** Source's key, then table and page. */
+  source: string;
+  note?: string;
+};
+
+const practice = (edge: string, figure: number | readonly [number, number], unit: string, more: Partial<BandFigure> = {}): BandFigure => ({
+  edge,
+  figure,
+  unit,
+  standing: "common-practice",
+  source: "common-practice",
+  ...more,
+});
+
+/** A figure for 12 V doubled (volts), halved (amps) or times four (ohms) for the same watts on 24 V. */
+const scaled = (edge: string, figure: number, unit: string, by: 2 | 0.5 | 4): BandFigure =>
+  practice(edge, figure * by, unit, { note: `${figure} ${unit} on 12 V, for the same watts on 24 V` });
+
+export const BAND_FIGURES: readonly BandFigure[] = [
+  // Air
+  practice("intake-vacuum: low | middling", 10, "inH2O", { within: 0.05, note: "clean small engines show 5 to 10" }),
+  practice("intake-vacuum: middling | high", 20, "inH2O", { within: 0.05, note: "5 short of the published limit of 25" }),
+  practice("hatch-open: slight | clear-gain", 50, "rpm"),
+
+  // Cold start
+  practice("glow-volts: small | some [v12]", 1, "V"),
+  practice("glow-volts: some | large [v12]", 2, "V"),
+  scaled("glow-volts: small | some [v24]", 1, "V", 2),
+  scaled("glow-volts: some | large [v24]", 2, "V", 2),
+  practice("glow-resistance: alike | open [v12]", 5, "ohm", { note: "0.5 to 2 ohm, some plugs up to 5" }),
+  scaled("glow-resistance: alike | open [v24]", 5, "ohm", 4),
+  practice("intake-heater: weak | full [v12]", 40, "A", { note: "40 to 100 A is typical" }),
+  scaled("intake-heater: weak | full [v24]", 40, "A", 0.5),
+
+  // Cooling
+  practice("full-load-temperature: cool | normal [heat-exchanger or keel]", 65, "°C"),
+  practice("full-load-temperature: normal | high [heat-exchanger or keel] plus", [8, 10], "°C", {
+    note: "act 8 to 10 above its own normal",
+  }),
+  practice("full-load-temperature: normal | high [heat-exchanger or keel] otherwise", 90, "°C", { note: "often 75 to 90" }),
+  practice("full-load-temperature: high | alarm [heat-exchanger or keel]", 95, "°C", { note: "alarms are commonly set at about 95" }),
+  practice("full-load-temperature: cool | normal [raw-water]", 42, "°C", {
+    note: "the coldest thermostat stamped for a raw-water engine, 42 to 60",
+  }),
+  practice("full-load-temperature: normal | high [raw-water] plus", [8, 10], "°C"),
+  practice("full-load-temperature: normal | high [raw-water] otherwise", 65, "°C", { note: "50 to 65 is normal" }),
+
+  // Cranking
+  practice("battery-rest-volts: low | part [v12]", 12.2, "V", { note: "under 12.2 V speaks for a flat battery" }),
+  practice("battery-rest-volts: part | full [v12]", 12.5, "V", { note: "over 12.5 V speaks against it" }),
+  scaled("battery-rest-volts: low | part [v24]", 12.2, "V", 2),
+  scaled("battery-rest-volts: part | full [v24]", 12.5, "V", 2),
+  {
+    edge: "crank-volts: low | marginal [v12]",
+    figure: 9.6,
+    unit: "V",
+    standing: "from-memory",
+    source: "bci battery test practice with SAE J537",
+  },
+  {
+    edge: "crank-volts: low | marginal [v24]",
+    figure: 19.2,
+    unit: "V",
+    standing: "from-memory",
+    source: "bci battery test practice with SAE J537",
+  },
+  practice("crank-volts: marginal | good [v12]", 10.5, "V"),
+  practice("crank-volts: good | high [v12]", 11.5, "V", { note: "over 11.5 V with a slow crank: the volts do not reach the starter" }),
+  scaled("crank-volts: marginal | good [v24]", 10.5, "V", 2),
+  scaled("crank-volts: good | high [v24]", 11.5, "V", 2),
+  practice("volts-at-starter: small | middling [v12]", 0.5, "V"),
+  practice("volts-at-starter: middling | large [v12]", 1, "V"),
+  scaled("volts-at-starter: small | middling [v24]", 0.5, "V", 2),
+  scaled("volts-at-starter: middling | large [v24]", 1, "V", 2),
+  {
+    edge: "drop-positive: small | over [v12]",
+    figure: 0.5,
+    unit: "V",
+    standing: "published",
+    source: "tm256-4 p. CGES-230-8, the worked example's total",
+  },
+  scaled("drop-positive: small | over [v24]", 0.5, "V", 2),
+  { edge: "drop-negative: small | over [v12]", figure: 0.2, unit: "V", standing: "published", source: "tm256-4 p. CGES-230-8" },
+  scaled("drop-negative: small | over [v24]", 0.2, "V", 2),
+  { edge: "crank-rpm: very-slow | slow", figure: 100, unit: "rpm", standing: "published", source: "crk1, cold, for a light-truck diesel" },
+  practice("crank-rpm: slow | fair", 150, "rpm"),
+  practice("crank-rpm: fair | healthy", 200, "rpm", { note: "200 to 300 is healthy warm" }),
+  practice("starter-amps: low | middling [v12]", 100, "A"),
+  practice("starter-amps: middling | high [v12]", 300, "A"),
+  scaled("starter-amps: low | middling [v24]", 100, "A", 0.5),
+  scaled("starter-amps: middling | high [v24]", 300, "A", 0.5),
+
+  // Drive line
+  practice("gland-temperature: warm | hot", 60, "°C", { note: "too hot to hold" }),
+
+  // Exhaust
+  practice("elbow-temp: usual | warm", 60, "°C", { note: "40 to 60 is usual" }),
+  practice("elbow-temp: warm | hot", 75, "°C", { note: "beside the published alarm point of 165 degF" }),
+  {
+    edge: "back-pressure: near | over [none]",
+    figure: 39,
+    unit: "inH2O",
+    within: 0.05,
+    standing: "published",
+    source: "m-bp technical data pp. 11-12, without a turbo",
+    note: "the same page's 1.5 psi is 41.5 inH2O: the source contradicts itself, the lower stands",
+  },
+  {
+    edge: "back-pressure: near | over [turbo or turbo-charge-cooled]",
+    figure: 19.5,
+    unit: "inH2O",
+    within: 0.05,
+    standing: "published",
+    source: "m-bp technical data pp. 11-12, with a turbo",
+    note: "the same page's 0.75 psi is 20.8 inH2O",
+  },
+
+  // First looks
+  practice("start-time: normal | slower otherwise", 3, "s"),
+  practice("start-time: slower | slow otherwise", 5, "s"),
+  practice("start-time: slow | long otherwise", 10, "s"),
+  practice("rpm-noload: short | reaches times", 1, "times", { note: "under rated speed without load is a fault of the engine's side" }),
+  practice("rpm-loaded: short | a-little-short times", 0.95, "times"),
+  practice("rpm-loaded: a-little-short | reaches times", 0.97, "times", {
+    note: "3 to 5 % short is watched; a rev counter is good to 3 %",
+  }),
+  practice("rpm-loaded: reaches | over times", 1.05, "times"),
+  practice("tacho-true: reads-low | agrees", 100 - 3, "%"),
+  practice("tacho-true: agrees | reads-high", 100 + 3, "%"),
+  practice("fuel-burn: usual | high", 120, "%", { note: "20 % over what it burnt before" }),
+
+  // Fuel supply
+  practice("tank-level: under-tenth | under-third", 10, "%"),
+  practice("tank-level: under-third | ample", 100 / 3, "%", { within: 0.5, note: "public accounts agree: two engines stopped at a third" }),
+  ...["filter-vacuum", "filter-vacuum-teed"].flatMap((check): BandFigure[] => [
+    practice(`${check}: in-order | raised plus`, 2, "inHg", { within: 0.5, note: "2 over its own clean reading: plan a change" }),
+    {
+      edge: `${check}: raised | high plus`,
+      figure: [3, 4],
+      unit: "inHg",
+      standing: "published",
+      source: "vac1, 3 to 4 over the clean reading: change",
+    },
+    {
+      edge: `${check}: in-order | raised otherwise`,
+      figure: 3.75,
+      unit: "inHg",
+      within: 0.5,
+      standing: "published",
+      source: "lift1, most at the pump's inlet at 1 500 rpm, for a 5.9 L engine",
+      note: "without the engine's own clean reading the figure is weak",
+    },
+    practice(`${check}: raised | high otherwise`, [7, 8], "inHg", { note: "suits large flows; a small engine starves before" }),
+  ]),
+  practice("lift-pump-pressure: low | in-order", 0.1, "bar", { note: "small diaphragm and pulse pumps, 0.1 to 0.35 bar" }),
+  {
+    edge: "lift-pump-pressure: in-order | high",
+    figure: 6.5,
+    unit: "psi",
+    within: 0.5,
+    standing: "published",
+    source: "lift3, top of 5.5 to 6.5 psi, for a 6.2 L engine",
+    note: "a small pump has no business above it",
+  },
+
+  // Injection
+  practice("injector-opening: low | in-order", 90, "%", { note: "10 % under the book is rejected" }),
+  {
+    edge: "injector-back-leak: in-order | high",
+    figure: 11,
+    unit: "count",
+    standing: "published",
+    source: "tm397, 3 to 10 drops in 30 s at 1 500 psi",
+    note: "11 is the first number over 10",
+  },
+  practice("leakoff-compare: one-raised | one-double", 200, "%", { note: "more than double the rest" }),
+  practice("rail-pressure: low | in-order", 200, "bar", { note: "200 to 300 bar permits injection" }),
+
+  // Mechanical
+  {
+    edge: "compression: low | good",
+    figure: 2.6,
+    unit: "MPa",
+    standing: "published",
+    source: "m-cp1 manual p. 43, the limit at 290 rpm",
+  },
+  practice("wet-compression: little | rises", 15, "%"),
+  practice("valve-clearance: right | wide", 0.1, "mm"),
+  practice("crank-pressure: light | raised", 3, "inH2O", { within: 0.01 }),
+  practice("crank-pressure: raised | high", 5, "inH2O", { within: 0.01 }),
+  practice("oil-use-rate: usual | raised", 0.5, "%"),
+  practice("oil-use-rate: raised | high", 1, "%"),
+
+  // Turbo
+  practice("boost: low | right", 80, "%", { note: "of the maker's figure" }),
+  practice("charge-air-temperature: cool | hot", 50, "°C"),
+];
+
+/** Edges that rest on no figure: judgement, said so, to be put right by the log of proved cures. */
+export const WITHOUT_FIGURE: Readonly<Record<string, string>> = {
+  "hatch-open: none | slight": "20 rpm is what a steady hand can tell on a rev counter",
+  "glow-volts: large | nothing [v12]": "nothing arrives when the loss is all the battery has; 9 V allows for one that sags",
+  "glow-volts: large | nothing [v24]": "twice the 12 V judgement",
+  "glow-amps: none | little": "nothing, but for the meter's zero",
+  "glow-amps: little | short": "under 30 %: not a plug's share, but the supply",
+  "glow-amps: short | full": "between five of six plugs, 83 %, and all six; the meter's error on either side",
+  "glow-resistance: shorted | alike [v12]": "below half of the lowest sound plug, 0.5 ohm",
+  "glow-resistance: shorted | alike [v24]": "well below the lowest sound plug, reckoned at 2 ohm",
+  "intake-heater: none | weak [v12]": "nothing, but for the meter's zero",
+  "intake-heater: none | weak [v24]": "nothing, but for the meter's zero",
+  "full-load-temperature: high | alarm [raw-water]": "15 over the top of normal; no figure for an alarm on a raw-water engine was found",
+  "battery-rest-volts: very-low | low [v12]": "between flat, 11.9 V, and a dead cell, about 10.5 V",
+  "battery-rest-volts: very-low | low [v24]": "twice the 12 V judgement",
+  "drop-positive: over | far-over [v12]": "twice the allowance",
+  "drop-positive: over | far-over [v24]": "twice the allowance",
+  "drop-negative: over | far-over [v12]": "two and a half times the allowance",
+  "drop-negative: over | far-over [v24]": "two and a half times the allowance",
+  "back-pressure: under | near [none]": "two thirds of the limit",
+  "back-pressure: under | near [turbo or turbo-charge-cooled]": "two thirds of the limit",
+  "start-time: normal | slower plus": "1 s over its own time is more than a stop watch errs",
+  "start-time: slower | slow plus": "keeps the distances of the bands without its own time",
+  "start-time: slow | long plus": "keeps the distances of the bands without its own time",
+  "rpm-noload: reaches | over times": "a droop of 12 % and the 3 % of a rev counter",
+  "fuel-burn: low | usual": "a sixth less than before is more than a sounding of the tank errs",
+  "filter-vacuum: near-nothing | in-order": "what a small gauge can show at all",
+  "filter-vacuum-teed: near-nothing | in-order": "what a small gauge can show at all",
+  "vacuum-before-filter: low | high": "a tank level with the engine and a clean line; the check's note says so",
+  "suction-hold: holds | falls-slowly": "a tight line holds; 3 kPa is the pump's own leak",
+  "suction-hold: falls-slowly | falls": "a fifth of what was pumped",
+  "lift-pump-volume: far-short | short": "half of the need",
+  "lift-pump-volume: short | enough": "the need is a rule of three, its measurement good to a tenth",
+  "filter-pressure-drop: small | large": "about 1 psi; the maker's figure goes first",
+  "injector-opening: in-order | high": "as far over as the trade rejects under",
+  "leakoff-compare: alike | one-raised": "half way to the double that is a finding",
+  "pump-element-pressure: low | in-order": "recalled by the tree's authors, and the step says so; the maker's figure goes first",
+  "delivery-valve-hold: falls | holds": "recalled by the tree's authors, and the step says so; the maker's figure goes first",
+  "rail-pressure-load: low | in-order": "recalled by the tree's authors; the maker's limit goes first",
+  "compression: very-low | low": "a figure that no cold start survives; the manuals give the limit only",
+  "valve-clearance: tight | right": "a feeler's step under the book; the trade only names none at all",
+  "boost: right | high": "a gauge's error over the maker's figure",
+};
+
+/** Published, recalled or usual values, and the finding that each has to fall in. */
+export type LiesIn = { check: string; value: number; unit: string; finding: string; kind?: string; source: string };
+
+export const LIES_IN: readonly LiesIn[] = [
+  { check: "intake-vacuum", value: 25, unit: "inH2O", finding: "high", source: "tm260 p. 135, the limit" },
+  { check: "back-pressure", value: 1.5, unit: "psi", kind: "none", finding: "over", source: "m-bp pp. 11-12, as the page has it in psi" },
+  {
+    check: "back-pressure",
+    value: 0.75,
+    unit: "psi",
+    kind: "turbo or turbo-charge-cooled",
+    finding: "over",
+    source: "m-bp pp. 11-12, as the page has it in psi",
+  },
+  { check: "back-pressure", value: 2.5, unit: "inHg", kind: "none", finding: "near", source: "h-bp ch. 7, without a turbo" },
+  {
+    check: "back-pressure",
+    value: 2,
+    unit: "inHg",
+    kind: "turbo or turbo-charge-cooled",
+    finding: "over",
+    source: "h-bp ch. 7, with a turbo",
+  },
+  { check: "back-pressure", value: 34, unit: "inH2O", kind: "none", finding: "near", source: "tm260 p. 135" },
+  { check: "elbow-temp", value: 217, unit: "F", finding: "hot", source: "exht, cause for concern" },
+  { check: "battery-rest-volts", value: 12.66, unit: "V", kind: "v12", finding: "full", source: "rvqa, full" },
+  { check: "battery-rest-volts", value: 12.45, unit: "V", kind: "v12", finding: "part", source: "rvqa, 75 %" },
+  { check: "battery-rest-volts", value: 12.3, unit: "V", kind: "v12", finding: "part", source: "rvqa, 50 %" },
+  { check: "battery-rest-volts", value: 12.15, unit: "V", kind: "v12", finding: "low", source: "rvqa, 25 %" },
+  { check: "battery-rest-volts", value: 12.24, unit: "V", kind: "v12", finding: "part", source: "bci, 50 %, from memory" },
+  { check: "battery-rest-volts", value: 12.06, unit: "V", kind: "v12", finding: "low", source: "bci, 25 %, from memory" },
+  { check: "battery-rest-volts", value: 11.89, unit: "V", kind: "v12", finding: "low", source: "bci, flat, from memory" },
+  { check: "battery-rest-volts", value: 10.5, unit: "V", kind: "v12", finding: "very-low", source: "common practice, a dead cell" },
+  { check: "battery-rest-volts", value: 25.32, unit: "V", kind: "v24", finding: "full", source: "rvqa, full, doubled" },
+  { check: "crank-rpm", value: 100, unit: "rpm", finding: "slow", source: "crk1, least for a cold start: slow, not hopeless" },
+  { check: "crank-rpm", value: 180, unit: "rpm", finding: "fair", source: "crk1, least for a hot start" },
+  { check: "crank-rpm", value: 240, unit: "rpm", finding: "healthy", source: "crk2, a car diesel with pre-chambers" },
+  { check: "crank-rpm", value: 290, unit: "rpm", finding: "healthy", source: "m-cp1 p. 43, the speed at which compression is read" },
+  { check: "filter-vacuum", value: 5, unit: "inHg", finding: "raised", source: "common practice, investigate" },
+  { check: "lift-pump-pressure", value: 0.35, unit: "bar", finding: "in-order", source: "common practice, top for a small pump" },
+  { check: "lift-pump-pressure", value: 5.5, unit: "psi", finding: "in-order", source: "lift3, 6.2 L engine" },
+  { check: "injector-back-leak", value: 3, unit: "count", finding: "in-order", source: "tm397, low end" },
+  { check: "injector-back-leak", value: 10, unit: "count", finding: "in-order", source: "tm397, high end" },
+  { check: "compression", value: 2.9, unit: "MPa", finding: "good", source: "m-cp1 p. 43, standard" },
+  { check: "compression", value: 30, unit: "bar", finding: "good", source: "m-cp3 p. 230, low end" },
+  { check: "compression", value: 2.6 - 0.1, unit: "MPa", finding: "low", source: "m-cp1 p. 43, under the limit" },
+  { check: "crank-pressure", value: 1, unit: "inH2O", finding: "light", source: "from memory, a new engine" },
+  { check: "glow-amps", value: 100, unit: "%", finding: "full", source: "arithmetic: every plug draws its share" },
+  { check: "glow-amps", value: (100 * 5) / 6, unit: "%", finding: "short", source: "arithmetic: one plug of six is dead" },
+  { check: "glow-amps", value: (100 * 2) / 3, unit: "%", finding: "short", source: "arithmetic: one plug of three is dead" },
+  { check: "glow-resistance", value: 12 ** 2 / 150, unit: "ohm", kind: "v12", finding: "alike", source: "glow1, 150 W at 12 V" },
+  { check: "glow-resistance", value: 24 ** 2 / 150, unit: "ohm", kind: "v24", finding: "alike", source: "glow1, the same watts at 24 V" },
+  { check: "rpm-noload", value: 1.05, unit: "times", finding: "reaches", source: "common practice, least droop" },
+  { check: "rpm-noload", value: 1.12, unit: "times", finding: "reaches", source: "common practice, most droop" },
+  {
+    check: "lift-pump-volume",
+    value: (100 * 300) / (15 * 20),
+    unit: "%",
+    finding: "enough",
+    source: "common practice: a 20 kW engine, 300 ml a minute",
+  },
+  { check: "oil-use-rate", value: 0.3, unit: "%", finding: "usual", source: "common practice" },
+  {
+    check: "full-load-temperature",
+    value: 165,
+    unit: "F",
+    kind: "heat-exchanger or keel",
+    finding: "normal",
+    source: "tm209-17, workboat, low end",
+  },
+];
