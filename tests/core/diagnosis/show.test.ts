@@ -38,7 +38,7 @@ const small = tree({
     check("colour", [finding("clear", { usual: true }), finding("black", { restates: "smoke" })], { engine: "idling", minutes: 40 }),
   ],
   remedies: [
-    remedy("element", { parts: [{ key: "element", title: "Element", quantity: 1 }], flags: { opensFuelDirty: true } }),
+    remedy("element", { minutes: 60, parts: [{ key: "element", title: "Element", quantity: 1 }], flags: { opensFuelDirty: true } }),
     remedy("decoke", { minutes: 90 }),
   ],
   causes: [
