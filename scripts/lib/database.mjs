@@ -16,8 +16,9 @@ export const runTypeScript = (file, args = [], options = {}) =>
  * @returns {Promise<{ env: Record<string, string>, demo: null | { password: string, people: { email: string, roles: string[] }[] } }>}
  */
 export async function prepareDatabase(ownerUrl, { demo }) {
-  const roles = await ensureRoles(ownerUrl);
   await migrate(ownerUrl);
+  // After the migrations: what it grants depends on the tables there are.
+  const roles = await ensureRoles(ownerUrl);
   const env = { DATABASE_APP_URL: roles.appUrl, DATABASE_IDENTITY_URL: roles.identityUrl };
   const reports = mkdtempSync(path.join(os.tmpdir(), "gudgeon-"));
   const report = path.join(reports, "demo.json");
