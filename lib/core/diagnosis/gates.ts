@@ -38,7 +38,7 @@ export class Gates {
 
   /** Could this person do the step as the engine now stands, gates apart? */
   isFeasible(step: CheckModel | RemedyModel): boolean {
-    return step.offered && !this.#standing.ruledOut.has(stateOf(step));
+    return step.offered && !statesOf(step).some((state) => this.#standing.ruledOut.has(state));
   }
 
   gateOf(step: CheckModel | RemedyModel, depth = 0): Gate {
@@ -84,3 +84,9 @@ export class Gates {
 }
 
 export const stateOf = (step: CheckModel | RemedyModel): EngineState => ("check" in step ? step.check.engine : step.remedy.engine);
+
+/** A cold start is tried cold and cranks all the same: what may not be cranked may not be asked for under another name. */
+const statesOf = (step: CheckModel | RemedyModel): readonly EngineState[] => {
+  const { cranks } = ("check" in step ? step.check : step.remedy).flags;
+  return cranks === undefined ? [stateOf(step)] : [stateOf(step), "cranking"];
+};

@@ -105,6 +105,31 @@ describe("stop rules", () => {
     expect(danger.step?.why).toContain("hot");
   });
 
+  it("[T5] a cold start is cranking too: it is not offered to an engine that may not be cranked", () => {
+    const risky = tree({
+      symptoms: [symptom("slow-start")],
+      stopRules: [{ ...flood, ask: "Did it stop dead?", when: { symptoms: ["slow-start"], findings: [] } }],
+      checks: [
+        check("cold-start", ["no-better", "starts"], { engine: "cold", minutes: 1, flags: { cranks: 10 } }),
+        check("look", ["even", "odd"]),
+      ],
+      remedies: [remedy("mend"), remedy("mend-b")],
+      causes: [
+        cause("a", {
+          shows: { "slow-start": "usually" },
+          gives: { "cold-start": { starts: "x60" }, look: { odd: "x5" } },
+          curedBy: { mend: "usually" },
+        }),
+        cause("b", { shows: { "slow-start": "usually" }, curedBy: { "mend-b": "usually" } }),
+      ],
+    });
+    const phone = new Device(1);
+    const begun = phone.begin({ symptoms: ["slow-start"] });
+    const answered = (answer: "yes" | "no") => view(risky, [begun, phone.tell("rule-answered", { rule: "flood", answer })]);
+    expect(answered("no").step?.key).toBe("cold-start");
+    expect(answered("yes").step?.key).not.toBe("cold-start");
+  });
+
   it("[T6] a rule that says to call leaves nothing but the call", () => {
     const phone = new Device(1);
     const log = [
