@@ -1,0 +1,222 @@
+/**
+ * Lists of causes as training courses and manuals print them, item by item in
+ * our own words, and the causes of the shipped tree that stand for each.
+ * A list belongs here if it is about hard starting or lost power, or about
+ * the smoke or misfire that goes with them. Lists about other complaints (blue smoke,
+ * knock, oil, coolant, charging, runaway, an engine that will not crank) have no symptom in this tree yet.
+ */
+export type PublishedItem = {
+  /** In our own words. */
+  item: string;
+  /** Causes that say it and show the list's symptom; or why there is none. */
+  causes?: readonly string[];
+  leftOut?: string;
+};
+
+export type PublishedList = {
+  key: string;
+  source: string;
+  /** The symptom of the tree that the list is about. */
+  symptom: "hard-start-cold" | "hard-start-hot" | "lost-top-end-rpm";
+  about: string;
+  items: readonly PublishedItem[];
+};
+
+export const PUBLISHED_LISTS: readonly PublishedList[] = [
+  {
+    key: "ring wear, hard start",
+    source: "en1c p. 3-28, fig. 3-18",
+    symptom: "hard-start-cold",
+    about: "low compression shows as a hard start",
+    items: [
+      { item: "worn rings", causes: ["rings-worn"] },
+      { item: "rings stuck in their grooves", causes: ["rings-stuck"] },
+      { item: "valves that leak", causes: ["valves-leaking", "valve-sticking"] },
+      { item: "an injector's gasket that leaks gas", causes: ["injector-seat-leak"] },
+      { item: "a head gasket that leaks", causes: ["head-gasket-blown"] },
+      { item: "a choked air filter", causes: ["air-filter-blocked"] },
+    ],
+  },
+  {
+    key: "ring wear, lost power",
+    source: "en1c p. 3-28, fig. 3-18",
+    symptom: "lost-top-end-rpm",
+    about: "low compression shows as lost power",
+    items: [
+      { item: "worn rings", causes: ["rings-worn"] },
+      { item: "rings stuck in their grooves", causes: ["rings-stuck"] },
+      { item: "valves that leak", causes: ["valves-leaking"] },
+      { item: "an injector's gasket that leaks gas", leftOut: "heard and seen long before it costs revs; it shows as a hard start" },
+      { item: "a head gasket that leaks", causes: ["head-gasket-blown"] },
+      { item: "a choked air filter", causes: ["air-filter-blocked"] },
+    ],
+  },
+  {
+    key: "black smoke, Navy",
+    source: "en3 p. en32-106",
+    symptom: "lost-top-end-rpm",
+    about: "black smoke under load is fuel without air, or too much load: it goes with lost revs",
+    items: [
+      {
+        item: "back pressure in the exhaust",
+        causes: ["exhaust-elbow-coked", "exhaust-manifold-coked", "exhaust-outlet-blocked", "exhaust-hose-delaminated"],
+      },
+      { item: "air held back on its way in", causes: ["air-filter-blocked", "intake-obstructed", "engine-space-airless"] },
+      { item: "a turbo at fault", causes: ["turbo-fouled", "turbo-bearing-failed", "wastegate-stuck-open", "charge-air-leak"] },
+      { item: "injection at the wrong moment", causes: ["injection-timing-late"] },
+      { item: "an injector at fault", causes: ["injector-nozzle-blocked"] },
+      {
+        item: "fuel left unburnt by an injector that drips",
+        leftOut: "a dribble smokes and knocks at part load and starts badly; it feeds too much, and costs no revs",
+      },
+      { item: "too much load", causes: ["hull-fouled", "prop-fouled-growth", "prop-oversized", "prop-rope"] },
+      { item: "low compression from burnt valves", causes: ["valves-leaking"] },
+      { item: "low compression from stuck rings", causes: ["rings-stuck"] },
+    ],
+  },
+  {
+    key: "black smoke, construction mechanic",
+    source: "cmb p. 209",
+    symptom: "lost-top-end-rpm",
+    about: "black smoke under load",
+    items: [
+      { item: "the wrong grade of fuel", causes: ["wrong-fuel"] },
+      { item: "too little air", causes: ["air-filter-blocked", "intake-obstructed", "engine-space-airless"] },
+      { item: "back pressure", causes: ["exhaust-elbow-coked", "exhaust-outlet-blocked"] },
+      { item: "timing of the injection", causes: ["injection-timing-late"] },
+      { item: "the injection pump", causes: ["injection-pump-worn"] },
+      { item: "valve clearances", causes: ["valve-clearance-wide"] },
+      { item: "nozzles", causes: ["injector-nozzle-blocked"] },
+      {
+        item: "the advance unit",
+        leftOut: "a cold-start device stuck on shows as a bad start; stuck late it reads as injection-timing-late",
+      },
+    ],
+  },
+  {
+    key: "white smoke, construction mechanic",
+    source: "cmb p. 209",
+    symptom: "hard-start-cold",
+    about: "white smoke is fuel that does not catch: it goes with a hard cold start",
+    items: [
+      { item: "low compression from rings", causes: ["rings-worn", "rings-stuck", "bores-glazed"] },
+      {
+        item: "a scored piston",
+        leftOut:
+          "the tree holds it as worn rings and bores: the same readings and the same work; the piston that picks up when hot is piston-seized",
+      },
+      {
+        item: "valves that do not seat",
+        causes: ["valves-leaking", "valve-clearance-tight", "valve-sticking", "decompressor-misadjusted"],
+      },
+      { item: "water in the combustion chamber", causes: ["head-gasket-blown", "waterlock-flooded"] },
+      { item: "injectors", causes: ["injector-dribble", "injector-low-pressure"] },
+      { item: "fuel of low cetane", causes: ["low-cetane-stale-fuel"] },
+    ],
+  },
+  {
+    key: "smoke, education body",
+    source: "ens, December 2011",
+    symptom: "lost-top-end-rpm",
+    about: "black smoke, and black smoke at high revs only",
+    items: [
+      { item: "the air inlet", causes: ["air-filter-blocked", "intake-obstructed"] },
+      { item: "carbon in the exhaust elbow or its hose", causes: ["exhaust-elbow-coked", "exhaust-hose-delaminated"] },
+      { item: "a line round the propeller", causes: ["prop-rope"] },
+      { item: "a fouled hull", causes: ["hull-fouled", "prop-fouled-growth"] },
+      { item: "equipment driven by the engine", causes: ["accessory-load"] },
+      { item: "a propeller too large", causes: ["prop-oversized"] },
+    ],
+  },
+  {
+    key: "misfire, Navy",
+    source: "en2 p. 3-31",
+    symptom: "lost-top-end-rpm",
+    about: "a misfire costs power",
+    items: [
+      { item: "the fuel", causes: ["water-in-fuel", "wrong-fuel", "microbial-growth"] },
+      { item: "an injector that does not deliver", causes: ["injector-nozzle-blocked"] },
+      { item: "worn parts of the injection", causes: ["injection-pump-worn"] },
+      { item: "the air cleaner", causes: ["air-filter-blocked"] },
+      { item: "compression lost by valves", causes: ["valves-leaking"] },
+      { item: "compression lost by pistons, liners and rings", causes: ["rings-worn"] },
+      { item: "compression lost by the gasket", causes: ["head-gasket-blown"] },
+      {
+        item: "a cracked head or block",
+        leftOut: "leaks coolant or gas and overheats; it belongs to those symptoms, and is found behind a head gasket here",
+      },
+      { item: "a cut-out left engaged", leftOut: "a device of engines larger than these" },
+    ],
+  },
+  {
+    key: "misfire, education body",
+    source: "ens, December 2011",
+    symptom: "lost-top-end-rpm",
+    about: "an irregular miss that gets worse with speed",
+    items: [
+      { item: "a plugged filter", causes: ["primary-filter-blocked", "secondary-filter-blocked", "final-filter-blocked"] },
+      { item: "water in the fuel", causes: ["water-in-fuel"] },
+      { item: "dirt in the fuel", causes: ["microbial-growth", "pickup-blocked", "inlet-screen-blocked", "lift-pump-strainer-blocked"] },
+    ],
+  },
+  {
+    key: "misfire worse when cold, education body",
+    source: "ens, December 2011",
+    symptom: "hard-start-cold",
+    about: "a regular miss of one cylinder or more, worse when cold, is compression",
+    items: [{ item: "compression", causes: ["valves-leaking", "rings-worn", "rings-stuck", "valve-clearance-tight"] }],
+  },
+  {
+    key: "air in the fuel",
+    source: "ase p. 207",
+    symptom: "hard-start-cold",
+    about: "air in the system: bleed until no bubbles come",
+    items: [
+      { item: "loose joints", causes: ["fuel-line-air-leak", "primary-filter-seal-leak", "bleed-point-leak", "primer-leak"] },
+      { item: "a nozzle that does not close", causes: ["injector-dribble"] },
+      { item: "the tank run out", leftOut: "an engine that has run out stops or does not start; the level is asked first all the same" },
+      { item: "a dirty nozzle", leftOut: "black smoke, a miss and lost revs (injector-nozzle-blocked), not a bad start" },
+    ],
+  },
+  {
+    key: "will not crank as it should",
+    source: "tm383 problem 29",
+    symptom: "hard-start-cold",
+    about: "the starting system weak: on the way to silence it cranks slowly and starts badly",
+    items: [
+      { item: "a battery that is low", causes: ["battery-discharged", "battery-worn"] },
+      {
+        item: "a cable or its connection",
+        causes: ["positive-connection-bad", "engine-ground-bad", "battery-switch-fault", "start-cable-undersized"],
+      },
+      { item: "the starter", causes: ["starter-motor-worn"] },
+      { item: "the solenoid", leftOut: "it clicks or does not, and then cranks as it should: a symptom of its own, not in this tree" },
+      { item: "the start switch's circuit", leftOut: "no crank at all, or a full one: a symptom of its own, not in this tree" },
+      { item: "an engine seized inside", leftOut: "does not turn; the stop rule for one that stops dead comes before any step" },
+    ],
+  },
+  {
+    key: "will not crank as it should, hot",
+    source: "tm383 problem 29",
+    symptom: "hard-start-hot",
+    about: "the same parts, worse by heat",
+    items: [
+      { item: "a battery that is low", causes: ["battery-worn"] },
+      { item: "a cable or its connection", causes: ["positive-connection-bad", "engine-ground-bad", "battery-switch-fault"] },
+      { item: "the starter", causes: ["starter-motor-worn"] },
+      { item: "an engine that binds inside", causes: ["piston-seized"] },
+    ],
+  },
+  {
+    key: "no smoke while cranking",
+    source: "m-crank, a maker's operating text",
+    symptom: "hard-start-cold",
+    about: "no blue or white smoke while it cranks: no fuel is delivered",
+    items: [
+      {
+        item: "no fuel delivered",
+        causes: ["fuel-drains-back", "fuel-line-air-leak", "electric-pump-check-valve-leak", "injector-leakoff-high"],
+      },
+    ],
+  },
+];
