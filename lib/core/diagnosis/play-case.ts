@@ -1,0 +1,99 @@
+import type { DiagnosisEvent, EventKind, EventOf } from "../contract/event";
+import type { FaultTree, KnownCase, Who } from "../tree/schema";
+import { answerOf, settingFor } from "./case-evidence";
+import { probabilityOf } from "./cause-row";
+import { CORE_VERSION } from "./core-version";
+import { evidenceOf } from "./evidence-of";
+import { fold } from "./fold";
+import { keepModels } from "./keep-models";
+import { nextStep } from "./next-step";
+import { settingOf } from "./setting-of";
+import { rulesToAsk } from "./stop-rules";
+
+export type Played = {
+  readonly minutes: number;
+  readonly end: "cured" | "held" | "called";
+  /** Kind and key of each step, in order. */
+  readonly steps: readonly { readonly kind: "check" | "remedy" | "call"; readonly key: string; readonly minutes: number }[];
+};
+
+type Payload = { [K in EventKind]: { kind: K; payload: EventOf<K>["payload"] } }[EventKind];
+
+/** More steps than any sound tree has. */
+const STEPS_MOST = 1000;
+
+/**
+ * Plays a known case through the planner: a check that the case does not answer
+ * is "can't tell" and costs its minutes, a true cause's remedy cures, a
+ * temporary one holds, and a call ends it at its price. Rule [V2].
+ */
+export function playCase(tree: FaultTree, known: KnownCase, person: Who): Played {
+  const models = keepModels();
+  const log = startOf(known, person);
+  for (const rule of rulesToAsk(tree, fold(logOf(log)))) log.push({ kind: "rule-answered", payload: { rule: rule.key, answer: "no" } });
+  const open = new Set(known.causes);
+  const steps: { kind: "check" | "remedy" | "call"; key: string; minutes: number }[] = [];
+  const minutes = (): number => steps.reduce((sum, step) => sum + step.minutes, 0);
+  while (steps.length < STEPS_MOST) {
+    const state = fold(logOf(log));
+    const step = nextStep(models(tree, settingOf(tree, state)), evidenceOf(tree, state));
+    steps.push({ kind: step.kind, key: step.key, minutes: step.minutes });
+    if (step.kind === "call") return { minutes: minutes(), end: "called", steps };
+    if (step.kind === "check") {
+      log.push({ kind: "answered", payload: { check: step.key, answer: answerOf(known, step.key) ?? { cannotTell: true }, photos: [] } });
+      continue;
+    }
+    const cured = curedBy(tree, open, step.key);
+    cured.forEach((cause) => open.delete(cause));
+    if (open.size === 0)
+      return { minutes: minutes(), end: tree.remedies.find(({ key }) => key === step.key)?.temporary ? "held" : "cured", steps };
+    log.push({ kind: "remedy-tried", payload: { remedy: step.key, result: cured.length > 0 ? "better" : "no-change", photos: [] } });
+  }
+  throw new Error(`the case "${known.key}" did not end`);
+}
+
+/** Causes still open that the remedy rather cures than not. */
+export const curedBy = (tree: FaultTree, open: ReadonlySet<string>, remedy: string): readonly string[] =>
+  tree.causes
+    .filter((cause) => open.has(cause.key) && cause.curedBy[remedy] !== undefined && probabilityOf(cause.curedBy[remedy]) >= 0.5)
+    .map((cause) => cause.key);
+
+function startOf(known: KnownCase, person: Who): Payload[] {
+  const { profile, situation } = settingFor(known, person);
+  const begun: Payload = {
+    kind: "begun",
+    payload: {
+      engineId: "engine",
+      treeVersionId: "tree",
+      profile,
+      situation,
+      person,
+      symptoms: known.symptoms,
+      multipliers: [],
+      coreVersion: CORE_VERSION,
+    },
+  };
+  const told = known.findings.filter((finding) => finding.when === "start");
+  return [
+    begun,
+    ...told.map(({ check }): Payload => ({
+      kind: "answered",
+      payload: { check, answer: answerOf(known, check) ?? { cannotTell: true }, photos: [] },
+    })),
+  ];
+}
+
+/** A log as one device would write it; only its order counts here. */
+const logOf = (payloads: readonly Payload[]): DiagnosisEvent[] =>
+  payloads.map(
+    (payload, index) =>
+      ({
+        ...payload,
+        id: `event-${index}`,
+        diagnosisId: "case",
+        device: "device",
+        sequence: index + 1,
+        madeAt: "2000-01-01T00:00:00Z",
+        seen: {},
+      }) as DiagnosisEvent,
+  );
