@@ -1,4 +1,5 @@
 import { check } from "./check";
+import { prove } from "./prove";
 import { Refusal } from "./read-tree";
 import { schema } from "./schema";
 import { show } from "./show";
@@ -9,10 +10,12 @@ const usage = `npm run tree -- check DIR [--json] [--links]
 npm run tree -- show DIR --symptom KEY [--symptom KEY] [--feature KEY=OPTION]
     [--situation alongside|at-anchor|under-way] [--person WHO] [--depth 4] [--chance 0.15]
   The order of questions, with the answers that are likely enough to follow.
+npm run tree -- prove DIR [--cases FILE.jsonl|FILE.yaml] [--person WHO] [--bar FIGURE=VALUE] [--json]
+  Known cases replayed: is the right cause believed, and what does the way to it cost.
 npm run tree -- schema
   Writes trees/fault-tree.schema.json anew.`;
 
-const commands: Record<string, (args: string[]) => Promise<number>> = { check, schema, show };
+const commands: Record<string, (args: string[]) => Promise<number>> = { check, prove, schema, show };
 
 // Whoever reads us may stop early (| head): that is no fault.
 process.stdout.on("error", (error: NodeJS.ErrnoException) => process.exit(error.code === "EPIPE" ? 0 : 1));

@@ -53,3 +53,10 @@ export async function readTreeOrSay(folder: string | undefined): Promise<FaultTr
     throw new Refusal(`The tree in ${folder} has ${errors} ${errors === 1 ? "error" : "errors"}: see npm run tree -- check ${folder}`);
   return tree;
 }
+
+/** The choice a person typed, or a refusal that lists them all. */
+export function chosen<T extends string>(choices: readonly T[], value: string, what: string): T {
+  const found = choices.find((choice) => choice === value);
+  if (found === undefined) throw new Refusal(`"${value}" is no ${what}: choose one of ${choices.join(", ")}.`);
+  return found;
+}

@@ -1,7 +1,7 @@
 import { parseArgs } from "node:util";
 import { Situation, Who, type FaultTree } from "@/lib/core/tree/schema";
 import { didYouMean } from "@/lib/core/tree/nearest";
-import { readTreeOrSay, Refusal } from "./read-tree";
+import { chosen, readTreeOrSay, Refusal } from "./read-tree";
 import { unfold, type Begin, type Possible, type Unfolded } from "./unfold";
 
 const options = {
@@ -56,12 +56,6 @@ function known(nodes: readonly { key: string }[], key: string, what: string): st
   if (nodes.some((node) => node.key === key)) return key;
   const keys = nodes.map((node) => node.key);
   throw new Refusal(`The tree has no ${what} "${key}". ${didYouMean(key, keys, `It has ${keys.join(", ")}.`)}`);
-}
-
-function chosen<T extends string>(choices: readonly T[], value: string, what: string): T {
-  const found = choices.find((choice) => choice === value);
-  if (found === undefined) throw new Refusal(`"${value}" is no ${what}: choose one of ${choices.join(", ")}.`);
-  return found;
 }
 
 function inRange(text: string, what: string, least: number, most: number): number {
