@@ -1,7 +1,7 @@
 import "server-only";
 import { and, asc, desc, eq, isNull } from "drizzle-orm";
 import { boats, engines, hourReadings } from "@/db/schema/boats";
-import type { Engine, HourReading } from "@/lib/core/contract/engine";
+import type { Engine, ListedReading } from "@/lib/core/contract/engine";
 import { Problem } from "@/lib/core/contract/problem";
 import type { EngineClock } from "@/lib/core/recurrence/engine-clock";
 import type { FleetScope } from "@/lib/server/auth/scope";
@@ -20,10 +20,7 @@ export async function getEngine(scope: FleetScope, id: string): Promise<Engine> 
 }
 
 /** The readings of an engine's meter, newest first; `doubtful`: does not fit the others and is not counted. */
-export async function listHourReadings(
-  scope: FleetScope,
-  engineId: string,
-): Promise<(HourReading & { hours: number | null; doubtful: boolean })[]> {
+export async function listHourReadings(scope: FleetScope, engineId: string): Promise<ListedReading[]> {
   const [engine] = await scope.tx
     .select()
     .from(engines)

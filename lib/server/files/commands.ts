@@ -29,7 +29,10 @@ export async function keepFile(scope: FleetScope<"file:write">, id: string, byte
   const picture = await readPicture(bytes);
   if ("refused" in picture) throw new Problem(STATUS[picture.refused], picture.refused, "That picture cannot be kept", picture.says);
 
-  const [used] = await scope.tx.select({ bytes: sum(files.bytes) }).from(files).where(eq(files.fleetId, scope.fleetId));
+  const [used] = await scope.tx
+    .select({ bytes: sum(files.bytes) })
+    .from(files)
+    .where(eq(files.fleetId, scope.fleetId));
   if (Number(used?.bytes ?? 0) + picture.body.byteLength > FLEET_BYTES) {
     throw new Problem(507, "fleet-full", "There is no room left for photos", "This fleet has used up its 4 GB. Go on without the photo.");
   }

@@ -38,5 +38,12 @@ export async function findFile(scope: FleetScope, id: string): Promise<Row | nul
 export const storeKey = (file: Pick<Row, "fleetId" | "id" | "sentHash">) => `${file.fleetId}/${file.id}-${file.sentHash.slice(0, 16)}.jpg`;
 
 export function storedFileOf(row: Row): StoredFile {
-  return { id: row.id, mediaType: "image/jpeg", bytes: row.bytes, widthPx: row.widthPx, heightPx: row.heightPx, createdAt: row.createdAt.toISOString() };
+  return {
+    id: row.id,
+    mediaType: "image/jpeg",
+    bytes: row.bytes,
+    widthPx: row.widthPx,
+    heightPx: row.heightPx,
+    createdAt: row.createdAt.toISOString(),
+  };
 }

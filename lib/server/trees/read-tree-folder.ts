@@ -61,6 +61,7 @@ function joinSources(sources: Source[]): TreeFolder | { faults: FileFault[] } {
       if (!isScalar(yaml.contents) || yaml.contents.value !== null) fault(yaml.contents.range[0], "A tree's file has to be a map.", `Begin it with one of ${[...SCALARS, ...LISTS].join(", ")}.`);
       continue;
     }
+    const values = yaml.toJS() as Record<string, unknown[]>;
     for (const { key: keyNode, value } of yaml.contents.items) {
       const offset = isScalar(keyNode) ? (keyNode.range?.[0] ?? 0) : 0;
       const key = String(isScalar(keyNode) ? keyNode.value : keyNode);
@@ -71,9 +72,9 @@ function joinSources(sources: Source[]): TreeFolder | { faults: FileFault[] } {
           continue;
         }
         const joined = document[key] as unknown[];
-        value.items.forEach((item, index) => {
+        value.items.forEach((_item, index) => {
           origins.set(`${key}/${joined.length}`, { source, inFile: [key, index] });
-          joined.push((yaml.toJS() as Record<string, unknown[]>)[key]?.[index]);
+          joined.push(values[key]?.[index]);
         });
       } else if (SCALARS.includes(key)) {
         const before = origins.get(key);

@@ -21,8 +21,17 @@ export async function readBytes(request: Request, accepted: readonly string[], m
 export async function readJson(request: Request, maxBytes: number): Promise<unknown> {
   const bytes = await readBytes(request, ["application/json"], maxBytes);
   try {
-    return JSON.parse(new TextDecoder("utf-8", { fatal: true }).decode(bytes));
-  } catch {
-    throw Problem.malformed("The body is not JSON.");
+    return JSON.parse(new TextDecoder("utf-8", { fatal: true }).decode(bytes), storable);
+  } catch (error) {
+    throw error instanceof Problem ? error : Problem.malformed("The body is not JSON.");
   }
+}
+
+/** Text that PostgreSQL can keep: without the character NUL, and without halves of characters. */
+function storable(key: string, value: unknown): unknown {
+  for (const text of [key, value]) {
+    if (typeof text === "string" && (text.includes("\0") || !text.isWellFormed()))
+      throw Problem.malformed("There is a character in it that cannot be kept.");
+  }
+  return value;
 }
