@@ -16,7 +16,7 @@ export function DiagnosisFrame({ children }: { children: ReactNode }) {
   const present = view.symptoms.filter((symptom) => symptom.present).map(({ title }) => title);
   const until = view.outcome?.at ?? now;
   const minutes = until === 0 ? null : minutesBetween(summary.beganAt, until);
-  const given = view.said.filter(({ kind }) => kind === "answered" || kind === "remedy-tried" || kind === "rule-answered").length;
+  const given = view.said.filter(({ kind }) => kind === "answered" || kind === "remedy-tried").length;
   return (
     <Frame
       ready={ready}

@@ -25,8 +25,14 @@ const KINDS: readonly { value: OutcomeKind; title: string; detail: string }[] = 
   { value: "broken-off", title: "Broken off", detail: "Given up for now" },
 ];
 
-/** What it was, what put it right, at which hours: under a minute, with what is known filled in. */
+/** What it was, what put it right, at which hours. It waits for the view: what was cured a moment ago is filled in. */
 export function OutcomeScreen() {
+  const { thinking } = useHere();
+  if (thinking) return <p role="status">Filling in what is known.</p>;
+  return <FilledIn />;
+}
+
+function FilledIn() {
   const { view, tree, engine, summary, record, go } = useHere();
   const [form, change, drop] = useKeptForm<OutcomeForm>(`gudgeon.outcome.${summary.id}`, () =>
     startingForm(view, tree, minutesBetween(summary.beganAt, Date.now())),

@@ -34,7 +34,7 @@ export function ReadingAnswer({ of, scale, given, onRead }: Props) {
         if (good) onRead(good.value, unit, `${figure(good.value)} ${unitSign(unit)}`);
       }}
     >
-      <div className="grid grid-cols-[minmax(0,1fr)_minmax(0,9rem)] gap-2">
+      <div className="grid grid-cols-[minmax(0,1fr)_minmax(0,7rem)] gap-2">
         <label className="grid gap-1 text-sm font-semibold">
           Reading
           <input
@@ -52,8 +52,8 @@ export function ReadingAnswer({ of, scale, given, onRead }: Props) {
           Unit
           <select value={unit} onChange={(event) => setUnit(event.target.value)} className={`${inputLook} min-h-16`}>
             {units.map(({ symbol, title }) => (
-              <option key={symbol} value={symbol}>
-                {unitSign(symbol) === title ? title : `${unitSign(symbol)} (${title})`}
+              <option key={symbol} value={symbol} title={title}>
+                {unitSign(symbol)}
               </option>
             ))}
           </select>
@@ -69,7 +69,7 @@ export function ReadingAnswer({ of, scale, given, onRead }: Props) {
             `Scale: ${figure(scale.from)} to ${figure(scale.to)} ${unitSign(scale.unit)}.`
           ))}
       </p>
-      <Button type="submit" tone="strong" size="large" wide aria-disabled={given || !good}>
+      <Button type="submit" tone="strong" size="large" wide aria-disabled={given}>
         {good ? `Enter ${figure(good.value)} ${unitSign(unit)}` : "Enter the reading"}
       </Button>
     </form>

@@ -9,11 +9,11 @@ export function UndoBar() {
   const withdrawn = undo.withdraws ? view.symptoms.find(({ key, present }) => key === undo.withdraws && present) : undefined;
   return (
     <div role="status" className="mb-4 rounded-lg border border-rule bg-sheet px-3 py-1 text-sm">
-      <div className="flex flex-wrap items-center justify-between gap-x-3">
+      <div className="flex items-center justify-between gap-x-3">
         <span>{undo.says}</span>
         <button
           type="button"
-          className="link min-h-12 min-w-12 font-semibold"
+          className="link min-h-12 min-w-12 flex-none font-semibold"
           onClick={() => {
             setUndo(null);
             void record("taken-back", { event: undo.event });

@@ -78,9 +78,9 @@ export function outcomeOf(form: OutcomeForm, lastHours: number | null): { outcom
       remedy: form.remedy && form.remedy !== OWN_WORDS ? form.remedy : undefined,
       remedyInWords: form.remedy === OWN_WORDS ? own(form.remedyInWords) : undefined,
       proof: own(form.proof),
-      engineHours: hours,
+      engineHours: hours ?? undefined,
       meterReset: form.meterReset && hours !== undefined ? (true as const) : undefined,
-      minutes,
+      minutes: minutes ?? undefined,
       parts: form.parts
         .filter(({ quantity, title }) => quantity > 0 && title.trim() !== "")
         .map(({ key, title, quantity }) => drop<OutcomePayload["parts"][number]>({ key: key ?? undefined, title: title.trim(), quantity })),

@@ -37,9 +37,12 @@ export class Exchange {
     const stopWatching = this.#store.changes.watch(() => void this.#count());
     window.addEventListener("online", back);
     document.addEventListener("visibilitychange", seen);
+    // Another phone may be answering the same diagnosis.
+    const round = setInterval(() => document.visibilityState === "visible" && this.nudge(), FRESH_MS);
     this.nudge(true);
     return () => {
       this.#ended = true;
+      clearInterval(round);
       stopWatching();
       window.removeEventListener("online", back);
       document.removeEventListener("visibilitychange", seen);
@@ -95,7 +98,11 @@ export class Exchange {
 }
 
 function troubleOf(failure: unknown): Standing["trouble"] {
-  if (!(failure instanceof NoAnswer)) return "server";
+  if (!(failure instanceof NoAnswer)) {
+    // Not the network but an answer, or a store, that is not as agreed: whoever looks into it needs the words.
+    console.error(failure);
+    return "server";
+  }
   if (failure.status === 0) return "no-signal";
   if (failure.status === 401) return "sign-in";
   return failure.status === 403 || failure.status === 404 ? "not-in-fleet" : "server";

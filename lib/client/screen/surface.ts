@@ -29,6 +29,7 @@ export class Surface {
       window.removeEventListener("online", ask);
       this.#stopExchange?.();
       this.#stopExchange = null;
+      this.state.set({ kind: "opening" });
     };
   }
 

@@ -36,6 +36,7 @@ export function useDiagnosis(ready: Ready, reasoner: Reasoner, diagnosisId: stri
   const [missing, setMissing] = useState(false);
   const [seen, setSeen] = useState<{ view: DiagnosisView; of: string } | null>(null);
   const [failure, setFailure] = useState<string | null>(null);
+  const [lastRecorded, setLastRecorded] = useState<string | null>(null);
   const asked = useRef(false);
 
   useEffect(() => {
@@ -86,18 +87,22 @@ export function useDiagnosis(ready: Ready, reasoner: Reasoner, diagnosisId: stri
   const record = useCallback<Recorder>(
     async (kind, payload, supersedes) => {
       const event = await store.record(diagnosisId, kind, payload, supersedes);
+      setLastRecorded(event.id);
       exchange.nudge();
       return event;
     },
     [store, exchange, diagnosisId],
   );
 
+  // From the tap on, not only from when the store has told of it: a screen drawn in between would be of the past.
+  const thinking = failure === null && (seen?.of !== fingerprint || (lastRecorded !== null && !fingerprint.includes(lastRecorded)));
+
   return {
     events: events ?? [],
     summary,
     tree,
     view: seen?.view ?? null,
-    thinking: seen?.of !== fingerprint,
+    thinking,
     missing: missing && (events?.length ?? 0) === 0,
     failure,
     record,
