@@ -1,11 +1,10 @@
-import { randomBytes } from "node:crypto";
 import { NextResponse, type NextRequest } from "next/server";
 import { LIGHT_SCRIPT } from "@/components/ui/light-script";
 import { sessionIdOf, siteIsSecure } from "@/lib/server/auth/session-cookie";
 import { contentSecurityPolicy, scriptHash, securityHeaders } from "@/lib/server/web/content-security";
 import { isStaticPage, staticScriptHashes } from "@/lib/server/web/static-scripts";
 
-const needsSignIn = (pathname: string) => pathname === "/account" || pathname.startsWith("/account/") || pathname.startsWith("/f/");
+const needsSignIn = (pathname: string) => /^\/(account|f)(\/|$)/.test(pathname);
 
 const development = process.env.NODE_ENV === "development";
 const lightScript = scriptHash(LIGHT_SCRIPT);
@@ -20,7 +19,7 @@ function scriptsOf(pathname: string): { scripts: string[]; nonce: string | null 
     console.error("script-hashes.json is missing: the static pages run without their scripts being named");
     return { scripts: ["'unsafe-inline'"], nonce: null };
   }
-  const nonce = randomBytes(16).toString("base64");
+  const nonce = Buffer.from(crypto.getRandomValues(new Uint8Array(16))).toString("base64");
   return { scripts: [lightScript, `'nonce-${nonce}'`], nonce };
 }
 

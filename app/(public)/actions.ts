@@ -12,8 +12,8 @@ import { done, personalAction, publicAction, refused, wait, type Outcome } from 
 import { ownPath } from "@/lib/server/web/own-path";
 import { pagePerson } from "@/lib/server/web/page-scope";
 
-/** Leads to the person's first fleet, or to a word about having none. */
-const HOME = "/account";
+/** Leads on to the person's first fleet. */
+const HOME = "/f";
 const LINK_USED = "This link has been used, or is too old. Ask for a new one.";
 
 /**

@@ -188,6 +188,7 @@ describe("what is asked", () => {
   test("no JSON: 400", async () => {
     await expectProblem(await ask(POST, { ...json(0), body: "{ name: " }), 400, "malformed");
     await expectProblem(await ask(POST, { ...json(0), body: new Uint8Array([0x22, 0xff, 0x22]) }), 400, "malformed");
+    await expectProblem(await ask(POST, json(boat("nul\0"))), 400, "malformed");
   });
 
   test("JSON of another shape: 422, which names the fields", async () => {
@@ -255,6 +256,17 @@ describe("failures", () => {
     const body = await expectProblem(await ask(failing(new Error("password of the database is swordfish"))), 500, "failure");
     expect(JSON.stringify(body)).not.toContain("swordfish");
     expect(String(log.mock.calls[0]?.[0])).toContain(String(body.reference));
+  });
+
+  test("text that the database cannot keep is the asker's to mend", async () => {
+    const search = endpoint({
+      permission: "fleet:read",
+      summary: "Search",
+      params,
+      query: z.object({ q: z.string() }),
+      run: async ({ tx }, { query }) => void (await tx.select().from(boats).where(eq(boats.name, query.q))),
+    });
+    await expectProblem(await ask(search, { search: "?q=%00" }), 400, "malformed");
   });
 
   test("nothing is kept of a change that failed half way", async () => {

@@ -126,15 +126,13 @@ describe("no writing across", () => {
 
   test("an engine cannot stand on another fleet's boat", async () => {
     const write = inFleet(a.fleetId, (tx) =>
-      tx
-        .insert(engines)
-        .values({
-          fleetId: a.fleetId,
-          id: crypto.randomUUID(),
-          boatId: b.boatId,
-          name: "x",
-          profile: { features: {}, figures: {}, healthy: {} },
-        }),
+      tx.insert(engines).values({
+        fleetId: a.fleetId,
+        id: crypto.randomUUID(),
+        boatId: b.boatId,
+        name: "x",
+        profile: { features: {}, figures: {}, healthy: {} },
+      }),
     );
     await expect(write).rejects.toMatchObject({ cause: { code: "23503" } });
   });

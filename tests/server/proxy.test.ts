@@ -21,7 +21,7 @@ const directive = (response: Response, name: string) =>
     ?.slice(name.length + 1);
 
 describe("a visitor who is signed out", () => {
-  test.each(["/account", "/f/0198c0de-0000-7000-8000-000000000001", "/f/x/log?cause=blocked"])(
+  test.each(["/account", "/f", "/f/0198c0de-0000-7000-8000-000000000001", "/f/x/log?cause=blocked"])(
     "is led from %s to sign in, and back",
     async (path) => {
       const response = await visit(path);

@@ -21,10 +21,16 @@ export async function listKeptMail(): Promise<KeptMail[] | null> {
     .sort()
     .reverse()
     .slice(0, SHOWN);
-  return Promise.all(
-    newest.map(async (name) => {
-      const mail = Kept.parse(JSON.parse(await readFile(/* turbopackIgnore: true */ path.join(dir, name), "utf8")));
-      return { id: name.replace(".json", ""), at: new Date(Number(name.split("-")[0])).toISOString(), ...mail };
-    }),
-  );
+  const mails = await Promise.all(newest.map((name) => read(path.join(/* turbopackIgnore: true */ dir, name), name)));
+  return mails.filter((mail) => mail !== null);
+}
+
+/** null for one that is being written at this moment. */
+async function read(file: string, name: string): Promise<KeptMail | null> {
+  try {
+    const mail = Kept.parse(JSON.parse(await readFile(/* turbopackIgnore: true */ file, "utf8")));
+    return { id: name.replace(".json", ""), at: new Date(Number(name.split("-")[0])).toISOString(), ...mail };
+  } catch {
+    return null;
+  }
 }

@@ -18,8 +18,8 @@ export function refuseCrossSite(request: Request): void {
 }
 
 function isOurs(origin: string, request: Request): boolean {
-  const url = URL.parse?.(origin) ?? null;
-  if (!url) return false;
+  if (!URL.canParse(origin)) return false;
+  const url = new URL(origin);
   const site = process.env.AUTH_URL;
   return url.host === request.headers.get("host") || (site !== undefined && url.origin === new URL(site).origin);
 }

@@ -2,7 +2,7 @@ import "server-only";
 import type * as z from "zod";
 import type { Permission } from "@/lib/core/access/permissions";
 import { Problem } from "@/lib/core/contract/problem";
-import { Id } from "@/lib/core/contract/id";
+import type { Id } from "@/lib/core/contract/id";
 import { prove, type FleetScope } from "../auth/scope";
 import { sessionIdOf } from "../auth/session-cookie";
 import { mediaType, readBytes, readJson } from "./body";

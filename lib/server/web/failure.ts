@@ -22,6 +22,9 @@ export function problemOf(error: unknown): Problem {
       return Problem.conflict("Something with the same identity is already there.");
     case "23503":
       return Problem.conflict("It refers to something that is not in this fleet.");
+    case "22021":
+    case "22P05":
+      return Problem.malformed("There is a character in it that cannot be kept.");
     case "40001":
     case "40P01":
     case "55P03":

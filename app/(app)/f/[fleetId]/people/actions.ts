@@ -53,7 +53,7 @@ export const leaveFleet = personalAction({
   input: z.object({ fleetId: Id }),
   async run(person, { fleetId }) {
     await leave(person, fleetId);
-    return { goTo: "/account" };
+    return { goTo: "/f" };
   },
 });
 
