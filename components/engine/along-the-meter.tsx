@@ -16,7 +16,7 @@ export function AlongTheMeter({ entries, hoursNow, systems }: Props) {
   const height = lanes.length * ROW + 44;
   return (
     <div className="overflow-x-auto" tabIndex={0} role="region" aria-label="Along the hour meter">
-      <svg viewBox={`0 0 ${WIDTH} ${height}`} className="min-w-[40rem]" role="img" aria-label={inWords(lanes)}>
+      <svg viewBox={`0 0 ${WIDTH} ${height}`} className="min-w-[60rem]" role="img" aria-label={inWords(lanes)}>
         {ticks.map((t) => (
           <g key={t}>
             <path d={`M${x(t)} 8V${height - 28}`} stroke="var(--rule)" />

@@ -1,8 +1,10 @@
 import Link from "next/link";
+import type { ReactNode } from "react";
 import { Table, type Column } from "@/components/ui/table";
 import { EmptyState } from "@/components/ui/empty-state";
 import type { LogEntry } from "@/lib/core/contract/log";
 import { Day } from "./day";
+import { EntryMore } from "./entry-more";
 import { Standing } from "./standing";
 
 type Props = {
@@ -10,10 +12,11 @@ type Props = {
   entries: readonly LogEntry[];
   caption: string;
   /** Over several engines: say which. */ namesEngine?: boolean;
+  empty?: ReactNode;
 };
 
 /** The log as a table: what was reported, found and done, and how it stands. */
-export function LogTable({ fleetId, entries, caption, namesEngine = false }: Props) {
+export function LogTable({ fleetId, entries, caption, namesEngine = false, empty }: Props) {
   const columns: Column<LogEntry>[] = [
     { key: "when", title: "When", cell: (e) => <LogLink fleetId={fleetId} entry={e} /> },
     ...(namesEngine ? [{ key: "engine", title: "Engine", cell: (e: LogEntry) => `${e.boatName}, ${e.engineName}` }] : []),
@@ -25,7 +28,16 @@ export function LogTable({ fleetId, entries, caption, namesEngine = false }: Pro
     },
     { key: "reported", title: "Reported", cell: (e) => e.symptoms.map((s) => s.title).join(", ") || "–" },
     { key: "found", title: "Found", cell: (e) => e.cause?.title ?? "–" },
-    { key: "cured", title: "Cured by", cell: (e) => e.remedy?.title ?? "–" },
+    {
+      key: "cured",
+      title: "Cured by",
+      cell: (e) => (
+        <>
+          {e.remedy?.title ?? "–"}
+          {e.outcome !== null && <EntryMore entry={e} />}
+        </>
+      ),
+    },
     { key: "minutes", title: "Minutes", figure: true, cell: (e) => (e.minutes === null ? "–" : Math.round(e.minutes)) },
     { key: "standing", title: "Standing", cell: (e) => <Standing entry={e} /> },
   ];
@@ -36,7 +48,9 @@ export function LogTable({ fleetId, entries, caption, namesEngine = false }: Pro
       columns={columns}
       rows={entries}
       rowKey={(e) => e.id}
-      empty={<EmptyState title="Nothing logged yet">A diagnosis that is ended, or a repair that is written in, stands here.</EmptyState>}
+      empty={
+        empty ?? <EmptyState title="Nothing logged yet">A diagnosis that is ended, or a repair that is written in, stands here.</EmptyState>
+      }
     />
   );
 }

@@ -1,0 +1,12 @@
+/** Today as a date field has it, in the zone of whoever types. */
+export function today(): string {
+  const now = new Date();
+  return `${now.getFullYear()}-${two(now.getMonth() + 1)}-${two(now.getDate())}`;
+}
+
+/** A day as a moment: now for today, noon for any other, so that no zone makes it another day. */
+export function momentOf(day: string): string {
+  return (day === today() ? new Date() : new Date(`${day}T12:00:00`)).toISOString();
+}
+
+const two = (n: number) => String(n).padStart(2, "0");

@@ -1,0 +1,145 @@
+"use client";
+
+import { zodResolver } from "@hookform/resolvers/zod";
+import { useRouter } from "next/navigation";
+import { useState } from "react";
+import { useForm, useWatch } from "react-hook-form";
+import { uuidv7 } from "uuidv7";
+import { today } from "@/components/form/day-typed";
+import { FormEnd } from "@/components/form/form-end";
+import { useSave } from "@/components/form/use-save";
+import { Segmented } from "@/components/ui/segmented";
+import { Select } from "@/components/ui/select";
+import { TextArea } from "@/components/ui/text-area";
+import { TextField } from "@/components/ui/text-field";
+import { sendJson } from "@/lib/client/exchange/request";
+import { PartFields } from "./part-fields";
+import { PickOrSay, type Said } from "./pick-or-say";
+import type { RepairChoices } from "./repair-choices";
+import { newRepair, NO_REPAIR, RepairValues } from "./repair-values";
+
+type Props = { fleetId: string; engineId: string; hasHourMeter: boolean; choices: RepairChoices };
+
+const OUTCOMES = [
+  { value: "cured", title: "Cured" },
+  { value: "held", title: "Held for now" },
+] as const;
+
+/** A repair that was done without a diagnosis, or a line of an old notebook. */
+export function RepairForm({ fleetId, engineId, hasHourMeter, choices }: Props) {
+  const router = useRouter();
+  // Made once: sent twice, it is one line of the log.
+  const [id] = useState(() => uuidv7());
+  const { saving, refusal, save } = useSave();
+  const form = useForm({ resolver: zodResolver(RepairValues), defaultValues: NO_REPAIR });
+  const { register, control, setValue } = form;
+  const { errors } = form.formState;
+  const [cause, remedy, outcome] = useWatch({ control, name: ["cause", "remedy", "outcome"] });
+  const known = choices.remedies.find(({ key }) => key === remedy.key);
+  const pickRemedy = (said: Said) => {
+    setValue("remedy", said, { shouldDirty: true, shouldValidate: form.formState.isSubmitted });
+    const picked = choices.remedies.find(({ key }) => key === said.key);
+    if (!picked) return;
+    if (picked.temporary) setValue("outcome", "held");
+    if (form.getValues("parts").every(({ title }) => title === "")) {
+      setValue(
+        "parts",
+        picked.parts.map((part) => ({ ...part, quantity: String(part.quantity) })),
+      );
+    }
+  };
+  const submit = form.handleSubmit(async (given) => {
+    const engine = `/api/v1/fleets/${fleetId}/engines/${engineId}`;
+    const result = await save(() => sendJson(`${engine}/repairs`, newRepair(id, engineId, given)));
+    if (!("answer" in result)) return;
+    router.push(`/f/${fleetId}/engines/${engineId}`);
+    router.refresh();
+  });
+  const hoursSay = refusal?.errors.find(({ path }) => path === "engineHours")?.says;
+  return (
+    <form className="grid max-w-2xl gap-5" onSubmit={submit} noValidate>
+      <div className="grid gap-4 sm:grid-cols-2">
+        <TextField
+          id="day"
+          type="date"
+          label="Done on"
+          error={errors.day?.message}
+          {...register("day")}
+          onFocus={() => form.getValues("day") === "" && setValue("day", today())}
+        />
+        {hasHourMeter && (
+          <TextField
+            id="hours"
+            label="The meter showed, in hours"
+            optional
+            inputMode="decimal"
+            autoComplete="off"
+            error={errors.hours?.message ?? hoursSay}
+            {...register("hours")}
+          />
+        )}
+      </div>
+      {hoursSay && (
+        <label className="flex min-h-12 items-center gap-3">
+          <input type="checkbox" className="size-5 flex-none accent-(--fill)" {...register("meterReset")} />
+          The meter was replaced or set back
+        </label>
+      )}
+      <Select
+        id="symptom"
+        label="What was noticed?"
+        optional
+        options={[{ value: "", title: "Not said" }, ...choices.symptoms.map(({ key, title }) => ({ value: key, title }))]}
+        {...register("symptom")}
+      />
+      <PickOrSay
+        id="cause"
+        label="What was wrong?"
+        hint="A word or two finds it in the fault tree, so that it is seen when it comes back."
+        options={choices.causes}
+        value={cause}
+        onChange={(said) => setValue("cause", said, { shouldDirty: true, shouldValidate: form.formState.isSubmitted })}
+        error={errors.cause?.message}
+      />
+      <PickOrSay
+        id="remedy"
+        label="What was done?"
+        hint="Found the same way, or in your own words."
+        options={choices.remedies}
+        suggested={choices.causes.find(({ key }) => key === cause.key)?.curedBy ?? []}
+        value={remedy}
+        onChange={pickRemedy}
+        error={errors.remedy?.message}
+      />
+      <Segmented
+        name="outcome"
+        legend="How it stands"
+        options={OUTCOMES}
+        value={outcome}
+        onChange={(value) => setValue("outcome", value)}
+      />
+      <TextField
+        id="proof"
+        label="How was it proved?"
+        hint={known ? known.proof : "A cure that was not proved counts for less when the fault comes back."}
+        optional
+        maxLength={500}
+        autoComplete="off"
+        error={errors.proof?.message}
+        {...register("proof")}
+      />
+      <TextField
+        id="minutes"
+        label="Minutes it took"
+        optional
+        inputMode="decimal"
+        autoComplete="off"
+        error={errors.minutes?.message}
+        {...register("minutes")}
+      />
+      <PartFields control={control} register={register} wrong={(i) => errors.parts?.[i]?.quantity?.message} />
+      <TextArea id="note" label="Note" optional maxLength={4000} error={errors.note?.message} {...register("note")} />
+      <FormEnd submit="Write it into the log" saving={saving} refusal={hoursSay ? null : refusal} wrong={Object.keys(errors).length > 0} />
+    </form>
+  );
+}

@@ -1,0 +1,66 @@
+import * as z from "zod";
+import { momentOf } from "@/components/form/day-typed";
+import { typedNumber } from "@/components/form/typed-number";
+import type { NewRepair } from "@/lib/core/contract/log";
+
+const Said = z.object({ key: z.string(), words: z.string().trim().max(500) });
+const isSaid = ({ key, words }: { key: string; words: string }) => key !== "" || words !== "";
+
+/** A repair as its form holds it. */
+export const RepairValues = z.object({
+  day: z.string().min(1, "Say which day."),
+  hours: typedNumber({ from: 0, to: 200_000 }),
+  meterReset: z.boolean(),
+  symptom: z.string(),
+  cause: Said.refine(isSaid, "Say what was wrong, as well as you know it."),
+  remedy: Said.refine(isSaid, "Say what was done."),
+  outcome: z.enum(["cured", "held"]),
+  proof: z.string().trim().max(500),
+  minutes: typedNumber({ from: 0, to: 100_000 }),
+  parts: z.array(
+    z.object({
+      key: z.string(),
+      title: z.string().trim().max(200),
+      quantity: typedNumber({ from: 0.01, to: 1000 }),
+    }),
+  ),
+  note: z.string().max(4000, "Keep it under 4000 characters."),
+});
+export type RepairValues = z.input<typeof RepairValues>;
+export type RepairGiven = z.output<typeof RepairValues>;
+
+export const NO_REPAIR: RepairValues = {
+  day: "",
+  hours: "",
+  meterReset: false,
+  symptom: "",
+  cause: { key: "", words: "" },
+  remedy: { key: "", words: "" },
+  outcome: "cured",
+  proof: "",
+  minutes: "",
+  parts: [],
+  note: "",
+};
+
+/** As the server takes it: what was not said is left out. */
+export function newRepair(id: string, engineId: string, given: RepairGiven): NewRepair {
+  const { cause, remedy, proof, note, hours, minutes, symptom, parts } = given;
+  return {
+    id,
+    engineId,
+    doneAt: momentOf(given.day),
+    outcome: given.outcome,
+    symptoms: symptom ? [symptom] : [],
+    ...(cause.key ? { cause: cause.key } : { causeInWords: cause.words }),
+    ...(remedy.key ? { remedy: remedy.key } : { remedyInWords: remedy.words }),
+    ...(proof ? { proof } : {}),
+    ...(hours === null ? {} : { engineHours: hours }),
+    ...(given.meterReset && hours !== null ? { meterReset: true as const } : {}),
+    ...(minutes === null ? {} : { minutes }),
+    parts: parts
+      .filter((part) => part.title !== "")
+      .map((part) => ({ ...(part.key ? { key: part.key } : {}), title: part.title, quantity: part.quantity ?? 1 })),
+    ...(note.trim() ? { note } : {}),
+  };
+}
