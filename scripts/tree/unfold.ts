@@ -1,13 +1,15 @@
+import { CORE_VERSION } from "@/lib/core/diagnosis/core-version";
 import { evidenceOf } from "@/lib/core/diagnosis/evidence-of";
 import { reportedIn } from "@/lib/core/diagnosis/finding-weight";
 import { fold } from "@/lib/core/diagnosis/fold";
 import { keepModels } from "@/lib/core/diagnosis/keep-models";
+import { logOf, type Payload } from "@/lib/core/diagnosis/log-of";
 import type { Model } from "@/lib/core/diagnosis/model";
 import { nextStep, type NextStep } from "@/lib/core/diagnosis/next-step";
 import { outcomesOf } from "@/lib/core/diagnosis/outcomes";
 import { settingOf } from "@/lib/core/diagnosis/setting-of";
 import { rulesToAsk } from "@/lib/core/diagnosis/stop-rules";
-import type { DiagnosisEvent, EventKind, EventOf } from "@/lib/core/contract/event";
+import type { EventOf } from "@/lib/core/contract/event";
 import type { FaultTree } from "@/lib/core/tree/schema";
 
 export type Begin = Pick<EventOf<"begun">["payload"], "profile" | "situation" | "person" | "symptoms">;
@@ -27,29 +29,12 @@ export type Possible = { title: string; share: number };
 /** How far to follow: steps deep, and answers at least so likely. */
 export type Bounds = { depth: number; chance: number };
 
-type Payload = { [K in EventKind]: { kind: K; payload: EventOf<K>["payload"] } }[EventKind];
-
-/** A log as a device would write it; only its order counts here. */
-const logOf = (payloads: readonly Payload[]): DiagnosisEvent[] =>
-  payloads.map(
-    (payload, index) =>
-      ({
-        ...payload,
-        id: `event-${index}`,
-        diagnosisId: "diagnosis",
-        device: "device",
-        sequence: index + 1,
-        madeAt: "2000-01-01T00:00:00.000Z",
-        seen: {},
-      }) as DiagnosisEvent,
-  );
-
 /** The order of questions for a complaint, as the planner would ask them, with every stop rule answered no. */
 export function unfold(tree: FaultTree, begin: Begin, bounds: Bounds): { rules: string[]; first: Unfolded | null; possible: Possible[] } {
   const models = keepModels();
   const begun: Payload = {
     kind: "begun",
-    payload: { ...begin, engineId: "engine", treeVersionId: "tree", multipliers: [], coreVersion: 0 },
+    payload: { ...begin, engineId: "engine", treeVersionId: "tree", multipliers: [], coreVersion: CORE_VERSION },
   };
   const rules = rulesToAsk(tree, fold(logOf([begun])));
   const start: Payload[] = [begun, ...rules.map(({ key }): Payload => ({ kind: "rule-answered", payload: { rule: key, answer: "no" } }))];

@@ -29,7 +29,10 @@ describe("tree -- check", () => {
   test("ends with 0 and the counts on a sound tree", async () => {
     await write(smallDocument());
     expect(await check([folder])).toBe(0);
-    expect(said).toEqual(["2 symptoms, 3 causes, 4 checks, 2 readings, 3 remedies, 1 cautions, 2 stopRules, 1 knownCases", "The tree is sound."]);
+    expect(said).toEqual([
+      "2 symptoms, 3 causes, 4 checks, 2 readings, 3 remedies, 1 cautions, 2 stopRules, 1 knownCases",
+      "The tree is sound.",
+    ]);
   });
 
   test("ends with 1 on an error, and names file, line, rule, node and mend", async () => {
@@ -46,14 +49,26 @@ describe("tree -- check", () => {
     await write(smallDocument());
     await check([folder, "--json"]);
     const figures = said.map((line) => JSON.parse(line) as { figure: string; value: number });
-    expect(figures.map(({ figure }) => figure)).toEqual(["symptoms", "causes", "checks", "readings", "remedies", "cautions", "stopRules", "knownCases", "errors"]);
+    expect(figures.map(({ figure }) => figure)).toEqual([
+      "symptoms",
+      "causes",
+      "checks",
+      "readings",
+      "remedies",
+      "cautions",
+      "stopRules",
+      "knownCases",
+      "errors",
+    ]);
     expect(figures.at(-1)).toEqual({ figure: "errors", value: 0 });
   });
 
   test("shows how far each link speaks", async () => {
     await write(smallDocument());
     await check([folder, "--links"]);
-    expect(said.join("\n")).toMatch(/Dirt in the tank \(tank-dirty\)\n {4}bowl-look: bright 0\.20 against 0\.95, x0\.21; slime 0\.80 against 0\.05, x16/);
+    expect(said.join("\n")).toMatch(
+      /Dirt in the tank \(tank-dirty\)\n {4}bowl-look: bright 0\.20 against 0\.95, x0\.21; slime 0\.80 against 0\.05, x16/,
+    );
   });
 });
 
@@ -74,7 +89,11 @@ describe("tree -- show", () => {
   test("shares of the answers to a question add up to 100, give or take the rounding", async () => {
     await write(smallDocument());
     await show([folder, "--symptom", "no-crank", "--depth", "1", "--chance", "0.01"]);
-    const shares = said.join("\n").split("\n").filter((line) => line.startsWith("    ")).map((line) => Number(/\((\d+) of 100\)/.exec(line)?.[1] ?? 0));
+    const shares = said
+      .join("\n")
+      .split("\n")
+      .filter((line) => line.startsWith("    "))
+      .map((line) => Number(/\((\d+) of 100\)/.exec(line)?.[1] ?? 0));
     expect(shares.length).toBeGreaterThan(1);
     expect(Math.abs(shares.reduce((sum, share) => sum + share, 0) - 100)).toBeLessThanOrEqual(shares.length);
   });
@@ -105,7 +124,21 @@ describe("tree -- prove", () => {
     await write(smallDocument());
     // The commonest cause is at fault, so the base-rate order goes straight to it: no bar to hold against that here.
     expect(await prove([folder, "--json", "--bar", "top1.butConfirming=1", "--bar", "minutes.ratioToBaseRate=10"])).toBe(0);
-    expect(Object.keys(figures())).toEqual(["cases", "top1.start", "top3.start", "top1.butConfirming", "top3.butConfirming", "top1.all", "top3.all", "cured", "held", "called", "minutes.mean", "minutes.baseRate", "minutes.ratioToBaseRate"]);
+    expect(Object.keys(figures())).toEqual([
+      "cases",
+      "top1.start",
+      "top3.start",
+      "top1.butConfirming",
+      "top3.butConfirming",
+      "top1.all",
+      "top3.all",
+      "cured",
+      "held",
+      "called",
+      "minutes.mean",
+      "minutes.baseRate",
+      "minutes.ratioToBaseRate",
+    ]);
     // High vacuum with lost revs: the filter, which its remedy cures.
     expect(figures()["top1.butConfirming"]).toEqual({ figure: "top1.butConfirming", value: 1, bar: 1, holds: true });
     expect(figures()).toMatchObject({ cases: { value: 1 }, cured: { value: 1 }, called: { value: 0 } });
@@ -123,7 +156,9 @@ describe("tree -- prove", () => {
   test("tells each case in words: place of the right cause, the end, and the way there", async () => {
     await write(smallDocument());
     await prove([folder]);
-    expect(said.join("\n")).toMatch(/^case-1 Slow home: right cause number 1; cured in \d+ min \(base-rate order \d+\)\n {4}.*\[change-filter\]/);
+    expect(said.join("\n")).toMatch(
+      /^case-1 Slow home: right cause number 1; cured in \d+ min \(base-rate order \d+\)\n {4}.*\[change-filter\]/,
+    );
   });
 
   test.each([

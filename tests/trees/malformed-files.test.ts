@@ -42,14 +42,56 @@ test("an empty file, one with comments only and an empty list are no faults", as
 
 describe("a fault names file and line, and says what to do", () => {
   const faults: { fault: string; files: Record<string, string>; at: string; says: RegExp; mend: RegExp }[] = [
-    { fault: "a bracket left open", files: { "a.yaml": "key: small\ncauses:\n  - { key: a, title: b\n" }, at: "a.yaml:4", says: /not valid YAML/, mend: /brackets/ },
+    {
+      fault: "a bracket left open",
+      files: { "a.yaml": "key: small\ncauses:\n  - { key: a, title: b\n" },
+      at: "a.yaml:4",
+      says: /not valid YAML/,
+      mend: /brackets/,
+    },
     { fault: "a tab for indent", files: { "a.yaml": "causes:\n\t- key: a\n" }, at: "a.yaml:2", says: /not valid YAML/, mend: /spaces/ },
-    { fault: "a key twice in a map", files: { "a.yaml": "causes:\n  - key: a\n    base: rare\n    base: common\n" }, at: "a.yaml:4", says: /unique/, mend: /Keep one/ },
-    { fault: "a colon in bare text", files: { "a.yaml": "causes:\n  - key: a\n    is: Dirt: holds fuel\n" }, at: "a.yaml:3", says: /not valid YAML/, mend: /quotes/ },
-    { fault: "a list where a map belongs", files: { "a.yaml": "- key: a\n" }, at: "a.yaml:1", says: /has to be a map/, mend: /Begin it with/ },
-    { fault: "a part no tree has", files: { "a.yaml": "key: small\ncuases:\n  - key: a\n" }, at: "a.yaml:2", says: /"cuases" is not a part of a tree/, mend: /Did you mean "causes"/ },
-    { fault: "a map where a list belongs", files: { "a.yaml": "causes:\n  key: a\n" }, at: "a.yaml:1", says: /"causes" has to be a list/, mend: /"- "/ },
-    { fault: "a single value in two files", files: { "a.yaml": "title: One\n", "b.yaml": "about: x\ntitle: Two\n" }, at: "b.yaml:2", says: /stands in a\.yaml already/, mend: /Keep one/ },
+    {
+      fault: "a key twice in a map",
+      files: { "a.yaml": "causes:\n  - key: a\n    base: rare\n    base: common\n" },
+      at: "a.yaml:4",
+      says: /unique/,
+      mend: /Keep one/,
+    },
+    {
+      fault: "a colon in bare text",
+      files: { "a.yaml": "causes:\n  - key: a\n    is: Dirt: holds fuel\n" },
+      at: "a.yaml:3",
+      says: /not valid YAML/,
+      mend: /quotes/,
+    },
+    {
+      fault: "a list where a map belongs",
+      files: { "a.yaml": "- key: a\n" },
+      at: "a.yaml:1",
+      says: /has to be a map/,
+      mend: /Begin it with/,
+    },
+    {
+      fault: "a part no tree has",
+      files: { "a.yaml": "key: small\ncuases:\n  - key: a\n" },
+      at: "a.yaml:2",
+      says: /"cuases" is not a part of a tree/,
+      mend: /Did you mean "causes"/,
+    },
+    {
+      fault: "a map where a list belongs",
+      files: { "a.yaml": "causes:\n  key: a\n" },
+      at: "a.yaml:1",
+      says: /"causes" has to be a list/,
+      mend: /"- "/,
+    },
+    {
+      fault: "a single value in two files",
+      files: { "a.yaml": "title: One\n", "b.yaml": "about: x\ntitle: Two\n" },
+      at: "b.yaml:2",
+      says: /stands in a\.yaml already/,
+      mend: /Keep one/,
+    },
     { fault: "no files at all", files: {}, at: ".:1", says: /no YAML files/, mend: /tree\.yaml/ },
   ];
 
@@ -74,7 +116,8 @@ describe("a fault names file and line, and says what to do", () => {
 
 test("a fault of shape is found again in the file it was written in", async () => {
   const { causes, ...rest } = smallDocument();
-  const wrong = "causes:\n  - key: late\n    title: Late\n    system: fuel\n    is: Late.\n    base: often\n    onset: either\n    shows: {}\n    curedBy: {}\n    sources: [judgement]\n";
+  const wrong =
+    "causes:\n  - key: late\n    title: Late\n    system: fuel\n    is: Late.\n    base: often\n    onset: either\n    shows: {}\n    curedBy: {}\n    sources: [judgement]\n";
   const read = await write({ "tree.yaml": stringify(rest), "systems/a.yaml": stringify({ causes }), "systems/z.yaml": wrong });
   if ("faults" in read) throw new Error("the files are at fault");
   const parsed = parseTree(read.document);

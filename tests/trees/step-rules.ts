@@ -17,7 +17,9 @@ export const allWordsOf = (step: Check | Remedy): string[] => [
   ...step.steps,
   ...step.tools,
   ...(step.note === undefined ? [] : [step.note]),
-  ...("proof" in step ? [step.proof] : [step.ask, ...step.findings.flatMap((one) => [one.title, ...(one.says === undefined ? [] : [one.says])])]),
+  ...("proof" in step
+    ? [step.proof]
+    : [step.ask, ...step.findings.flatMap((one) => [one.title, ...(one.says === undefined ? [] : [one.says])])]),
 ];
 
 export type Rule = {
@@ -56,7 +58,8 @@ export const STEP_RULES: readonly Rule[] = [
     key: "cranks",
     wants: "the flag cranks",
     // The crank, its pulley and its nut are things; what is done with the starter is cranking.
-    speaks: (clause) => /\b(crank(s|ed|ing)?|starter|burst)\b/i.test(clause.replaceAll(/\bcrank (pulley|nut|case)|against the crank\b/gi, "")),
+    speaks: (clause) =>
+      /\b(crank(s|ed|ing)?|starter|burst)\b/i.test(clause.replaceAll(/\bcrank (pulley|nut|case)|against the crank\b/gi, "")),
     holds: ({ step }) => step.flags.cranks !== undefined,
   },
   {
@@ -71,7 +74,8 @@ export const STEP_RULES: readonly Rule[] = [
     key: "coolant",
     wants: "the flag opensCoolant",
     speaks: (clause, { step }) =>
-      /\b(cap off|pressure cap|header (tank|cap)|coolant cap|jacketed)\b/i.test(clause) || (step.system === "cooling" && /\bcap\b/i.test(clause)),
+      /\b(cap off|pressure cap|header (tank|cap)|coolant cap|jacketed)\b/i.test(clause) ||
+      (step.system === "cooling" && /\bcap\b/i.test(clause)),
     holds: ({ step }) => step.flags.opensCoolant === true,
   },
   {
@@ -83,7 +87,8 @@ export const STEP_RULES: readonly Rule[] = [
   {
     key: "bypass",
     wants: "a mechanic, for it works round a switch that guards people",
-    speaks: (clause) => /\b(bypass|bridg(e|es|ing)|jumpers?|short out|hot-wire|screwdriver across|neutral switch|interlock)\b/i.test(clause),
+    speaks: (clause) =>
+      /\b(bypass|bridg(e|es|ing)|jumpers?|short out|hot-wire|screwdriver across|neutral switch|interlock)\b/i.test(clause),
     holds: (step) => !skipper(step),
   },
 ];
@@ -91,7 +96,11 @@ export const STEP_RULES: readonly Rule[] = [
 /** Words that may stand only in a sentence that forbids. */
 export const FORBIDDEN: readonly { key: string; word: RegExp; unless: RegExp }[] = [
   { key: "taste", word: /\b(tast(e|es|ed|ing)|lick|tongue)\b/i, unless: /\bnever taste\b|\btastes sweet\b/i },
-  { key: "ether", word: /\b(ether|starting (fluid|spray)|start spray|easy[- ]start)\b/i, unless: /\b(never|no|not|explodes?|breaks?|forbid\w*|out of the)\b/i },
+  {
+    key: "ether",
+    word: /\b(ether|starting (fluid|spray)|start spray|easy[- ]start)\b/i,
+    unless: /\b(never|no|not|explodes?|breaks?|forbid\w*|out of the)\b/i,
+  },
   { key: "blow by mouth", word: /\bby mouth\b/i, unless: /\bnever by mouth|not by mouth\b/i },
   { key: "battery switch, running", word: /\bbattery switch\b.{0,40}\b(runs|running)\b/i, unless: /\b(never|nor|not)\b/i },
 ];

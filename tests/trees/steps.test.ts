@@ -15,7 +15,11 @@ type Hit = { node: string; clause: string };
 const hitsOf = ({ speaks, holds }: Rule): Hit[] =>
   stepsOf(tree)
     .filter((step: Step) => !holds(step))
-    .flatMap((step) => clausesOf(step.step).filter((clause) => speaks(clause, step) && !isForbidden(clause)).map((clause) => ({ node: step.node, clause })));
+    .flatMap((step) =>
+      clausesOf(step.step)
+        .filter((clause) => speaks(clause, step) && !isForbidden(clause))
+        .map((clause) => ({ node: step.node, clause })),
+    );
 
 describe("what the steps say agrees with what the step carries", () => {
   test.each(STEP_RULES)("$key: $wants", (rule) => {

@@ -1,4 +1,3 @@
-import type { DiagnosisEvent, EventKind, EventOf } from "../contract/event";
 import type { FaultTree, KnownCase, Who } from "../tree/schema";
 import { answerOf, settingFor } from "./case-evidence";
 import { probabilityOf } from "./cause-row";
@@ -6,6 +5,7 @@ import { CORE_VERSION } from "./core-version";
 import { evidenceOf } from "./evidence-of";
 import { fold } from "./fold";
 import { keepModels } from "./keep-models";
+import { logOf, type Payload } from "./log-of";
 import { nextStep } from "./next-step";
 import { settingOf } from "./setting-of";
 import { rulesToAsk } from "./stop-rules";
@@ -16,8 +16,6 @@ export type Played = {
   /** Kind and key of each step, in order. */
   readonly steps: readonly { readonly kind: "check" | "remedy" | "call"; readonly key: string; readonly minutes: number }[];
 };
-
-type Payload = { [K in EventKind]: { kind: K; payload: EventOf<K>["payload"] } }[EventKind];
 
 /** More steps than any sound tree has. */
 const STEPS_MOST = 1000;
@@ -82,18 +80,3 @@ function startOf(known: KnownCase, person: Who): Payload[] {
     })),
   ];
 }
-
-/** A log as one device would write it; only its order counts here. */
-const logOf = (payloads: readonly Payload[]): DiagnosisEvent[] =>
-  payloads.map(
-    (payload, index) =>
-      ({
-        ...payload,
-        id: `event-${index}`,
-        diagnosisId: "case",
-        device: "device",
-        sequence: index + 1,
-        madeAt: "2000-01-01T00:00:00Z",
-        seen: {},
-      }) as DiagnosisEvent,
-  );

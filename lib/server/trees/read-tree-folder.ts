@@ -29,11 +29,18 @@ const SCALARS = ["format", "key", "title", "about"];
  */
 export async function readTreeFolder(folder: string): Promise<TreeFolder | { faults: FileFault[] }> {
   const files = await yamlFiles(folder);
-  if (files.length === 0) return { faults: [{ file: ".", line: 1, says: `There are no YAML files in ${folder}.`, mend: "Name the folder that holds tree.yaml." }] };
+  if (files.length === 0)
+    return {
+      faults: [{ file: ".", line: 1, says: `There are no YAML files in ${folder}.`, mend: "Name the folder that holds tree.yaml." }],
+    };
   const sources: Source[] = [];
   for (const file of files) {
     const lines = new LineCounter();
-    sources.push({ file, lines, yaml: parseDocument(await readFile(path.join(folder, file), "utf8"), { lineCounter: lines, prettyErrors: false }) });
+    sources.push({
+      file,
+      lines,
+      yaml: parseDocument(await readFile(path.join(folder, file), "utf8"), { lineCounter: lines, prettyErrors: false }),
+    });
   }
   return joinSources(sources);
 }
@@ -54,11 +61,13 @@ function joinSources(sources: Source[]): TreeFolder | { faults: FileFault[] } {
 
   for (const source of sources) {
     const { yaml } = source;
-    const fault = (offset: number, says: string, mend: string) => faults.push({ file: source.file, line: source.lines.linePos(offset).line, says, mend });
+    const fault = (offset: number, says: string, mend: string) =>
+      faults.push({ file: source.file, line: source.lines.linePos(offset).line, says, mend });
     for (const error of yaml.errors) fault(error.pos[0], `This is not valid YAML: ${error.message}`, yamlMend(error.code));
     if (yaml.errors.length > 0 || yaml.contents === null) continue;
     if (!isMap(yaml.contents)) {
-      if (!isScalar(yaml.contents) || yaml.contents.value !== null) fault(yaml.contents.range[0], "A tree's file has to be a map.", `Begin it with one of ${[...SCALARS, ...LISTS].join(", ")}.`);
+      if (!isScalar(yaml.contents) || yaml.contents.value !== null)
+        fault(yaml.contents.range[0], "A tree's file has to be a map.", `Begin it with one of ${[...SCALARS, ...LISTS].join(", ")}.`);
       continue;
     }
     const values = yaml.toJS() as Record<string, unknown[]>;
@@ -80,8 +89,13 @@ function joinSources(sources: Source[]): TreeFolder | { faults: FileFault[] } {
         const before = origins.get(key);
         if (before !== undefined) fault(offset, `"${key}" stands in ${before.source.file} already.`, "Keep one of the two.");
         origins.set(key, { source, inFile: [key] });
-        document[key] = yaml.get(key);
-      } else fault(offset, `"${key}" is not a part of a tree.`, didYouMean(key, [...SCALARS, ...LISTS], `Use one of ${[...SCALARS, ...LISTS].join(", ")}.`));
+        document[key] = values[key];
+      } else
+        fault(
+          offset,
+          `"${key}" is not a part of a tree.`,
+          didYouMean(key, [...SCALARS, ...LISTS], `Use one of ${[...SCALARS, ...LISTS].join(", ")}.`),
+        );
     }
   }
   if (faults.length > 0) return { faults };
@@ -118,6 +132,7 @@ function offsetOf(yaml: Document.Parsed, inFile: readonly (string | number)[]): 
 function yamlMend(code: string): string {
   if (code === "DUPLICATE_KEY") return "Keep one of the two lines with the same key.";
   if (code === "TAB_AS_INDENT") return "Indent with spaces.";
-  if (code === "BAD_INDENT" || code === "BLOCK_AS_IMPLICIT_KEY") return 'Check indent and brackets here; text with a colon and a space, or that begins with a sign such as "*" or "@", needs quotes.';
+  if (code === "BAD_INDENT" || code === "BLOCK_AS_IMPLICIT_KEY")
+    return 'Check indent and brackets here; text with a colon and a space, or that begins with a sign such as "*" or "@", needs quotes.';
   return "Check this line and the one before it: indent, quotes, brackets.";
 }
