@@ -2,25 +2,21 @@ import { NextResponse, type NextRequest } from "next/server";
 import { LIGHT_SCRIPT } from "@/components/ui/light-script";
 import { sessionIdOf, siteIsSecure } from "@/lib/server/auth/session-cookie";
 import { contentSecurityPolicy, scriptHash, securityHeaders } from "@/lib/server/web/content-security";
-import { isStaticPage, staticScriptHashes } from "@/lib/server/web/static-scripts";
+import { builtScriptHashes } from "@/lib/server/web/script-hashes";
 
 const needsSignIn = (pathname: string) => /^\/(account|f)(\/|$)/.test(pathname);
 
 const development = process.env.NODE_ENV === "development";
 const lightScript = scriptHash(LIGHT_SCRIPT);
 
-/** Names the inline scripts that this page may run. */
-function scriptsOf(pathname: string): { scripts: string[]; nonce: string | null } {
-  if (isStaticPage(pathname)) {
-    const hashes = staticScriptHashes();
-    if (hashes) return { scripts: [lightScript, ...hashes], nonce: null };
-    // A page that was built without its hashes would not come alive; in development there are none.
-    if (development) return { scripts: ["'unsafe-inline'"], nonce: null };
-    console.error("script-hashes.json is missing: the static pages run without their scripts being named");
-    return { scripts: ["'unsafe-inline'"], nonce: null };
-  }
-  const nonce = Buffer.from(crypto.getRandomValues(new Uint8Array(16))).toString("base64");
-  return { scripts: [lightScript, `'nonce-${nonce}'`], nonce };
+/**
+ * Names the inline scripts that a page may run: by a nonce, if it is made for this request; by their hashes, if it was
+ * made when Gudgeon was built (the skipper's surface, "not found"). `next dev` makes the skipper's surface anew each
+ * time and without a nonce.
+ */
+function inlineScripts(pathname: string, nonce: string): string[] {
+  if (development && pathname.startsWith("/diagnose")) return ["'unsafe-inline'"];
+  return [lightScript, ...builtScriptHashes(), `'nonce-${nonce}'`];
 }
 
 /**
@@ -31,8 +27,8 @@ function scriptsOf(pathname: string): { scripts: string[]; nonce: string | null 
 export async function proxy(request: NextRequest): Promise<NextResponse> {
   const { pathname, search } = request.nextUrl;
   const secure = siteIsSecure();
-  const { scripts, nonce } = scriptsOf(pathname);
-  const policy = contentSecurityPolicy({ scripts, development, secure });
+  const nonce = Buffer.from(crypto.getRandomValues(new Uint8Array(16))).toString("base64");
+  const policy = contentSecurityPolicy({ scripts: inlineScripts(pathname, nonce), development, secure });
 
   if (needsSignIn(pathname) && !(await sessionIdOf(request.headers))) {
     const to = new URL("/sign-in", request.nextUrl);
@@ -41,8 +37,7 @@ export async function proxy(request: NextRequest): Promise<NextResponse> {
   }
   // Next reads the nonce from the request's policy and puts it on its own scripts.
   const headers = new Headers(request.headers);
-  if (nonce) headers.set("content-security-policy", policy);
-  else headers.delete("content-security-policy");
+  headers.set("content-security-policy", policy);
   return withHeaders(NextResponse.next({ request: { headers } }), policy, secure);
 }
 
