@@ -14,7 +14,7 @@ async function shippedDocument() {
   return read.document;
 }
 
-// Some 10 000 lines of YAML: seconds, on a busy machine.
+// Thousands of lines of YAML: seconds, on a busy machine.
 vi.setConfig({ testTimeout: 30_000 });
 
 test("the shipped tree is sound", async () => {
