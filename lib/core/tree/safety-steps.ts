@@ -104,7 +104,7 @@ const RULES: readonly Rule[] = [
     first: () => "Stop the engine, gear in neutral, key out and in your pocket. Tell everyone aboard that hands are at the shaft.",
     last: () => "Spanners, rags and hands away from the shaft before the key goes back.",
     caution: {
-      key: "hands-at-shaft",
+      key: "shaft-hands",
       signal: "danger",
       says: "A turning shaft takes hands and sleeves. Never touch shaft, gland or coupling while it turns or could turn.",
     },
@@ -134,7 +134,7 @@ const RULES: readonly Rule[] = [
   {
     holds: (f) => f.hotParts,
     caution: {
-      key: "hot-parts",
+      key: "burns",
       signal: "warning",
       says: "Exhaust parts pass 300 °C, and a hot block burns. Measure by infrared, not by hand; work on them only when a bare hand can rest there.",
     },
@@ -171,7 +171,7 @@ const RULES: readonly Rule[] = [
   {
     holds: (f) => f.rail && (f.opensFuelClean || f.opensHighPressureFuel),
     caution: {
-      key: "common-rail",
+      key: "common-rail-closed",
       signal: "danger",
       says: "Common rail, unit injectors, or not known which: a skipper opens nothing after the last filter, even with the engine stopped. Purge with the electric or hand primer only, then crank; no start in two bursts: stop.",
     },

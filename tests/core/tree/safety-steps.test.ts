@@ -85,12 +85,12 @@ describe("fuel", () => {
     const safety = safetyOf(step({ opensFuelClean: true }), wet);
     expect(all(safety.first)).toMatch(/lint-free.*bag/);
     expect(safety.cautions.find(({ key }) => key === "clean-side")?.says).toMatch(/Never fill a new element/);
-    expect(keys(safety)).not.toContain("common-rail");
+    expect(keys(safety)).not.toContain("common-rail-closed");
   });
 
   test.each(["common-rail", "unit-injectors", undefined])("after the last filter stays shut with %s injection", (injection) => {
     const profile = { features: { exhaust: "wet", ...(injection === undefined ? {} : { injection }) } };
-    expect(safetyOf(step({ opensFuelClean: true }), profile).cautions[0]).toMatchObject({ key: "common-rail", signal: "danger" });
+    expect(safetyOf(step({ opensFuelClean: true }), profile).cautions[0]).toMatchObject({ key: "common-rail-closed", signal: "danger" });
   });
 
   test("under high pressure goes through skin: card, never a hand, and to hospital", () => {
