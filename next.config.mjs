@@ -11,6 +11,8 @@ const config = {
   agentRules: false,
   serverExternalPackages: ["pg", "graphile-worker", "nodemailer", "@node-rs/argon2", "sharp"],
   experimental: { agentUpgrade: false },
+  // The proxy does not see static files.
+  headers: async () => [{ source: "/_next/static/:path*", headers: [{ key: "X-Content-Type-Options", value: "nosniff" }] }],
 };
 
 export default config;

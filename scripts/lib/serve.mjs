@@ -11,11 +11,13 @@ export const addressOf = (port) => process.env.APP_URL ?? `http://localhost:${po
 export async function serve({ dir, port, host = "127.0.0.1", env = {}, stdio = "inherit" }) {
   const url = addressOf(port);
   const hashes = path.join(dir, "script-hashes.json");
+  // The owner's address may do anything; what serves people never sees it.
+  const inherited = { ...process.env, DATABASE_URL: undefined };
   const child = daemon(process.execPath, [path.join(dir, "server.js")], {
     cwd: root,
     stdio: ["ignore", stdio, stdio],
     env: {
-      ...process.env,
+      ...inherited,
       NEXT_TELEMETRY_DISABLED: "1",
       AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: "true",
       NODE_ENV: "production",
