@@ -1,14 +1,25 @@
 "use client";
 
 import "@xyflow/react/dist/style.css";
-import { Controls, Position, ReactFlow, ReactFlowProvider, ViewportPortal, type Edge, type Node } from "@xyflow/react";
-import { useEffect, useState } from "react";
+import "./tree-map.css";
+import {
+  Controls,
+  Position,
+  type OnSelectionChangeFunc,
+  ReactFlow,
+  ReactFlowProvider,
+  ViewportPortal,
+  type Edge,
+  type Node,
+} from "@xyflow/react";
+import { useCallback, useEffect, useState } from "react";
 import { LANES, placesOf, heightOf, type Places } from "./tree-layout";
 import { nodeTypes } from "./tree-nodes";
 import type { TreeGraph } from "./tree-graph";
 
 /** One symptom's part of the tree, drawn in four ruled lanes. Read only: to look, to pan, to zoom. */
-export function TreeMap({ graph }: { graph: TreeGraph }) {
+export function TreeMap({ graph, onSelect }: { graph: TreeGraph; onSelect: (id: string | null) => void }) {
+  const chosen = useCallback<OnSelectionChangeFunc>(({ nodes }) => onSelect(nodes[0]?.id ?? null), [onSelect]);
   const [laid, setLaid] = useState<{ graph: TreeGraph; places: Places } | "failed" | null>(null);
   useEffect(() => {
     let wanted = true;
@@ -23,7 +34,7 @@ export function TreeMap({ graph }: { graph: TreeGraph }) {
   if (laid === "failed") return <p role="alert">The picture could not be laid out in this browser. The same is in the list below.</p>;
   if (laid === null || laid.graph !== graph) return <p role="status">Laying out…</p>;
   return (
-    <div className="h-[70vh] min-h-96 overflow-hidden rounded-xl border border-rule bg-paper text-sm leading-[22px]">
+    <div className="tree-map h-[70vh] min-h-96 overflow-hidden rounded-xl border border-rule bg-paper text-sm leading-[22px]">
       <ReactFlowProvider key={graph.symptom.key + graph.causes.length}>
         <ReactFlow
           defaultNodes={nodesOf(graph, laid.places)}
@@ -37,6 +48,9 @@ export function TreeMap({ graph }: { graph: TreeGraph }) {
           edgesFocusable={false}
           onlyRenderVisibleElements
           preventScrolling={false}
+          multiSelectionKeyCode={null}
+          deleteKeyCode={null}
+          onSelectionChange={chosen}
         >
           <Lanes places={laid.places} />
           <Controls showInteractive={false} />

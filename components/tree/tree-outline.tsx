@@ -1,52 +1,69 @@
-import type { TreeGraph } from "./tree-graph";
+"use client";
 
-/** The same as the picture, as a list: for a screen reader, a small phone and a printer. */
-export function TreeOutline({ graph }: { graph: TreeGraph }) {
-  const titleOf = (check: string, finding: string) => {
-    const c = graph.checks.find((k) => k.key === check);
-    return { check: c?.title ?? check, finding: c?.findings.find((f) => f.key === finding)?.title ?? finding };
-  };
+import { useState } from "react";
+import { Dialog } from "@/components/ui/dialog";
+import { NodeBody, nodeOf } from "./selected-node";
+import type { TreePart } from "./tree-part";
+
+/** The same as the picture, as a list: for a screen reader, a small phone and a printer. Each name opens what it says. */
+export function TreeOutline({ part }: { part: TreePart }) {
+  const { graph } = part;
+  const [open, setOpen] = useState<string | null>(null);
+  const node = open === null ? null : nodeOf(open, part);
+  const named = (id: string, title: string) => (
+    <button type="button" className="link inline-flex min-h-12 items-center text-left sm:min-h-8" onClick={() => setOpen(id)}>
+      {title}
+    </button>
+  );
+  const titleOf = (kind: "check" | "remedy", key: string) =>
+    (kind === "check" ? graph.checks : graph.remedies).find((n) => n.key === key)?.title ?? key;
+  const findingOf = (check: string, key: string) =>
+    graph.checks.find((c) => c.key === check)?.findings.find((f) => f.key === key)?.title ?? key;
   return (
-    <ul className="grid gap-3">
-      {graph.causes.map((cause) => (
-        <li key={cause.key} className="rounded-lg border border-rule bg-sheet px-4 py-3">
-          <h3>{cause.title}</h3>
-          <p className="text-sm text-ink-2">{cause.is}</p>
-          <dl className="mt-2 grid gap-1 text-sm sm:grid-cols-[9rem_1fr]">
-            <dt className="text-ink-2">Told by</dt>
-            <dd>
-              <ul className="list-disc pl-5">
-                {graph.tells
-                  .filter((t) => t.cause === cause.key)
-                  .sort((a, b) => b.ratio - a.ratio)
-                  .map((t) => {
-                    const { check, finding } = titleOf(t.check, t.finding);
-                    return (
+    <>
+      <ul className="grid gap-3">
+        {graph.causes.map((cause) => (
+          <li key={cause.key} className="break-inside-avoid rounded-lg border border-rule bg-sheet px-4 py-3">
+            <h3>{named(`cause:${cause.key}`, cause.title)}</h3>
+            <p className="text-sm text-ink-2">{cause.is}</p>
+            <dl className="mt-2 grid gap-x-4 gap-y-1 text-sm sm:grid-cols-[9rem_1fr]">
+              <dt className="text-ink-2">Told by</dt>
+              <dd>
+                <ul>
+                  {graph.tells
+                    .filter((t) => t.cause === cause.key)
+                    .sort((a, b) => b.ratio - a.ratio)
+                    .map((t) => (
                       <li key={t.check + t.finding}>
-                        {check}: {finding} (<span className="dial">{Math.round(t.ratio)}</span> times as often as in a sound engine)
+                        {named(`check:${t.check}`, titleOf("check", t.check))}: {findingOf(t.check, t.finding)} (
+                        <span className="dial">{Math.round(t.ratio)}</span> times as often as in a sound engine)
                       </li>
-                    );
-                  })}
-              </ul>
-            </dd>
-            <dt className="text-ink-2">Put right by</dt>
-            <dd>
-              {graph.cures
-                .filter((c) => c.cause === cause.key)
-                .map((c) => graph.remedies.find((r) => r.key === c.remedy)?.title ?? c.remedy)
-                .join("; ")}
-            </dd>
-            {cause.roots.length > 0 && (
-              <>
-                <dt className="text-ink-2">Comes back through</dt>
-                <dd>{cause.roots.join("; ")}</dd>
-              </>
-            )}
-            <dt className="text-ink-2">Sources</dt>
-            <dd>{cause.sources.join("; ")}</dd>
-          </dl>
-        </li>
-      ))}
-    </ul>
+                    ))}
+                </ul>
+              </dd>
+              <dt className="text-ink-2">Put right by</dt>
+              <dd>
+                <ul>
+                  {graph.cures
+                    .filter((c) => c.cause === cause.key)
+                    .map((c) => (
+                      <li key={c.remedy}>{named(`remedy:${c.remedy}`, titleOf("remedy", c.remedy))}</li>
+                    ))}
+                </ul>
+              </dd>
+              {cause.roots.length > 0 && (
+                <>
+                  <dt className="text-ink-2">Comes back through</dt>
+                  <dd>{cause.roots.join("; ")}</dd>
+                </>
+              )}
+            </dl>
+          </li>
+        ))}
+      </ul>
+      <Dialog open={node !== null} onClose={() => setOpen(null)} title={node?.title ?? ""}>
+        {open !== null && <NodeBody id={open} part={part} />}
+      </Dialog>
+    </>
   );
 }
