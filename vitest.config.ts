@@ -28,7 +28,7 @@ export default defineConfig({
       pure("core"),
       pure("trees"),
       pure("reference", { testTimeout: 30_000 }),
-      pure("architecture", { testTimeout: 60_000 }),
+      pure("architecture", { testTimeout: 60_000, hookTimeout: 120_000 }),
       pure("server", withDatabase),
       pure("api", withDatabase),
     ],

@@ -28,7 +28,7 @@ export const rings = [
   {
     // The demo fleet is made by the commands people use.
     name: "database programs",
-    files: ["db/*.ts"],
+    files: ["db/*.ts", "db/demo/**/*.ts"],
     ignores: ["db/client.ts"],
     sees: ["db", "lib/core", "lib/server"],
     packages: "any",
