@@ -1,12 +1,14 @@
 "use client";
 
-import { useActionState, type ReactNode } from "react";
+import { useRouter } from "next/navigation";
+import { useActionState, useEffect, type ReactNode } from "react";
 import { Button } from "@/components/ui/button";
 import { Notice } from "@/components/ui/notice";
-import { untouched, type FormState } from "@/lib/core/contract/form-state";
+import { untouched } from "@/lib/core/contract/form-state";
+import type { FormAction } from "./form-action";
 
 type Props = {
-  action: (before: FormState, form: FormData) => Promise<FormState>;
+  action: FormAction;
   /** What the form carries without showing it. */
   hidden?: Readonly<Record<string, string>>;
   submit: string;
@@ -15,11 +17,19 @@ type Props = {
   children?: (wrong: (name: string) => string | undefined) => ReactNode;
   /** Shown in place of the form once it is done. */
   onceDone?: (says: string) => ReactNode;
+  /** The page shows what the form changes: it is read again once that is done. */
+  changesPage?: boolean;
+  /** Beside the button. */
+  also?: ReactNode;
 };
 
 /** A form round a server action: says what is wrong where it is wrong, keeps what was typed, and says when it is done. */
-export function ActionForm({ action, hidden = {}, submit, tone = "strong", children, onceDone }: Props) {
+export function ActionForm({ action, hidden = {}, submit, tone = "strong", children, onceDone, changesPage = false, also }: Props) {
   const [state, act, waits] = useActionState(action, untouched);
+  const { refresh } = useRouter();
+  useEffect(() => {
+    if (changesPage && state.status === "done") refresh();
+  }, [changesPage, state, refresh]);
   if (state.status === "done" && onceDone) return <>{onceDone(state.says)}</>;
   const wrong = (name: string) => (state.status === "refused" ? state.fields[name] : undefined);
   return (
@@ -46,10 +56,11 @@ export function ActionForm({ action, hidden = {}, submit, tone = "strong", child
           {state.says}
         </Notice>
       )}
-      <div>
+      <div className="flex flex-wrap gap-3">
         <Button type="submit" tone={tone} disabled={waits}>
           {waits ? "One moment…" : submit}
         </Button>
+        {also}
       </div>
     </form>
   );

@@ -19,8 +19,8 @@ export function EmailField({ wrong, label = "E-mail", hint, id = "email" }: { wr
   );
 }
 
-export function PasswordField({ wrong, label = "Password", name = "password" }: { wrong: Wrong; label?: string; name?: string }) {
-  return <TextField id={name} name={name} type="password" autoComplete="current-password" required label={label} error={wrong(name)} />;
+export function PasswordField({ wrong, label = "Password", name = "password", id = name }: { wrong: Wrong; label?: string; name?: string; id?: string }) {
+  return <TextField id={id} name={name} type="password" autoComplete="current-password" required label={label} error={wrong(name)} />;
 }
 
 export function NewPasswordField({ wrong, label = "Password" }: { wrong: Wrong; label?: string }) {

@@ -1,4 +1,5 @@
 import type { DiagnosisEvent, EventOf } from "@/lib/core/contract/event";
+import { fold } from "@/lib/core/diagnosis/fold";
 
 /** One line about a diagnosis on this phone. */
 export type Summary = {
@@ -19,19 +20,7 @@ export type Summary = {
 export function summarize(events: readonly DiagnosisEvent[]): Summary | null {
   const begun = events.find((event): event is EventOf<"begun"> => event.kind === "begun");
   if (!begun) return null;
-  const gone = new Set<string>();
-  for (const event of events) {
-    if (event.supersedes) gone.add(event.supersedes);
-    if (event.kind === "taken-back") gone.add(event.payload.event);
-  }
-  const standing = events.filter((event) => !gone.has(event.id));
-  const seqOf = (kind: DiagnosisEvent["kind"]) =>
-    standing
-      .filter((event) => event.kind === kind)
-      .map((event) => event.madeAt)
-      .sort();
-  const lastEnd = seqOf("ended").at(-1);
-  const lastTakenUp = seqOf("taken-up-again").at(-1);
+  const { live, ended } = fold(events);
   return {
     id: begun.diagnosisId,
     engineId: begun.payload.engineId,
@@ -40,7 +29,7 @@ export function summarize(events: readonly DiagnosisEvent[]): Summary | null {
     complaint: begun.payload.complaint ?? null,
     beganAt: begun.madeAt,
     touchedAt: events.reduce((latest, event) => (event.madeAt > latest ? event.madeAt : latest), begun.madeAt),
-    answers: standing.filter((event) => event.kind === "answered" || event.kind === "remedy-tried").length,
-    ended: lastEnd !== undefined && (lastTakenUp === undefined || lastTakenUp < lastEnd),
+    answers: [...live].filter((event) => event.kind === "answered" || event.kind === "remedy-tried").length,
+    ended: ended !== null,
   };
 }

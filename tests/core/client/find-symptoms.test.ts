@@ -1,0 +1,86 @@
+import fc from "fast-check";
+import { describe, expect, it } from "vitest";
+import { complaintsOf, symptomFinder } from "@/lib/client/find-symptoms";
+import type { Symptom } from "@/lib/core/tree/schema";
+
+const symptom = (key: string, title: string, detail: string, phrases: string[]): Symptom => ({
+  key,
+  title,
+  detail,
+  system: "fuel-supply",
+  phrases,
+  sources: ["users"],
+});
+
+const SYMPTOMS = [
+  symptom("hard-start-cold", "Slow to start from cold", "It needs long cranking after a night", [
+    "slow to start in the morning",
+    "takes ages to fire up",
+    "cold start trouble",
+    "won't start first time",
+    "have to crank and crank",
+  ]),
+  symptom("lost-top-end-rpm", "Will not reach full revs", "In gear, at full throttle", [
+    "won't rev out",
+    "down on revs",
+    "lost top end",
+    "no full throttle",
+    "slow boat",
+  ]),
+  symptom("fades-and-stops", "Fades, then stops", "Loses revs over seconds under load", [
+    "fades when pushed",
+    "starved",
+    "ran out of puff",
+    "petered out",
+    "gasping",
+  ]),
+  symptom("overheat", "Overheats", "Needle high or the alarm", ["running hot", "temp alarm", "boiling", "needle in red", "too hot"]),
+];
+const find = symptomFinder(SYMPTOMS);
+const ticked = (text: string) =>
+  find(text)
+    .filter(({ fits }) => fits)
+    .map(({ key }) => key);
+
+describe("finding a symptom by plain words", () => {
+  it("takes one line apart at commas and joining words", () => {
+    expect(complaintsOf("Won't rev, fadse when pushd and it's hot; then dies")).toEqual([
+      "wont rev",
+      "fadse when pushd",
+      "its hot",
+      "dies",
+    ]);
+  });
+
+  it("ticks each of two complaints in one misspelt line", () => {
+    expect(ticked("wont rev, fadse when pushd")).toEqual(["lost-top-end-rpm", "fades-and-stops"]);
+  });
+
+  it("finds a symptom by words that stand in none of its phrases in this order", () => {
+    expect(ticked("takes forever to start")).toEqual(["hard-start-cold"]);
+  });
+
+  it("reads an apostrophe, a capital and a full stop as nothing", () => {
+    expect(find("WON'T REV OUT.")).toEqual(find("wont rev out"));
+  });
+
+  it("finds nothing, and ticks nothing, where nothing is alike", () => {
+    expect(find("zzzz qqqq")).toEqual([]);
+    expect(find("")).toEqual([]);
+    expect(find("  , and ")).toEqual([]);
+  });
+
+  it("ticks at most one symptom for each complaint, and never falls over", () => {
+    fc.assert(
+      fc.property(fc.string({ maxLength: 80 }), (text) => {
+        expect(ticked(text).length).toBeLessThanOrEqual(Math.max(0, complaintsOf(text).length));
+      }),
+    );
+  });
+
+  it("gives the same order for the same words, whatever order the symptoms' rivals tie in", () => {
+    expect(find("start")).toEqual(symptomFinder([...SYMPTOMS])("start"));
+    const scores = find("slow revs under load").map(({ fits, score }) => [fits ? 0 : 1, score] as const);
+    expect(scores).toEqual([...scores].sort((a, b) => a[0] - b[0] || a[1] - b[1]));
+  });
+});
