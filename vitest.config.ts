@@ -25,8 +25,8 @@ export default defineConfig({
     env: { TZ: "Asia/Kathmandu" },
     reporters: ["default", ["json", { outputFile: `${run}/vitest.json` }]],
     projects: [
-      pure("core"),
-      pure("trees"),
+      pure("core", { testTimeout: 15_000 }),
+      pure("trees", { testTimeout: 30_000 }),
       pure("reference", { testTimeout: 30_000 }),
       pure("architecture", { testTimeout: 60_000, hookTimeout: 120_000 }),
       pure("server", withDatabase),
