@@ -19,7 +19,17 @@ export function EmailField({ wrong, label = "E-mail", hint, id = "email" }: { wr
   );
 }
 
-export function PasswordField({ wrong, label = "Password", name = "password", id = name }: { wrong: Wrong; label?: string; name?: string; id?: string }) {
+export function PasswordField({
+  wrong,
+  label = "Password",
+  name = "password",
+  id = name,
+}: {
+  wrong: Wrong;
+  label?: string;
+  name?: string;
+  id?: string;
+}) {
   return <TextField id={id} name={name} type="password" autoComplete="current-password" required label={label} error={wrong(name)} />;
 }
 
