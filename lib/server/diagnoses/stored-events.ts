@@ -2,7 +2,7 @@ import "server-only";
 import { and, asc, eq, inArray } from "drizzle-orm";
 import { diagnosisEvents } from "@/db/schema/diagnoses";
 import { people } from "@/db/schema/fleets";
-import { DiagnosisEvent, type StoredEvent } from "@/lib/core/contract/event";
+import type { DiagnosisEvent, StoredEvent } from "@/lib/core/contract/event";
 import type { FleetScope } from "@/lib/server/auth/scope";
 
 export type EventRow = typeof diagnosisEvents.$inferSelect;
@@ -52,7 +52,6 @@ export async function readEventsOf(scope: FleetScope, diagnosisIds: readonly str
 
 /** The events alone, as fold and view take them. */
 export const plainEvents = (stored: readonly StoredEvent[]): DiagnosisEvent[] =>
-  stored.map((one) => {
-    const { receivedAt: _receivedAt, by: _by, byName: _byName, ...event } = one;
-    return event as DiagnosisEvent;
+  stored.map(({ id, diagnosisId, device, sequence, kind, payload, seen, madeAt, supersedes }) => {
+    return { id, diagnosisId, device, sequence, kind, payload, seen, madeAt, ...(supersedes ? { supersedes } : {}) } as DiagnosisEvent;
   });

@@ -1,6 +1,6 @@
 import "server-only";
 import { and, asc, eq, inArray, min } from "drizzle-orm";
-import { engines, hourReadings } from "@/db/schema/boats";
+import { type engines, hourReadings } from "@/db/schema/boats";
 import { logEntries } from "@/db/schema/log-entries";
 import { engineClock, type EngineClock, type MeterReading } from "@/lib/core/recurrence/engine-clock";
 import type { FleetScope } from "@/lib/server/auth/scope";
