@@ -1,12 +1,6 @@
-import type { RemedyResult } from "../contract/event";
 import type { Evidence } from "./evidence";
 import { addFinding, heard, reportedIn } from "./finding-weight";
 import type { Model } from "./model";
-
-/** "Better, not cured" is as likely as a fifth of a cure while only single causes are weighed. */
-const BETTER = 0.2;
-/** Even what is not in the tree can get a little better by chance. */
-const BETTER_LEAST = 0.002;
 
 /** Shares over the model's hypotheses, the unknown last; they sum to 1. */
 export type Belief = { readonly shares: Float64Array };
@@ -35,51 +29,45 @@ const byKey = <T>(items: readonly T[], keyOf: (item: T) => string): readonly T[]
 function addSymptoms(model: Model, symptoms: Evidence["symptoms"], log: Float64Array): void {
   let told = false;
   for (const { symptom, present } of byKey(symptoms, (one) => one.symptom)) {
-    const row = model.symptoms.get(symptom);
-    if (!row) continue;
+    const logs = model.logSymptoms.get(symptom);
+    if (!logs) continue;
     told = true;
-    for (let index = 0; index < model.unknownAt; index++) {
-      const share = row[index] ?? 0;
-      log[index] = (log[index] ?? 0) + (present ? Math.log(share) : Math.log1p(-share));
-    }
+    const row = present ? logs.present : logs.absent;
+    for (let index = 0; index < model.unknownAt; index++) log[index] = log[index]! + row[index]!;
   }
-  if (told && model.unknownAt > 0) log[model.unknownAt] = (log[model.unknownAt] ?? 0) + meanOverCauses(model, log);
+  if (told && model.unknownAt > 0) log[model.unknownAt] = log[model.unknownAt]! + meanOverCauses(model, log);
 }
 
 /** ln of the mean, over the causes, of the likelihood of all symptoms together: the unknown keeps its share whatever is reported. Rule [K2]. */
 function meanOverCauses(model: Model, log: Float64Array): number {
   let most = -Infinity;
-  for (let index = 0; index < model.unknownAt; index++) most = Math.max(most, log[index] ?? -Infinity);
+  for (let index = 0; index < model.unknownAt; index++) most = Math.max(most, log[index]!);
   let sum = 0;
-  let prior = 0;
-  for (let index = 0; index < model.unknownAt; index++) {
-    sum += Math.exp((log[index] ?? 0) - most);
-    prior += Math.exp(model.logPrior[index] ?? 0);
-  }
-  return Math.log(sum) + most - Math.log(prior);
+  for (let index = 0; index < model.unknownAt; index++) sum += Math.exp(log[index]! - most);
+  return Math.log(sum) + most - model.logPriorOfCauses;
 }
 
 function addRemedies(model: Model, remedies: Evidence["remedies"], log: Float64Array): void {
   for (const { remedy, result } of byKey(remedies, (one) => one.remedy)) {
-    const cure = model.remedies[model.remedyAt.get(remedy) ?? -1]?.cure;
-    if (!cure || result === "could-not") continue;
-    for (let index = 0; index < log.length; index++) log[index] = (log[index] ?? 0) + Math.log(resultShare(result, cure[index] ?? 0));
+    const tried = model.remedies[model.remedyAt.get(remedy) ?? -1];
+    if (!tried || result === "could-not") continue;
+    const row = tried.logResults[result];
+    for (let index = 0; index < log.length; index++) log[index] = log[index]! + row[index]!;
   }
 }
 
-function resultShare(result: Exclude<RemedyResult, "could-not">, cure: number): number {
-  if (result === "cured") return cure;
-  return result === "better" ? Math.max(BETTER_LEAST, BETTER * cure) : 1 - cure;
-}
-
+/** Logs of weights as shares, in place. */
 function normalised(log: Float64Array): Float64Array {
   let most = -Infinity;
   for (const one of log) if (one > most) most = one;
   // Only "cured" can rule everything out, in a tree where nothing applies; then nothing is learnt.
   if (most === -Infinity) return new Float64Array(log.length).fill(1 / log.length);
-  const shares = log.map((one) => Math.exp(one - most));
   let total = 0;
-  for (const share of shares) total += share;
-  for (let index = 0; index < shares.length; index++) shares[index] = (shares[index] ?? 0) / total;
-  return shares;
+  for (let index = 0; index < log.length; index++) {
+    const weight = Math.exp(log[index]! - most);
+    log[index] = weight;
+    total += weight;
+  }
+  for (let index = 0; index < log.length; index++) log[index] = log[index]! / total;
+  return log;
 }

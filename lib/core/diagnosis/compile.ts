@@ -13,6 +13,10 @@ import { whoMay } from "./who-may";
 const UNKNOWN = 0.05;
 /** A remedy cures a cause that it has no link to 1 time in 100. */
 const UNLINKED_CURE = 0.01;
+/** "Better, not cured" is as likely as a fifth of a cure while only single causes are weighed. */
+const BETTER = 0.2;
+/** Even what is not in the tree can get a little better by chance. */
+const BETTER_LEAST = 0.002;
 
 /**
  * Makes a tree ready for arithmetic: what does not apply to this engine here is
@@ -31,6 +35,7 @@ export function compile(tree: FaultTree, setting: Setting): Model {
     .filter(({ step }) => step.share > 0)
     .map(({ check, step }) => compileCheck(check, step, causes, prior));
   const remedies = tree.remedies.map((remedy) => compileRemedy(remedy, stepOf(remedy), causes)).filter((remedy) => remedy.share > 0);
+  const symptoms = new Map(tree.symptoms.map(({ key }) => [key, withUnknownPlace(symptomShares(key, causes, weights).shares)]));
   return {
     tree,
     setting,
@@ -39,7 +44,11 @@ export function compile(tree: FaultTree, setting: Setting): Model {
     causeAt: placesOf(causes),
     unknownAt: causes.length,
     logPrior: prior.map(Math.log),
-    symptoms: new Map(tree.symptoms.map(({ key }) => [key, withUnknownPlace(symptomShares(key, causes, weights).shares)])),
+    logPriorOfCauses: Math.log1p(-(prior[causes.length] ?? 0)),
+    symptoms,
+    logSymptoms: new Map(
+      [...symptoms].map(([key, row]) => [key, { present: row.map(Math.log), absent: row.map((share) => Math.log1p(-share)) }]),
+    ),
     checks,
     checkAt: placesOf(checks),
     remedies,
@@ -101,10 +110,16 @@ function compileRemedy(remedy: Remedy, step: StepModel, causes: readonly Cause[]
     cure[index] = probabilityOf(strength);
     linkedAt.push(index);
   });
+  const logResults = {
+    cured: cure.map(Math.log),
+    better: cure.map((chance) => Math.log(Math.max(BETTER_LEAST, BETTER * chance))),
+    "no-change": cure.map((chance) => Math.log1p(-chance)),
+  };
   return {
     ...step,
     remedy,
     cure,
+    logResults,
     linkedAt: Int32Array.from(linkedAt),
     linkedCure: Float64Array.from(linkedAt, (index) => cure[index] ?? 0),
   };

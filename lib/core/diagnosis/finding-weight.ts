@@ -49,7 +49,7 @@ export function addFinding(one: Heard, reported: ReadonlySet<string>, into: Floa
   if (!row) return;
   const again = restating(one.check, reported);
   if (!again.includes(one.finding)) {
-    for (let index = 0; index < into.length; index++) into[index] = (into[index] ?? 0) + (row[index] ?? 0);
+    for (let index = 0; index < into.length; index++) into[index] = into[index]! + row[index]!;
     return;
   }
   if (again.length === 1) return;

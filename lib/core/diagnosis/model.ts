@@ -1,5 +1,5 @@
 import type { EngineProfile } from "../contract/engine";
-import type { Multiplier } from "../contract/event";
+import type { Multiplier, RemedyResult } from "../contract/event";
 import type { Cause, Check, FaultTree, Remedy, Situation, Who } from "../tree/schema";
 
 /** What a tree is compiled for: this engine, here, with these hands. */
@@ -44,6 +44,8 @@ export type RemedyModel = StepModel & {
   readonly remedy: Remedy;
   /** cure[hypothesis] = P(cured given hypothesis). */
   readonly cure: Float64Array;
+  /** ln of what each result of trying it weighs for each hypothesis. */
+  readonly logResults: Readonly<Record<Exclude<RemedyResult, "could-not">, Float64Array>>;
   /** The hypotheses with a link, and their chance. */
   readonly linkedAt: Int32Array;
   readonly linkedCure: Float64Array;
@@ -62,8 +64,12 @@ export type Model = {
   /** Index of "something not in this tree". */
   readonly unknownAt: number;
   readonly logPrior: Float64Array;
+  /** ln of the prior share of all causes together. */
+  readonly logPriorOfCauses: number;
   /** P(symptom given hypothesis); the unknown's place is not used, see believe(). */
   readonly symptoms: ReadonlyMap<string, Float64Array>;
+  /** ln of that, and of its complement. */
+  readonly logSymptoms: ReadonlyMap<string, { readonly present: Float64Array; readonly absent: Float64Array }>;
   readonly checks: readonly CheckModel[];
   readonly checkAt: ReadonlyMap<string, number>;
   readonly remedies: readonly RemedyModel[];
