@@ -3,6 +3,7 @@
 import type { StepShown } from "@/lib/core/diagnosis/view";
 import { AnswerForm } from "./answer-form";
 import { useHere } from "./here";
+import { MissingFigure } from "./missing-figure";
 import { StepHead } from "./step-head";
 import { StepTimers } from "./step-timers";
 
@@ -13,6 +14,7 @@ export function CheckStep({ step }: { step: StepShown }) {
     <>
       <StepHead step={step} />
       <StepTimers step={step} />
+      <MissingFigure checkKey={step.key} />
       <AnswerForm
         of={step.key}
         ask={step.ask}

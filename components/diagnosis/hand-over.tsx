@@ -38,7 +38,13 @@ export function HandOver() {
           lines={[...facts.symptoms, ...(facts.complaint ? [`\u201c${facts.complaint}\u201d`] : [])]}
           none="None given."
         />
-        {facts.rulesInForce.length > 0 && <Part title="In force: do not" lines={facts.rulesInForce} none="" />}
+        {facts.rulesInForce.length > 0 && (
+          <Part
+            title="Stop rules in force"
+            lines={view.rulesInForce.map((rule) => `${rule.title}: ${rule.says[0] ?? rule.because}`)}
+            none=""
+          />
+        )}
         <Part
           title="Engine"
           lines={[...facts.engineIs, ...(facts.hours === null ? [] : [`${facts.hours} h at the last reading`])]}

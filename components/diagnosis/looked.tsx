@@ -5,6 +5,7 @@ import { AnswerForm } from "./answer-form";
 import { BackLink } from "./back-link";
 import { Defers } from "./defers";
 import { useHere } from "./here";
+import { MissingFigure } from "./missing-figure";
 import { NodePicker } from "./node-picker";
 import { ScreenHeading } from "./screen-heading";
 
@@ -30,6 +31,7 @@ export function Looked() {
       <BackLink />
       <ScreenHeading of={check.key}>{check.title}</ScreenHeading>
       {before && <p className="mt-2 text-sm text-ink-2">Answered before: {before.says}. A new answer takes its place.</p>}
+      <MissingFigure checkKey={check.key} />
       <AnswerForm
         of={check.key}
         ask={check.ask}

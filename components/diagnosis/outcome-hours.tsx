@@ -1,6 +1,7 @@
 "use client";
 
 import type { OutcomeForm } from "@/lib/client/outcome-form";
+import { Checkbox } from "@/components/ui/checkbox";
 import { TextField } from "@/components/ui/text-field";
 import { useHere } from "./here";
 
@@ -35,15 +36,9 @@ export function OutcomeHours({
         onChange={(event) => change({ hours: event.target.value })}
       />
       {(error || form.meterReset) && engine.hours !== null && (
-        <label className="flex min-h-12 items-center gap-3">
-          <input
-            type="checkbox"
-            className="size-6 accent-fill"
-            checked={form.meterReset}
-            onChange={(event) => change({ meterReset: event.target.checked })}
-          />
+        <Checkbox checked={form.meterReset} onChange={(event) => change({ meterReset: event.target.checked })}>
           The meter was replaced or set back
-        </label>
+        </Checkbox>
       )}
     </div>
   );

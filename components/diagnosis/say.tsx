@@ -12,6 +12,7 @@ import type { Engine } from "@/lib/core/contract/engine";
 import type { Phone } from "@/lib/core/contract/phone";
 import type { Situation } from "@/lib/core/tree/schema";
 import { Button } from "@/components/ui/button";
+import { Checkbox } from "@/components/ui/checkbox";
 import { Segmented } from "@/components/ui/segmented";
 import { BoatFirst } from "./boat-first";
 import { Frame } from "./frame";
@@ -121,15 +122,11 @@ export function Say({ ready, phone, engine, go }: Props) {
           />
         </div>
       )}
-      <label className="mt-4 flex min-h-12 items-center gap-3">
-        <input
-          type="checkbox"
-          className="size-6 accent-fill"
-          checked={draft.mechanic}
-          onChange={(event) => change({ mechanic: event.target.checked })}
-        />
-        A mechanic is at the engine
-      </label>
+      <div className="mt-4">
+        <Checkbox checked={draft.mechanic} onChange={(event) => change({ mechanic: event.target.checked })}>
+          A mechanic is at the engine
+        </Checkbox>
+      </div>
       {needsSafety && asked && (
         <p role="alert" className="mt-2 font-semibold text-lead">
           See to the boat first, then say so above.
