@@ -12,7 +12,7 @@ export const daysBefore = (today: Date, days: number, hour = 9): Date => {
 export function whenAt(engine: DemoEngine, at: number, today: Date): Date {
   const after = engine.meter.findIndex(([, hours]) => hours >= at);
   const [before, next] = [engine.meter[after - 1], engine.meter[after]];
-  if (!before || !next) return daysBefore(today, at, 14);
+  if (engine.hoursPerYear !== undefined || !before || !next) return daysBefore(today, at, 14);
   const part = (at - before[1]) / (next[1] - before[1]);
   return daysBefore(today, Math.ceil(before[0] + part * (next[0] - before[0])), 13);
 }

@@ -81,8 +81,8 @@ export const OPEN_RUN: DemoRun & { steps: number } = {
   by: "skipper",
   at: 2788,
   symptom: "hard-start-cold",
-  cause: "positive-connection-bad",
-  complaint: "cranks slowly when cold, then starts",
+  cause: "glow-supply-fault",
+  complaint: "longer every cold morning until it fires",
   steps: 3,
 };
 

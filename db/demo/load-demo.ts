@@ -2,6 +2,7 @@ import { eq } from "drizzle-orm";
 import { identityDatabase } from "@/db/client";
 import { users } from "@/db/schema/users";
 import type { Permission } from "@/lib/core/access/permissions";
+import { multipliersFor } from "@/lib/core/diagnosis/odds-of-this-engine";
 import { makeUser } from "@/lib/server/account/make-user";
 import { hashPassword } from "@/lib/server/auth/password";
 import { withScope, type FleetScope } from "@/lib/server/auth/scope";
@@ -10,6 +11,7 @@ import { recordEvents } from "@/lib/server/diagnoses/commands";
 import { listDiagnoses } from "@/lib/server/diagnoses/queries";
 import { addEngine, addHourReading } from "@/lib/server/engines/commands";
 import { logRepair } from "@/lib/server/log/commands";
+import { listLog } from "@/lib/server/log/queries";
 import { getFleet, fleetsOf } from "@/lib/server/people/queries";
 import { addMember, joinAsFirst, startFleet } from "@/lib/server/people/start-fleet";
 import { getCurrentTreeVersion, getTreeVersion } from "@/lib/server/trees/queries";
@@ -83,7 +85,7 @@ async function tellRepair(as: As, repair: DemoRepair, today: Date): Promise<void
       doneAt: whenAt(engine, repair.at, today).toISOString(),
       outcome: proof ? "cured" : "held",
       ...{ cause, causeInWords, remedyInWords, proof, minutes, note },
-      ...(engine.meter.length > 0 ? { engineHours: repair.at } : {}),
+      ...(engine.hoursPerYear === undefined ? { engineHours: repair.at } : {}),
       symptoms: repair.symptom ? [repair.symptom] : [],
       parts: (repair.parts ?? []).map((title) => ({ title, quantity: 1 })),
     }),
@@ -98,7 +100,7 @@ async function addDemoEngine(as: As, engine: DemoEngine, today: Date): Promise<v
       boatId: steadyId(boat),
       name,
       profile,
-      hasHourMeter: meter.length > 0,
+      hasHourMeter: hoursPerYear === undefined,
       ...(hoursPerYear === undefined ? {} : { estimatedHoursPerYear: hoursPerYear }),
     }),
   );
@@ -115,6 +117,10 @@ async function tellRun(as: As, run: DemoRun, today: Date, steps?: number): Promi
   const { key, symptom, cause, complaint, note, at } = run;
   await as(run.by, "diagnosis:write", async (scope) => {
     const { document, id } = await getTreeVersion(scope, (await getCurrentTreeVersion(scope)).id);
+    const beginsAt = steps === undefined ? whenAt(engine, at, today) : daysBefore(today, 1, 16);
+    const before = (await listLog(scope, { engineId: steadyId(engine.key), limit: 200 })).items.filter(
+      (line) => new Date(line.at) < beginsAt,
+    );
     const events = play({
       key,
       device: steadyId(`${run.by}'s phone`),
@@ -125,7 +131,8 @@ async function tellRun(as: As, run: DemoRun, today: Date, steps?: number): Promi
       symptom,
       complaint,
       cause,
-      beginsAt: steps === undefined ? whenAt(engine, at, today) : daysBefore(today, 1, 16),
+      beginsAt,
+      multipliers: multipliersFor(document, before),
       ...(steps === undefined ? { engineHours: at } : { steps }),
       proved: run.proved !== false,
       note,

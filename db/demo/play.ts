@@ -1,5 +1,5 @@
 import type { EngineProfile } from "@/lib/core/contract/engine";
-import type { Answer, DiagnosisEvent, EventKind, EventOf } from "@/lib/core/contract/event";
+import type { Answer, DiagnosisEvent, EventKind, EventOf, Multiplier } from "@/lib/core/contract/event";
 import { CORE_VERSION } from "@/lib/core/diagnosis/core-version";
 import { keepModels } from "@/lib/core/diagnosis/keep-models";
 import { view } from "@/lib/core/diagnosis/show";
@@ -20,6 +20,8 @@ export type Play = {
   /** What is really wrong: every answer follows from it. */
   cause: string;
   beginsAt: Date;
+  /** What the engine's log says of its odds before the first question. */
+  multipliers: Multiplier[];
   /** Leave after so many steps, with nothing decided. */
   steps?: number;
   engineHours?: number | undefined;
@@ -66,7 +68,7 @@ export function play(run: Play): DiagnosisEvent[] {
     person: "skipper-in-port",
     symptoms: [run.symptom],
     complaint,
-    multipliers: [],
+    multipliers: run.multipliers,
     coreVersion: CORE_VERSION,
   });
   for (const rule of view(tree, events, models).rulesToAsk) write("rule-answered", { rule: rule.key, answer: "no" });

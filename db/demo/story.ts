@@ -43,7 +43,7 @@ export type DemoEngine = {
   profile: EngineProfile;
   /** Without a meter: hours run in a usual year. */
   hoursPerYear?: number;
-  /** What the meter showed so many days before today: [days before, hours], oldest first. */
+  /** What the meter showed, or somebody reckoned, so many days before today: [days before, hours], oldest first. */
   meter: readonly (readonly [number, number])[];
 };
 
@@ -108,7 +108,8 @@ export const ENGINES: readonly DemoEngine[] = [
     name: "main engine",
     profile: { features: {}, figures: {}, healthy: {} },
     hoursPerYear: 90,
-    meter: [],
+    // What the last owner reckoned.
+    meter: [[545, 1100]],
   },
 ];
 
