@@ -39,3 +39,8 @@ function waitingMinutes(needs: EngineState, engine: EngineStanding): number {
   if (needs === "idling" || needs === "under-load") return engine.running ? 0 : COSTS.start;
   return 0;
 }
+
+/** What the clock will show: work, waiting, opening and try-out, without the price of mess and harm. */
+export function clockMinutes(step: Check | Remedy, engine: EngineStanding): number {
+  return step.minutes * COSTS.access[step.access] + ("tryOut" in step ? step.tryOut.minutes : 0) + standingMinutes(step, engine);
+}

@@ -10,9 +10,14 @@ import { minutesSaid } from "./words";
  * apart, what a finding would leave, what it costs. Rule [X4].
  *
  * @param clears titles of the rules in force that the step can lift.
+ * @param minutes what the clock will show; null for a call.
  */
-export function whyStep(model: Model, evidence: Evidence, step: NextStep, clears: readonly string[]): string {
-  const parts = [leadOf(model, evidence, step, clears), tellsOf(model, evidence, step), costOf(model, step)];
+export function whyStep(model: Model, evidence: Evidence, step: NextStep, clears: readonly string[], minutes: number | null): string {
+  const parts = [
+    leadOf(model, evidence, step, clears),
+    tellsOf(model, evidence, step),
+    minutes === null ? "" : costOf(model, step, minutes),
+  ];
   return parts.filter((part) => part !== "").join(" ");
 }
 
@@ -53,9 +58,12 @@ const of100 = (share: number): string => {
 function tellsOf(model: Model, evidence: Evidence, step: NextStep): string {
   if (step.kind === "call") return "";
   if (step.kind === "remedy") {
-    const cure = model.remedies[model.remedyAt.get(step.key) ?? -1]?.cure ?? new Float64Array(0);
-    const chance = cure.reduce((sum, one, index) => sum + one * (step.shares[index] ?? 0), 0);
-    return `It would cure ${of100(chance)} engines like this one, and if it does not, that tells something too.`;
+    const tried = model.remedies[model.remedyAt.get(step.key) ?? -1];
+    const chance = tried?.cure.reduce((sum, one, index) => sum + one * (step.shares[index] ?? 0), 0) ?? 0;
+    const would = tried?.remedy.temporary
+      ? `It would keep ${of100(chance)} engines like this one going for now`
+      : `It would cure ${of100(chance)} engines like this one`;
+    return `${would}, and if it does not, that tells something too.`;
   }
   const check = model.checks[model.checkAt.get(step.key) ?? -1];
   return check ? separates(model, evidence, check, step.shares) : "";
@@ -93,8 +101,7 @@ function swingsOf(model: Model, evidence: Evidence, check: CheckModel, shares: F
   return swings.sort((a, b) => b.most.share - b.least.share - (a.most.share - a.least.share) || a.index - b.index);
 }
 
-function costOf(model: Model, step: NextStep): string {
-  if (step.kind === "call") return "";
+function costOf(model: Model, step: NextStep, minutes: number): string {
   const known =
     step.kind === "check"
       ? model.checks[model.checkAt.get(step.key) ?? -1]?.check
@@ -109,6 +116,5 @@ function costOf(model: Model, step: NextStep): string {
     flags.opensFuelClean ||
     flags.opensHighPressureFuel ||
     flags.opensHoseBelowWater;
-  const minutes = minutesSaid(step.minutes);
-  return `Costs ${minutes}${opens || step.kind === "remedy" ? "" : "; nothing has to be opened"}.`;
+  return `Costs ${minutesSaid(minutes)}${opens || step.kind === "remedy" ? "" : "; nothing has to be opened"}.`;
 }

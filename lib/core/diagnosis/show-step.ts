@@ -1,7 +1,8 @@
 import { safetyOf, cautionsOf } from "../tree/safety-steps";
 import type { Check, Remedy } from "../tree/schema";
 import { bandsOf } from "../units/bands";
-import type { Evidence } from "./evidence";
+import { clockMinutes } from "./costs";
+import { AT_REST, type Evidence } from "./evidence";
 import { reportedIn } from "./finding-weight";
 import type { Model } from "./model";
 import type { NextStep } from "./next-step";
@@ -10,19 +11,19 @@ import type { StepShown } from "./view";
 
 /** A step as the screen shows it: cautions and safety steps in place, answers, bands in numbers. Rules [X4], [X5]. */
 export function showStep(model: Model, evidence: Evidence, step: NextStep, clears: readonly string[]): StepShown {
-  const why = whyStep(model, evidence, step, clears);
-  if (step.kind === "call") return { ...CALL, why, minutes: Math.round(step.minutes) };
+  if (step.kind === "call") return { ...CALL, why: whyStep(model, evidence, step, clears, null), minutes: Math.round(step.minutes) };
   const compiled =
     step.kind === "check" ? model.checks[model.checkAt.get(step.key) ?? -1] : model.remedies[model.remedyAt.get(step.key) ?? -1];
   if (!compiled) throw new Error(`the planner chose "${step.key}", which the model does not have`);
   const node: Check | Remedy = "check" in compiled ? compiled.check : compiled.remedy;
+  const minutes = clockMinutes(node, evidence.standing ?? AT_REST);
   const safety = safetyOf(node, model.setting.profile);
   const marked = (texts: readonly string[], isSafety: boolean) => texts.map((text) => ({ text, safety: isSafety }));
   const shown = {
     key: node.key,
     title: node.title,
-    why,
-    minutes: Math.max(1, Math.round(step.minutes)),
+    why: whyStep(model, evidence, step, clears, minutes),
+    minutes: Math.max(1, Math.round(minutes)),
     engine: node.engine,
     tools: node.tools,
     ifFitted: compiled.share < 1,
