@@ -11,26 +11,24 @@ import { NotReady } from "./not-ready";
 
 /** The skipper's path, from the choice of an engine to the outcome. */
 export function Diagnose() {
-  const { address, go, back } = useAddress();
+  const { address, go } = useAddress();
   if (!address)
     return (
       <Frame ready={null} who="Gudgeon">
         <p>Opening what is kept on this phone.</p>
       </Frame>
     );
-  return <Awake address={address} go={go} back={back} />;
+  return <Awake address={address} go={go} />;
 }
 
-type Props = { address: Address; go: ReturnType<typeof useAddress>["go"]; back: () => void };
+type Props = { address: Address; go: ReturnType<typeof useAddress>["go"] };
 
-function Awake({ address, go, back }: Props) {
+function Awake({ address, go }: Props) {
   const [surface] = useState(() => new Surface());
   const [reasoner] = useState(() => new Reasoner());
   const [fleetWanted] = useState(address.fleet);
   useEffect(() => surface.start(fleetWanted), [surface, fleetWanted]);
   const state = useObservable(surface.state);
   if (state.kind !== "ready") return <NotReady kind={state.kind} />;
-  return (
-    <Fleet key={`${state.person.userId} ${state.person.fleetId}`} ready={state} reasoner={reasoner} address={address} go={go} back={back} />
-  );
+  return <Fleet key={`${state.person.userId} ${state.person.fleetId}`} ready={state} reasoner={reasoner} address={address} go={go} />;
 }

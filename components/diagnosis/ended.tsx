@@ -18,7 +18,7 @@ const SAYS: Record<OutcomeKind, string> = {
 
 /** What was logged, what was used, and the way on. */
 export function Ended() {
-  const { view, tree, record, go, ready, summary } = useHere();
+  const { view, tree, record, go, toEngines, ready, summary } = useHere();
   const { outcome } = view;
   if (!outcome) return <ScreenHeading of="ended">One moment</ScreenHeading>;
   const cause = outcome.cause ? tree.causes.find(({ key }) => key === outcome.cause)?.title : outcome.causeInWords;
@@ -58,9 +58,9 @@ export function Ended() {
         </div>
       )}
       <div className="mt-6 grid gap-3">
-        <LinkButton href="/diagnose" tone="strong" size="large" wide>
+        <Button tone="strong" size="large" wide onClick={toEngines}>
           To the engines
-        </LinkButton>
+        </Button>
         {outcome.outcome === "handed-over" && (
           <Button size="large" wide onClick={() => go("hand-over")}>
             The hand-over page

@@ -11,10 +11,10 @@ import { Frame } from "./frame";
 import { OpenDiagnosis } from "./open-diagnosis";
 import { Say } from "./say";
 
-type Props = { ready: Ready; reasoner: Reasoner; address: Address; go: ReturnType<typeof useAddress>["go"]; back: () => void };
+type Props = { ready: Ready; reasoner: Reasoner; address: Address; go: ReturnType<typeof useAddress>["go"] };
 
 /** With a store open: the engine, what is wrong with it, or a diagnosis under way. */
-export function Fleet({ ready, reasoner, address, go, back }: Props) {
+export function Fleet({ ready, reasoner, address, go }: Props) {
   const phone = usePhone(ready.store);
   const { trouble } = useObservable(ready.exchange.standing);
   if (!phone)
@@ -29,8 +29,8 @@ export function Fleet({ ready, reasoner, address, go, back }: Props) {
         )}
       </Frame>
     );
-  if (address.d) return <OpenDiagnosis key={address.d} id={address.d} {...{ ready, reasoner, phone, address, go, back }} />;
+  if (address.d) return <OpenDiagnosis key={address.d} id={address.d} {...{ ready, reasoner, phone, address, go }} />;
   const engine = phone.engines.find(({ id }) => id === address.engine);
-  if (engine) return <Say key={engine.id} {...{ ready, phone, engine, address, go, back }} />;
+  if (engine) return <Say key={engine.id} {...{ ready, phone, engine, address, go }} />;
   return <ChooseEngine {...{ ready, phone, go }} />;
 }

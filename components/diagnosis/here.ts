@@ -24,7 +24,7 @@ export type Here = {
   address: Address;
   /** Goes to another screen of this diagnosis. */
   go: (at: Address["at"], which?: string, how?: "push" | "replace") => void;
-  back: () => void;
+  toEngines: () => void;
   record: Recorder;
   /** What was said last on this screen, to be undone with one tap. */
   undo: { event: string; says: string; withdraws: string | null } | null;

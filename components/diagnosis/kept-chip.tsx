@@ -1,5 +1,6 @@
 "use client";
 
+import Link from "next/link";
 import { standingInShort, standingInWords } from "@/lib/client/exchange/standing";
 import type { Ready } from "@/lib/client/screen/surface";
 import { useObservable } from "@/lib/client/screen/use-observable";
@@ -20,9 +21,9 @@ export function KeptLine({ ready }: { ready: Ready }) {
     <div className="flex flex-wrap items-center gap-x-3 text-sm text-ink-2">
       <p role="status">{standingInWords(standing, unsaved)}</p>
       {standing.trouble === "sign-in" && (
-        <a className="link inline-flex min-h-12 items-center" href="/sign-in?next=/diagnose">
+        <Link className="link inline-flex min-h-12 items-center" href="/sign-in?next=/diagnose" prefetch={false}>
           Sign in
-        </a>
+        </Link>
       )}
       {standing.waiting > 0 && standing.trouble !== "sign-in" && !standing.sending && (
         <button type="button" className="link min-h-12" onClick={() => ready.exchange.nudge(true)}>

@@ -1,3 +1,4 @@
+import Link from "next/link";
 import { LinkButton } from "@/components/ui/link-button";
 import { Notice } from "@/components/ui/notice";
 import type { SurfaceState } from "@/lib/client/screen/surface";
@@ -25,9 +26,9 @@ export function NotReady({ kind }: { kind: Exclude<SurfaceState["kind"], "ready"
       {kind === "no-fleet" && (
         <Notice tone="look" title="You do not belong to a fleet yet">
           Accept an invitation from its owner, or start your own from the{" "}
-          <a className="link" href="/">
+          <Link className="link" href="/">
             front page
-          </a>
+          </Link>
           .
         </Notice>
       )}

@@ -6,7 +6,7 @@ import type { Ready } from "@/lib/client/screen/surface";
 import type { Address, useAddress } from "@/lib/client/screen/use-address";
 import { useDiagnosis } from "@/lib/client/screen/use-diagnosis";
 import type { Phone } from "@/lib/core/contract/phone";
-import { LinkButton } from "@/components/ui/link-button";
+import { Button } from "@/components/ui/button";
 import { Notice } from "@/components/ui/notice";
 import { DiagnosisFrame } from "./diagnosis-frame";
 import { Frame } from "./frame";
@@ -20,14 +20,14 @@ type Props = {
   phone: Phone;
   address: Address;
   go: ReturnType<typeof useAddress>["go"];
-  back: () => void;
 };
 
 /** One diagnosis: reads it from the store and hands it to its screens. */
-export function OpenDiagnosis({ id, ready, reasoner, phone, address, go, back }: Props) {
+export function OpenDiagnosis({ id, ready, reasoner, phone, address, go }: Props) {
   const state = useDiagnosis(ready, reasoner, id);
   const [undo, setUndo] = useState<Here["undo"]>(null);
   const goHere = useCallback<Here["go"]>((at, which, how) => go({ d: id, at, which: which ?? null }, how), [go, id]);
+  const toEngines = useCallback(() => go({ at: "engines" }), [go]);
   const { summary, tree, view } = state;
   const engine = phone.engines.find((one) => one.id === summary?.engineId);
   const here = useMemo<Here | null>(
@@ -44,13 +44,13 @@ export function OpenDiagnosis({ id, ready, reasoner, phone, address, go, back }:
             thinking: state.thinking,
             address,
             go: goHere,
-            back,
+            toEngines,
             record: state.record,
             undo,
             setUndo,
           }
         : null,
-    [ready, phone, engine, tree, view, summary, state.events, state.thinking, address, goHere, back, state.record, undo],
+    [ready, phone, engine, tree, view, summary, state.events, state.thinking, address, goHere, toEngines, state.record, undo],
   );
   if (here)
     return (
@@ -67,9 +67,9 @@ export function OpenDiagnosis({ id, ready, reasoner, phone, address, go, back }:
           <Notice tone="look" title="This diagnosis is not on this phone">
             It was begun on another phone, or belongs to another fleet. With a signal it is fetched from the server.
           </Notice>
-          <LinkButton href="/diagnose" tone="strong">
+          <Button tone="strong" onClick={toEngines}>
             To the engines
-          </LinkButton>
+          </Button>
         </div>
       ) : state.failure ? (
         <Notice tone="bad" title="The next step could not be worked out" live>

@@ -20,7 +20,7 @@ import { ScreenHeading } from "./screen-heading";
 import { SymptomHits } from "./symptom-hits";
 import { SymptomList } from "./symptom-list";
 
-type Props = { ready: Ready; phone: Phone; engine: Engine; address: Address; go: ReturnType<typeof useAddress>["go"]; back: () => void };
+type Props = { ready: Ready; phone: Phone; engine: Engine; address: Address; go: ReturnType<typeof useAddress>["go"] };
 
 const NUMBERS = ["", "this one", "these two", "these three", "these four", "these five", "these six"];
 

@@ -34,11 +34,12 @@ export async function takeInFromServer(store: PhoneStore, fleetId: string, diagn
   await store.takeIn(events.flatMap((event) => known(event)));
 }
 
-/** What the server adds to an event (who, when received) is not part of the event. */
+/** What the server adds to an event, and what is no part of it. */
+const ADDED = new Set(["receivedAt", "by", "byName"]);
+
 function known(event: unknown): DiagnosisEvent[] {
   if (typeof event !== "object" || event === null) return [];
-  const { receivedAt: _receivedAt, by: _by, byName: _byName, ...sent } = event as Record<string, unknown>;
-  const parsed = DiagnosisEvent.safeParse(sent);
+  const parsed = DiagnosisEvent.safeParse(Object.fromEntries(Object.entries(event).filter(([key]) => !ADDED.has(key))));
   return parsed.success ? [parsed.data] : [];
 }
 

@@ -61,7 +61,7 @@ export function writeAddress(address: Partial<Address>): string {
 }
 
 /** The address, and a way to another that asks no server: null before the page has woken up. */
-export function useAddress(): { address: Address | null; go: (to: Partial<Address>, how?: "push" | "replace") => void; back: () => void } {
+export function useAddress(): { address: Address | null; go: (to: Partial<Address>, how?: "push" | "replace") => void } {
   const search = useSyncExternalStore(
     watch,
     () => window.location.search,
@@ -74,6 +74,5 @@ export function useAddress(): { address: Address | null; go: (to: Partial<Addres
     else window.history.replaceState(null, "", url);
     window.dispatchEvent(new Event(MOVED));
   }, []);
-  const back = useCallback(() => window.history.back(), []);
-  return { address, go, back };
+  return { address, go };
 }
