@@ -30,7 +30,7 @@ const change = async (folder: string, from: RegExp, to: string) => {
   await writeFile(file, before.replace(from, to));
 };
 
-describe("loading the shipped tree", () => {
+describe("loading the shipped tree", { timeout: 60_000 }, () => {
   test("makes a version once, in two starts at once as well", async () => {
     const [a, b] = await Promise.all([loadShippedTree(ownerUrl), loadShippedTree(ownerUrl)]);
     expect([a.number, b.number, a.id === b.id]).toEqual([1, 1, true]);
