@@ -47,9 +47,13 @@ export async function loadShippedTree(ownerUrl: string, folder = SHIPPED_TREE_FO
 
 async function soundTree(folder: string): Promise<FaultTree> {
   const read = await readTreeFolder(folder);
-  if ("faults" in read) throw new Error([`The tree in ${folder} cannot be read:`, ...read.faults.map((f) => `${f.file}:${f.line}: ${f.says} ${f.mend}`)].join("\n"));
+  if ("faults" in read)
+    throw new Error(
+      [`The tree in ${folder} cannot be read:`, ...read.faults.map((f) => `${f.file}:${f.line}: ${f.says} ${f.mend}`)].join("\n"),
+    );
   const parsed = parseTree(read.document);
   const flaws = "flaws" in parsed ? parsed.flaws : findFlaws(parsed.tree).filter((flaw) => flaw.severity === "error");
-  if ("flaws" in parsed || flaws.length > 0) throw new Error([`The tree in ${folder} is not sound:`, ...flaws.map((flaw) => flaw.says)].join("\n"));
+  if ("flaws" in parsed || flaws.length > 0)
+    throw new Error([`The tree in ${folder} is not sound:`, ...flaws.map((flaw) => flaw.says)].join("\n"));
   return parsed.tree;
 }

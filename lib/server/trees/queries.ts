@@ -7,16 +7,31 @@ import type { FaultTree } from "@/lib/core/tree/schema";
 import type { FleetScope } from "@/lib/server/auth/scope";
 import { keptDocument } from "./kept-documents";
 
-
-
-const shipped = { id: shippedTreeVersions.id, key: shippedTreeVersions.key, title: shippedTreeVersions.title, number: shippedTreeVersions.number, hash: shippedTreeVersions.hash, publishedAt: shippedTreeVersions.publishedAt };
-const own = { id: treeVersions.id, key: trees.key, title: trees.title, number: treeVersions.number, hash: treeVersions.hash, publishedAt: treeVersions.publishedAt };
+const shipped = {
+  id: shippedTreeVersions.id,
+  key: shippedTreeVersions.key,
+  title: shippedTreeVersions.title,
+  number: shippedTreeVersions.number,
+  hash: shippedTreeVersions.hash,
+  publishedAt: shippedTreeVersions.publishedAt,
+};
+const own = {
+  id: treeVersions.id,
+  key: trees.key,
+  title: trees.title,
+  number: treeVersions.number,
+  hash: treeVersions.hash,
+  publishedAt: treeVersions.publishedAt,
+};
 type Row = { id: string; key: string; title: string; number: number | null; hash: string; publishedAt: Date | null };
 
 /** All published versions that this fleet can see: its own and the shipped ones, newest first; never a document. */
 export async function listTreeVersions(scope: FleetScope): Promise<TreeVersionInfo[]> {
   const ours = await ownVersions(scope);
-  const theirs = await scope.tx.select(shipped).from(shippedTreeVersions).orderBy(desc(shippedTreeVersions.publishedAt), desc(shippedTreeVersions.number));
+  const theirs = await scope.tx
+    .select(shipped)
+    .from(shippedTreeVersions)
+    .orderBy(desc(shippedTreeVersions.publishedAt), desc(shippedTreeVersions.number));
   return [...ours.map((row) => infoOf(row, "own")), ...theirs.map((row) => infoOf(row, "shipped"))];
 }
 
@@ -24,8 +39,18 @@ export async function listTreeVersions(scope: FleetScope): Promise<TreeVersionIn
 export async function getCurrentTreeVersion(scope: FleetScope): Promise<TreeVersionInfo> {
   const [ours] = await ownVersions(scope);
   if (ours) return infoOf(ours, "own");
-  const [newest] = await scope.tx.select(shipped).from(shippedTreeVersions).orderBy(desc(shippedTreeVersions.publishedAt), desc(shippedTreeVersions.number)).limit(1);
-  if (!newest) throw new Problem(503, "no-tree", "There is no fault tree yet", "The server has been started without its fault tree. Start it again with npm start.");
+  const [newest] = await scope.tx
+    .select(shipped)
+    .from(shippedTreeVersions)
+    .orderBy(desc(shippedTreeVersions.publishedAt), desc(shippedTreeVersions.number))
+    .limit(1);
+  if (!newest)
+    throw new Problem(
+      503,
+      "no-tree",
+      "There is no fault tree yet",
+      "The server has been started without its fault tree. Start it again with npm start.",
+    );
   return infoOf(newest, "shipped");
 }
 
@@ -49,7 +74,10 @@ export function documentOf(scope: FleetScope, version: Pick<TreeVersionInfo, "id
   const isShipped = version.from === "shipped";
   return keptDocument(isShipped ? version.id : `${scope.fleetId}/${version.id}`, async () => {
     const [row] = isShipped
-      ? await scope.tx.select({ document: shippedTreeVersions.document }).from(shippedTreeVersions).where(eq(shippedTreeVersions.id, version.id))
+      ? await scope.tx
+          .select({ document: shippedTreeVersions.document })
+          .from(shippedTreeVersions)
+          .where(eq(shippedTreeVersions.id, version.id))
       : await scope.tx
           .select({ document: treeVersions.document })
           .from(treeVersions)
@@ -69,5 +97,13 @@ async function ownVersions(scope: FleetScope): Promise<Row[]> {
 }
 
 function infoOf(row: Row, from: TreeVersionInfo["from"]): TreeVersionInfo {
-  return { id: row.id, key: row.key, title: row.title, number: row.number ?? 0, hash: row.hash, publishedAt: (row.publishedAt ?? new Date(0)).toISOString(), from };
+  return {
+    id: row.id,
+    key: row.key,
+    title: row.title,
+    number: row.number ?? 0,
+    hash: row.hash,
+    publishedAt: (row.publishedAt ?? new Date(0)).toISOString(),
+    from,
+  };
 }
