@@ -1,11 +1,11 @@
-import { connection } from "next/server";
 import { NothingHere } from "@/components/shell/nothing-here";
 import { PlainFrame } from "@/components/shell/plain-frame";
 import { LinkButton } from "@/components/ui/link-button";
 
-export default async function NoSuchPage() {
-  // Made for each request, so that it can carry the nonce that its scripts are allowed by.
-  await connection();
+export const metadata = { title: "Nothing here" };
+
+/** Made when Gudgeon is built: one page made for each request would make every page so, the skipper's surface too. */
+export default function NoSuchPage() {
   return (
     <PlainFrame>
       <NothingHere action={<LinkButton href="/">To the front page</LinkButton>} />
