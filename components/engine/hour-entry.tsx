@@ -2,7 +2,7 @@
 
 import { zodResolver } from "@hookform/resolvers/zod";
 import { useRouter } from "next/navigation";
-import { useState } from "react";
+import { useEffect, useState } from "react";
 import { useForm } from "react-hook-form";
 import { uuidv7 } from "uuidv7";
 import * as z from "zod";
@@ -27,6 +27,9 @@ export function HourEntry({ fleetId, engineId }: { fleetId: string; engineId: st
   const { saving, refusal, save } = useSave();
   const fresh = (): Values => ({ reading: "", day: today(), reset: false });
   const form = useForm({ resolver: zodResolver(Values), defaultValues: { reading: "", day: "", reset: false } });
+  // Only the browser knows which day it is where the engine is.
+  const { setValue } = form;
+  useEffect(() => setValue("day", today()), [setValue]);
   const submit = form.handleSubmit(async ({ reading, day, reset }) => {
     setSaved(false);
     const outcome = await save(() =>
@@ -40,7 +43,7 @@ export function HourEntry({ fleetId, engineId }: { fleetId: string; engineId: st
   const { errors } = form.formState;
   const says = refusal?.errors.find(({ path }) => path === "reading")?.says;
   return (
-    <form className="grid gap-4" onSubmit={submit} noValidate onFocus={() => form.getValues("day") === "" && form.setValue("day", today())}>
+    <form className="grid gap-4" onSubmit={submit} noValidate>
       <div className="grid gap-4 sm:grid-cols-2">
         <TextField
           id="reading"

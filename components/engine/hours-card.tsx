@@ -20,7 +20,7 @@ export function HoursCard({ fleetId, engine }: { fleetId: string; engine: Engine
         )}
         {moved && engine.hasHourMeter && (
           <span className="text-ink-2">
-            . The meter was replaced: <span className="dial">{Math.round(engine.hoursSinceNew ?? 0)} h</span> since new, which the log
+            . The meter was replaced: <span className="dial">{Math.round(engine.hoursSinceNew ?? 0)}</span> h since new, which the log
             counts in
           </span>
         )}

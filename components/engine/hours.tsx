@@ -6,8 +6,7 @@ export function Hours({ engine }: { engine: Pick<Engine, "hours" | "hoursAreEsti
   return (
     <span className="whitespace-nowrap">
       {engine.hoursAreEstimated && "about "}
-      <span className="dial">{Math.round(engine.hours)} h</span>
-      {engine.hoursAreEstimated && ", estimated"}
+      <span className="dial">{Math.round(engine.hours)}</span> h{engine.hoursAreEstimated && ", estimated"}
     </span>
   );
 }

@@ -10,7 +10,7 @@ import { FIGURES, HEALTHY } from "./figures";
 
 type Props = { features: readonly Feature[]; register: UseFormRegister<EngineValues>; errors: FieldErrors<EngineValues> };
 
-const twoColumns = "grid gap-x-5 gap-y-4 md:grid-cols-2";
+const twoColumns = "grid items-end gap-x-5 gap-y-4 md:grid-cols-2";
 
 /** What the engine is. Nothing here has to be known; each answer saves a question or makes one sharper. */
 export function ProfileFields({ features, register, errors }: Props) {

@@ -7,7 +7,7 @@ export function RepeatPanel({ repeat }: { repeat: RepeatFault }) {
   const gaps = inHours ? repeat.gapsHours : repeat.gapsDays;
   const unit = inHours ? "h" : "d";
   return (
-    <section className="grid gap-5 rounded-xl border-[1.5px] border-lead bg-lead-wash px-4 py-4 sm:px-5 md:grid-cols-[1fr_20rem]">
+    <section className="grid gap-5 rounded-xl border-[1.5px] border-lead bg-linear-to-r from-lead-wash to-sheet px-4 py-4 sm:px-5 md:grid-cols-[1fr_20rem]">
       <div>
         <p className="text-sm font-bold text-lead">Came back</p>
         <h2>{repeatInWords(repeat)}</h2>

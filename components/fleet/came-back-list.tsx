@@ -19,7 +19,10 @@ export function CameBackList({
   });
   if (lines.length === 0) return null;
   return (
-    <section aria-labelledby="came-back" className="rounded-xl border-[1.5px] border-lead bg-lead-wash px-4 py-4 sm:px-5">
+    <section
+      aria-labelledby="came-back"
+      className="rounded-xl border-[1.5px] border-lead bg-linear-to-r from-lead-wash to-sheet px-4 py-4 sm:px-5"
+    >
       <h2 id="came-back">Came back</h2>
       <ul className="mt-1">
         {lines.map(({ repeat, engine }) => (

@@ -10,11 +10,11 @@ export function BelievedThen({ believed, others, unknown }: Props) {
     { key: "unknown", title: "Something not in this tree", of100: unknown, named: false },
   ].filter(({ of100 }) => of100 > 0);
   return (
-    <div className="mt-3">
+    <div>
       <p className="text-sm text-ink-2">Believed then, of 100 engines like this:</p>
       <ul className="mt-1 grid max-w-2xl gap-0.5 text-sm">
         {rows.map(({ key, title, of100, named }) => (
-          <li key={key} className="grid grid-cols-[2.5rem_minmax(0,1fr)] items-center gap-x-2 sm:grid-cols-[2.5rem_9rem_minmax(0,1fr)]">
+          <li key={key} className="grid grid-cols-[2.5rem_minmax(0,1fr)] items-center gap-x-2 sm:grid-cols-[2.5rem_6rem_minmax(0,1fr)]">
             <span className="dial text-right">{of100}</span>
             <svg
               viewBox="0 0 100 8"

@@ -7,8 +7,8 @@ export function EntryMore({ entry }: { entry: LogEntry }) {
     (line): line is string => Boolean(line),
   );
   return (
-    <details className="text-ink-2">
-      <summary className="inline-flex min-h-12 items-center sm:min-h-8">More</summary>
+    <details>
+      <summary className="link inline-flex min-h-12 items-center sm:min-h-8">More</summary>
       {lines.map((line) => (
         <p key={line} className="max-w-md">
           {line}

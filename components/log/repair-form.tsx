@@ -5,7 +5,6 @@ import { useRouter } from "next/navigation";
 import { useState } from "react";
 import { useForm, useWatch } from "react-hook-form";
 import { uuidv7 } from "uuidv7";
-import { today } from "@/components/form/day-typed";
 import { FormEnd } from "@/components/form/form-end";
 import { useSave } from "@/components/form/use-save";
 import { Segmented } from "@/components/ui/segmented";
@@ -59,14 +58,7 @@ export function RepairForm({ fleetId, engineId, hasHourMeter, choices }: Props) 
   return (
     <form className="grid max-w-2xl gap-5" onSubmit={submit} noValidate>
       <div className="grid gap-4 sm:grid-cols-2">
-        <TextField
-          id="day"
-          type="date"
-          label="Done on"
-          error={errors.day?.message}
-          {...register("day")}
-          onFocus={() => form.getValues("day") === "" && setValue("day", today())}
-        />
+        <TextField id="day" type="date" label="Done on" error={errors.day?.message} {...register("day")} />
         {hasHourMeter && (
           <TextField
             id="hours"

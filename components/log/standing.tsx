@@ -5,6 +5,14 @@ const hours = (h: number) => `${Math.round(h).toLocaleString("en-GB")} h`;
 
 /** How a logged cure stands: it held so long, it came back, it was only held, or it is still open. */
 export function Standing({ entry }: { entry: LogEntry }) {
+  return (
+    <span className="whitespace-nowrap">
+      <StandingChip entry={entry} />
+    </span>
+  );
+}
+
+function StandingChip({ entry }: { entry: LogEntry }) {
   if (entry.outcome === null) return <Chip tone="buoy">Open</Chip>;
   if (entry.outcome === "handed-over") return <Chip tone="quiet">Handed over</Chip>;
   if (entry.outcome === "broken-off") return <Chip tone="quiet">Broken off</Chip>;

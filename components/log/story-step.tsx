@@ -8,37 +8,39 @@ type Props = { fleetId: string; step: StoryStep; /** What it changed in belief i
 export function StoryStepView({ fleetId, step, showsBelief }: Props) {
   const outOfTurn = step.askedWhy === null && (step.kind === "answered" || step.kind === "remedy-tried");
   return (
-    <li className="break-inside-avoid border-l-4 border-shoal pl-4 print:border-rule">
-      <p className="text-sm text-ink-2">
-        <Moment at={step.at} />, {step.by}
-      </p>
-      <h3>{step.title}</h3>
-      {step.askedWhy && (
+    <li className="grid break-inside-avoid gap-x-6 gap-y-3 border-l-4 border-shoal pl-4 lg:grid-cols-[minmax(0,1fr)_25rem] print:border-rule">
+      <div>
         <p className="text-sm text-ink-2">
-          {step.kind === "rule-answered" ? "Because" : "Asked, because"}: {step.askedWhy}
+          <Moment at={step.at} />, {step.by}
         </p>
-      )}
-      {outOfTurn && <p className="text-sm text-ink-2">Said without being asked.</p>}
-      {step.says && <p className="mt-1 font-semibold">{step.says}</p>}
-      {step.note && <p className="mt-1 whitespace-pre-line">“{step.note}”</p>}
-      {step.photos.length > 0 && (
-        <ul className="mt-2 flex flex-wrap gap-2">
-          {step.photos.map((id, i) => (
-            <li key={id}>
-              <a href={`/api/v1/fleets/${fleetId}/files/${id}`}>
-                {/* eslint-disable-next-line @next/next/no-img-element -- behind the fleet's wall: the image service may not fetch it */}
-                <img
-                  src={`/api/v1/fleets/${fleetId}/files/${id}`}
-                  alt={`Photo ${i + 1} taken at: ${step.title}`}
-                  loading="lazy"
-                  className="h-40 w-auto rounded-lg border border-rule"
-                />
-              </a>
-            </li>
-          ))}
-        </ul>
-      )}
-      {showsBelief && <BelievedThen {...step} />}
+        <h3>{step.title}</h3>
+        {step.askedWhy && (
+          <p className="text-sm text-ink-2">
+            {step.kind === "rule-answered" ? "Because" : "Asked, because"}: {step.askedWhy}
+          </p>
+        )}
+        {outOfTurn && <p className="text-sm text-ink-2">Said without being asked.</p>}
+        {step.says && <p className="mt-1 font-semibold">{step.says}</p>}
+        {step.note && <p className="mt-1 whitespace-pre-line">“{step.note}”</p>}
+        {step.photos.length > 0 && (
+          <ul className="mt-2 flex flex-wrap gap-2">
+            {step.photos.map((id, i) => (
+              <li key={id}>
+                <a href={`/api/v1/fleets/${fleetId}/files/${id}`}>
+                  {/* eslint-disable-next-line @next/next/no-img-element -- behind the fleet's wall: the image service may not fetch it */}
+                  <img
+                    src={`/api/v1/fleets/${fleetId}/files/${id}`}
+                    alt={`Photo ${i + 1} taken at: ${step.title}`}
+                    loading="lazy"
+                    className="h-40 w-auto rounded-lg border border-rule"
+                  />
+                </a>
+              </li>
+            ))}
+          </ul>
+        )}
+      </div>
+      {showsBelief && <BelievedThen believed={step.believed} others={step.others} unknown={step.unknown} />}
     </li>
   );
 }

@@ -32,7 +32,9 @@ export function PersonCard({ fleetId, person, isSelf, manage }: Props) {
       </p>
       {manage && (
         <details className="no-print">
-          <summary className="link flex min-h-12 items-center">Change {person.name}’s roles or remove them</summary>
+          <summary className="link flex min-h-12 items-center">
+            {isSelf ? "Change your roles" : `Change ${person.name}’s roles or remove them`}
+          </summary>
           <div className="mt-2 grid gap-5">
             <RolesForm key={person.version} action={manage.changeRoles} hidden={hidden} person={person} />
             {!isSelf && (

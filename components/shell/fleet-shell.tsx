@@ -37,7 +37,7 @@ export function FleetShell({ fleet, fleets, personName, children }: Props) {
           </div>
         </details>
         <div className="hidden lg:block">
-          {fleet && <p className="px-3 pb-2 text-sm">{fleet.name}</p>}
+          {fleet && <p className="mb-2 border-b border-on-deep/25 px-3 pb-3 font-semibold">{fleet.name}</p>}
           <FleetNav fleet={fleet} fleets={fleets} personName={personName} />
           <div className="pt-6">
             <LightSwitch />

@@ -4,7 +4,6 @@ import type { ReactNode } from "react";
 export function NothingHere({ action }: { action: ReactNode }) {
   return (
     <div className="max-w-xl">
-      <title>Nothing here · Gudgeon</title>
       <h1 className="text-3xl">There is nothing here</h1>
       <p className="mt-2">
         The address may be mistyped, the thing may have been taken off the lists, or it belongs to a fleet you are not in. If somebody sent

@@ -32,7 +32,12 @@ export function TreeMap({ graph, onSelect }: { graph: TreeGraph; onSelect: (id: 
     };
   }, [graph]);
   if (laid === "failed") return <p role="alert">The picture could not be laid out in this browser. The same is in the list below.</p>;
-  if (laid === null || laid.graph !== graph) return <p role="status">Laying out…</p>;
+  if (laid === null || laid.graph !== graph)
+    return (
+      <p role="status" className="h-[70vh] min-h-96 rounded-xl border border-rule p-4">
+        Laying out…
+      </p>
+    );
   return (
     <div className="tree-map h-[70vh] min-h-96 overflow-hidden rounded-xl border border-rule bg-paper text-sm leading-[22px]">
       <ReactFlowProvider key={graph.symptom.key + graph.causes.length}>

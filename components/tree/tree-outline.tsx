@@ -1,6 +1,6 @@
 "use client";
 
-import { useState } from "react";
+import { useState, type ReactElement } from "react";
 import { Dialog } from "@/components/ui/dialog";
 import { NodeBody, nodeOf } from "./selected-node";
 import type { TreePart } from "./tree-part";
@@ -21,6 +21,7 @@ export function TreeOutline({ part }: { part: TreePart }) {
     graph.checks.find((c) => c.key === check)?.findings.find((f) => f.key === key)?.title ?? key;
   return (
     <>
+      <p className="text-sm text-ink-2">×14: the finding is seen 14 times as often with this cause as in a sound engine.</p>
       <ul className="grid gap-3">
         {graph.causes.map((cause) => (
           <li key={cause.key} className="break-inside-avoid rounded-lg border border-rule bg-sheet px-4 py-3">
@@ -29,17 +30,17 @@ export function TreeOutline({ part }: { part: TreePart }) {
             <dl className="mt-2 grid gap-x-4 gap-y-1 text-sm sm:grid-cols-[9rem_1fr]">
               <dt className="text-ink-2">Told by</dt>
               <dd>
-                <ul>
-                  {graph.tells
+                <Strongest
+                  lines={graph.tells
                     .filter((t) => t.cause === cause.key)
-                    .sort((a, b) => b.ratio - a.ratio)
+                    .sort((x, y) => y.ratio - x.ratio)
                     .map((t) => (
-                      <li key={t.check + t.finding}>
-                        {named(`check:${t.check}`, titleOf("check", t.check))}: {findingOf(t.check, t.finding)} (
-                        <span className="dial">{Math.round(t.ratio)}</span> times as often as in a sound engine)
-                      </li>
+                      <span key={t.check + t.finding}>
+                        {named(`check:${t.check}`, titleOf("check", t.check))}: {findingOf(t.check, t.finding)}{" "}
+                        <span className="dial whitespace-nowrap">×{Math.round(t.ratio)}</span>
+                      </span>
                     ))}
-                </ul>
+                />
               </dd>
               <dt className="text-ink-2">Put right by</dt>
               <dd>
@@ -64,6 +65,24 @@ export function TreeOutline({ part }: { part: TreePart }) {
       <Dialog open={node !== null} onClose={() => setOpen(null)} title={node?.title ?? ""}>
         {open !== null && <NodeBody id={open} part={part} />}
       </Dialog>
+    </>
+  );
+}
+
+const STRONGEST = 6;
+
+/** The findings that tell most; the rest one tap away. */
+function Strongest({ lines }: { lines: readonly ReactElement[] }) {
+  const item = (line: ReactElement) => <li key={line.key}>{line}</li>;
+  return (
+    <>
+      <ul>{lines.slice(0, STRONGEST).map(item)}</ul>
+      {lines.length > STRONGEST && (
+        <details>
+          <summary className="link inline-flex min-h-12 items-center sm:min-h-8">{lines.length - STRONGEST} more</summary>
+          <ul>{lines.slice(STRONGEST).map(item)}</ul>
+        </details>
+      )}
     </>
   );
 }

@@ -22,53 +22,57 @@ export default async function AccountPage() {
     <FleetShell fleet={only ?? null} fleets={fleets} personName={person.name}>
       <PageHead title="Your account" under={`${person.name}, ${person.email}`} />
       <div className="grid items-start gap-5 lg:grid-cols-2">
-        <Card aria-labelledby="fleets">
-          <h2 id="fleets">Your fleets</h2>
-          {fleets.length === 0 ? (
-            <div className="mt-2">
-              <EmptyState title="You are in no fleet">Somebody who owns one can invite you; the invitation comes by mail.</EmptyState>
-            </div>
-          ) : (
-            <ul className="divide-y divide-rule">
-              {fleets.map((fleet) => (
-                <li key={fleet.id} className="flex flex-wrap items-center gap-x-3">
-                  <Link className="link inline-flex min-h-12 items-center" prefetch={false} href={`/f/${fleet.id}`}>
-                    {fleet.name}
-                  </Link>
-                  <span className="text-sm text-ink-2">{fleet.roles.join(", ")}</span>
-                </li>
-              ))}
-            </ul>
-          )}
-        </Card>
-        <Card aria-labelledby="sign-out">
-          <h2 id="sign-out" className="mb-3">
-            Sign out
-          </h2>
-          <SignOut userId={person.userId} fleetIds={fleets.map(({ id }) => id)} signOut={signOut} signOutEverywhere={signOutEverywhere} />
-        </Card>
-        <Card aria-labelledby="devices" className="lg:col-span-2">
-          <h2 id="devices">Where you are signed in</h2>
-          <DeviceList devices={devices} end={endSession} endOthers={endOtherSessions} />
-        </Card>
-        <Card aria-labelledby="your-name">
-          <h2 id="your-name" className="mb-3">
-            Your name
-          </h2>
-          <ChangeNameForm action={changeName} name={person.name} />
-        </Card>
-        <Card aria-labelledby="address">
-          <h2 id="address" className="mb-3">
-            Your e-mail address
-          </h2>
-          <ChangeAddressForm action={changeAddress} />
-        </Card>
-        <Card aria-labelledby="new-password">
-          <h2 id="new-password" className="mb-3">
-            Your password
-          </h2>
-          <ChangePasswordForm action={changePassword} />
-        </Card>
+        <div className="grid gap-5">
+          <Card aria-labelledby="fleets">
+            <h2 id="fleets">Your fleets</h2>
+            {fleets.length === 0 ? (
+              <div className="mt-2">
+                <EmptyState title="You are in no fleet">Somebody who owns one can invite you; the invitation comes by mail.</EmptyState>
+              </div>
+            ) : (
+              <ul className="divide-y divide-rule">
+                {fleets.map((fleet) => (
+                  <li key={fleet.id} className="flex flex-wrap items-center gap-x-3">
+                    <Link className="link inline-flex min-h-12 items-center" prefetch={false} href={`/f/${fleet.id}`}>
+                      {fleet.name}
+                    </Link>
+                    <span className="text-sm text-ink-2">{fleet.roles.join(", ")}</span>
+                  </li>
+                ))}
+              </ul>
+            )}
+          </Card>
+          <Card aria-labelledby="devices">
+            <h2 id="devices">Where you are signed in</h2>
+            <DeviceList devices={devices} end={endSession} endOthers={endOtherSessions} />
+          </Card>
+          <Card aria-labelledby="sign-out">
+            <h2 id="sign-out" className="mb-3">
+              Sign out
+            </h2>
+            <SignOut userId={person.userId} fleetIds={fleets.map(({ id }) => id)} signOut={signOut} signOutEverywhere={signOutEverywhere} />
+          </Card>
+        </div>
+        <div className="grid gap-5">
+          <Card aria-labelledby="your-name">
+            <h2 id="your-name" className="mb-3">
+              Your name
+            </h2>
+            <ChangeNameForm action={changeName} name={person.name} />
+          </Card>
+          <Card aria-labelledby="address">
+            <h2 id="address" className="mb-3">
+              Your e-mail address
+            </h2>
+            <ChangeAddressForm action={changeAddress} />
+          </Card>
+          <Card aria-labelledby="new-password">
+            <h2 id="new-password" className="mb-3">
+              Your password
+            </h2>
+            <ChangePasswordForm action={changePassword} />
+          </Card>
+        </div>
       </div>
     </FleetShell>
   );
