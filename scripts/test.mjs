@@ -1,6 +1,6 @@
 // npm test: format, lint, types, unit and database tests, then the built site in a browser. A fresh clone will do.
 // `npm test -- tests/e2e/one.spec.ts` hands its arguments to Playwright.
-import { cpSync, mkdirSync, readFileSync, rmSync } from "node:fs";
+import { cpSync, mkdirSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import path from "node:path";
 import { ensureNodeModules } from "./lib/npm.mjs";
 import { startPostgres } from "./lib/postgres.mjs";
@@ -88,7 +88,8 @@ async function startSite() {
   const dir = await build();
   const server = await startPostgres({ dir: path.join(scratch, "postgres"), database: "gudgeon", ephemeral: true });
   add(() => server.stop());
-  const { env } = await prepareDatabase(server.url, { demo: true });
+  const { env, demo } = await prepareDatabase(server.url, { demo: true });
+  writeFileSync(path.join(scratch, "demo.json"), JSON.stringify(demo)); // who may sign in, for the browser tests
   const mailDir = path.join(scratch, "mail");
   const mail = await startMail({ dir: mailDir });
   add(() => mail.stop());
