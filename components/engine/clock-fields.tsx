@@ -1,6 +1,7 @@
 "use client";
 
 import type { FieldErrors, UseFormRegister } from "react-hook-form";
+import { Choice } from "@/components/ui/choice";
 import { TextField } from "@/components/ui/text-field";
 import type { EngineValues } from "./engine-values";
 
@@ -27,10 +28,9 @@ export function ClockFields({ register, errors, meter }: Props) {
       <fieldset>
         <legend className="mb-1 font-semibold">Hours</legend>
         {CHOICES.map(([value, title]) => (
-          <label key={value} className="flex min-h-12 items-center gap-3">
-            <input type="radio" value={value} className="size-5 flex-none accent-(--fill)" {...register("meter")} />
+          <Choice key={value} type="radio" value={value} {...register("meter")}>
             {title}
-          </label>
+          </Choice>
         ))}
       </fieldset>
       <TextField

@@ -10,6 +10,7 @@ import { FormEnd } from "@/components/form/form-end";
 import { momentOf, today } from "@/components/form/day-typed";
 import { typedNumber } from "@/components/form/typed-number";
 import { useSave } from "@/components/form/use-save";
+import { Choice } from "@/components/ui/choice";
 import { TextField } from "@/components/ui/text-field";
 import { sendJson } from "@/lib/client/exchange/request";
 
@@ -55,10 +56,7 @@ export function HourEntry({ fleetId, engineId }: { fleetId: string; engineId: st
         />
         <TextField id="read-on" type="date" label="Read on" error={errors.day?.message} {...form.register("day")} />
       </div>
-      <label className="flex min-h-12 items-center gap-3">
-        <input type="checkbox" className="size-5 flex-none accent-(--fill)" {...form.register("reset")} />
-        The meter was replaced or set back since the last reading
-      </label>
+      <Choice {...form.register("reset")}>The meter was replaced or set back since the last reading</Choice>
       <FormEnd submit="Write it down" saving={saving} refusal={says ? null : refusal} done={saved && "Written down."} />
     </form>
   );

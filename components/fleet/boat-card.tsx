@@ -36,7 +36,7 @@ export function BoatCard({ fleetId, boat, engines }: { fleetId: string; boat: Bo
 
 function EngineRow({ fleetId, engine, open, repeats }: EngineStanding & { fleetId: string }) {
   return (
-    <li className="flex flex-wrap items-center gap-x-4 gap-y-1 py-2">
+    <li className="flex flex-wrap items-center gap-x-4 gap-y-2 pb-3">
       <div className="min-w-0 flex-1 basis-56">
         <Link className="link inline-flex min-h-12 items-center" prefetch={false} href={`/f/${fleetId}/engines/${engine.id}`}>
           {engine.name}

@@ -27,7 +27,7 @@ export function CameBackList({
       <ul className="mt-1">
         {lines.map(({ repeat, engine }) => (
           <li key={`${repeat.engineId} ${repeat.cause}`}>
-            <Link className="link inline-flex min-h-12 items-center" prefetch={false} href={`/f/${fleetId}/engines/${engine.id}`}>
+            <Link className="link inline-flex min-h-12 items-center py-1" prefetch={false} href={`/f/${fleetId}/engines/${engine.id}`}>
               <span>
                 {engine.boatName}, {engine.name}. {repeatInWords(repeat)}
               </span>

@@ -7,6 +7,7 @@ import { useForm, useWatch } from "react-hook-form";
 import { uuidv7 } from "uuidv7";
 import { FormEnd } from "@/components/form/form-end";
 import { useSave } from "@/components/form/use-save";
+import { Choice } from "@/components/ui/choice";
 import { Segmented } from "@/components/ui/segmented";
 import { Select } from "@/components/ui/select";
 import { TextArea } from "@/components/ui/text-area";
@@ -71,12 +72,7 @@ export function RepairForm({ fleetId, engineId, hasHourMeter, choices }: Props) 
           />
         )}
       </div>
-      {hoursSay && (
-        <label className="flex min-h-12 items-center gap-3">
-          <input type="checkbox" className="size-5 flex-none accent-(--fill)" {...register("meterReset")} />
-          The meter was replaced or set back
-        </label>
-      )}
+      {hoursSay && <Choice {...register("meterReset")}>The meter was replaced or set back</Choice>}
       <Select
         id="symptom"
         label="What was noticed?"

@@ -1,3 +1,4 @@
+import { Choice } from "@/components/ui/choice";
 import { ROLES, type Role } from "@/lib/core/access/roles";
 
 const WHAT: Readonly<Record<Role, string>> = {
@@ -12,18 +13,9 @@ export function RoleBoxes({ legend, roles, error }: { legend: string; roles: rea
     <fieldset>
       <legend className="font-semibold">{legend}</legend>
       {ROLES.map((role) => (
-        <label key={role} className="flex min-h-12 items-center gap-3">
-          <input
-            type="checkbox"
-            name="roles"
-            value={role}
-            defaultChecked={roles.includes(role)}
-            className="size-5 flex-none accent-(--fill)"
-          />
-          <span>
-            <b className="font-semibold">{role}</b>: {WHAT[role]}
-          </span>
-        </label>
+        <Choice key={role} name="roles" value={role} defaultChecked={roles.includes(role)}>
+          <b className="font-semibold">{role}</b>: {WHAT[role]}
+        </Choice>
       ))}
       {error && (
         <p role="alert" className="text-sm font-semibold text-lead">

@@ -44,7 +44,7 @@ export function FleetShell({ fleet, fleets, personName, children }: Props) {
           </div>
         </div>
       </header>
-      <main id="main" className="mx-auto w-full min-w-0 max-w-6xl px-4 pt-5 pb-16 lg:px-9 lg:pt-7">
+      <main id="main" className="mx-auto w-full min-w-0 max-w-6xl has-data-wide:max-w-none px-4 pt-5 pb-16 lg:px-9 lg:pt-7">
         {children}
       </main>
     </div>

@@ -1,9 +1,13 @@
 import type { FindingLink, Strength } from "@/lib/core/tree/finding-link";
 import type { Who } from "@/lib/core/tree/schema";
+import { STRENGTHS } from "@/lib/core/tree/strength";
 
 /** A strength as a mechanic reads it: the word, a count of 100, or times a sound engine's odds. */
 export function linkInWords(link: FindingLink | Strength): string {
-  if (typeof link === "number") return `${Math.round(link * 100)} of 100`;
+  if (typeof link === "number") {
+    const word = Object.entries(STRENGTHS).find(([, share]) => share === link)?.[0];
+    return word ?? `${Math.round(link * 100)} of 100`;
+  }
   if (!/^x\d/.test(link)) return link;
   return `${link.slice(1)} times the odds of a sound engine`;
 }

@@ -7,7 +7,9 @@ import type { TreePart } from "./tree-part";
 /** What the node chosen in the picture says, read only; each choice starts at the top of it. */
 export function SelectedNode({ id, part }: { id: string; part: TreePart }) {
   const top = useRef<HTMLDivElement>(null);
-  useEffect(() => top.current?.parentElement?.scrollTo({ top: 0 }), [id]);
+  useEffect(() => {
+    top.current?.parentElement?.scrollTo({ top: 0 });
+  }, [id]);
   const node = nodeOf(id, part);
   if (!node) return null;
   return (

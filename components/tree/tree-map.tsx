@@ -6,44 +6,48 @@ import {
   Controls,
   Position,
   type OnSelectionChangeFunc,
+  type ReactFlowInstance,
+  type Viewport,
   ReactFlow,
   ReactFlowProvider,
   ViewportPortal,
   type Edge,
   type Node,
 } from "@xyflow/react";
-import { useCallback, useEffect, useState } from "react";
-import { LANES, placesOf, heightOf, type Places } from "./tree-layout";
+import { useCallback, useMemo, useRef, useState } from "react";
+import { drawnPart, type DrawnPart } from "./drawn-part";
+import { heightOf, LANES, placesOf, type Places } from "./tree-layout";
 import { nodeTypes } from "./tree-nodes";
 import type { TreeGraph } from "./tree-graph";
 
+type Props = {
+  graph: TreeGraph;
+  onSelect: (id: string | null) => void;
+  /** Pixels at the right that are covered while a node is chosen. */ panelWidth: number;
+};
+
 /** One symptom's part of the tree, drawn in four ruled lanes. Read only: to look, to pan, to zoom. */
-export function TreeMap({ graph, onSelect }: { graph: TreeGraph; onSelect: (id: string | null) => void }) {
-  const chosen = useCallback<OnSelectionChangeFunc>(({ nodes }) => onSelect(nodes[0]?.id ?? null), [onSelect]);
-  const [laid, setLaid] = useState<{ graph: TreeGraph; places: Places } | "failed" | null>(null);
-  useEffect(() => {
-    let wanted = true;
-    placesOf(graph).then(
-      (places) => wanted && setLaid({ graph, places }),
-      () => wanted && setLaid("failed"),
-    );
-    return () => {
-      wanted = false;
-    };
+export function TreeMap({ graph, onSelect, panelWidth }: Props) {
+  const [flow, setFlow] = useState<ReactFlowInstance | null>(null);
+  const box = useRef<HTMLDivElement>(null);
+  const chosen = useCallback<OnSelectionChangeFunc>(
+    ({ nodes }) => {
+      const node = nodes[0];
+      onSelect(node?.id ?? null);
+      if (node && flow && box.current) flow.setViewport(clearOfPanel(node, flow.getViewport(), box.current.clientWidth - panelWidth));
+    },
+    [onSelect, flow, panelWidth],
+  );
+  const { part, places } = useMemo(() => {
+    const drawn = drawnPart(graph);
+    return { part: drawn, places: placesOf(drawn) };
   }, [graph]);
-  if (laid === "failed") return <p role="alert">The picture could not be laid out in this browser. The same is in the list below.</p>;
-  if (laid === null || laid.graph !== graph)
-    return (
-      <p role="status" className="h-[70vh] min-h-96 rounded-xl border border-rule p-4">
-        Laying out…
-      </p>
-    );
   return (
-    <div className="tree-map h-[70vh] min-h-96 overflow-hidden rounded-xl border border-rule bg-paper text-sm leading-[22px]">
+    <div ref={box} className="tree-map h-[75vh] min-h-96 overflow-hidden rounded-xl border border-rule bg-paper text-sm leading-[22px]">
       <ReactFlowProvider key={graph.symptom.key + graph.causes.length}>
         <ReactFlow
-          defaultNodes={nodesOf(graph, laid.places)}
-          defaultEdges={edgesOf(graph)}
+          defaultNodes={nodesOf(part, places)}
+          defaultEdges={edgesOf(part)}
           nodeTypes={nodeTypes}
           defaultViewport={{ x: 0, y: 0, zoom: 0.9 }}
           minZoom={0.1}
@@ -56,13 +60,20 @@ export function TreeMap({ graph, onSelect }: { graph: TreeGraph; onSelect: (id: 
           multiSelectionKeyCode={null}
           deleteKeyCode={null}
           onSelectionChange={chosen}
+          onInit={setFlow}
         >
-          <Lanes places={laid.places} />
+          <Lanes places={places} />
           <Controls showInteractive={false} />
         </ReactFlow>
       </ReactFlowProvider>
     </div>
   );
+}
+
+/** The view moved left as far as the chosen node needs to be seen beside the panel. */
+function clearOfPanel(node: Node, { x, y, zoom }: Viewport, freeWidth: number): Viewport {
+  const rightEdge = (node.position.x + (node.width ?? 0)) * zoom + x;
+  return { x: x - Math.max(0, rightEdge + 16 - freeWidth), y, zoom };
 }
 
 const LANE_TITLES = [
@@ -91,7 +102,7 @@ function Lanes({ places }: { places: Places }) {
 type Handles = NonNullable<Node["handles"]>;
 
 /** Sizes and handles are given, so that nothing is measured and links to nodes outside the view are drawn. */
-function nodesOf(graph: TreeGraph, places: Places): Node[] {
+function nodesOf(graph: DrawnPart, places: Places): Node[] {
   const node = (id: string, type: keyof typeof LANES, data: Record<string, unknown>, handles: Handles): Node => {
     const { x, y, height } = places.get(id)!;
     const { width } = LANES[type];
@@ -109,14 +120,14 @@ function nodesOf(graph: TreeGraph, places: Places): Node[] {
   });
   return [
     node("symptom", "symptom", { symptom: graph.symptom }, []),
-    ...graph.checks.map((check) => {
-      let y = heightOf.checkHead(check.title);
-      const handles = check.findings.map((f) => {
+    ...graph.checks.map((drawn) => {
+      let y = heightOf.checkHead(drawn.check.title);
+      const handles = drawn.findings.map((f) => {
         const h = heightOf.findingRow(f.title);
         y += h;
         return right(LANES.check.width, y - h / 2, f.key);
       });
-      return node(`check:${check.key}`, "check", { check }, handles);
+      return node(`check:${drawn.check.key}`, "check", { drawn }, handles);
     }),
     ...graph.causes.map((cause) => {
       const height = heightOf.cause(cause.title);
@@ -127,7 +138,7 @@ function nodesOf(graph: TreeGraph, places: Places): Node[] {
   ];
 }
 
-function edgesOf(graph: TreeGraph): Edge[] {
+function edgesOf(graph: DrawnPart): Edge[] {
   return [
     ...graph.tells.map((t) => ({
       id: `${t.check}/${t.finding}/${t.cause}`,

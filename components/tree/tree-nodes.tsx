@@ -2,14 +2,15 @@
 
 import { Handle, Position, type Node, type NodeProps } from "@xyflow/react";
 import { memo } from "react";
-import type { Cause, Check, Remedy, Symptom } from "@/lib/core/tree/schema";
+import type { Cause, Remedy, Symptom } from "@/lib/core/tree/schema";
+import type { DrawnCheck } from "./drawn-part";
 import { heightOf } from "./tree-layout";
 
 // Outlines are ours and carry the meaning; colour repeats it. A pennant is a symptom, a ticket with its findings as rows a
 // check, a plate with clipped corners a cause, a tag with a hole a remedy.
 
 export type SymptomNode = Node<{ symptom: Symptom }, "symptom">;
-export type CheckNode = Node<{ check: Check }, "check">;
+export type CheckNode = Node<{ drawn: DrawnCheck }, "check">;
 export type CauseNode = Node<{ cause: Cause; base: string }, "cause">;
 export type RemedyNode = Node<{ remedy: Remedy }, "remedy">;
 
@@ -23,14 +24,15 @@ const Pennant = memo(function Pennant({ data }: NodeProps<SymptomNode>) {
   );
 });
 
-const Ticket = memo(function Ticket({ data: { check } }: NodeProps<CheckNode>) {
+const Ticket = memo(function Ticket({ data: { drawn } }: NodeProps<CheckNode>) {
+  const { check, findings, folded } = drawn;
   let y = heightOf.checkHead(check.title);
   return (
     <div className="h-full rounded-node border-[1.5px] border-ink-2 bg-sheet">
       <b className="block px-3 py-2 font-semibold" style={{ height: y }}>
         {check.title}
       </b>
-      {check.findings.map((finding) => {
+      {findings.map((finding) => {
         const height = heightOf.findingRow(finding.title);
         const middle = y + height / 2;
         y += height;
@@ -48,6 +50,9 @@ const Ticket = memo(function Ticket({ data: { check } }: NodeProps<CheckNode>) {
           </div>
         );
       })}
+      {folded > 0 && (
+        <div className="border-t border-rule px-3 py-1 text-ink-2">{folded === 1 ? "1 other finding" : `${folded} other findings`}</div>
+      )}
     </div>
   );
 });

@@ -40,7 +40,7 @@ export default async function FleetPage({ params }: PageProps<"/f/[fleetId]">) {
         under={`${counted(boats.length, "boat")}, ${counted(engines.length, "engine")}`}
         action={boats.length > 0 && <LinkButton href={`/f/${fleetId}/boats/new`}>Add a boat</LinkButton>}
       />
-      <div className="grid gap-5">
+      <div className="grid grid-cols-1 gap-5">
         {begins && <FirstSteps steps={newcomerSteps(fleetId, boats, engines)} />}
         <CameBackList fleetId={fleetId} repeats={repeats} engines={engines} />
         <OpenList fleetId={fleetId} entries={open} />

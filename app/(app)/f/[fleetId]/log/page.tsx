@@ -45,7 +45,7 @@ export default async function LogPage({ params, searchParams }: PageProps<"/f/[f
   return (
     <>
       <PageHead title="Logged diagnoses" under="Every diagnosis and repair of the fleet, newest first." />
-      <div className="grid gap-5">
+      <div className="grid grid-cols-1 gap-5">
         <LogFilters path={here} filters={filters} boats={boats} engines={engines} systems={systems} />
         <Card>
           <LogTable

@@ -49,7 +49,7 @@ export default async function EnginePage({ params, searchParams }: Props) {
         back={<BackTo href={`/f/${fleetId}/boats/${engine.boatId}`} title={engine.boatName} />}
         action={<EngineActions fleetId={fleetId} engineId={engineId} open={drawn.filter((entry) => entry.outcome === null)} />}
       />
-      <div className="grid gap-5">
+      <div className="grid grid-cols-1 gap-5">
         {repeats.map((repeat) => (
           <RepeatPanel key={repeat.cause} repeat={repeat} />
         ))}

@@ -67,7 +67,7 @@ export default async function StoryPage({ params }: Props) {
           </div>
         }
       />
-      <div className="grid gap-5">
+      <div className="grid grid-cols-1 gap-5">
         {complaint && (
           <Card aria-labelledby="said">
             <h2 id="said">What was said</h2>

@@ -43,7 +43,7 @@ export default async function TreePage({ params, searchParams }: Props) {
         under={`Version ${number}, ${from === "own" ? "of this fleet" : "shipped with Gudgeon"}. ${tree.about}`}
         back={<BackTo href={`/f/${fleetId}/trees`} title="Fault trees" />}
       />
-      <div className="grid gap-6 lg:grid-cols-[15rem_minmax(0,1fr)]">
+      <div data-wide className="grid gap-6 lg:grid-cols-[15rem_minmax(0,1fr)]">
         <SymptomIndex path={here} tree={tree} here={symptom} />
         <section aria-labelledby="symptom" className="min-w-0">
           <h2 id="symptom">{part.graph.symptom.title}</h2>
