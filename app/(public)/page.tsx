@@ -4,7 +4,7 @@ import { SampleStep } from "@/components/front/sample-step";
 const WHO = [
   {
     who: "At the engine",
-    what: "Say what it does in your own words. One step a screen, cautions first, to the cause and a cure that is proved. Works with no signal.",
+    what: "Say what it does in your own words. One step a screen, cautions first, to the cause and a cure that is proved. Once open, it goes on without a signal.",
   },
   {
     who: "Ashore",
