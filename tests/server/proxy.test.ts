@@ -115,5 +115,8 @@ describe("where to go on after signing in", () => {
     "f/abc",
     "/\t/elsewhere.example",
     "/a\\b",
+    "/.//elsewhere.example",
+    "/a/..//elsewhere.example",
+    "/%2e//elsewhere.example",
   ])("%j is not", (given) => expect(ownPath(given)).toBeNull());
 });
