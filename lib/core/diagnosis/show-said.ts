@@ -98,16 +98,22 @@ function lineOf(tree: FaultTree, state: DiagnosisState, event: DiagnosisEvent): 
         key: event.payload.feature,
         title: feature?.title ?? event.payload.feature,
         says: titled(feature?.options ?? [], event.payload.option),
+        mayChange: true,
       };
     }
     case "figure-told":
-      return { key: event.payload.figure, title: FIGURES_SAID[event.payload.figure], says: figureSaid(event.payload.value) };
+      return {
+        key: event.payload.figure,
+        title: FIGURES_SAID[event.payload.figure],
+        says: figureSaid(event.payload.value),
+        mayChange: true,
+      };
     case "not-aboard":
-      return { key: null, title: "Not aboard", says: event.payload.item };
+      return { key: null, title: "Not aboard", says: event.payload.item, mayChange: true };
     case "runs-again":
-      return { key: null, title: "It runs again by itself", says: "", note: event.payload.note };
+      return { key: null, title: "It runs again by itself", says: "", note: event.payload.note, mayChange: true };
     case "noted":
-      return { key: null, title: "Note", says: "", note: event.payload.note, photos: event.payload.photos };
+      return { key: null, title: "Note", says: "", note: event.payload.note, photos: event.payload.photos, mayChange: true };
     case "ended":
       return { key: event.payload.cause ?? null, title: "Outcome", says: OUTCOMES_SAID[event.payload.outcome], note: event.payload.note };
     case "taken-up-again":

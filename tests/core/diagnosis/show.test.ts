@@ -152,6 +152,18 @@ describe("what a screen shows", () => {
     expect(ended.said.every(({ mayChange }) => !mayChange)).toBe(true);
   });
 
+  it("[X6] a figure mistyped, a part found after all, and a note can be taken back too", () => {
+    const phone = new Device(1);
+    const log = [
+      begin(phone),
+      phone.tell("figure-told", { figure: "ratedRpm", value: 36 }),
+      phone.tell("not-aboard", { item: "Vacuum gauge" }),
+      phone.tell("noted", { note: "wrong boat", photos: [] }),
+    ];
+    expect(ask(log).said.map(({ mayChange }) => mayChange)).toEqual([false, true, true, true]);
+    expect(ask([...log, phone.tell("taken-back", { event: log[1]!.id })]).profile.figures).toEqual(ask([log[0]!]).profile.figures);
+  });
+
   it("[F4] shows both answers of a conflict, and reckons with neither", () => {
     const [one, two] = [new Device(1), new Device(2)];
     const log = [begin(one), one.answer("vacuum", "low"), two.answer("vacuum", "high")];

@@ -81,9 +81,9 @@ describe("stop rules", () => {
   it("[T4] every second of cranking counts until the engine runs or the exhaust is drained", () => {
     const phone = new Device(1);
     const log = [phone.begin(), phone.tell("cranked", { seconds: 8, ran: false }), phone.answer("crank", "slow")];
-    expect(crankSeconds(small, fold(log))).toBe(18);
+    expect(crankSeconds(small, fold(log))).toBe(10);
     const more = [...log, phone.answer("crank", "turns", { supersedes: log[2]!.id }), phone.tell("cranked", { seconds: 12, ran: false })];
-    expect(crankSeconds(small, fold(more))).toBe(20);
+    expect(crankSeconds(small, fold(more))).toBe(22);
     const over = [...more, phone.tell("cranked", { seconds: 10, ran: false })];
     expect(keys(rulesInForce(small, fold(over)))).toEqual(["flood"]);
     const drained = [...over, phone.tell("rule-answered", { rule: "flood", answer: "cleared" })];
@@ -91,6 +91,34 @@ describe("stop rules", () => {
     expect(rulesInForce(small, fold(drained))).toEqual([]);
     expect(crankSeconds(small, fold([...over, phone.tell("cranked", { seconds: 2, ran: true })]))).toBe(0);
     expect(crankSeconds(small, fold([...over, phone.answer("load", "fine")]))).toBe(0);
+  });
+
+  it("[T4] bursts timed at a step are part of what it asks for, and the longer of the two counts", () => {
+    const [short, long] = [new Device(1), new Device(2)];
+    const timed = (phone: Device, seconds: number) => phone.tell("cranked", { seconds, ran: false });
+    expect(crankSeconds(small, fold([short.begin(), timed(short, 4), short.answer("crank", "slow")]))).toBe(10);
+    const bursts = [long.begin(), timed(long, 10), timed(long, 6), long.answer("crank", "slow")];
+    expect(crankSeconds(small, fold(bursts))).toBe(16);
+    expect(crankSeconds(small, fold([...bursts, long.answer("crank", "turns")]))).toBe(26);
+  });
+
+  it("[T4] a changed answer takes no second off: the starter has turned, whatever was read", () => {
+    const phone = new Device(1);
+    const first = phone.answer("crank", "slow");
+    const log = [phone.begin(), first];
+    const changed = phone.answer("crank", "turns", { supersedes: first.id });
+    const again = phone.answer("crank", "slow", { supersedes: changed.id });
+    expect(crankSeconds(small, fold([...log, changed, again]))).toBe(10);
+    const putOff = phone.tell("answered", { check: "crank", answer: { cannotTell: true }, photos: [] }, { supersedes: again.id });
+    expect(crankSeconds(small, fold([...log, changed, again, putOff]))).toBe(10);
+  });
+
+  it("[T4] a step that was put off and then done has cranked; one that was taken back has not", () => {
+    const phone = new Device(1);
+    const putOff = phone.tell("answered", { check: "crank", answer: { cannotTell: true }, photos: [] });
+    const done = phone.answer("crank", "slow", { supersedes: putOff.id });
+    expect(crankSeconds(small, fold([phone.begin(), putOff, done]))).toBe(10);
+    expect(crankSeconds(small, fold([phone.begin(), putOff, done, phone.tell("taken-back", { event: done.id })]))).toBe(0);
   });
 
   it("[T5] steps in engine states that they forbid are gone", () => {
