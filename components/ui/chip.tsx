@@ -13,5 +13,9 @@ const TONES: Record<ChipTone, string> = {
 
 /** A word or two about how something stands. The words carry it; colour repeats it. */
 export function Chip({ tone = "quiet", children }: { tone?: ChipTone; children: ReactNode }) {
-  return <span className={clsx("inline-block rounded-full border px-2.5 py-0.5 text-sm font-semibold whitespace-nowrap", TONES[tone])}>{children}</span>;
+  return (
+    <span className={clsx("inline-block rounded-full border px-2.5 py-0.5 text-sm font-semibold whitespace-nowrap", TONES[tone])}>
+      {children}
+    </span>
+  );
 }
