@@ -26,5 +26,6 @@ export function typedNumber({ from = -Infinity, to = Infinity, whole = false }: 
   });
 }
 
-/** A number back in a field. */
-export const asTyped = (value: number | null | undefined): string => (value === null || value === undefined ? "" : String(value));
+/** A number back in a field, without the digits that only a conversion made. */
+export const asTyped = (value: number | null | undefined): string =>
+  value === null || value === undefined ? "" : String(Number(value.toPrecision(6)));

@@ -5,6 +5,8 @@ import { EmptyState } from "@/components/ui/empty-state";
 import type { LogEntry } from "@/lib/core/contract/log";
 import { Day } from "./day";
 import { EntryMore } from "./entry-more";
+import { hoursInWords } from "./hours-in-words";
+import { LogCards } from "./log-cards";
 import { Standing } from "./standing";
 
 type Props = {
@@ -24,7 +26,7 @@ export function LogTable({ fleetId, entries, caption, namesEngine = false, empty
       key: "hours",
       title: "Engine hours",
       figure: true,
-      cell: (e) => (e.engineHours === null ? "–" : `${e.hoursAreEstimated ? "~" : ""}${Math.round(e.engineHours)}`),
+      cell: hoursInWords,
     },
     { key: "reported", title: "Reported", cell: (e) => e.symptoms.map((s) => s.title).join(", ") || "–" },
     { key: "found", title: "Found", cell: (e) => e.cause?.title ?? "–" },
@@ -41,17 +43,29 @@ export function LogTable({ fleetId, entries, caption, namesEngine = false, empty
     { key: "minutes", title: "Minutes", figure: true, cell: (e) => (e.minutes === null ? "–" : Math.round(e.minutes)) },
     { key: "standing", title: "Standing", cell: (e) => <Standing entry={e} /> },
   ];
+  if (entries.length === 0) {
+    return (
+      <>
+        {empty ?? (
+          <EmptyState title="Nothing logged yet">A diagnosis that is ended, or a repair that is written in, stands here.</EmptyState>
+        )}
+      </>
+    );
+  }
   return (
-    <Table
-      caption={caption}
-      hideCaption
-      columns={columns}
-      rows={entries}
-      rowKey={(e) => e.id}
-      empty={
-        empty ?? <EmptyState title="Nothing logged yet">A diagnosis that is ended, or a repair that is written in, stands here.</EmptyState>
-      }
-    />
+    <>
+      <div className="md:hidden print:hidden">
+        <LogCards
+          entries={entries}
+          caption={caption}
+          namesEngine={namesEngine}
+          dayOf={(entry) => <LogLink fleetId={fleetId} entry={entry} />}
+        />
+      </div>
+      <div className="hidden md:block print:block">
+        <Table caption={caption} hideCaption columns={columns} rows={entries} rowKey={(e) => e.id} empty={null} />
+      </div>
+    </>
   );
 }
 
@@ -59,7 +73,7 @@ function LogLink({ fleetId, entry }: { fleetId: string; entry: LogEntry }) {
   const day = <Day at={entry.at} />;
   if (entry.diagnosisId === null) return day;
   return (
-    <Link className="link" prefetch={false} href={`/f/${fleetId}/log/${entry.diagnosisId}`}>
+    <Link className="link inline-flex min-h-12 items-center md:min-h-0" prefetch={false} href={`/f/${fleetId}/log/${entry.diagnosisId}`}>
       {day}
     </Link>
   );
