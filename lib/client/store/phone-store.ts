@@ -22,8 +22,8 @@ export class PhoneStore {
   readonly unsaved = new Observable(false);
   readonly #database: Database;
   readonly #channel: BroadcastChannel | null;
-  /** Events whose write failed: shown, used, and written again with the next one. */
-  #homeless: KeptEvent[] = [];
+  /** Events whose write failed: shown, used, and written again with the next one. Once sent they stay here, so that their numbers are not given out twice. */
+  #homeless: readonly KeptEvent[] = [];
 
   constructor(userId: string, fleetId: string, device: string) {
     this.device = device;
@@ -39,9 +39,10 @@ export class PhoneStore {
     payload: EventOf<K>["payload"],
     supersedes?: string,
   ): Promise<EventOf<K>> {
+    const id = uuidv7();
     const make = (known: readonly DiagnosisEvent[]): EventOf<K> =>
       ({
-        id: uuidv7(),
+        id,
         diagnosisId,
         device: this.device,
         ...stamp(known, this.device),
@@ -55,14 +56,16 @@ export class PhoneStore {
       const event = await this.#database.run(async (connection) => {
         const transaction = connection.transaction("events", "readwrite", { durability: "strict" });
         for (const kept of homeless) await transaction.store.put(kept);
-        const known = (await transaction.store.index("diagnosis").getAll(diagnosisId)).map((kept) => kept.event);
-        const made = make(known);
-        await transaction.store.add({ event: made, unsent: 1 });
+        const kept = await transaction.store.index("diagnosis").getAll(diagnosisId);
+        // A handle may die after the write and before its word of it; the second try then finds it written.
+        const written = kept.find(({ event }) => event.id === id)?.event as EventOf<K> | undefined;
+        const made = written ?? make(kept.map(({ event }) => event));
+        if (!written) await transaction.store.add({ event: made, unsent: 1 });
         await transaction.done;
         return made;
       });
-      this.#homeless = [];
-      this.unsaved.set(false);
+      this.#homeless = this.#homeless.filter((kept) => !homeless.includes(kept));
+      this.unsaved.set(this.#homeless.length > 0);
       this.#tell();
       return event;
     } catch {
@@ -77,13 +80,13 @@ export class PhoneStore {
 
   async events(diagnosisId: string): Promise<KeptEvent[]> {
     const onDisk = await this.#database.run((connection) => connection.getAllFromIndex("events", "diagnosis", diagnosisId)).catch(() => []);
-    return [...onDisk, ...this.#homeless.filter((kept) => kept.event.diagnosisId === diagnosisId)];
+    return this.#withHomeless(onDisk).filter((kept) => kept.event.diagnosisId === diagnosisId);
   }
 
   async summaries(): Promise<Summary[]> {
     const all = await this.#database.run((connection) => connection.getAll("events")).catch(() => []);
     const byDiagnosis = new Map<string, DiagnosisEvent[]>();
-    for (const { event } of [...all, ...this.#homeless])
+    for (const { event } of this.#withHomeless(all))
       byDiagnosis.set(event.diagnosisId, [...(byDiagnosis.get(event.diagnosisId) ?? []), event]);
     return [...byDiagnosis.values()]
       .map(summarize)
@@ -109,27 +112,40 @@ export class PhoneStore {
 
   async unsentEvents(): Promise<KeptEvent[]> {
     const onDisk = await this.#database.run((connection) => connection.getAllFromIndex("events", "unsent", 1)).catch(() => []);
-    return [...onDisk, ...this.#homeless];
+    return this.#withHomeless(onDisk).filter(({ unsent }) => unsent === 1);
+  }
+
+  #withHomeless(onDisk: readonly KeptEvent[]): KeptEvent[] {
+    const there = new Set(onDisk.map(({ event }) => event.id));
+    return [...onDisk, ...this.#homeless.filter(({ event }) => !there.has(event.id))];
   }
 
   /** The server has them, or has said why it will not: either way they leave the outbox and stay in the log. */
   async settle(receipts: readonly { id: string; rejected?: string }[]): Promise<void> {
-    const settled = new Set(receipts.map((receipt) => receipt.id));
+    const settled = new Map(receipts.map(({ id, rejected }) => [id, rejected === undefined ? {} : { rejected }]));
+    this.#homeless = this.#homeless.map((kept) => {
+      const mark = settled.get(kept.event.id);
+      return mark ? { event: kept.event, ...mark } : kept;
+    });
     await this.#database.run(async (connection) => {
       const transaction = connection.transaction("events", "readwrite");
-      for (const { id, rejected } of receipts) {
+      for (const [id, mark] of settled) {
         const kept = await transaction.store.get(id);
-        if (kept) await transaction.store.put({ event: kept.event, ...(rejected === undefined ? {} : { rejected }) });
+        if (kept) await transaction.store.put({ event: kept.event, ...mark });
       }
       await transaction.done;
     });
-    this.#homeless = this.#homeless.filter((kept) => !settled.has(kept.event.id));
     this.#tell();
   }
 
+  /** Keeps a picture for the server. @throws Error with words to show where there is no room for it */
   async addPhoto(blob: Blob): Promise<string> {
     const id = uuidv7();
-    await this.#write((connection) => connection.put("photos", { id, blob, unsent: 1 }));
+    try {
+      await this.#database.run((connection) => connection.put("photos", { id, blob, unsent: 1 }));
+    } catch {
+      throw new Error("This picture could not be kept: the phone's storage may be full. The answer can be given without it.");
+    }
     this.#tell();
     return id;
   }
@@ -184,7 +200,7 @@ export class PhoneStore {
   async #write(work: Parameters<Database["run"]>[0]): Promise<void> {
     try {
       await this.#database.run(work);
-      if (this.#homeless.length === 0) this.unsaved.set(false);
+      this.unsaved.set(this.#homeless.length > 0);
     } catch {
       this.unsaved.set(true);
     }
