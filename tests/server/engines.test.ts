@@ -125,3 +125,12 @@ describe("the hour meter", () => {
     expect(found.hours).toBeLessThan(0.1);
   });
 });
+
+test("a reading of a day that is still to come is refused in words", async () => {
+  const readAt = new Date(Date.now() + 3 * 24 * 3600 * 1000).toISOString();
+  await expect(
+    withScope(ines.person, ines.fleetId, "engine:write", (scope) =>
+      addHourReading(scope, { id: uuidv7(), engineId: ines.engineId, reading: 5, readAt, reset: false }),
+    ),
+  ).rejects.toMatchObject({ status: 422, extras: { errors: [{ path: "readAt" }] } });
+});

@@ -56,6 +56,21 @@ describe("a repair logged without a diagnosis", () => {
     await expect(repair(ines, 2, 5, { id })).rejects.toMatchObject({ status: 409 });
   });
 
+  test("with a meter that was replaced is a reading that the hours go on from", async () => {
+    const ines = await afloat("Ines");
+    await repair(ines, 1, 900);
+    await repair(ines, 2, 4, { meterReset: true });
+    expect(await withScope(ines.person, ines.fleetId, "fleet:read", (scope) => listEngines(scope))).toMatchObject([
+      { hours: 4, hoursSinceNew: 900 },
+    ]);
+  });
+
+  test("of a day that is still to come is refused", async () => {
+    const ines = await afloat("Ines");
+    const doneAt = new Date(Date.now() + 3 * 24 * 3600 * 1000).toISOString();
+    await expect(repair(ines, 1, 5, { doneAt })).rejects.toMatchObject({ status: 422 });
+  });
+
   test("is refused where the tree does not know its words for keys, and another fleet's engine is not found", async () => {
     const [ines, mats] = [await afloat("Ines"), await afloat("Mats")];
     await expect(repair(ines, 1, 5, { cause: "gremlins" })).rejects.toMatchObject({

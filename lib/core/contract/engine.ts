@@ -2,9 +2,15 @@ import * as z from "zod";
 import { EngineFigure, HealthyReading, Key } from "../tree/schema";
 import { Id, Moment } from "./id";
 
+/** As many features as any tree will ask of. */
+const MOST_FEATURES = 200;
+
 /** What an engine is: features of the tree it has, and its maker's figures. An absent key means "don't know". */
 export const EngineProfile = z.strictObject({
-  features: z.record(Key, Key).default({}),
+  features: z
+    .record(Key, Key)
+    .refine((features) => Object.keys(features).length <= MOST_FEATURES, "That is more than an engine has.")
+    .default({}),
   figures: z.partialRecord(EngineFigure, z.number().positive()).default({}),
   healthy: z.partialRecord(HealthyReading, z.number()).default({}),
   maker: z.string().trim().max(80).optional(),

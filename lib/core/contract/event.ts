@@ -45,6 +45,7 @@ export const OutcomePayload = z.strictObject({
   minutes: z.number().nonnegative().max(100_000).optional(),
   parts: z
     .array(z.strictObject({ key: Key.optional(), title: z.string().trim().min(1).max(200), quantity: z.number().positive().max(1000) }))
+    .max(100)
     .default([]),
   note: z.string().max(4000).optional(),
 });
@@ -93,6 +94,8 @@ const kinds = {
 
 export type EventKind = keyof typeof kinds;
 
+const MOST_DEVICES = 200;
+
 const base = {
   id: Id,
   diagnosisId: Id,
@@ -101,7 +104,10 @@ const base = {
   sequence: z.number().int().min(1).max(2_147_483_647),
   madeAt: Moment,
   /** The newest events this device had seen of the other devices, by device: how far it knew their log. */
-  seen: z.record(Id, z.number().int().min(0)).default({}),
+  seen: z
+    .record(Id, z.number().int().min(0))
+    .refine((seen) => Object.keys(seen).length <= MOST_DEVICES, "No diagnosis is shared by so many devices.")
+    .default({}),
   /** The event this one replaces. */
   supersedes: Id.optional(),
 };

@@ -4,6 +4,12 @@ import * as z from "zod";
 export const Id = z.uuid().toLowerCase();
 export type Id = z.infer<typeof Id>;
 
-/** A moment, in UTC. */
-export const Moment = z.iso.datetime({ offset: true });
+const EARLIEST = Date.parse("1900-01-01T00:00:00Z");
+const LATEST = Date.parse("3000-01-01T00:00:00Z");
+
+/** A moment. However wrong a phone's clock is, it is one that every database and every reader can keep. */
+export const Moment = z.iso.datetime({ offset: true }).refine((moment) => {
+  const ms = Date.parse(moment);
+  return ms >= EARLIEST && ms < LATEST;
+}, "That is no moment of ours.");
 export type Moment = z.infer<typeof Moment>;

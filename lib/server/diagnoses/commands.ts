@@ -1,17 +1,17 @@
 import "server-only";
-import { and, eq, inArray, or } from "drizzle-orm";
-import { diagnoses, diagnosisEvents } from "@/db/schema/diagnoses";
+import { and, eq, isNull } from "drizzle-orm";
 import { engines } from "@/db/schema/boats";
+import { diagnoses, diagnosisEvents } from "@/db/schema/diagnoses";
+import { logEntries } from "@/db/schema/log-entries";
 import { DiagnosisEvent, type EventOf, type EventReceipt } from "@/lib/core/contract/event";
 import { Problem } from "@/lib/core/contract/problem";
-import type { FaultTree } from "@/lib/core/tree/schema";
 import type { FleetScope } from "@/lib/server/auth/scope";
 import { projectDiagnosis } from "@/lib/server/log/project-diagnosis";
-import { canonical } from "@/lib/server/trees/content-hash";
 import { pinnedVersion } from "@/lib/server/trees/pinned-version";
 import { documentOf, findTreeVersion } from "@/lib/server/trees/queries";
 import { refusalOf } from "./check-event";
-import { eventOf, rowOf } from "./stored-events";
+import { sortOut } from "./sort-out";
+import { rowOf } from "./stored-events";
 
 /** An event as it came, of which only the id is sure. */
 export type PostedEvent = { id: string } & Record<string, unknown>;
@@ -62,7 +62,7 @@ export async function recordEvents(
   }
 
   const tree = await documentOf(scope, pinnedVersion(diagnosis));
-  const fresh = await sortOut(scope, diagnosisId, events, tree, receipts);
+  const fresh = await sortOut(scope, diagnosis, events.sort(byDeviceAndSequence), tree, receipts);
   if (fresh.length > 0) {
     await scope.tx.insert(diagnosisEvents).values(fresh.map((event) => rowOf(scope, event)));
     await projectDiagnosis(scope, diagnosisId);
@@ -70,66 +70,13 @@ export async function recordEvents(
   return posted.map((one) => receipts.get(one.id) as EventReceipt);
 }
 
-/** Writes a receipt for each event and gives back those to store. */
-async function sortOut(
-  scope: FleetScope,
-  diagnosisId: string,
-  events: readonly DiagnosisEvent[],
-  tree: FaultTree,
-  receipts: Map<string, EventReceipt>,
-): Promise<DiagnosisEvent[]> {
-  if (events.length === 0) return [];
-  const rows = await scope.tx
-    .select()
-    .from(diagnosisEvents)
-    .where(
-      and(
-        eq(diagnosisEvents.fleetId, scope.fleetId),
-        or(
-          eq(diagnosisEvents.diagnosisId, diagnosisId),
-          inArray(
-            diagnosisEvents.id,
-            events.map((event) => event.id),
-          ),
-        ),
-      ),
-    );
-  const known = new Map(rows.map((row) => [row.id, eventOf(row)]));
-  const places = new Map(rows.map((row) => [placeOf(row), row.id]));
-  let begunBy = rows.find((row) => row.kind === "begun" && row.diagnosisId === diagnosisId)?.id;
-  const fresh: DiagnosisEvent[] = [];
-  for (const event of [...events].sort(byDeviceAndSequence)) {
-    const before = known.get(event.id);
-    const because = before
-      ? sameEvent(before, event)
-        ? null
-        : "Another event has this id already."
-      : places.has(placeOf(event))
-        ? "Another event has this place in the device's sequence already."
-        : event.kind === "begun" && begunBy
-          ? "This diagnosis has begun already."
-          : refusalOf(event, tree);
-    if (because) receipts.set(event.id, { id: event.id, result: "rejected", because });
-    else if (before) receipts.set(event.id, receipts.get(event.id) ?? { id: event.id, result: "duplicate" });
-    else {
-      receipts.set(event.id, { id: event.id, result: "stored" });
-      known.set(event.id, event);
-      places.set(placeOf(event), event.id);
-      if (event.kind === "begun") begunBy = event.id;
-      fresh.push(event);
-    }
-  }
-  // Rolls back a diagnosis that was made a moment ago for a beginning that could not be kept.
-  if (!begunBy) throw Problem.conflict("The event that begins this diagnosis was refused: its id or its place in the sequence is taken.");
-  return fresh;
-}
-
 /** Makes the diagnosis that an event begins, pinned to its tree version; nothing when it is there already or cannot be. */
 async function begin(scope: FleetScope<"diagnosis:write">, event: EventOf<"begun">): Promise<void> {
   if (await beginRefusal(scope, event)) return;
   const version = await findTreeVersion(scope, event.payload.treeVersionId);
   if (!version) return;
-  const at = new Date(event.madeAt);
+  // A phone whose clock runs ahead does not put it above all that follow.
+  const at = new Date(Math.min(Date.parse(event.madeAt), Date.now()));
   await scope.tx
     .insert(diagnoses)
     .values({
@@ -151,17 +98,15 @@ async function beginRefusal(scope: FleetScope, event: EventOf<"begun">): Promise
     .from(engines)
     .where(and(eq(engines.fleetId, scope.fleetId), eq(engines.id, event.payload.engineId)));
   if (!engine) return "There is no such engine in this fleet.";
+  const [repair] = await scope.tx
+    .select({ id: logEntries.id })
+    .from(logEntries)
+    .where(and(eq(logEntries.fleetId, scope.fleetId), eq(logEntries.id, event.diagnosisId), isNull(logEntries.diagnosisId)));
+  if (repair) return "A repair in the log has this id already.";
   const version = await findTreeVersion(scope, event.payload.treeVersionId);
   if (!version) return "There is no such version of the fault tree.";
   return refusalOf(event, await documentOf(scope, version));
 }
-
-const placeOf = (event: { diagnosisId: string; device: string; sequence: number }) =>
-  `${event.diagnosisId} ${event.device} ${event.sequence}`;
-
-/** The same event, whatever zone its moment is written in. */
-const sameEvent = (a: DiagnosisEvent, b: DiagnosisEvent) => canonical(comparable(a)) === canonical(comparable(b));
-const comparable = (event: DiagnosisEvent) => ({ ...event, madeAt: Date.parse(event.madeAt) });
 
 function byDeviceAndSequence(a: DiagnosisEvent, b: DiagnosisEvent): number {
   return a.device < b.device ? -1 : a.device > b.device ? 1 : a.sequence - b.sequence;

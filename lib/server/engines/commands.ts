@@ -5,6 +5,8 @@ import type { Engine, EngineChange, HourReading, NewEngine } from "@/lib/core/co
 import { Problem } from "@/lib/core/contract/problem";
 import type { FleetScope } from "@/lib/server/auth/scope";
 import { getBoat } from "@/lib/server/boats/queries";
+import { refuseEventId } from "@/lib/server/diagnoses/event-ids";
+import { notAhead } from "@/lib/server/web/not-ahead";
 import { getEngine, listHourReadings } from "./queries";
 
 /** Adds an engine to a boat. Sent twice it is one engine; another engine under the same id is refused. */
@@ -46,7 +48,7 @@ export async function removeEngine(scope: FleetScope<"boat:remove">, id: string,
 /** Writes down what the meter shows. Sent twice it is one reading. A meter that ran back must have been replaced, and that has to be said. */
 export async function addHourReading(scope: FleetScope<"engine:write">, reading: HourReading): Promise<HourReading> {
   await getEngine(scope, reading.engineId);
-  const readAt = new Date(reading.readAt);
+  const readAt = notAhead("readAt", reading.readAt);
   const [there] = await scope.tx
     .select()
     .from(hourReadings)
@@ -60,6 +62,7 @@ export async function addHourReading(scope: FleetScope<"engine:write">, reading:
     if (!same) throw Problem.conflict("Another reading has this id already.");
     return reading;
   }
+  await refuseEventId(scope, reading.id);
   if (!reading.reset) {
     const newest = (await listHourReadings(scope, reading.engineId)).find((r) => !r.doubtful && new Date(r.readAt) <= readAt);
     if (newest && newest.reading > reading.reading) {

@@ -6,8 +6,10 @@ import { logEntries } from "@/db/schema/log-entries";
 import type { LogEntry, NewRepair } from "@/lib/core/contract/log";
 import { Problem } from "@/lib/core/contract/problem";
 import type { FleetScope } from "@/lib/server/auth/scope";
+import { refuseEventId } from "@/lib/server/diagnoses/event-ids";
 import { getEngine } from "@/lib/server/engines/queries";
 import { documentOf, getCurrentTreeVersion } from "@/lib/server/trees/queries";
+import { notAhead } from "@/lib/server/web/not-ahead";
 import { namesOf, unknownIn } from "./outcome-names";
 import { projectDiagnosis } from "./project-diagnosis";
 import { getLogEntry } from "./queries";
@@ -18,7 +20,8 @@ export async function logRepair(scope: FleetScope<"log:write">, repair: NewRepai
   const tree = await documentOf(scope, await getCurrentTreeVersion(scope));
   const errors = unknownIn(repair, tree);
   if (errors.length > 0) throw Problem.invalid(errors);
-  const at = new Date(repair.doneAt);
+  const at = notAhead("doneAt", repair.doneAt);
+  await refuseEventId(scope, repair.id);
   const [stored] = await scope.tx
     .insert(logEntries)
     .values({
@@ -56,6 +59,7 @@ export async function logRepair(scope: FleetScope<"log:write">, repair: NewRepai
         engineId: repair.engineId,
         reading: repair.engineHours,
         readAt: at,
+        reset: repair.meterReset ?? false,
         by: scope.actor.userId,
       })
       .onConflictDoNothing();

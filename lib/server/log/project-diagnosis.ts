@@ -54,16 +54,22 @@ export async function projectDiagnosis(scope: FleetScope<"diagnosis:write" | "lo
   await scope.tx
     .insert(logEntries)
     .values({ fleetId: scope.fleetId, id: diagnosisId, diagnosisId, ...line })
-    .onConflictDoUpdate({ target: [logEntries.fleetId, logEntries.id], set: line });
+    .onConflictDoUpdate({ target: [logEntries.fleetId, logEntries.id], set: line, setWhere: eq(logEntries.diagnosisId, diagnosisId) });
 
   // An outcome's hours are a reading of the meter under the outcome's own id; one that was taken back goes with it.
   const ends = stored.filter((event) => event.kind === "ended").map((event) => event.id);
   if (ends.length > 0)
     await scope.tx.delete(hourReadings).where(and(eq(hourReadings.fleetId, scope.fleetId), inArray(hourReadings.id, ends)));
   if (end && endedAt && outcome?.engineHours !== undefined) {
-    await scope.tx
-      .insert(hourReadings)
-      .values({ fleetId: scope.fleetId, id: end.id, engineId: diagnosis.engineId, reading: outcome.engineHours, readAt: endedAt, by });
+    await scope.tx.insert(hourReadings).values({
+      fleetId: scope.fleetId,
+      id: end.id,
+      engineId: diagnosis.engineId,
+      reading: outcome.engineHours,
+      readAt: endedAt,
+      reset: outcome.meterReset ?? false,
+      by,
+    });
   }
 }
 
