@@ -15,7 +15,7 @@ export function AlongTheMeter({ entries, hoursNow, systems }: Props) {
   const x = (h: number) => LEFT + ((h - from) / (to - from)) * (WIDTH - LEFT - 24);
   const height = lanes.length * ROW + 44;
   return (
-    <div className="overflow-x-auto" tabIndex={0} role="region" aria-label="Along the hour meter">
+    <div className="overflow-x-auto" tabIndex={0} role="region" aria-label="Faults by system, drawn along the hour meter">
       <svg viewBox={`0 0 ${WIDTH} ${height}`} className="min-w-[60rem]" role="img" aria-label={inWords(lanes)}>
         {ticks.map((t) => (
           <g key={t}>

@@ -2,6 +2,7 @@ import type { ReactNode } from "react";
 import { Mark } from "@/components/ui/mark";
 import { LightSwitch } from "@/components/ui/light-switch";
 import { FleetNav } from "./fleet-nav";
+import { FoldedNav } from "./folded-nav";
 
 type Props = {
   /** null: a page that belongs to the person and to no fleet. */
@@ -15,7 +16,7 @@ type Props = {
 /** The frame round everything that needs the server: the way about at the left, on a phone folded into the top. */
 export function FleetShell({ fleet, fleets, personName, children }: Props) {
   return (
-    <div className="min-h-dvh lg:grid lg:grid-cols-[13rem_1fr]">
+    <div className="min-h-dvh lg:grid lg:grid-cols-[13rem_minmax(0,1fr)] print:block">
       <header className="no-print bg-deep text-on-deep lg:min-h-dvh lg:px-3.5 lg:py-5">
         <div className="flex items-center gap-2.5 px-4 py-2 lg:mb-6 lg:px-1 lg:py-0">
           <Mark />
@@ -24,18 +25,9 @@ export function FleetShell({ fleet, fleets, personName, children }: Props) {
             <LightSwitch />
           </span>
         </div>
-        <details className="group lg:hidden">
-          <summary className="flex min-h-12 list-none items-center justify-between border-t border-on-deep/25 px-4 font-semibold">
-            <span>{fleet?.name ?? personName}</span>
-            <span aria-hidden className="group-open:rotate-180">
-              ⌄
-            </span>
-            <span className="visually-hidden">Menu</span>
-          </summary>
-          <div className="px-2 pb-3">
-            <FleetNav fleet={fleet} fleets={fleets} personName={personName} />
-          </div>
-        </details>
+        <FoldedNav title={fleet?.name ?? personName}>
+          <FleetNav fleet={fleet} fleets={fleets} personName={personName} />
+        </FoldedNav>
         <div className="hidden lg:block">
           {fleet && <p className="mb-2 border-b border-on-deep/25 px-3 pb-3 font-semibold">{fleet.name}</p>}
           <FleetNav fleet={fleet} fleets={fleets} personName={personName} />

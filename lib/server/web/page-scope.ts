@@ -36,7 +36,7 @@ export async function pageScope<P extends Permission, T>(
   try {
     return await (await prove(person, fleetId, permission)).enter(run);
   } catch (error) {
-    if (error instanceof Problem && (error.status === 404 || error.status === 403)) notFound();
+    if (error instanceof Problem && [403, 404, 422].includes(error.status)) notFound();
     throw error;
   }
 }

@@ -13,12 +13,13 @@ import { can } from "@/lib/core/access/permissions";
 import { getBoat } from "@/lib/server/boats/queries";
 import { listEngines } from "@/lib/server/engines/queries";
 import { pageScope } from "@/lib/server/web/page-scope";
+import { knownId } from "../../known-id";
 
 type Props = PageProps<"/f/[fleetId]/boats/[boatId]">;
 
 const read = cache((fleetId: string, boatId: string) =>
   pageScope("fleet:read", fleetId, async (scope) => ({
-    boat: await getBoat(scope, boatId),
+    boat: await getBoat(scope, knownId(boatId)),
     engines: (await listEngines(scope)).filter((engine) => engine.boatId === boatId),
     mayRemove: can(scope.actor.roles, "boat:remove"),
   })),

@@ -14,10 +14,13 @@ import { getEngine } from "@/lib/server/engines/queries";
 import { listLog, listRepeats } from "@/lib/server/log/queries";
 import { documentOf, getCurrentTreeVersion } from "@/lib/server/trees/queries";
 import { pageScope } from "@/lib/server/web/page-scope";
+import { knownId } from "../../known-id";
 
 type Props = PageProps<"/f/[fleetId]/engines/[engineId]">;
 
-const readEngine = cache((fleetId: string, engineId: string) => pageScope("fleet:read", fleetId, (scope) => getEngine(scope, engineId)));
+const readEngine = cache((fleetId: string, engineId: string) =>
+  pageScope("fleet:read", fleetId, (scope) => getEngine(scope, knownId(engineId))),
+);
 
 /** The picture takes the newest faults; more would not be told apart on it. */
 const MOST_DRAWN = 200;

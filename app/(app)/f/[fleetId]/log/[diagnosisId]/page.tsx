@@ -12,12 +12,13 @@ import { PageHead } from "@/components/ui/page-head";
 import { readStory } from "@/lib/server/diagnoses/story";
 import { getLogEntry } from "@/lib/server/log/queries";
 import { pageScope } from "@/lib/server/web/page-scope";
+import { knownId } from "../../known-id";
 
 type Props = PageProps<"/f/[fleetId]/log/[diagnosisId]">;
 
 const read = cache((fleetId: string, diagnosisId: string) =>
   pageScope("diagnosis:read", fleetId, async (scope) => ({
-    story: await readStory(scope, diagnosisId),
+    story: await readStory(scope, knownId(diagnosisId)),
     entry: await getLogEntry(scope, diagnosisId),
   })),
 );

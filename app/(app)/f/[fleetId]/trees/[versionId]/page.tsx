@@ -7,19 +7,18 @@ import { partOf } from "@/components/tree/tree-part";
 import { TreeView } from "@/components/tree/tree-view";
 import { LinkButton } from "@/components/ui/link-button";
 import { PageHead } from "@/components/ui/page-head";
-import { Id } from "@/lib/core/contract/id";
 import { getTreeVersion } from "@/lib/server/trees/queries";
 import { pageScope } from "@/lib/server/web/page-scope";
+import { knownId } from "../../known-id";
 
 type Props = PageProps<"/f/[fleetId]/trees/[versionId]">;
 
 /** The likeliest causes first; more than these are hard to take in at once. */
 const LIKELIEST = 12;
 
-const read = cache((fleetId: string, versionId: string) => {
-  if (!Id.safeParse(versionId).success) notFound();
-  return pageScope("tree:read", fleetId, (scope) => getTreeVersion(scope, versionId));
-});
+const read = cache((fleetId: string, versionId: string) =>
+  pageScope("tree:read", fleetId, (scope) => getTreeVersion(scope, knownId(versionId))),
+);
 
 export async function generateMetadata({ params }: Props): Promise<Metadata> {
   const { fleetId, versionId } = await params;

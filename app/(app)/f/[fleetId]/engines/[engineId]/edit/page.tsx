@@ -7,13 +7,14 @@ import { can } from "@/lib/core/access/permissions";
 import { getEngine } from "@/lib/server/engines/queries";
 import { documentOf, getCurrentTreeVersion } from "@/lib/server/trees/queries";
 import { pageScope } from "@/lib/server/web/page-scope";
+import { knownId } from "../../../known-id";
 
 export const metadata: Metadata = { title: "Engine profile" };
 
 export default async function EditEnginePage({ params }: PageProps<"/f/[fleetId]/engines/[engineId]/edit">) {
   const { fleetId, engineId } = await params;
   const { engine, tree, mayRemove } = await pageScope("engine:write", fleetId, async (scope) => ({
-    engine: await getEngine(scope, engineId),
+    engine: await getEngine(scope, knownId(engineId)),
     tree: await documentOf(scope, await getCurrentTreeVersion(scope)),
     mayRemove: can(scope.actor.roles, "boat:remove"),
   }));

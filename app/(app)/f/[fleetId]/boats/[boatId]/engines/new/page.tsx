@@ -6,13 +6,14 @@ import { getBoat } from "@/lib/server/boats/queries";
 import { listEngines } from "@/lib/server/engines/queries";
 import { documentOf, getCurrentTreeVersion } from "@/lib/server/trees/queries";
 import { pageScope } from "@/lib/server/web/page-scope";
+import { knownId } from "../../../../known-id";
 
 export const metadata: Metadata = { title: "Add an engine" };
 
 export default async function NewEnginePage({ params }: PageProps<"/f/[fleetId]/boats/[boatId]/engines/new">) {
   const { fleetId, boatId } = await params;
   const { boat, others, tree } = await pageScope("engine:write", fleetId, async (scope) => ({
-    boat: await getBoat(scope, boatId),
+    boat: await getBoat(scope, knownId(boatId)),
     others: (await listEngines(scope)).filter((engine) => engine.boatId === boatId),
     tree: await documentOf(scope, await getCurrentTreeVersion(scope)),
   }));

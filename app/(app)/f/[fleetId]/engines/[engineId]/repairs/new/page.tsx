@@ -6,13 +6,14 @@ import { PageHead } from "@/components/ui/page-head";
 import { getEngine } from "@/lib/server/engines/queries";
 import { documentOf, getCurrentTreeVersion } from "@/lib/server/trees/queries";
 import { pageScope } from "@/lib/server/web/page-scope";
+import { knownId } from "../../../../known-id";
 
 export const metadata: Metadata = { title: "Log a repair" };
 
 export default async function NewRepairPage({ params }: PageProps<"/f/[fleetId]/engines/[engineId]/repairs/new">) {
   const { fleetId, engineId } = await params;
   const { engine, tree } = await pageScope("log:write", fleetId, async (scope) => ({
-    engine: await getEngine(scope, engineId),
+    engine: await getEngine(scope, knownId(engineId)),
     tree: await documentOf(scope, await getCurrentTreeVersion(scope)),
   }));
   const title = `${engine.boatName} · ${engine.name}`;
