@@ -3,6 +3,7 @@ import { beforeAll, beforeEach, describe, expect, test } from "vitest";
 import { identityDatabase, type Database } from "@/db/client";
 import { oneTimeTokens } from "@/db/schema/sessions";
 import { users } from "@/db/schema/users";
+import { FleetName, PersonName } from "@/lib/core/contract/account";
 import { askAddressChange, changeName, changePassword, confirmAddress } from "@/lib/server/account/commands";
 import { resetPassword, sendResetLink, sendSignInLink } from "@/lib/server/account/password-reset";
 import { finishSignUp, sendSignUpLink } from "@/lib/server/account/sign-up";
@@ -160,13 +161,30 @@ describe("one's own account", () => {
     const b = await signUp();
     box.clear();
     expect(await askAddressChange(a.person, { email: b.email, current: PASSWORD })).toMatchObject({ result: "right" });
-    expect(box.mails.map((m) => m.to)).toEqual([a.email]);
+    // As much work as for one that is free, so that the time taken tells nothing; but no link.
+    expect(box.mails.map((m) => m.to).sort()).toEqual([a.email, b.email].sort());
+    expect(box.mails.filter((m) => m.text.includes("/confirm-address/"))).toEqual([]);
     // Free when asked for, taken when confirmed.
     const c = address();
     await askAddressChange(a.person, { email: c, current: PASSWORD });
     const token = box.tokenFor(c, "confirm-address");
     await identityDatabase().update(users).set({ email: c }).where(eq(users.id, b.person.userId));
     expect(await confirmAddress(token, null)).toBe(false);
+  });
+
+  test("nobody's mailbox can be filled by asking for a change of address", async () => {
+    const { person } = await signUp();
+    const next = address();
+    for (let i = 0; i < 5; i++)
+      expect(await askAddressChange(person, { email: next, current: PASSWORD })).toMatchObject({ result: "right" });
+    expect(await askAddressChange(person, { email: next, current: PASSWORD })).toMatchObject({ result: "wait" });
+    for (let i = 0; i < 4; i++) await askAddressChange(person, { email: address(), current: PASSWORD });
+    expect(await askAddressChange(person, { email: address(), current: PASSWORD })).toMatchObject({ result: "wait" });
+  });
+
+  test.each(["Ada\r\nhttps://elsewhere.example", "Ada\u2028Byron", "\u202eadA", "A\u0000da"])("%j is no name", (name) => {
+    expect(PersonName.safeParse(name).success).toBe(false);
+    expect(FleetName.safeParse(name).success).toBe(false);
   });
 
   test("a name is changed on the card in each fleet too", async () => {

@@ -112,6 +112,29 @@ describe("invitations", () => {
     await expect(as(owner, fleetId).invite(others[0]?.email ?? "", ["owner"])).rejects.toMatchObject({ status: 409 });
   });
 
+  test("end with the standing of whoever sent them: removed, gone or no longer an owner", async () => {
+    const { owner, fleetId, others } = await crew(["owner"], ["owner"], ["owner"]);
+    const [removed, gone, demoted] = others as [TestPerson, TestPerson, TestPerson];
+    for (const [i, who] of [removed, gone, demoted].entries()) await as(who, fleetId).invite(`back-door-${i}@example.test`, ["owner"]);
+    await as(owner, fleetId).invite("wanted@example.test", ["skipper"]);
+    await as(owner, fleetId).remove(removed.userId);
+    await leaveFleet(await personOf(gone), fleetId);
+    await as(owner, fleetId).change(demoted.userId, ["skipper"]);
+    const left = await withScope(owner, fleetId, "people:write", listInvitations);
+    expect(left.map((invitation) => invitation.email)).toEqual(["wanted@example.test"]);
+  });
+
+  test("whose mail could not be sent are not kept, so that asking again sends it", async () => {
+    const { owner, fleetId } = await crew();
+    const id = crypto.randomUUID();
+    const reachable = process.env.SMTP_URL;
+    process.env.SMTP_URL = "smtp://127.0.0.1:1";
+    await expect(as(owner, fleetId).invite("unsent@example.test", ["skipper"], id)).rejects.toThrow();
+    process.env.SMTP_URL = reachable;
+    await as(owner, fleetId).invite("unsent@example.test", ["skipper"], id);
+    expect(box.mails.map((mail) => mail.to)).toEqual(["unsent@example.test"]);
+  });
+
   test("an owner of one fleet cannot withdraw another's", async () => {
     const a = await crew();
     const b = await crew();

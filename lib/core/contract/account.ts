@@ -9,8 +9,17 @@ export const Email = z
   .max(254, "That is too long for an e-mail address.")
   .pipe(z.email("That does not look like an e-mail address."));
 
-export const PersonName = z.string().trim().min(1, "Say what we may call you.").max(80, "Keep it under 80 characters.");
-export const FleetName = z.string().trim().min(1, "Give the fleet a name.").max(80, "Keep it under 80 characters.");
+/** One line, and it reads as it is written: names stand in mails that strangers get. */
+const name = (missing: string) =>
+  z
+    .string()
+    .trim()
+    .min(1, missing)
+    .max(80, "Keep it under 80 characters.")
+    .regex(/^[^\p{Cc}\p{Zl}\p{Zp}\u202a-\u202e\u2066-\u2069]*$/u, "Keep it to letters that can be seen, on one line.");
+
+export const PersonName = name("Say what we may call you.");
+export const FleetName = name("Give the fleet a name.");
 
 /** Length is what makes a password strong; nothing is asked of its make-up. */
 export const NewPassword = z

@@ -6,13 +6,14 @@ import { memberships } from "@/db/schema/memberships";
 import { oneTimeTokens } from "@/db/schema/sessions";
 import { users } from "@/db/schema/users";
 import type { ChangeAddress, ChangePassword } from "@/lib/core/contract/account";
+import { countAttempt, LIMITS } from "../auth/attempts";
 import { checkOwnPassword, type PasswordOutcome } from "../auth/check-password";
 import { inFleet } from "../auth/fleet-transaction";
 import { issueToken, takeToken } from "../auth/one-time-token";
 import { hashPassword } from "../auth/password";
 import type { Person } from "../auth/person";
 import { endSessionsOf } from "../auth/sessions";
-import { addressChangeAskedLetter, confirmAddressLetter, passwordChangedLetter } from "../mail/letters";
+import { addressChangeAskedLetter, addressTakenLetter, confirmAddressLetter, passwordChangedLetter } from "../mail/letters";
 import { sendMail } from "../mail/send-mail";
 import { setPassword } from "./password-reset";
 
@@ -41,15 +42,20 @@ export async function changePassword(person: Person, { current, password }: Chan
   return checked;
 }
 
-/** Asks the new address whether it is theirs, and tells the old one. An address that somebody has gets no mail; the answer is the same. */
+/**
+ * Asks the new address whether it is theirs, and tells the old one. An address that somebody has is told of it and gets
+ * no link; the answer and the work are the same.
+ */
 export async function askAddressChange(person: Person, { email, current }: ChangeAddress): Promise<PasswordOutcome> {
   const checked = await checkOwnPassword(person.userId, current);
   if (checked.result !== "right" || email === person.email) return checked;
+  const until = (await countAttempt(LIMITS.addressChanges, person.userId)) ?? (await countAttempt(LIMITS.mailToAddress, email));
+  if (until) return { result: "wait", until };
   const [taken] = await identityDatabase()
     .select({ id: users.id })
     .from(users)
     .where(and(eq(users.email, email), ne(users.id, person.userId)));
-  if (!taken) await sendMail(email, confirmAddressLetter(await issueToken("change-address", email, person.userId)));
+  await sendMail(email, taken ? addressTakenLetter() : confirmAddressLetter(await issueToken("change-address", email, person.userId)));
   await sendMail(person.email, addressChangeAskedLetter(email));
   return checked;
 }

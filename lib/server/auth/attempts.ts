@@ -14,6 +14,7 @@ export const LIMITS = {
   ownPassword: { name: "own-password", max: 10, seconds: 15 * 60 },
   mailToAddress: { name: "mail-to-address", max: 5, seconds: 15 * 60 },
   mailsOfPlace: { name: "mails-of-place", max: 40, seconds: 3600 },
+  addressChanges: { name: "address-changes", max: 10, seconds: 24 * 3600 },
   invitationsOfFleet: { name: "invitations-of-fleet", max: 60, seconds: 24 * 3600 },
 } as const satisfies Record<string, Limit>;
 

@@ -48,6 +48,13 @@ export const confirmAddressLetter = (token: string) =>
     NOT_YOU,
   );
 
+export const addressTakenLetter = () =>
+  letter(
+    "This address has an account",
+    "Somebody asked to use this address for another account. It has one of its own already, so nothing was changed.",
+    `If it was you, sign in with it here: ${siteUrl("/sign-in")}`,
+  );
+
 const ifNotYou = () => `If it was not you, choose a new password at once: ${siteUrl("/forgotten")}`;
 
 export const addressChangeAskedLetter = (newAddress: string) =>

@@ -3,6 +3,16 @@ import { createTransport, type Transporter } from "nodemailer";
 
 export type Letter = { subject: string; text: string };
 
+/** Somebody waits for the answer meanwhile: the library's own patience is ten minutes. */
+const PATIENCE_MS = "10000";
+
+function withPatience(url: string): string {
+  const patient = new URL(url);
+  for (const name of ["connectionTimeout", "greetingTimeout", "socketTimeout", "dnsTimeout"])
+    if (!patient.searchParams.has(name)) patient.searchParams.set(name, PATIENCE_MS);
+  return patient.toString();
+}
+
 const transports = new Map<string, Transporter>();
 
 function transport(): Transporter {
@@ -10,7 +20,7 @@ function transport(): Transporter {
   if (!url) throw new Error("SMTP_URL is not set: mail cannot be sent.");
   const known = transports.get(url);
   if (known) return known;
-  const made = createTransport(url, { from: process.env.MAIL_FROM ?? "Gudgeon <no-reply@localhost>" });
+  const made = createTransport(withPatience(url), { from: process.env.MAIL_FROM ?? "Gudgeon <no-reply@localhost>" });
   transports.set(url, made);
   return made;
 }

@@ -2,7 +2,7 @@ import "server-only";
 import { and, eq, sql } from "drizzle-orm";
 import { identityDatabase, type Transaction } from "@/db/client";
 import { fleets, people } from "@/db/schema/fleets";
-import { memberships } from "@/db/schema/memberships";
+import { invitations, memberships } from "@/db/schema/memberships";
 import type { Role } from "@/lib/core/access/roles";
 import type { Fleet, FleetPerson } from "@/lib/core/contract/people";
 import { Problem } from "@/lib/core/contract/problem";
@@ -25,6 +25,11 @@ function keepAnOwner(members: readonly Membership[], userId: string): void {
   }
 }
 
+/** Whoever manages people no longer must leave no way back in, for themselves or for others. */
+async function withdrawInvitationsOf(tx: Transaction, fleetId: string, userId: string): Promise<void> {
+  await tx.delete(invitations).where(and(eq(invitations.fleetId, fleetId), eq(invitations.invitedBy, userId)));
+}
+
 async function getPerson(scope: FleetScope, userId: string): Promise<FleetPerson> {
   const person = (await listPeople(scope)).find((p) => p.userId === userId);
   if (!person) throw Problem.notFound("That person is not in this fleet.");
@@ -44,7 +49,10 @@ export async function changeRoles(
     const member = members.find((m) => m.userId === userId);
     if (!member) throw Problem.notFound("That person is not in this fleet.");
     if (member.version !== version) throw Problem.stale({ ...seen, roles: member.roles, version: member.version });
-    if (!roles.includes("owner")) keepAnOwner(members, userId);
+    if (!roles.includes("owner")) {
+      keepAnOwner(members, userId);
+      await withdrawInvitationsOf(tx, scope.fleetId, userId);
+    }
     await tx
       .update(memberships)
       .set({ roles: [...roles], version: sql`${memberships.version} + 1` })
@@ -76,6 +84,7 @@ async function endMembership(tx: Transaction, fleetId: string, userId: string): 
   if (!member) throw Problem.notFound("That person is not in this fleet.");
   keepAnOwner(members, userId);
   await tx.delete(memberships).where(and(eq(memberships.fleetId, fleetId), eq(memberships.userId, userId)));
+  await withdrawInvitationsOf(tx, fleetId, userId);
   return member;
 }
 

@@ -54,7 +54,13 @@ export async function invite(scope: FleetScope<"people:write">, { id, email, rol
     if (!made) throw new Error("an insert gave no row");
     return made;
   });
-  await sendMail(email, invitationLetter(token, row));
+  try {
+    await sendMail(email, invitationLetter(token, row));
+  } catch (error) {
+    // Kept, it would make the next try a repeat, which sends nothing.
+    await db.delete(invitations).where(and(eq(invitations.fleetId, scope.fleetId), eq(invitations.id, id)));
+    throw error;
+  }
   return invitationOf(row);
 }
 
