@@ -1,4 +1,5 @@
 import type { HourReading } from "../contract/engine";
+import { longestRise } from "./longest-rise";
 
 /** A reading of the meter, as far as the hours hang on it. */
 export type MeterReading = Pick<HourReading, "id" | "reading" | "readAt" | "reset">;
@@ -66,10 +67,11 @@ function believedReadings(readings: readonly MeterReading[]): { believed: Fixed[
   const doubtful: string[] = [];
   for (const [index, stretch] of stretches.entries()) {
     const kept = longestRise(stretch, index > 0);
+    const isKept = new Set(kept);
     const start = kept[0];
     const sumSoFar = believed.at(-1)?.hours;
     for (const r of stretch) {
-      if (!kept.includes(r) || !start) doubtful.push(r.id);
+      if (!isKept.has(r) || !start) doubtful.push(r.id);
       else {
         const hours = sumSoFar === undefined ? r.reading : sumSoFar + r.reading - start.reading;
         believed.push({ id: r.id, reading: r.reading, hours, readAt: r.readAt, ms: Date.parse(r.readAt) });
@@ -77,19 +79,6 @@ function believedReadings(readings: readonly MeterReading[]): { believed: Fixed[
     }
   }
   return { believed, doubtful };
-}
-
-/** The longest run of readings that never falls; of equal ones the one with the later readings. A reset is always part of its stretch. */
-function longestRise(stretch: readonly MeterReading[], keepFirst: boolean): MeterReading[] {
-  let runs: MeterReading[][] = [];
-  for (const reading of stretch) {
-    const joins = runs.filter((run) => (run.at(-1)?.reading ?? 0) <= reading.reading);
-    // Later runs come later in the list, so >= lets the newer of two equal ones win.
-    const longest = joins.reduce<MeterReading[]>((best, run) => (run.length >= best.length ? run : best), []);
-    runs = [...runs, [...longest, reading]];
-  }
-  const whole = keepFirst ? runs.filter((run) => run[0] === stretch[0]) : runs;
-  return whole.reduce<MeterReading[]>((best, run) => (run.length >= best.length ? run : best), []);
 }
 
 const compare = (a: string, b: string) => (a < b ? -1 : a > b ? 1 : 0);
