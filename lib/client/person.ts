@@ -42,6 +42,9 @@ export function rememberPerson(person: LastPerson): void {
   }
 }
 
+/** Has another tab remembered someone else, or forgotten? A null key: all that was kept was cleared. */
+export const saysWhoElse = (event: StorageEvent): boolean => event.key === LAST || event.key === null;
+
 /** On signing out: the next person must not be shown this one's boats. What has not been sent stays in this person's store. */
 export function forgetPerson(): void {
   try {

@@ -1,9 +1,10 @@
+import { Me } from "@/lib/core/contract/me";
 import { Observable } from "../observable";
 import type { PhoneStore } from "../store/phone-store";
 import { backoffSeconds } from "./backoff";
 import { pull } from "./pull";
 import { push } from "./push";
-import { NoAnswer } from "./request";
+import { NoAnswer, request } from "./request";
 import { NOTHING_YET, type Standing } from "./standing";
 
 const FRESH_MS = 60_000;
@@ -16,16 +17,20 @@ const FRESH_MS = 60_000;
 export class Exchange {
   readonly standing = new Observable<Standing>(NOTHING_YET);
   readonly #store: PhoneStore;
+  readonly #userId: string;
   readonly #fleetId: string;
   #running = false;
   #again = false;
   #failures = 0;
   #timer: ReturnType<typeof setTimeout> | null = null;
   #pulledAt = 0;
+  /** When the server last said that the person of this store is the one signed in. */
+  #knownAt = 0;
   #ended = false;
 
-  constructor(store: PhoneStore, fleetId: string) {
+  constructor(store: PhoneStore, userId: string, fleetId: string) {
     this.#store = store;
+    this.#userId = userId;
     this.#fleetId = fleetId;
   }
 
@@ -52,7 +57,7 @@ export class Exchange {
 
   /** Try now. `hopeful`: something has changed, so the pause starts over. */
   nudge(hopeful = false): void {
-    if (hopeful) this.#failures = 0;
+    if (hopeful) this.#failures = this.#knownAt = 0;
     this.#again = true;
     if (!this.#running) void this.#run();
   }
@@ -70,6 +75,7 @@ export class Exchange {
         this.#say({ sending: false, trouble: null, ashoreAt: new Date().toISOString() });
       } catch (failure) {
         this.#failures += 1;
+        this.#knownAt = 0;
         this.#say({ sending: false, trouble: troubleOf(failure) });
         this.#timer = setTimeout(() => this.nudge(), backoffSeconds(this.#failures, Math.random()) * 1000);
       }
@@ -79,10 +85,21 @@ export class Exchange {
   }
 
   async #exchange(): Promise<void> {
-    await push(this.#store, this.#fleetId);
-    if (Date.now() - this.#pulledAt < FRESH_MS) return;
-    await pull(this.#store, this.#fleetId);
-    this.#pulledAt = Date.now();
+    await this.#samePerson();
+    const held = await push(this.#store, this.#fleetId);
+    if (Date.now() - this.#pulledAt >= FRESH_MS) {
+      await pull(this.#store, this.#fleetId);
+      this.#pulledAt = Date.now();
+    }
+    if (held) throw held;
+  }
+
+  /** Someone else may have signed in on this phone since, in another tab: nothing of this person's goes ashore in their name. */
+  async #samePerson(): Promise<void> {
+    if (Date.now() - this.#knownAt < FRESH_MS) return;
+    const { user } = Me.parse(await request("/api/v1/me"));
+    if (user.id !== this.#userId) throw new NoAnswer(401, "another person is signed in on this phone", {});
+    this.#knownAt = Date.now();
   }
 
   async #count(): Promise<void> {
@@ -103,7 +120,7 @@ function troubleOf(failure: unknown): Standing["trouble"] {
     console.error(failure);
     return "server";
   }
-  if (failure.status === 0) return "no-signal";
+  if (failure.isNoSignal) return "no-signal";
   if (failure.status === 401) return "sign-in";
   return failure.status === 403 || failure.status === 404 ? "not-in-fleet" : "server";
 }

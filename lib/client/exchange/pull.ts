@@ -3,14 +3,15 @@ import { DiagnosisEvent } from "@/lib/core/contract/event";
 import { Phone } from "@/lib/core/contract/phone";
 import type { FaultTree } from "@/lib/core/tree/schema";
 import type { PhoneStore } from "../store/phone-store";
+import { readLoosely } from "./read-loosely";
 import { NoAnswer, request } from "./request";
 
-/** An event of a kind that this phone does not know yet is left out, not fatal: the log is the server's to keep. */
-const Events = z.object({ events: z.array(z.unknown()) });
+/** What the server adds to an event, and what is no part of it, is left out; so is an event of a kind that this phone does not know. */
+const Events = z.object({ events: z.array(DiagnosisEvent) });
 
 /** Makes the store fresher: the fleet, the trees its diagnoses are pinned to, and what other phones have said. @throws NoAnswer */
 export async function pull(store: PhoneStore, fleetId: string): Promise<void> {
-  const phone = Phone.parse(await request(`/api/v1/fleets/${fleetId}/phone`));
+  const phone = readLoosely(Phone, await request(`/api/v1/fleets/${fleetId}/phone`));
   await store.keepPhone(phone);
   const open = new Set<string>();
   const versions = new Set([phone.treeVersion.id]);
@@ -30,17 +31,8 @@ export async function pull(store: PhoneStore, fleetId: string): Promise<void> {
 
 /** @throws NoAnswer */
 export async function takeInFromServer(store: PhoneStore, fleetId: string, diagnosisId: string): Promise<void> {
-  const { events } = Events.parse(await request(`/api/v1/fleets/${fleetId}/diagnoses/${diagnosisId}/events`));
-  await store.takeIn(events.flatMap((event) => known(event)));
-}
-
-/** What the server adds to an event, and what is no part of it. */
-const ADDED = new Set(["receivedAt", "by", "byName"]);
-
-function known(event: unknown): DiagnosisEvent[] {
-  if (typeof event !== "object" || event === null) return [];
-  const parsed = DiagnosisEvent.safeParse(Object.fromEntries(Object.entries(event).filter(([key]) => !ADDED.has(key))));
-  return parsed.success ? [parsed.data] : [];
+  const { events } = readLoosely(Events, await request(`/api/v1/fleets/${fleetId}/diagnoses/${diagnosisId}/events`));
+  await store.takeIn(events);
 }
 
 /** @throws NoAnswer */

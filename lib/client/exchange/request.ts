@@ -12,14 +12,22 @@ export class NoAnswer extends Error {
   readonly errors: readonly FieldError[];
   /** With a 412: the thing as it is now. */
   readonly current: unknown;
+  /** The server's own word; not that of a proxy, or of a harbour's sign-in page between here and there. */
+  readonly fromServer: boolean;
 
   /** `status` 0: nothing came back at all. */
-  constructor(status: number, because: string, problem: Pick<ProblemBody, "errors" | "current"> = {}) {
+  constructor(status: number, because: string, problem?: Pick<ProblemBody, "errors" | "current">) {
     super(because);
+    this.fromServer = problem !== undefined;
     this.status = status;
     this.because = because;
-    this.errors = problem.errors ?? [];
-    this.current = problem.current;
+    this.errors = problem?.errors ?? [];
+    this.current = problem?.current;
+  }
+
+  /** Nothing came back, or something on the way answered in the server's place. */
+  get isNoSignal(): boolean {
+    return this.status === 0 || (!this.fromServer && [403, 404, 407, 511].includes(this.status));
   }
 }
 
@@ -33,7 +41,10 @@ export async function request(path: string, init: RequestInit = {}): Promise<unk
   } catch {
     throw new NoAnswer(0, "no signal");
   }
-  const body: unknown = await response.json().catch(() => null);
+  if (response.ok && response.status === 204) return null;
+  const body: unknown = await response.json().catch(() => undefined);
+  // A page where an answer was due: a harbour's network wants signing in to before it lets anything through.
+  if (response.ok && body === undefined) throw new NoAnswer(0, "no signal");
   if (response.ok) return body;
   const problem = ProblemBody.partial({ type: true, status: true, detail: true }).safeParse(body);
   if (!problem.success) throw new NoAnswer(response.status, `answer ${response.status}`);

@@ -2,7 +2,7 @@ import { Me } from "@/lib/core/contract/me";
 import { Exchange } from "../exchange/exchange";
 import { NoAnswer, request } from "../exchange/request";
 import { Observable } from "../observable";
-import { deviceId, lastPerson, rememberPerson, type LastPerson } from "../person";
+import { deviceId, lastPerson, rememberPerson, saysWhoElse, type LastPerson } from "../person";
 import { PhoneStore } from "../store/phone-store";
 
 /** The store that is open, and the exchange that serves it. */
@@ -25,8 +25,11 @@ export class Surface {
     const ask = () => void this.#askWho();
     ask();
     window.addEventListener("online", ask);
+    const elsewhere = (event: StorageEvent) => saysWhoElse(event) && this.#perhapsAnother(ask);
+    window.addEventListener("storage", elsewhere);
     return () => {
       window.removeEventListener("online", ask);
+      window.removeEventListener("storage", elsewhere);
       this.#stopExchange?.();
       this.#stopExchange = null;
       this.state.set({ kind: "opening" });
@@ -40,7 +43,12 @@ export class Surface {
       const wish = this.#fleetWanted ?? (current.kind === "ready" ? current.person.fleetId : null);
       const fleet = me.fleets.find(({ id }) => id === wish) ?? me.fleets[0];
       if (!fleet) this.#close("no-fleet");
-      else this.#open({ userId: me.user.id, name: me.user.name, fleetId: fleet.id });
+      else {
+        const person = { userId: me.user.id, name: me.user.name, fleetId: fleet.id };
+        // Only what the server has said: a link to a fleet that is not this person's must not stand in the way without a signal.
+        rememberPerson(person);
+        this.#open(person);
+      }
     } catch (failure) {
       // Whoever has a store goes on with it; the exchange says what is wrong.
       if (this.state.get().kind === "ready") return;
@@ -48,18 +56,25 @@ export class Surface {
     }
   }
 
+  /** Another tab has signed out, or in as someone else: this person's boats go off the screen. */
+  #perhapsAnother(ask: () => void): void {
+    const current = this.state.get();
+    if (current.kind !== "ready" || lastPerson()?.userId === current.person.userId) return;
+    this.#close("opening");
+    ask();
+  }
+
   #open(person: LastPerson): void {
     const current = this.state.get();
     if (current.kind === "ready" && current.person.userId === person.userId && current.person.fleetId === person.fleetId) return;
     this.#stopExchange?.();
-    rememberPerson(person);
     const store = new PhoneStore(person.userId, person.fleetId, deviceId());
-    const exchange = new Exchange(store, person.fleetId);
+    const exchange = new Exchange(store, person.userId, person.fleetId);
     this.#stopExchange = exchange.start();
     this.state.set({ kind: "ready", person, store, exchange });
   }
 
-  #close(kind: "sign-in" | "no-signal" | "no-fleet"): void {
+  #close(kind: "opening" | "sign-in" | "no-signal" | "no-fleet"): void {
     this.#stopExchange?.();
     this.#stopExchange = null;
     this.state.set({ kind });
