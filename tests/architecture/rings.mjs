@@ -15,7 +15,7 @@ export const rings = [
     name: "client",
     files: ["lib/client/**/*.{ts,tsx}"],
     sees: ["lib/client", "lib/core"],
-    packages: ["zod", "idb", "fuse.js", "uuidv7", "react", "@tanstack/react-query"],
+    packages: ["zod", "idb", "fuse.js", "uuidv7", "react"],
     bans: ["server-import"],
   },
   {
@@ -45,7 +45,7 @@ export const rings = [
     name: "ui",
     files: ["components/ui/**/*.{ts,tsx}"],
     sees: ["components/ui"],
-    packages: ["react", "next", "radix-ui", "clsx", "lucide-react"],
+    packages: ["react", "next", "clsx", "lucide-react"],
     bans: ["server-import"],
   },
   {
@@ -63,7 +63,7 @@ export const rings = [
       "elkjs",
       "react-hook-form",
       "@hookform/resolvers",
-      "@tanstack/react-query",
+      ,
       "zod",
       "uuidv7",
     ],
@@ -81,7 +81,7 @@ export const rings = [
     files: ["app/**/*.{ts,tsx}", "proxy.ts", "instrumentation.ts"],
     ignores: ["app/(flow)/**"],
     sees: ["app", "components", "lib/core", "lib/client", "lib/server"],
-    packages: ["react", "next", "next-auth", "zod", "@fontsource/b612-mono", "@fontsource-variable/atkinson-hyperlegible-next"],
+    packages: ["react", "next", "next-auth", "uuidv7", "zod", "@fontsource/b612-mono", "@fontsource-variable/atkinson-hyperlegible-next"],
     bans: [],
   },
 ];

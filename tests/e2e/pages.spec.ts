@@ -3,7 +3,7 @@ import { expect, test } from "@playwright/test";
 import { stateOf } from "./support/demo";
 import { Fleet } from "./support/fleet";
 
-test.use({ storageState: ({}, use) => use(stateOf("owner@example.test")) });
+test.use({ storageState: stateOf("owner@example.test") });
 
 /** Every page there is; `of` makes the address from the demo fleet. */
 const PAGES: [name: string, of: (ids: { fleet: string; engine: string; boat: string; diagnosis: string; tree: string }) => string][] = [

@@ -3,7 +3,7 @@ import { demo, stateOf } from "./support/demo";
 import { Fleet } from "./support/fleet";
 import { playAt } from "./support/play";
 
-test.use({ storageState: ({}, use) => use(stateOf("skipper@example.test")) });
+test.use({ storageState: stateOf("skipper@example.test") });
 
 async function say(page: Page, fleet: Fleet, engineId: string, complaint: string, symptom: string) {
   await page.goto(`/diagnose?fleet=${fleet.id}&engine=${engineId}`);

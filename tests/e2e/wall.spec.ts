@@ -2,7 +2,7 @@ import { expect, test } from "@playwright/test";
 import { stateOf } from "./support/demo";
 import { Fleet } from "./support/fleet";
 
-test.use({ storageState: ({}, use) => use(stateOf("stranger@example.test")) });
+test.use({ storageState: stateOf("stranger@example.test") });
 
 test("somebody of another fleet opens none of its pages, files or routes", async ({ page, playwright, baseURL }) => {
   const insider = await playwright.request.newContext({ baseURL: baseURL!, storageState: stateOf("owner@example.test") });

@@ -85,6 +85,7 @@ describe("plans", () => {
     });
     const mean = over.reduce((sum, one) => sum + one, 0) / over.length;
     expect(Math.min(...over)).toBeGreaterThan(-1e-9);
+    console.log("MEAN", mean, "MAX", Math.max(...over), "p99", [...over].sort((a,b)=>a-b)[58]);
     expect(mean).toBeLessThan(0.02);
     expect(Math.max(...over)).toBeLessThan(0.08);
   }, 90_000);

@@ -76,6 +76,15 @@ describe("an owner that is no superuser", () => {
     });
   });
 
+  test("takes from everybody the right to make things beside its tables, which older servers give", async () => {
+    const url = await database(`older_${suffix}`, "createrole");
+    await withClient(url, (owner) => owner.query("grant create on schema public to public"));
+    await migrate(url);
+    const { appUrl, identityUrl } = await ensureRoles(url, {});
+    for (const role of [appUrl, identityUrl])
+      await expect(withClient(role, (client) => client.query("create table mine (id int)"))).rejects.toMatchObject({ code: "42501" });
+  });
+
   test("that may not make roles is given the statement to run", async () => {
     const url = await database(`strict_${suffix}`, "");
     await migrate(url);

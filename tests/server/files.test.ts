@@ -146,6 +146,7 @@ describe("a photo of a fleet", () => {
       "content-length": String(kept.bytes),
     });
     expect(answer.headers.get("content-security-policy")).toContain("sandbox");
+    expect(answer.headers.get("vary")).toBe("cookie");
     expect((await sharp(await answer.bytes()).metadata()).format).toBe("jpeg");
   });
 

@@ -1,4 +1,4 @@
-import { mkdtempSync, rmSync, writeFileSync } from "node:fs";
+import { chmodSync, mkdtempSync, readdirSync, rmSync, statSync, writeFileSync } from "node:fs";
 import os from "node:os";
 import path from "node:path";
 import { afterEach, beforeEach, expect, test } from "vitest";
@@ -20,6 +20,7 @@ test("where mail goes out for real there is no mailbox to show", async () => {
 
 test("what was sent is shown, newest first, and nothing else of the folder", async () => {
   process.env.MAIL_DIR = dir;
+  chmodSync(dir, 0o755);
   let arrived = 0;
   const server = await startMail({ dir, onMail: () => void arrived++ });
   process.env.SMTP_URL = server.url;
@@ -27,6 +28,8 @@ test("what was sent is shown, newest first, and nothing else of the folder", asy
   await sendMail("ben@example.test", { subject: "Second", text: "Two\n" });
   await expect.poll(() => arrived).toBe(2);
   await server.stop();
+  for (const name of [".", ...readdirSync(dir)])
+    expect(statSync(path.join(dir, name)).mode & 0o077, `${name} is for its owner alone`).toBe(0);
   writeFileSync(path.join(dir, "secrets.json"), "{}");
   writeFileSync(path.join(dir, "1-0001.json"), '{ "to": "half wri');
   const mails = await listKeptMail();
