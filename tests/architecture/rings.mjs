@@ -63,7 +63,6 @@ export const rings = [
       "elkjs",
       "react-hook-form",
       "@hookform/resolvers",
-      ,
       "zod",
       "uuidv7",
     ],
