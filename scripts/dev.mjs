@@ -30,6 +30,7 @@ try {
     stdio: ["ignore", "inherit", "inherit"],
     env: {
       ...process.env,
+      DATABASE_URL: undefined, // the owner's address: what serves people never sees it
       ...secrets(),
       ...env,
       NEXT_TELEMETRY_DISABLED: "1",

@@ -2,8 +2,10 @@
 import path from "node:path";
 import { claimCheckout } from "./lib/checkout.mjs";
 import { ensureNodeModules } from "./lib/npm.mjs";
+import { isForThisMachine } from "./lib/own-machine.mjs";
 import { startPostgres } from "./lib/postgres.mjs";
 import { freePort, log, root, stop, UserError } from "./lib/proc.mjs";
+import { addressOf, serve } from "./lib/serve.mjs";
 import { stopping } from "./lib/stopping.mjs";
 
 const { add, end } = stopping();
@@ -14,7 +16,6 @@ try {
   const announce = claimCheckout();
   await ensureNodeModules();
   const { build } = await import("./lib/build.mjs");
-  const { serve } = await import("./lib/serve.mjs");
 
   const database = (async () => {
     const { prepareDatabase } = await import("./lib/database.mjs");
@@ -25,7 +26,7 @@ try {
 
   const host = process.env.HOST ?? "127.0.0.1";
   const port = await portFor(host);
-  const env = { ...urls.value.env, FILES_DIR: process.env.FILES_DIR ?? path.join(root, ".data/files"), ...(await ownMailbox()) };
+  const env = { ...urls.value.env, FILES_DIR: process.env.FILES_DIR ?? path.join(root, ".data/files"), ...(await ownMailbox(host, port)) };
   const site = await serve({ dir: built.value, port, host, env });
   add(() => stop(site.child));
   site.child.once("exit", () => end(1, "the web server ended"));
@@ -55,14 +56,17 @@ async function portFor(host) {
   return port;
 }
 
-/** Without SMTP_URL, mail stays here: a mailbox on loopback, shown on /dev/mail. */
-async function ownMailbox() {
+/** Without SMTP_URL, mail stays here: a mailbox on loopback, shown on /dev/mail where nobody else can look. */
+async function ownMailbox(host, port) {
   if (process.env.SMTP_URL) return {};
   const { startMail } = await import("./lib/mail.mjs");
   const dir = path.join(root, ".data/mail");
-  const mail = await startMail({ dir, onMail: (m) => log(`mail to ${m.to}: ${m.subject} (kept in .data/mail, shown on /dev/mail)`) });
+  const shown = isForThisMachine(host, addressOf(port));
+  if (!shown) log("others can open this site: /dev/mail is not shown, mail is kept in .data/mail. Set SMTP_URL to send it.");
+  const where = shown ? "kept in .data/mail, shown on /dev/mail" : "kept in .data/mail";
+  const mail = await startMail({ dir, onMail: (m) => log(`mail to ${m.to}: ${m.subject} (${where})`) });
   add(() => mail.stop());
-  return { SMTP_URL: mail.url, MAIL_DIR: dir };
+  return { SMTP_URL: mail.url, ...(shown && { MAIL_DIR: dir }) };
 }
 
 function demoSignIns({ people, password }, url, mailDir) {

@@ -2,7 +2,8 @@
 import { createHash } from "node:crypto";
 import { cpSync, existsSync, mkdirSync, readdirSync, readFileSync, renameSync, rmSync, statSync, writeFileSync } from "node:fs";
 import path from "node:path";
-import { bin, log, root, run, withLock } from "./proc.mjs";
+import { withLock } from "./lock-file.mjs";
+import { bin, log, root, run } from "./proc.mjs";
 
 const SOURCES = [
   "app",

@@ -2,7 +2,8 @@
 import { createHash } from "node:crypto";
 import { existsSync, readFileSync, writeFileSync } from "node:fs";
 import path from "node:path";
-import { log, root, run, withLock } from "./proc.mjs";
+import { withLock } from "./lock-file.mjs";
+import { log, root, run } from "./proc.mjs";
 
 const marker = path.join(root, "node_modules/.lock-hash");
 const want = () =>

@@ -1,6 +1,6 @@
 // Process helpers. Node built-ins only: these run before `npm ci`.
 import { spawn } from "node:child_process";
-import { accessSync, constants, existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from "node:fs";
+import { accessSync, constants, existsSync, readFileSync } from "node:fs";
 import net from "node:net";
 import path from "node:path";
 
@@ -25,10 +25,19 @@ export function which(name, extraDirs = []) {
   return null;
 }
 
-/** Runs to the end; throws on a non-zero exit unless `check: false`. */
-export function run(cmd, args, { check = true, ...opts } = {}) {
+const setpriv = process.platform === "linux" ? which("setpriv") : null;
+
+/**
+ * A program and its arguments, so that the kernel signals it when we die, even by kill -9 (prctl PR_SET_PDEATHSIG through
+ * util-linux's setpriv, where that exists).
+ */
+const endedWithUs = (signal, cmd, args, drop = []) =>
+  setpriv ? [setpriv, [...drop, `--pdeathsig=${signal}`, "--", cmd, ...args]] : [cmd, args];
+
+/** Runs to the end, or to ours unless `mayOutlive`; throws on a non-zero exit unless `check: false`. */
+export function run(cmd, args, { check = true, mayOutlive = false, ...opts } = {}) {
   return new Promise((resolve, reject) => {
-    const child = spawn(cmd, args, { cwd: root, stdio: "inherit", ...opts });
+    const child = spawn(...(mayOutlive ? [cmd, args] : endedWithUs("TERM", cmd, args)), { cwd: root, stdio: "inherit", ...opts });
     let out = "";
     child.stdout?.on("data", (d) => (out += d));
     child.stderr?.on("data", (d) => (out += d));
@@ -40,19 +49,13 @@ export function run(cmd, args, { check = true, ...opts } = {}) {
   });
 }
 
-const setpriv = process.platform === "linux" ? which("setpriv") : null;
-
 /**
  * A long-running child in a session of its own (so a Ctrl+C in the terminal reaches only us
- * and we decide the order of shutdown) that the kernel signals when we die, even by kill -9
- * (prctl PR_SET_PDEATHSIG through util-linux's setpriv, where that exists).
+ * and we decide the order of shutdown) that ends with us.
  */
 export function daemon(cmd, args, { deathSignal = "TERM", as, ...opts } = {}) {
-  if (setpriv) {
-    const drop = as ? [`--reuid=${as.uid}`, `--regid=${as.gid}`, "--clear-groups"] : [];
-    return spawn(setpriv, [...drop, `--pdeathsig=${deathSignal}`, "--", cmd, ...args], { detached: true, cwd: root, ...opts });
-  }
-  return spawn(cmd, args, { detached: true, cwd: root, ...(as ?? {}), ...opts });
+  const drop = as ? [`--reuid=${as.uid}`, `--regid=${as.gid}`, "--clear-groups"] : [];
+  return spawn(...endedWithUs(deathSignal, cmd, args, drop), { detached: true, cwd: root, ...(setpriv ? {} : as), ...opts });
 }
 
 export function exited(child) {
@@ -88,32 +91,6 @@ export function processTag(pid) {
   }
 }
 
-/** One at a time in this checkout; a lock whose holder has died is taken over. */
-export async function withLock(name, work) {
-  const file = path.join(root, `.data/${name}.lock`);
-  mkdirSync(path.dirname(file), { recursive: true });
-  for (let told = false; ;) {
-    try {
-      writeFileSync(file, processTag(process.pid), { flag: "wx" });
-      break;
-    } catch (e) {
-      if (e.code !== "EEXIST") throw e;
-      const tag = existsSync(file) ? readFileSync(file, "utf8") : "";
-      if (tag && processTag(Number(tag.split(":")[0])) !== tag) rmSync(file, { force: true });
-      else {
-        if (!told) log(`waiting for another run (${name})`);
-        told = true;
-        await new Promise((r) => setTimeout(r, 300));
-      }
-    }
-  }
-  try {
-    return await work();
-  } finally {
-    rmSync(file, { force: true });
-  }
-}
-
 function canListen(port, host) {
   return new Promise((resolve) => {
     const s = net.createServer();
@@ -140,7 +117,7 @@ export async function ensureDebian(present, packages, why) {
   const env = { ...process.env, DEBIAN_FRONTEND: "noninteractive" };
   const apt = async (...args) => {
     for (const end = Date.now() + 300_000; ; await new Promise((r) => setTimeout(r, 1000))) {
-      const { code, out } = await run("apt-get", ["-q", ...args], { env, stdio: "pipe", check: false });
+      const { code, out } = await run("apt-get", ["-q", ...args], { env, stdio: "pipe", check: false, mayOutlive: true });
       if (code === 0) return;
       // Another run (or unattended-upgrades) has apt at this moment. DPkg::Lock::Timeout does not cover `update`.
       if (!/Could not get lock|Unable to lock/.test(out) || Date.now() > end) throw new Error(`apt-get ${args.join(" ")}:\n${out}`);

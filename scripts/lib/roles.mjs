@@ -106,6 +106,9 @@ async function grants(client, { app, identity }) {
   );
   const both = `${quote(app)}, ${quote(identity)}`;
   const out = [`REVOKE ALL ON ALL TABLES IN SCHEMA public FROM ${both}`, `GRANT USAGE ON SCHEMA public TO ${both}`];
+  // Before PostgreSQL 15 everybody may make tables and functions there.
+  const mayMake = await client.query("select has_schema_privilege($1, 'public', 'CREATE') as may", [app]);
+  if (mayMake.rows[0].may) out.push("REVOKE CREATE ON SCHEMA public FROM PUBLIC");
   for (const { name, walled } of rows) {
     const table = `public.${quote(name)}`;
     if (IDENTITY_TABLES.includes(name)) out.push(`GRANT SELECT, INSERT, UPDATE, DELETE ON ${table} TO ${quote(identity)}`);

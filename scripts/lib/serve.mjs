@@ -29,9 +29,11 @@ export async function serve({ dir, port, host = "127.0.0.1", env = {}, stdio = "
       ...env,
     },
   });
-  await untilHealthy(child, `http://localhost:${port}`);
+  await untilHealthy(child, `http://${["127.0.0.1", "0.0.0.0", "::"].includes(host) ? "localhost" : bracketed(host)}:${port}`);
   return { child, url };
 }
+
+const bracketed = (host) => (host.includes(":") ? `[${host}]` : host);
 
 async function untilHealthy(child, url) {
   let ended = false;

@@ -12,9 +12,9 @@ export function folderStore(root: string): ObjectStore {
   return {
     async put(key, body) {
       const file = at(key);
-      await mkdir(path.dirname(file), { recursive: true });
+      await mkdir(path.dirname(file), { recursive: true, mode: 0o700 });
       const unfinished = `${file}.${randomUUID()}.tmp`;
-      await writeFile(unfinished, body);
+      await writeFile(unfinished, body, { mode: 0o600 });
       await rename(unfinished, file);
     },
     async get(key) {

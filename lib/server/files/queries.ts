@@ -8,7 +8,7 @@ import { objectStore } from "./object-store";
 
 type Row = typeof files.$inferSelect;
 
-/** A photo's bytes, as an answer that no browser will run or guess at. The address of a photo always means the same photo, so it may be kept; by this person's browser only. */
+/** A photo's bytes, as an answer that no browser will run or guess at. The address of a photo always means the same photo, so it may be kept; by this person's browser, for this person only. */
 export async function readFile(scope: FleetScope<"file:read">, id: string): Promise<Response> {
   const row = await findFile(scope, id);
   const stored = row && (await objectStore().get(storeKey(row)));
@@ -22,6 +22,8 @@ export async function readFile(scope: FleetScope<"file:read">, id: string): Prom
       "cross-origin-resource-policy": "same-origin",
       "x-content-type-options": "nosniff",
       "cache-control": "private, max-age=86400, immutable",
+      // A browser may be signed in as somebody else tomorrow.
+      vary: "cookie",
     },
   });
 }
