@@ -4,6 +4,7 @@ import type { Database } from "@/db/client";
 import { withScope } from "@/lib/server/auth/scope";
 import { recordEvents, type PostedEvent } from "@/lib/server/diagnoses/commands";
 import { getDiagnosis, getEvents, listDiagnoses } from "@/lib/server/diagnoses/queries";
+import { readStory } from "@/lib/server/diagnoses/story";
 import { addHourReading } from "@/lib/server/engines/commands";
 import { listHourReadings } from "@/lib/server/engines/queries";
 import { logRepair } from "@/lib/server/log/commands";
@@ -129,14 +130,14 @@ describe("an outcome", () => {
 });
 
 describe("a diagnosis", () => {
-  test("has an end: past two thousand events more are refused, and what is there stays", async () => {
+  test("has an end: past a thousand events more are refused, and what is there stays", async () => {
     const id = uuidv7();
     const phone = phoneOf(id);
     const note = () => phone.write("noted", { note: "x", photos: [] });
     await post(id, [phone.begin(ines.engineId, treeId)]);
-    for (let i = 0; i < 4; i++) await post(id, Array.from({ length: 500 }, note));
+    for (let i = 0; i < 2; i++) await post(id, Array.from({ length: 500 }, note));
     expect(await post(id, [note()])).toMatchObject([{ result: "rejected" }]);
-    expect(await read((scope) => getEvents(scope, id))).toHaveLength(2000);
+    expect(await read((scope) => getEvents(scope, id))).toHaveLength(1000);
   });
 
   test("takes no event with lists or maps without end", async () => {
@@ -154,4 +155,25 @@ describe("a diagnosis", () => {
     const begun = phoneOf(other).begin(ines.engineId, treeId, { profile: { features, figures: {}, healthy: {} } });
     await expect(post(other, [begun])).rejects.toMatchObject({ status: 404 });
   });
+});
+
+test("the story of a long log lets others be served while it is worked out", async () => {
+  const id = uuidv7();
+  const phone = phoneOf(id);
+  await post(id, [
+    phone.begin(ines.engineId, treeId),
+    ...Array.from({ length: 300 }, () => phone.write("noted", { note: "x", photos: [] })),
+  ]);
+  const began = performance.now();
+  let [last, longestWait, done] = [began, 0, false];
+  const wait = () => {
+    const now = performance.now();
+    longestWait = Math.max(longestWait, now - last);
+    last = now;
+    if (!done) setImmediate(wait);
+  };
+  setImmediate(wait);
+  await read((scope) => readStory(scope, id));
+  done = true;
+  expect(longestWait * 4).toBeLessThan(performance.now() - began);
 });

@@ -12,7 +12,7 @@ import { refusalOf } from "./check-event";
 import { eventOf } from "./stored-events";
 
 /** Many times what the longest search needs; each event is folded again at every reading. */
-const MOST_EVENTS = 2000;
+const MOST_EVENTS = 1000;
 
 type DiagnosisRow = typeof diagnoses.$inferSelect;
 

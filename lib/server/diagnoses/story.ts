@@ -1,4 +1,5 @@
 import "server-only";
+import { setImmediate } from "node:timers/promises";
 import { and, eq } from "drizzle-orm";
 import { diagnoses } from "@/db/schema/diagnoses";
 import type { Story, StoryStep } from "@/lib/core/contract/diagnosis";
@@ -29,23 +30,26 @@ export async function readStory(scope: FleetScope, id: string): Promise<Story> {
   return {
     diagnosis: await getDiagnosis(scope, id),
     complaint: stored.flatMap((event) => (event.kind === "begun" ? [event.payload.complaint ?? null] : []))[0] ?? null,
-    steps: stepsOf(version.document, stored),
+    steps: await stepsOf(version.document, stored),
     treeNumber: version.number,
   };
 }
 
 /** Each event in the order in which it could be known, with the view just before and just after it. */
-export function stepsOf(tree: FaultTree, stored: readonly StoredEvent[]): StoryStep[] {
+async function stepsOf(tree: FaultTree, stored: readonly StoredEvent[]): Promise<StoryStep[]> {
   const models = keepModels();
   const names = new Map(stored.map((event) => [event.id, event.byName]));
   const events = fold(plainEvents(stored)).order.events;
   let before: DiagnosisView | null = null;
-  return events.flatMap((event, index) => {
+  const steps: StoryStep[] = [];
+  for (const [index, event] of events.entries()) {
+    // Each view takes some milliseconds: others are served in between.
+    await setImmediate();
     const after = view(tree, events.slice(0, index + 1), models);
-    const step = stepOf(event, before, after, names.get(event.id) ?? "");
+    steps.push(...stepOf(event, before, after, names.get(event.id) ?? ""));
     before = after;
-    return step;
-  });
+  }
+  return steps;
 }
 
 function stepOf(event: DiagnosisEvent, before: DiagnosisView | null, after: DiagnosisView, by: string): StoryStep[] {
