@@ -3,10 +3,11 @@
 import { useState } from "react";
 import type { Answer } from "@/lib/core/contract/event";
 import type { StepShown } from "@/lib/core/diagnosis/view";
-import { useGuard } from "@/lib/client/screen/use-guard";
+import { useGuard, useSettling } from "@/lib/client/screen/use-guard";
 import { AnswerButton } from "./answer-button";
 import { NoteAndPhotos } from "./note-and-photos";
 import { ReadingAnswer } from "./reading-answer";
+import { useKeptNote } from "./use-kept-note";
 
 export type Given = { answer: Answer; says: string; withdraws: string | null; note: string; photos: readonly string[] };
 
@@ -21,16 +22,16 @@ type Props = {
 
 /** The question and its answers. Each tap is kept at once; there is no send button to forget. */
 export function AnswerForm({ of, ask, answers, reading, ifFitted, onAnswer }: Props) {
-  const [note, setNote] = useState("");
-  const [photos, setPhotos] = useState<readonly string[]>([]);
+  const { note, photos, onNote, onPhotos, drop } = useKeptNote(of);
   const [given, setGiven] = useState<string | null>(null);
   const guard = useGuard();
+  const settling = useSettling();
   const withBands = reading !== null && reading.bands.length > 0;
   const give = (answer: Answer, says: string, withdraws: string | null = null) =>
-    guard(() => {
-      if (given !== null) return;
+    guard(`${of} ${says}`, () => {
+      if (given !== null || settling) return;
       setGiven(says);
-      void onAnswer({ answer, says, withdraws, note: note.trim(), photos });
+      void onAnswer({ answer, says, withdraws, note: note.trim(), photos }).then(drop);
     });
   return (
     <div role="group" aria-labelledby={`ask-${of}`}>
@@ -45,6 +46,7 @@ export function AnswerForm({ of, ask, answers, reading, ifFitted, onAnswer }: Pr
         {answers.map((answer) => (
           <AnswerButton
             key={answer.finding}
+            waits={settling}
             chosen={given === answer.title}
             onTap={() => give({ finding: answer.finding }, answer.title, answer.withdraws)}
           >
@@ -52,15 +54,15 @@ export function AnswerForm({ of, ask, answers, reading, ifFitted, onAnswer }: Pr
           </AnswerButton>
         ))}
         {ifFitted && (
-          <AnswerButton quiet chosen={given === "Not fitted"} onTap={() => give({ notFitted: true }, "Not fitted")}>
+          <AnswerButton quiet waits={settling} chosen={given === "Not fitted"} onTap={() => give({ notFitted: true }, "Not fitted")}>
             Not fitted on this engine
           </AnswerButton>
         )}
-        <AnswerButton quiet chosen={given === "Can't tell"} onTap={() => give({ cannotTell: true }, "Can't tell")}>
+        <AnswerButton quiet waits={settling} chosen={given === "Can't tell"} onTap={() => give({ cannotTell: true }, "Can't tell")}>
           Can&rsquo;t tell, or can&rsquo;t get to it
         </AnswerButton>
       </div>
-      <NoteAndPhotos of={of} note={note} onNote={setNote} photos={photos} onPhotos={setPhotos} />
+      <NoteAndPhotos of={of} note={note} onNote={onNote} photos={photos} onPhotos={onPhotos} />
       <p role="status" className="mt-2 min-h-6 text-sm text-ink-2">
         {given === null ? "" : "Kept. The next step is being worked out."}
       </p>

@@ -6,28 +6,26 @@ import { useHere } from "./here";
 /** A cause that was cured on this engine before and is here again: a fact, and a reason to look upstream. */
 export function BeenHereBefore({ cause }: { cause: string }) {
   const { phone, tree, engine, summary } = useHere();
-  const { earlier, upstream } = beenHere(phone.recentLog, tree, engine.id, cause, summary.id);
-  if (earlier.length === 0) return null;
+  const { times, last, upstream } = beenHere(phone.recentLog, tree, engine.id, cause, summary.id);
+  if (times === 0 || !last) return null;
   const title = tree.causes.find(({ key }) => key === cause)?.title ?? cause;
   return (
     <section aria-label="Been here before" className="rounded-xl border-[1.5px] border-lead bg-lead-wash px-4 py-3">
       <p className="text-sm font-bold text-lead">Came back</p>
       <p className="font-semibold">
-        {title}: {earlier.length === 1 ? "once before" : `${earlier.length} times before`} on this engine
+        {title}: {times === 1 ? "once before" : `${times} times before`} on this engine
       </p>
-      <ul className="mt-1 list-disc pl-5 text-sm">
-        {earlier.slice(-6).map(({ at, engineHours }) => (
-          <li key={at}>
-            {new Date(at).toLocaleDateString("en-GB", { day: "numeric", month: "short", year: "numeric" })}
-            {engineHours !== null && (
-              <>
-                {" at "}
-                <span className="dial">{Math.round(engineHours)}</span> h
-              </>
-            )}
-          </li>
-        ))}
-      </ul>
+      <p className="mt-1 text-sm">
+        {times === 1 ? "That was on " : "The last time was on "}
+        {new Date(last.at).toLocaleDateString("en-GB", { day: "numeric", month: "short", year: "numeric" })}
+        {last.engineHours !== null && (
+          <>
+            {" at "}
+            <span className="dial">{Math.round(last.engineHours)}</span> h
+          </>
+        )}
+        .
+      </p>
       {upstream.length > 0 && (
         <>
           <p className="mt-2 text-sm font-semibold">Putting it right again treats the sign. Look upstream at:</p>

@@ -1,11 +1,13 @@
 "use client";
 
+import { useGuard } from "@/lib/client/screen/use-guard";
 import { AnswerButton } from "./answer-button";
 import { useHere } from "./here";
 
 /** Steps that two phones answered at once: one tap says which answer is right. */
 export function Conflicts() {
   const { view, record, ready } = useHere();
+  const guard = useGuard();
   return (
     <>
       {view.conflicts.map((conflict) => (
@@ -14,7 +16,7 @@ export function Conflicts() {
           <p className="mt-1 mb-2 text-sm">Two phones say different things. Which is right?</p>
           <div className="grid gap-2">
             {conflict.answers.map((answer) => (
-              <AnswerButton key={answer.event} onTap={() => void record("picked", { event: answer.event })}>
+              <AnswerButton key={answer.event} onTap={() => guard("pick", () => void record("picked", { event: answer.event }))}>
                 {answer.says}
                 <span className="block text-sm font-normal text-ink-2">
                   {answer.device === ready.store.device ? "from this phone" : "from another phone"}

@@ -1,6 +1,7 @@
 "use client";
 
-import { useState } from "react";
+import { burstSeconds } from "@/lib/client/crank-clock";
+import { useKeptMoment } from "@/lib/client/screen/use-kept-moment";
 import { useTicking } from "@/lib/client/screen/use-ticking";
 import { Button } from "@/components/ui/button";
 import { Chip } from "@/components/ui/chip";
@@ -10,17 +11,19 @@ import { useHere } from "./here";
 const BURST_SECONDS = 10;
 const REST_SECONDS = 60;
 
-/** Cranking in bursts with rests between. What is cranked adds up over all steps until the engine runs, since it fills a wet exhaust. */
+/** Cranking in bursts with rests between; both go on while the page is away. What is cranked adds up over all steps until the engine runs, since it fills a wet exhaust. */
 export function CrankTimer() {
-  const { view, record } = useHere();
-  const [burst, setBurst] = useState<number | null>(null);
-  const [rest, setRest] = useState<number | null>(null);
+  const { view, tree, summary, record } = useHere();
+  const [burst, setBurst] = useKeptMoment(`gudgeon.burst.${summary.id}`);
+  const [rest, setRest] = useKeptMoment(`gudgeon.rest.${summary.id}`);
   const cranking = useTicking(burst);
   const resting = useTicking(rest);
   const restLeft = resting === null ? 0 : Math.max(0, REST_SECONDS - resting);
+  const most = Math.min(...tree.stopRules.flatMap(({ when }) => when.crankSeconds ?? []));
+  const spent = view.crankSeconds + (cranking ?? 0) >= most;
   const stop = (ran: boolean) => {
     if (burst === null) return;
-    const seconds = Math.min(600, Math.round((Date.now() - burst) / 1000));
+    const seconds = burstSeconds(burst, Date.now());
     setBurst(null);
     setRest(ran ? null : Date.now());
     void record("cranked", { seconds, ran });
@@ -29,13 +32,19 @@ export function CrankTimer() {
     <section aria-label="Cranking" className="rounded-xl border-[1.5px] border-edge bg-sheet p-3.5">
       <div className="flex flex-wrap items-center justify-between gap-2">
         <p className="font-semibold">Crank no more than {BURST_SECONDS} s at a time</p>
-        <Chip tone={view.crankSeconds >= 20 ? "lead" : "quiet"}>{Math.round(view.crankSeconds)} s since it last ran</Chip>
+        <Chip tone={spent || view.crankSeconds >= most - BURST_SECONDS ? "lead" : "quiet"}>
+          {Math.round(view.crankSeconds)} s{Number.isFinite(most) ? ` of ${most} s` : ""} since it last ran
+        </Chip>
       </div>
       {cranking !== null ? (
         <>
           <p className="dial my-2 text-3xl">{cranking.toFixed(1)} s</p>
           <p role="alert" className="min-h-6 font-semibold text-lead">
-            {cranking >= BURST_SECONDS ? "Stop cranking. Let the starter rest." : ""}
+            {cranking >= BURST_SECONDS
+              ? "Stop cranking. Let the starter rest."
+              : spent
+                ? `Stop cranking. It has had its ${most} s since it last ran.`
+                : ""}
           </p>
           <div className="mt-1 grid grid-cols-2 gap-3">
             <Button size="large" tone="strong" onClick={() => stop(false)}>

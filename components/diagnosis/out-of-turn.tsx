@@ -7,6 +7,8 @@ import { Button } from "@/components/ui/button";
 import { Dialog } from "@/components/ui/dialog";
 import { Segmented } from "@/components/ui/segmented";
 import { BigRow } from "./big-row";
+import { BoatFirst } from "./boat-first";
+import { CrankTimer } from "./crank-timer";
 import { useHere } from "./here";
 import { NoteOnly } from "./note-only";
 import { NotAboard } from "./not-aboard";
@@ -15,6 +17,8 @@ import { NotAboard } from "./not-aboard";
 export function OutOfTurn() {
   const { view, go, record, setUndo } = useHere();
   const [open, setOpen] = useState(false);
+  /** The boat has got under way since: what makes her safe comes before the engine. */
+  const [castOff, setCastOff] = useState(false);
   const leave = (work: () => void) => () => {
     setOpen(false);
     work();
@@ -50,8 +54,19 @@ export function OutOfTurn() {
             legend="Where is the boat now?"
             options={(["alongside", "at-anchor", "under-way"] as const).map((value) => ({ value, title: SITUATIONS[value] }))}
             value={view.situation}
-            onChange={(situation) => situation !== view.situation && void record("situation-changed", { situation })}
+            onChange={(situation) => {
+              if (situation === view.situation) return;
+              setCastOff(situation === "under-way");
+              void record("situation-changed", { situation });
+            }}
           />
+          {castOff && <BoatFirst safe={false} onSafe={leave(() => setCastOff(false))} />}
+          <details className="rounded-[10px] border-[1.5px] border-edge bg-sheet px-3.5">
+            <summary className="flex min-h-16 items-center font-semibold">It is being cranked</summary>
+            <div className="pb-3.5">
+              <CrankTimer />
+            </div>
+          </details>
           <NotAboard onSaid={() => setOpen(false)} />
           <NoteOnly onSaid={() => setOpen(false)} />
         </div>

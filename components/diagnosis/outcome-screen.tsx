@@ -3,7 +3,7 @@
 import { useState } from "react";
 import type { OutcomeKind } from "@/lib/core/contract/event";
 import { minutesBetween } from "@/lib/client/duration";
-import { outcomeOf, startingForm, type FormErrors, type OutcomeForm } from "@/lib/client/outcome-form";
+import { basisOf, FOLLOWS_THE_CURE, outcomeOf, startingForm, type FormErrors, type OutcomeForm } from "@/lib/client/outcome-form";
 import { useGuard } from "@/lib/client/screen/use-guard";
 import { useKeptForm } from "@/lib/client/screen/use-kept-form";
 import { Button } from "@/components/ui/button";
@@ -34,13 +34,15 @@ export function OutcomeScreen() {
 
 function FilledIn() {
   const { view, tree, engine, summary, record, go } = useHere();
-  const [form, change, drop] = useKeptForm<OutcomeForm>(`gudgeon.outcome.${summary.id}`, () =>
-    startingForm(view, tree, minutesBetween(summary.beganAt, Date.now())),
+  const [form, change, drop] = useKeptForm<OutcomeForm>(
+    `gudgeon.outcome.${summary.id}`,
+    () => startingForm(view, tree, minutesBetween(summary.beganAt, Date.now())),
+    { basis: basisOf(view), fields: FOLLOWS_THE_CURE },
   );
   const [errors, setErrors] = useState<FormErrors>({});
   const guard = useGuard();
   const give = () =>
-    guard(() => {
+    guard("log it", () => {
       const read = outcomeOf(form, engine.hoursAreEstimated ? null : engine.hours);
       if ("errors" in read) return setErrors(read.errors);
       setErrors({});

@@ -2,10 +2,11 @@
 
 import { useState } from "react";
 import type { RemedyResult } from "@/lib/core/contract/event";
-import { useGuard } from "@/lib/client/screen/use-guard";
+import { useGuard, useSettling } from "@/lib/client/screen/use-guard";
 import { TextField } from "@/components/ui/text-field";
 import { AnswerButton } from "./answer-button";
 import { NoteAndPhotos } from "./note-and-photos";
+import { useKeptNote } from "./use-kept-note";
 
 export type Tried = { result: RemedyResult; proof: string | null; note: string; photos: readonly string[]; says: string };
 
@@ -18,17 +19,17 @@ const RESULTS: readonly { result: RemedyResult; title: string }[] = [
 
 /** Did it cure it, and how was that proved? A cure is only believed once it has been tried under load. */
 export function RemedyResultForm({ of, proof, onResult }: { of: string; proof: string | null; onResult: (tried: Tried) => Promise<void> }) {
-  const [note, setNote] = useState("");
-  const [photos, setPhotos] = useState<readonly string[]>([]);
+  const { note, photos, onNote, onPhotos, drop } = useKeptNote(of);
   const [cured, setCured] = useState(false);
   const [words, setWords] = useState("");
   const [given, setGiven] = useState(false);
   const guard = useGuard();
+  const settling = useSettling();
   const give = (result: RemedyResult, says: string, how: string | null) =>
-    guard(() => {
-      if (given) return;
+    guard(`${of} ${says}`, () => {
+      if (given || settling) return;
       setGiven(true);
-      void onResult({ result, says, proof: how, note: note.trim(), photos });
+      void onResult({ result, says, proof: how, note: note.trim(), photos }).then(drop);
     });
   return (
     <div>
@@ -37,8 +38,9 @@ export function RemedyResultForm({ of, proof, onResult }: { of: string; proof: s
         {RESULTS.map(({ result, title }) => (
           <AnswerButton
             key={result}
+            waits={settling}
             chosen={result === "cured" && cured}
-            onTap={() => (result === "cured" ? guard(() => setCured(true)) : give(result, title, null))}
+            onTap={() => (result === "cured" ? guard(`${of} cured`, () => setCured(true)) : give(result, title, null))}
           >
             {title}
           </AnswerButton>
@@ -69,7 +71,7 @@ export function RemedyResultForm({ of, proof, onResult }: { of: string; proof: s
           </section>
         )}
       </div>
-      <NoteAndPhotos of={of} note={note} onNote={setNote} photos={photos} onPhotos={setPhotos} />
+      <NoteAndPhotos of={of} note={note} onNote={onNote} photos={photos} onPhotos={onPhotos} />
     </div>
   );
 }

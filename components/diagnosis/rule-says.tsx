@@ -1,9 +1,9 @@
 import type { RuleShown } from "@/lib/core/diagnosis/view";
 
 /** What to do while a rule is in force, first thing first, and the one exception to it. It can be folded, but its name stays. */
-export function RuleSays({ rule }: { rule: RuleShown }) {
+export function RuleSays({ rule, folded = false }: { rule: RuleShown; folded?: boolean }) {
   return (
-    <details open className="mt-3 rounded-lg border-[1.5px] border-lead bg-lead-wash px-3 py-1">
+    <details open={!folded} className="mt-3 rounded-lg border-[1.5px] border-lead bg-lead-wash px-3 py-1">
       <summary className="flex min-h-12 items-center font-semibold text-lead">{rule.title}</summary>
       <ol className="mt-1 list-decimal pl-6 marker:font-bold">
         {rule.says.map((line) => (

@@ -54,7 +54,7 @@ export function Rules() {
           size="large"
           wide
           aria-disabled={thinking && open.length === 0}
-          onClick={() => guard(() => void noneOfTheRest())}
+          onClick={() => guard("rules go on", () => void noneOfTheRest())}
         >
           {open.length === shown.length && shown.length > 0
             ? "None of these: go on"

@@ -2,6 +2,7 @@
 
 import type { Said } from "@/lib/core/diagnosis/view";
 import { Button } from "@/components/ui/button";
+import { useGuard } from "@/lib/client/screen/use-guard";
 import { useHere } from "./here";
 import { Photo } from "./photo";
 
@@ -9,6 +10,7 @@ const CHANGEABLE = new Set(["answered", "remedy-tried", "rule-answered"]);
 
 export function SaidRow({ said }: { said: Said }) {
   const { go, record, setUndo } = useHere();
+  const guard = useGuard();
   return (
     <li className="rounded-xl border border-rule bg-sheet p-3.5">
       <p className="text-sm text-ink-2">{said.title}</p>
@@ -31,10 +33,13 @@ export function SaidRow({ said }: { said: Said }) {
           <Button
             tone="quiet"
             aria-label={`Take back: ${said.title}`}
-            onClick={() => {
-              setUndo(null);
-              void record("taken-back", { event: said.event });
-            }}
+            onClick={() =>
+              // The next row moves up under the finger.
+              guard("take back", () => {
+                setUndo(null);
+                void record("taken-back", { event: said.event });
+              })
+            }
           >
             Take back
           </Button>

@@ -30,6 +30,7 @@ export function Say({ ready, phone, engine, go }: Props) {
   const onlyMechanic = phone.roles.includes("mechanic") && phone.roles.length === 1;
   const [draft, change] = useDraft(ready.store, engine.id, onlyMechanic);
   const [asked, setAsked] = useState(false);
+  const [beginning, setBeginning] = useState(false);
   const [listOpen, setListOpen] = useState(false);
   const guard = useGuard();
   const find = useMemo(() => symptomFinder(tree?.symptoms ?? []), [tree]);
@@ -60,8 +61,9 @@ export function Say({ ready, phone, engine, go }: Props) {
   const goOn = () => {
     setAsked(true);
     const { situation } = draft;
-    if (!situation || needsSafety) return;
-    guard(() => {
+    if (!situation || needsSafety || beginning) return;
+    guard("begin", () => {
+      setBeginning(true);
       void begin({ store: ready.store, phone, engine, tree, draft: { ...draft, situation }, symptoms: picked }).then((d) => {
         ready.exchange.nudge();
         go({ d, at: "rules" });
@@ -80,7 +82,7 @@ export function Say({ ready, phone, engine, go }: Props) {
           { value: "under-way", title: "under way" },
         ]}
         value={draft.situation}
-        onChange={(situation) => change({ situation })}
+        onChange={(situation) => change({ situation, boatIsSafe: false })}
       />
       {asked && !draft.situation && (
         <p role="alert" className="mt-2 font-semibold text-lead">

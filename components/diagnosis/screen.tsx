@@ -9,6 +9,7 @@ import { useHere } from "./here";
 import { Looked } from "./looked";
 import { OutcomeScreen } from "./outcome-screen";
 import { Rules } from "./rules";
+import { RulesInForceFolded } from "./rules-in-force";
 import { SaidScreen } from "./said-screen";
 import { Step } from "./step";
 import { SymptomsTold } from "./symptoms-told";
@@ -22,7 +23,19 @@ export function Screen() {
   useEffect(() => {
     if (due) go(due, undefined, "replace");
   }, [due, go]);
-  switch (due ?? at) {
+  const shown = due ?? at;
+  return (
+    <>
+      {!SAYS_RULES_ITSELF.has(shown) && <RulesInForceFolded />}
+      <ScreenNamed at={shown} />
+    </>
+  );
+}
+
+const SAYS_RULES_ITSELF: ReadonlySet<ScreenName> = new Set(["engines", "say", "rules", "step", "more", "hand-over"]);
+
+function ScreenNamed({ at }: { at: ScreenName }) {
+  switch (at) {
     case "rules":
       return <Rules />;
     case "said":

@@ -4,21 +4,22 @@ import { useHere } from "./here";
 
 /** What was just answered, with a way back from it. It asks nothing. */
 export function UndoBar() {
-  const { undo, setUndo, record, view } = useHere();
+  const { undo, setUndo, record, view, events } = useHere();
   if (!undo) return null;
   const withdrawn = undo.withdraws ? view.symptoms.find(({ key, present }) => key === undo.withdraws && present) : undefined;
+  /** What it took the place of stands again; else it is as if it had not been said. */
+  const takeBack = () => {
+    setUndo(null);
+    const said = events.find(({ event }) => event.id === undo.event)?.event;
+    const before = events.find(({ event }) => event.id === said?.supersedes)?.event;
+    if (before) void record(before.kind, before.payload, undo.event);
+    else void record("taken-back", { event: undo.event });
+  };
   return (
     <div role="status" className="mb-4 rounded-lg border border-rule bg-sheet px-3 py-1 text-sm">
       <div className="flex items-center justify-between gap-x-3">
         <span>{undo.says}</span>
-        <button
-          type="button"
-          className="link min-h-12 min-w-12 flex-none font-semibold"
-          onClick={() => {
-            setUndo(null);
-            void record("taken-back", { event: undo.event });
-          }}
-        >
+        <button type="button" className="link min-h-12 min-w-12 flex-none font-semibold" onClick={takeBack}>
           Undo
         </button>
       </div>

@@ -1,28 +1,15 @@
 import type { LogEntry } from "@/lib/core/contract/log";
+import type { Upstream } from "@/lib/core/recurrence/came-back";
+import { hereBefore } from "@/lib/core/recurrence/standing";
+import { upstreamIn } from "@/lib/core/recurrence/upstream";
 import type { FaultTree } from "@/lib/core/tree/schema";
-import { STRENGTHS } from "@/lib/core/tree/strength";
 
-export type BeenHere = {
-  /** Earlier cases on this engine, oldest first. */
-  earlier: readonly { at: string; engineHours: number | null }[];
-  upstream: readonly { title: string; share: number | null }[];
-};
+/** `times`: earlier appearances of the cause on this engine. `last`: the newest entry of it. */
+export type BeenHere = { times: number; last: Pick<LogEntry, "at" | "engineHours"> | null; upstream: Upstream };
 
-/** Was this cause on this engine before, and what lies upstream of it? From the part of the log that is on the phone. */
+/** Was this cause on this engine before, and what lies upstream of it? From the part of the log that is on the phone, by the log's own rules. */
 export function beenHere(log: readonly LogEntry[], tree: FaultTree, engineId: string, causeKey: string, thisDiagnosis: string): BeenHere {
-  const cause = tree.causes.find(({ key }) => key === causeKey);
-  const titleOf = (key: string) => tree.causes.find((other) => other.key === key)?.title ?? key;
-  return {
-    earlier: log
-      .filter((entry) => entry.engineId === engineId && entry.cause?.key === causeKey && entry.diagnosisId !== thisDiagnosis)
-      .filter((entry) => entry.outcome === "cured" || entry.outcome === "held")
-      .map(({ at, engineHours }) => ({ at, engineHours }))
-      .sort((a, b) => a.at.localeCompare(b.at)),
-    upstream: [
-      ...Object.entries(cause?.broughtOnBy ?? {})
-        .map(([key, strength]) => ({ title: titleOf(key), share: typeof strength === "number" ? strength : STRENGTHS[strength] }))
-        .sort((a, b) => b.share - a.share),
-      ...(cause?.roots ?? []).map((title) => ({ title, share: null })),
-    ],
-  };
+  const title = tree.causes.find(({ key }) => key === causeKey)?.title ?? causeKey;
+  const others = log.filter((entry) => entry.diagnosisId !== thisDiagnosis);
+  return { ...hereBefore(others, engineId, { key: causeKey, title }), upstream: upstreamIn(tree)(causeKey) };
 }

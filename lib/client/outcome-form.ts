@@ -52,6 +52,13 @@ export function startingForm(view: DiagnosisView, tree: FaultTree, minutes: numb
   };
 }
 
+/** What of the form hangs on what cured it, and is filled in afresh when that is another thing. */
+export const FOLLOWS_THE_CURE = ["outcome", "cause", "remedy", "proof", "parts"] as const;
+
+/** What the form is filled in from. */
+export const basisOf = ({ curedCause, runsAgain }: Pick<DiagnosisView, "curedCause" | "runsAgain">): string =>
+  curedCause ? `${curedCause.remedy} ${curedCause.proof ?? ""}` : runsAgain ? "runs again" : "";
+
 export type FormErrors = Partial<Record<"hours" | "minutes" | "proof" | "cause", string>>;
 
 /** The outcome as it is logged, or what has to be put right first. `lastHours`: the last reading of the meter; null: unknown. */
@@ -66,7 +73,8 @@ export function outcomeOf(form: OutcomeForm, lastHours: number | null): { outcom
     errors.minutes = "Minutes are a figure between 0 and 100 000.";
   if (form.outcome === "cured" && form.proof.trim() === "")
     errors.proof = "Say how it was proved. If it has not been, log it as held for now.";
-  if (form.outcome === "cured" && form.cause === "") errors.cause = "Say what it was, in your own words if the tree does not have it.";
+  const unnamed = form.cause === "" || (form.cause === OWN_WORDS && form.causeInWords.trim() === "");
+  if (form.outcome === "cured" && unnamed) errors.cause = "Say what it was, in your own words if the tree does not have it.";
   if (Object.keys(errors).length > 0) return { errors };
   const named = form.outcome === "cured" || form.outcome === "held" || form.cause !== "";
   const own = (text: string) => (text.trim() ? text.trim() : undefined);

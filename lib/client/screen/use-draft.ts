@@ -1,7 +1,7 @@
 "use client";
 
 import { useCallback, useEffect, useState } from "react";
-import { emptyDraft, type Draft } from "../store/draft";
+import { emptyDraft, takenUp, type Draft } from "../store/draft";
 import type { PhoneStore } from "../store/phone-store";
 
 /** What has been said of an engine so far; every change is kept at once. null while it is read. */
@@ -9,7 +9,9 @@ export function useDraft(store: PhoneStore, engineId: string, mechanic: boolean)
   const [draft, setDraft] = useState<Draft | null>(null);
   useEffect(() => {
     let current = true;
-    void store.draft(engineId).then((kept) => current && setDraft(kept ?? emptyDraft(engineId, mechanic)));
+    void store
+      .draft(engineId)
+      .then((kept) => current && setDraft(kept ? takenUp(kept, Date.now(), mechanic) : emptyDraft(engineId, mechanic)));
     return () => {
       current = false;
     };
@@ -17,7 +19,7 @@ export function useDraft(store: PhoneStore, engineId: string, mechanic: boolean)
   const change = useCallback(
     (part: Partial<Draft>) => {
       if (!draft) return;
-      const next = { ...draft, ...part };
+      const next = { ...draft, ...part, keptAt: new Date().toISOString() };
       setDraft(next);
       void store.keepDraft(next);
     },

@@ -1,17 +1,24 @@
 "use client";
 
-import { useCallback, useRef } from "react";
+import { useCallback, useEffect, useState } from "react";
+import { TapGuard } from "../tap-guard";
 
-/** A finger that bounces in a seaway taps twice within this. */
-const GUARD_MS = 400;
+/** One for the page: a bounce does not care which screen it lands on. */
+const taps = new TapGuard();
 
-/** Lets one tap through and drops those that follow within the guard, over all the buttons that share it. */
-export function useGuard(): (work: () => void) => void {
-  const last = useRef(-Infinity);
-  return useCallback((work: () => void) => {
-    const now = performance.now();
-    if (now - last.current < GUARD_MS) return;
-    last.current = now;
-    work();
+/** Does the work of a tap unless it is the bounce of the one before on the same control. */
+export function useGuard(): (on: string, work: () => void) => void {
+  return useCallback((on, work) => {
+    if (taps.allows(on, performance.now())) work();
   }, []);
+}
+
+/** True while what has just come onto the screen may still be under a bouncing finger. */
+export function useSettling(): boolean {
+  const [settling, setSettling] = useState(() => taps.settlesIn(performance.now()) > 0);
+  useEffect(() => {
+    const timer = setTimeout(() => setSettling(false), taps.settlesIn(performance.now()));
+    return () => clearTimeout(timer);
+  }, []);
+  return settling;
 }

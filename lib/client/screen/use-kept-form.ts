@@ -1,37 +1,49 @@
 "use client";
 
 import { useCallback, useState } from "react";
+import { readKept, withKept, type KeptChanges } from "../kept-changes";
 
-/** A half-filled form that outlives a reload of the page, until it is given in. */
-export function useKeptForm<T extends object>(key: string, initial: () => T): [T, (part: Partial<T>) => void, () => void] {
-  const [form, setForm] = useState<T>(() => {
+type Follows<T> = { basis: string; fields: readonly (keyof T)[] };
+
+/** A half-filled form that outlives a reload, and the phone's ending the page in a pocket, until it is given in or dropped. */
+export function useKeptForm<T extends object>(
+  key: string,
+  initial: () => T,
+  follows?: Follows<T>,
+): [T, (part: Partial<T>) => void, () => void] {
+  const basis = follows?.basis ?? "";
+  const [{ form }, setKept] = useState<{ form: T; changes: KeptChanges["changes"] }>(() => {
     const fresh = initial();
-    try {
-      const kept: unknown = JSON.parse(sessionStorage.getItem(key) ?? "null");
-      return typeof kept === "object" && kept !== null ? { ...fresh, ...kept } : fresh;
-    } catch {
-      return fresh;
-    }
+    const form = withKept(fresh, readKept(read(key)), basis, follows?.fields ?? []);
+    return { form, changes: Object.fromEntries(Object.entries(form).filter(([name, value]) => fresh[name as keyof T] !== value)) };
   });
   const change = useCallback(
     (part: Partial<T>) =>
-      setForm((before) => {
-        const next = { ...before, ...part };
-        try {
-          sessionStorage.setItem(key, JSON.stringify(next));
-        } catch {
-          // Where nothing can be kept it lasts as long as the page.
-        }
-        return next;
+      setKept((before) => {
+        const changes = { ...before.changes, ...part };
+        write(key, JSON.stringify({ basis, changes } satisfies KeptChanges));
+        return { form: { ...before.form, ...part }, changes };
       }),
-    [key],
+    [key, basis],
   );
-  const drop = useCallback(() => {
-    try {
-      sessionStorage.removeItem(key);
-    } catch {
-      // Nothing was kept.
-    }
-  }, [key]);
+  const drop = useCallback(() => write(key, null), [key]);
   return [form, change, drop];
+}
+
+/** Where nothing can be kept a form lasts as long as the page. */
+function read(key: string): string | null {
+  try {
+    return localStorage.getItem(key);
+  } catch {
+    return null;
+  }
+}
+
+function write(key: string, text: string | null): void {
+  try {
+    if (text === null) localStorage.removeItem(key);
+    else localStorage.setItem(key, text);
+  } catch {
+    // As above.
+  }
 }

@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
-import { OWN_WORDS, outcomeOf, type OutcomeForm } from "@/lib/client/outcome-form";
+import { readKept, withKept } from "@/lib/client/kept-changes";
+import { basisOf, FOLLOWS_THE_CURE, OWN_WORDS, outcomeOf, type OutcomeForm } from "@/lib/client/outcome-form";
 import { OutcomePayload } from "@/lib/core/contract/event";
 
 const FORM: OutcomeForm = {
@@ -49,8 +50,31 @@ describe("the outcome that is logged", () => {
     expect("outcome" in read && read.outcome.cause).toBeUndefined();
   });
 
+  it("asks for the words where a cure is put down to something in one's own words", () => {
+    expect(given({ cause: OWN_WORDS, causeInWords: "  " })).toMatchObject({ errors: { cause: expect.any(String) as string } });
+  });
+
+  it("is filled in afresh when something else has cured it since, but for what was typed of hours and notes", () => {
+    const fresh = { ...FORM, hours: "", note: "" };
+    const kept = { basis: "", changes: { outcome: "broken-off", cause: "", remedy: "", hours: "2190", note: "wet" } };
+    const cured = basisOf({ curedCause: { cause: "x", remedy: "y", temporary: false, proof: null }, runsAgain: false });
+    expect(withKept(fresh, kept, cured, FOLLOWS_THE_CURE)).toEqual({ ...fresh, hours: "2190", note: "wet" });
+    expect(withKept(fresh, kept, "", FOLLOWS_THE_CURE)).toMatchObject({ outcome: "broken-off", cause: "", hours: "2190" });
+  });
+
   it("leaves out parts of which none was used", () => {
     const read = given({ parts: [{ key: null, title: "Washer", quantity: 0 }] });
     expect("outcome" in read && read.outcome.parts).toEqual([]);
+  });
+});
+
+describe("a form that was kept", () => {
+  it("fills in what was not typed from now, and lets nothing odd from an earlier version in", () => {
+    const kept = readKept(JSON.stringify({ basis: "", changes: { note: "half a", parts: "none", gone: 1 } }));
+    expect(withKept({ note: "", parts: [1], minutes: 12 }, kept, "", [])).toEqual({ note: "half a", parts: [1], minutes: 12 });
+  });
+
+  it("is nothing where what was kept cannot be read", () => {
+    expect([null, "", "{", "null", "7", '{"note":"x"}', '{"basis":1,"changes":{}}'].map(readKept)).toEqual(Array(7).fill(null));
   });
 });

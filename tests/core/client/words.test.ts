@@ -63,8 +63,14 @@ describe("a cause that has been here before", () => {
     entry(5, 1, "cured", "2026-04-01T00:00:00Z"),
   ];
 
-  it("counts cures on this engine alone, oldest first, and not this diagnosis itself", () => {
-    expect(beenHere(log, tree, idOf(1), "filter", idOf(105)).earlier.map(({ engineHours }) => engineHours)).toEqual([10, 30]);
+  it("counts its appearances on this engine alone, and not this diagnosis itself", () => {
+    expect(beenHere(log, tree, idOf(1), "filter", idOf(105))).toMatchObject({ times: 2, last: { engineHours: 30 } });
+    expect(beenHere(log, tree, idOf(3), "filter", idOf(105))).toMatchObject({ times: 0, last: null });
+  });
+
+  it("says what the engine's log says: what only got one home is the same appearance as the cure that followed", () => {
+    const held = log.map((one) => (one.outcome === "held" ? { ...one, temporary: true } : one));
+    expect(beenHere(held, tree, idOf(1), "filter", idOf(105)).times).toBe(1);
   });
 
   it("names what lies upstream, the likelier first, then the roots in words", () => {
