@@ -1,7 +1,10 @@
 import * as z from "zod";
 
 /** What every list that can grow is asked with; `after`: the `next` of the page before. */
-export const PageQuery = z.strictObject({ after: z.string().max(200).optional(), limit: z.coerce.number().int().min(1).max(200).default(50) });
+export const PageQuery = z.strictObject({
+  after: z.string().max(200).optional(),
+  limit: z.coerce.number().int().min(1).max(200).default(50),
+});
 export type PageQuery = z.infer<typeof PageQuery>;
 
 /** A page of a list; `next` is null on the last. */
