@@ -1,4 +1,4 @@
-import { eq } from "drizzle-orm";
+import { eq, sql } from "drizzle-orm";
 import { identityDatabase } from "@/db/client";
 import { users } from "@/db/schema/users";
 import type { Permission } from "@/lib/core/access/permissions";
@@ -30,11 +30,18 @@ export type Demo = {
 
 /**
  * Loads the demo fleet through the commands that people's own devices call.
- * A second time it does nothing; broken off half way it goes on where it was.
+ * A second time it does nothing; broken off half way it goes on where it was;
+ * of two starts at once the second waits for the first.
  *
  * @param today the day that the story ends on
  */
-export async function loadDemo(today: Date): Promise<Demo> {
+export const loadDemo = (today: Date): Promise<Demo> =>
+  identityDatabase().transaction(async (tx) => {
+    await tx.execute(sql`select pg_advisory_xact_lock(hashtext('demo fleet'))`);
+    return load(today);
+  });
+
+async function load(today: Date): Promise<Demo> {
   const ids = await makePeople();
   await makeStrangersFleet(ids.stranger);
   const known = (await fleetsOf({ userId: ids.owner }))[0]?.id;

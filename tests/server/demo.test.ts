@@ -16,13 +16,16 @@ import { testDatabase } from "../support/database";
 const TODAY = new Date("2026-11-30T08:00:00Z");
 let owner: Database;
 let demo: Demo;
+let loadedAnew: boolean[];
 let asOwner: <T>(run: (scope: FleetScope<"fleet:read">) => Promise<T>) => Promise<T>;
 
 beforeAll(async () => {
   const database = await testDatabase();
   owner = database.owner;
   await loadShippedTree(database.ownerUrl);
-  demo = await loadDemo(TODAY);
+  const starts = await Promise.all([loadDemo(TODAY), loadDemo(TODAY)]);
+  loadedAnew = starts.map((start) => start.isNew);
+  demo = starts[0];
   const [person] = await owner
     .select({ userId: users.id })
     .from(users)
@@ -71,6 +74,12 @@ describe("the demo fleet", () => {
     const asked = story.steps.filter((step) => ["answered", "remedy-tried"].includes(step.kind));
     expect(asked.length).toBeGreaterThan(1);
     for (const step of asked) expect(step.askedWhy).toMatch(/\w/);
+  });
+
+  test("is loaded once by two starts at the same moment", async () => {
+    expect(loadedAnew.sort()).toEqual([false, true]);
+    const { rows } = await owner.execute(sql`select name from fleets`);
+    expect(rows).toHaveLength(2);
   });
 
   test("is loaded once", async () => {
