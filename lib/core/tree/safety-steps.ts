@@ -88,7 +88,8 @@ const RULES: readonly Rule[] = [
   },
   {
     holds: (f) => f.opensWater,
-    last: (f) => `Open the seacock${f.wetExhaust ? " and the exhaust cock" : ""}, then count: as many cocks open as before.`,
+    last: (f) =>
+      `Open the seacock${f.wetExhaust ? " and the exhaust cock" : ""} just before the next start, not sooner, and count: as many cocks open as before. An engine that may not be started keeps it shut.`,
   },
   {
     holds: (f) => f.opensHoseBelowWater,
@@ -224,6 +225,14 @@ const RULES: readonly Rule[] = [
       key: "hydraulic-lock",
       signal: "warning",
       says: "One heavy clunk, or part of a turn and a stop: let go and do not press again. Water in a cylinder bends the engine's rods.",
+    },
+  },
+  {
+    holds: (f) => f.cranks,
+    caution: {
+      key: "starter-runs-on",
+      signal: "warning",
+      says: "If the starter runs on when the key is let go: stop control, then the start battery's switch off at once, even with the engine running. A starter that stays in burns.",
     },
   },
   {
