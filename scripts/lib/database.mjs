@@ -7,7 +7,7 @@ import { log, root, run } from "./proc.mjs";
 import { ensureRoles } from "./roles.mjs";
 
 /** Runs one of our TypeScript programs on the server's side of the house. */
-export const runTypeScript = (file, args = [], options = {}) =>
+const runTypeScript = (file, args = [], options = {}) =>
   run(process.execPath, ["--conditions=react-server", "--import", "tsx", path.join(root, file), ...args], options);
 
 /**

@@ -1,3 +1,4 @@
+import { inspect } from "node:util";
 import { eq, sql } from "drizzle-orm";
 import { afterEach, beforeAll, describe, expect, test, vi } from "vitest";
 import * as z from "zod";
@@ -256,6 +257,20 @@ describe("failures", () => {
     const body = await expectProblem(await ask(failing(new Error("password of the database is swordfish"))), 500, "failure");
     expect(JSON.stringify(body)).not.toContain("swordfish");
     expect(String(log.mock.calls[0]?.[0])).toContain(String(body.reference));
+  });
+
+  test("what was to be written into the database does not get into the log", async () => {
+    const log = vi.spyOn(console, "error").mockImplementation(() => undefined);
+    const write = endpoint({
+      permission: "fleet:read",
+      summary: "Write",
+      params,
+      run: async ({ tx }) => void (await tx.execute(sql`insert into boats_that_are_not_there values (${"swordfish"})`)),
+    });
+    expect((await ask(write)).status).toBe(500);
+    const logged = inspect(log.mock.calls, { depth: 9 });
+    expect(logged).toContain("boats_that_are_not_there");
+    expect(logged).not.toContain("swordfish");
   });
 
   test("text that the database cannot keep is the asker's to mend", async () => {

@@ -3,7 +3,7 @@ import type { LogEntry } from "../contract/log";
 type Named = { key: string | null; title: string };
 
 /** A cause's words reduced to their letters and figures: "Impeller, worn" and "impeller WORN" are one. */
-export function plainWords(words: string): string {
+function plainWords(words: string): string {
   const plain = words
     .normalize("NFKC")
     .toLowerCase()
@@ -22,7 +22,7 @@ export function causeIdentity(causes: Iterable<Named>): (cause: Named) => string
 }
 
 /** A key for a cause that only words name. The prefix keeps it apart from the keys of trees; the figures after it keep two alphabets apart. */
-export function keyOfWords(words: string): string {
+function keyOfWords(words: string): string {
   const plain = plainWords(words);
   let mix = 0x811c9dc5; // FNV-1a, 32 bits: a fingerprint, not a secret
   for (const char of plain) mix = Math.imul(mix ^ (char.codePointAt(0) ?? 0), 0x01000193) >>> 0;

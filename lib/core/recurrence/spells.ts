@@ -17,12 +17,12 @@ export type Spell<E extends CaseEntry = CaseEntry> = {
 export type CauseHistory<E extends CaseEntry = CaseEntry> = { engineId: string; cause: string; spells: [Spell<E>, ...Spell<E>[]] };
 
 /** Rule C1: something was confirmed. */
-export function isCase(entry: CaseEntry): boolean {
+function isCase(entry: CaseEntry): boolean {
   return entry.cause !== null && (entry.outcome === "cured" || entry.outcome === "held" || entry.outcome === "handed-over");
 }
 
 /** Rule C3. */
-export function isCure(entry: CaseEntry): boolean {
+function isCure(entry: CaseEntry): boolean {
   return isCase(entry) && (entry.outcome === "cured" || (entry.outcome === "held" && !entry.temporary));
 }
 

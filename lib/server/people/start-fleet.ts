@@ -34,7 +34,7 @@ export async function joinAsFirst(on: Database | Transaction, fleetId: string, u
 }
 
 /** Puts a person's card into the fleet; the fleet's log refers to it. One who comes back gets the old card. */
-export async function writeCard(fleetId: string, { userId, name }: Newcomer): Promise<void> {
+async function writeCard(fleetId: string, { userId, name }: Newcomer): Promise<void> {
   await inFleet(fleetId, (tx) =>
     tx
       .insert(people)

@@ -1,5 +1,6 @@
 import "server-only";
 import { randomUUID } from "node:crypto";
+import { DrizzleQueryError } from "drizzle-orm";
 import { Problem } from "@/lib/core/contract/problem";
 
 /** PostgreSQL's code for what went wrong, under the wrapper that drizzle puts round it. */
@@ -9,6 +10,9 @@ function sqlState(error: unknown): string | null {
   }
   return null;
 }
+
+/** A failed query without its values: they are people's addresses, hashes of passwords, what somebody wrote. */
+const forLog = (error: unknown): unknown => (error instanceof DrizzleQueryError ? { query: error.query, cause: error.cause } : error);
 
 const unavailable = () =>
   new Problem(503, "unavailable", "The server is busy", "Try again in a moment. What you have written down is kept on this device.");
@@ -34,11 +38,11 @@ export function problemOf(error: unknown): Problem {
     case "53300":
     case "ECONNREFUSED":
     case "ECONNRESET":
-      console.error("unavailable:", error);
+      console.error("unavailable:", forLog(error));
       return unavailable();
   }
   const reference = randomUUID().slice(0, 8);
-  console.error(`failure ${reference}:`, error);
+  console.error(`failure ${reference}:`, forLog(error));
   return new Problem(
     500,
     "failure",

@@ -2,7 +2,7 @@ import "server-only";
 import type * as z from "zod";
 import { Problem, type FieldError } from "@/lib/core/contract/problem";
 
-export const fieldErrors = (error: z.ZodError): FieldError[] =>
+const fieldErrors = (error: z.ZodError): FieldError[] =>
   error.issues.slice(0, 20).map((issue) => ({ path: issue.path.join("."), says: issue.message }));
 
 /** Parsed, or a 422 that names the fields. */
