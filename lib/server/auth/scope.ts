@@ -48,3 +48,9 @@ export async function withScope<P extends Permission, T>(
 ): Promise<T> {
   return (await prove(who, fleetId, permission)).enter(run);
 }
+
+/** A second permission, for a command that does more for those who may: 403 for those who may not. */
+export function demand<P extends Permission>(scope: FleetScope, permission: P): FleetScope<P> {
+  if (!can(scope.actor.roles, permission)) throw Problem.notAllowed();
+  return scope as FleetScope<P>;
+}
