@@ -13,11 +13,15 @@ export function HandOverMessage({ facts }: { facts: HandOverFacts }) {
   const [copied, setCopied] = useState("");
   const text = own ?? handOverMessage(facts);
   const { characters, messages } = messageLength(text);
-  const copy = () =>
-    navigator.clipboard.writeText(text).then(
-      () => setCopied("Copied."),
-      () => setCopied("The browser would not copy it. Select the text and copy it by hand."),
-    );
+  const copy = async () => {
+    try {
+      // Not there at all where the address is not a secure one.
+      await navigator.clipboard.writeText(text);
+      setCopied("Copied.");
+    } catch {
+      setCopied("The browser would not copy it. Select the text and copy it by hand.");
+    }
+  };
   return (
     <section aria-label="As a text message" className="grid gap-2">
       <TextArea id="message" label="As a text message" rows={6} value={text} onChange={(event) => setOwn(event.target.value)} />

@@ -56,6 +56,13 @@ export function OpenDiagnosis({ id, ready, reasoner, phone, address, go }: Props
     return (
       <HereContext.Provider value={here}>
         <DiagnosisFrame>
+          {state.failure && (
+            <div className="mb-4">
+              <Notice tone="bad" title="The next step could not be worked out" live>
+                Your answers are kept. {state.failure}
+              </Notice>
+            </div>
+          )}
           <Screen />
         </DiagnosisFrame>
       </HereContext.Provider>
@@ -74,6 +81,10 @@ export function OpenDiagnosis({ id, ready, reasoner, phone, address, go }: Props
       ) : state.failure ? (
         <Notice tone="bad" title="The next step could not be worked out" live>
           Your answers are kept. {state.failure}
+        </Notice>
+      ) : summary && !engine ? (
+        <Notice tone="look" title="The engine of this diagnosis is not in this fleet any more">
+          The answers are kept on this phone.
         </Notice>
       ) : tree === null ? (
         <Notice tone="look" title="The fault tree of this diagnosis is not on this phone">

@@ -61,6 +61,8 @@ export function Say({ ready, phone, engine, go }: Props) {
   const goOn = () => {
     setAsked(true);
     const { situation } = draft;
+    // It stands above the fold: the question comes to whoever missed it.
+    if (!situation) document.querySelector<HTMLInputElement>('input[name="situation"]')?.focus();
     if (!situation || needsSafety || beginning) return;
     guard("begin", () => {
       setBeginning(true);

@@ -3,6 +3,8 @@ import type { DiagnosisView } from "@/lib/core/diagnosis/view";
 import type { FaultTree } from "@/lib/core/tree/schema";
 import type { Ask, Told } from "./protocol";
 
+class WorkerDied extends Error {}
+
 /** Asks the diagnosis core what to show; in a worker, or here where the browser has none. */
 export class Reasoner {
   #worker: Worker | null = null;
@@ -11,8 +13,17 @@ export class Reasoner {
   #next = 1;
 
   async view(version: string, tree: FaultTree, events: readonly DiagnosisEvent[]): Promise<DiagnosisView> {
-    const worker = this.#start();
-    if (!worker) return (await import("@/lib/core/diagnosis/show")).view(tree, events);
+    try {
+      const worker = this.#start();
+      if (worker) return await this.#ask(worker, version, tree, events);
+    } catch (failure) {
+      if (!(failure instanceof WorkerDied)) throw failure;
+    }
+    // Slower, and the screen waits; but there is a next step.
+    return (await import("@/lib/core/diagnosis/show")).view(tree, events);
+  }
+
+  #ask(worker: Worker, version: string, tree: FaultTree, events: readonly DiagnosisEvent[]): Promise<DiagnosisView> {
     if (!this.#kept.has(version)) {
       this.#kept.add(version);
       worker.postMessage({ ask: "keep-tree", version, tree } satisfies Ask);
@@ -38,10 +49,10 @@ export class Reasoner {
       else waiting?.failed(new Error(data.failure));
     };
     this.#worker.onerror = () => {
-      // A worker that died takes its questions with it; the next question starts another.
+      // A worker that died, or was never fetched, takes its questions with it; the next question starts another.
       this.#worker = null;
       this.#kept.clear();
-      for (const { failed } of this.#waiting.values()) failed(new Error("the reckoning stopped; it starts again with the next answer"));
+      for (const { failed } of this.#waiting.values()) failed(new WorkerDied());
       this.#waiting.clear();
     };
     return this.#worker;

@@ -1,0 +1,51 @@
+import { afterEach, describe, expect, it, vi } from "vitest";
+import { Reasoner } from "@/lib/client/compute/reasoner";
+import type { Ask, Told } from "@/lib/client/compute/protocol";
+import { view } from "@/lib/core/diagnosis/show";
+import { smallTree } from "../../support/small-tree";
+import { BEGUN, makeEvent } from "./make-event";
+
+const tree = smallTree();
+const log = [makeEvent("begun", { ...BEGUN, symptoms: [tree.symptoms[0]!.key] }, { n: 1 })];
+
+/** A worker that does with each question what the test says. */
+function workerThat(answers: (worker: { onmessage: (said: { data: Told }) => void; onerror: () => void }, ask: Ask) => void) {
+  const started: unknown[] = [];
+  vi.stubGlobal(
+    "Worker",
+    class {
+      onmessage = (said: { data: Told }) => void said;
+      onerror = () => undefined;
+      constructor() {
+        started.push(this);
+      }
+      postMessage(ask: Ask) {
+        if (ask.ask === "view") queueMicrotask(() => answers(this, ask));
+      }
+    },
+  );
+  return started;
+}
+
+afterEach(() => {
+  vi.unstubAllGlobals();
+});
+
+describe("asking for the next step", () => {
+  it("is answered here where the browser has no worker", async () => {
+    expect(await new Reasoner().view("1", tree, log)).toEqual(view(tree, log));
+  });
+
+  it("is answered here where the worker died or could not be fetched, and a new one is tried the next time", async () => {
+    const started = workerThat((worker) => worker.onerror());
+    const reasoner = new Reasoner();
+    expect(await reasoner.view("1", tree, log)).toEqual(view(tree, log));
+    await reasoner.view("1", tree, log);
+    expect(started).toHaveLength(2);
+  });
+
+  it("says why where the reckoning itself failed", async () => {
+    workerThat((worker, ask) => ask.ask === "view" && worker.onmessage({ data: { id: ask.id, failure: "no such check" } }));
+    await expect(new Reasoner().view("1", tree, log)).rejects.toThrow("no such check");
+  });
+});
