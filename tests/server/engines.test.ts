@@ -24,6 +24,15 @@ const read = (engineId: string, reading: number, n: number, reset = false, id: s
   withScope(ines.person, ines.fleetId, "engine:write", (scope) => addHourReading(scope, { id, engineId, reading, readAt: day(n), reset }));
 const engine = (id = ines.engineId) => withScope(ines.person, ines.fleetId, "fleet:read", (scope) => getEngine(scope, id));
 
+test("an engine sent again with another name or profile is refused: it would be lost without a word", async () => {
+  const mats = await afloat("Mats");
+  await addEngineTo(mats);
+  await expect(addEngineTo(mats, { name: "port" })).rejects.toMatchObject({ status: 409 });
+  await expect(addEngineTo(mats, { profile: { features: {}, figures: { ratedRpm: 3000 }, healthy: {} } })).rejects.toMatchObject({
+    status: 409,
+  });
+});
+
 describe("boats", () => {
   test("a boat sent twice is one boat; another under its id is refused", async () => {
     const boat = { id: uuidv7(), name: "Turnstone", callMinutes: { atAnchor: 300 } };

@@ -54,6 +54,9 @@ describe("a repair logged without a diagnosis", () => {
     await repair(ines, 1, 5, { id });
     expect((await log(ines)).items).toHaveLength(1);
     await expect(repair(ines, 2, 5, { id })).rejects.toMatchObject({ status: 409 });
+    for (const other of [{ note: "Other words" }, { cause: "tank-dirty" }, { minutes: 5 }, { parts: [{ title: "Filter", quantity: 1 }] }])
+      await expect(repair(ines, 1, 5, { id, ...other }), JSON.stringify(other)).rejects.toMatchObject({ status: 409 });
+    expect((await log(ines)).items).toMatchObject([{ note: null, cause: { key: "filter-blocked" } }]);
   });
 
   test("with a meter that was replaced is a reading that the hours go on from", async () => {

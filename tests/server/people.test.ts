@@ -109,6 +109,7 @@ describe("invitations", () => {
     await as(owner, fleetId).invite("twice@example.test", ["skipper"], id);
     await as(owner, fleetId).invite("twice@example.test", ["skipper"], id);
     expect(box.mails).toHaveLength(1);
+    await expect(as(owner, fleetId).invite("twice@example.test", ["owner"], id)).rejects.toMatchObject({ status: 409 });
     await expect(as(owner, fleetId).invite(others[0]?.email ?? "", ["owner"])).rejects.toMatchObject({ status: 409 });
   });
 

@@ -6,6 +6,7 @@ import { Problem } from "@/lib/core/contract/problem";
 import type { FleetScope } from "@/lib/server/auth/scope";
 import { getBoat } from "@/lib/server/boats/queries";
 import { refuseEventId } from "@/lib/server/diagnoses/event-ids";
+import { canonical } from "@/lib/server/trees/content-hash";
 import { notAhead } from "@/lib/server/web/not-ahead";
 import { getEngine, listHourReadings } from "./queries";
 
@@ -17,9 +18,17 @@ export async function addEngine(scope: FleetScope<"engine:write">, engine: NewEn
     .values({ ...engine, fleetId: scope.fleetId })
     .onConflictDoNothing();
   const there = await getEngine(scope, engine.id);
-  if (there.boatId !== engine.boatId) throw Problem.conflict(`Another engine, ${there.name} of ${there.boatName}, has this id already.`);
+  const isOther = there.boatId !== engine.boatId || (there.version === 1 && canonical(contentOf(there)) !== canonical(contentOf(engine)));
+  if (isOther) throw Problem.conflict(`Another engine, ${there.name} of ${there.boatName}, has this id already.`);
   return there;
 }
+
+const contentOf = ({ name, hasHourMeter, estimatedHoursPerYear, profile }: NewEngine) => ({
+  name,
+  hasHourMeter,
+  estimatedHoursPerYear,
+  profile,
+});
 
 /** @throws Problem 412 when somebody changed the engine since `version` */
 export async function changeEngine(scope: FleetScope<"engine:write">, id: string, change: EngineChange, version: number): Promise<Engine> {

@@ -8,6 +8,7 @@ import { Problem } from "@/lib/core/contract/problem";
 import type { FleetScope } from "@/lib/server/auth/scope";
 import { refuseEventId } from "@/lib/server/diagnoses/event-ids";
 import { getEngine } from "@/lib/server/engines/queries";
+import { canonical } from "@/lib/server/trees/content-hash";
 import { documentOf, getCurrentTreeVersion } from "@/lib/server/trees/queries";
 import { notAhead } from "@/lib/server/web/not-ahead";
 import { namesOf, unknownIn } from "./outcome-names";
@@ -22,33 +23,30 @@ export async function logRepair(scope: FleetScope<"log:write">, repair: NewRepai
   if (errors.length > 0) throw Problem.invalid(errors);
   const at = notAhead("doneAt", repair.doneAt);
   await refuseEventId(scope, repair.id);
+  const line = {
+    engineId: repair.engineId,
+    at,
+    outcome: repair.outcome,
+    ...namesOf(repair, repair.symptoms, tree),
+    proof: repair.proof ?? null,
+    engineHours: repair.engineHours ?? null,
+    minutes: repair.minutes ?? null,
+    parts: repair.parts,
+    note: repair.note ?? null,
+  };
   const [stored] = await scope.tx
     .insert(logEntries)
-    .values({
-      fleetId: scope.fleetId,
-      id: repair.id,
-      engineId: repair.engineId,
-      at,
-      outcome: repair.outcome,
-      ...namesOf(repair, repair.symptoms, tree),
-      proof: repair.proof ?? null,
-      engineHours: repair.engineHours ?? null,
-      minutes: repair.minutes ?? null,
-      parts: repair.parts,
-      note: repair.note ?? null,
-      by: scope.actor.userId,
-    })
+    .values({ fleetId: scope.fleetId, id: repair.id, ...line, by: scope.actor.userId })
     .onConflictDoNothing()
     .returning({ id: logEntries.id });
   if (!stored) {
-    const there = await getLogEntry(scope, repair.id);
-    const same =
-      there.diagnosisId === null &&
-      there.engineId === repair.engineId &&
-      Date.parse(there.at) === at.getTime() &&
-      there.outcome === repair.outcome;
-    if (!same) throw Problem.conflict("Another line of the log has this id already.");
-    return there;
+    const [there] = await scope.tx
+      .select()
+      .from(logEntries)
+      .where(and(eq(logEntries.fleetId, scope.fleetId), eq(logEntries.id, repair.id)));
+    if (there?.diagnosisId !== null || canonical(asSent(there)) !== canonical(asSent(line)))
+      throw Problem.conflict("Another line of the log has this id already.");
+    return getLogEntry(scope, repair.id);
   }
   if (repair.engineHours !== undefined) {
     await scope.tx
@@ -66,6 +64,42 @@ export async function logRepair(scope: FleetScope<"log:write">, repair: NewRepai
   }
   return getLogEntry(scope, repair.id);
 }
+
+type Line = Pick<
+  typeof logEntries.$inferSelect,
+  | "engineId"
+  | "at"
+  | "outcome"
+  | "causeKey"
+  | "causeTitle"
+  | "remedyKey"
+  | "remedyTitle"
+  | "proof"
+  | "engineHours"
+  | "minutes"
+  | "parts"
+  | "note"
+>;
+
+/** What a person wrote, apart from titles that a newer tree may word in another way. */
+const asSent = ({
+  engineId,
+  at,
+  outcome,
+  causeKey,
+  causeTitle,
+  remedyKey,
+  remedyTitle,
+  proof,
+  engineHours,
+  minutes,
+  parts,
+  note,
+}: Line) => ({
+  ...{ engineId, at: at.getTime(), outcome, proof, engineHours, minutes, parts, note },
+  cause: causeKey ?? causeTitle,
+  remedy: remedyKey ?? remedyTitle,
+});
 
 /** Works out every diagnosis' line of the log anew from its events, as after a mend of the fold. Gives the number of diagnoses. */
 export async function rebuildLog(scope: FleetScope<"log:write">): Promise<number> {

@@ -5,6 +5,7 @@ import { invitations, memberships } from "@/db/schema/memberships";
 import { users } from "@/db/schema/users";
 import type { Invitation, NewInvitation } from "@/lib/core/contract/people";
 import { Problem } from "@/lib/core/contract/problem";
+import { canonical } from "@/lib/server/trees/content-hash";
 import { countAttempt, LIMITS } from "../auth/attempts";
 import { newToken, tokenHash } from "../auth/one-time-token";
 import type { FleetScope } from "../auth/scope";
@@ -22,8 +23,8 @@ export async function invite(scope: FleetScope<"people:write">, { id, email, rol
     .from(invitations)
     .where(and(eq(invitations.fleetId, scope.fleetId), eq(invitations.id, id)));
   if (repeat) {
-    if (repeat.email === email) return invitationOf(repeat);
-    throw Problem.conflict("An invitation with this id went to another address.");
+    if (repeat.email === email && canonical(repeat.roles) === canonical(roles)) return invitationOf(repeat);
+    throw Problem.conflict("Another invitation has this id already.");
   }
   const [member] = await db
     .select({ userId: users.id })
