@@ -78,6 +78,36 @@ describe("finding a symptom by plain words", () => {
     );
   });
 
+  it.each([
+    "won't turn over just clicks",
+    "won't start, just clicks",
+    "fuel everywhere",
+    "oil in the water",
+    "no water out the back",
+    "beeping alarm and steam",
+    "black smoke",
+    "smells funny",
+  ])("ticks nothing for %s where no symptom says so: a wrong one leads to the wrong end of the engine", (complaint) => {
+    expect(symptomFinder(SYMPTOMS.slice(0, 2))(complaint).filter(({ fits }) => fits)).toEqual([]);
+  });
+
+  it("ticks neither of two that the words do not tell apart, and offers both", () => {
+    const both = symptomFinder([
+      ...SYMPTOMS.slice(0, 1),
+      symptom("hard-start-hot", "Will not restart warm", "After a run", ["won't start once warm"]),
+    ]);
+    expect(both("wont start").map(({ fits }) => fits)).toEqual([false, false]);
+  });
+
+  it.each([
+    ["engin dies when pushd", "fades-and-stops"],
+    ["takes for ever to fire", "hard-start-cold"],
+    ["lost top-end", "lost-top-end-rpm"],
+    ["not getting full throtle", "lost-top-end-rpm"],
+  ])("knows %s by everyday words for the same thing, and by slips of the finger", (complaint, key) => {
+    expect(find(complaint)[0]?.key).toBe(key);
+  });
+
   it("gives the same order for the same words, whatever order the symptoms' rivals tie in", () => {
     expect(find("start")).toEqual(symptomFinder([...SYMPTOMS])("start"));
     const scores = find("slow revs under load").map(({ fits, score }) => [fits ? 0 : 1, score] as const);
