@@ -13,7 +13,7 @@ import { possible } from "./possible";
 import { settingOf } from "./setting-of";
 import { answerSaid, said } from "./show-said";
 import { showStep } from "./show-step";
-import { rulesInForce, rulesToAsk } from "./stop-rules";
+import { rulesInForce, rulesToAsk, standingRules } from "./stop-rules";
 import type { DiagnosisView, RuleShown, StepShown } from "./view";
 import { RESULTS_SAID } from "./words";
 
@@ -44,6 +44,7 @@ export function view(tree: FaultTree, log: readonly DiagnosisEvent[], models: Co
     said: said(tree, state),
     conflicts: conflictsShown(tree, state),
     rulesToAsk: toAsk.map(ruleShown),
+    rules: standingRules(tree, state).map(({ rule, ...standing }) => ({ ...ruleShown(rule), ...standing })),
     rulesInForce: inForce.map(ruleShown),
     step: goesOn ? stepShown(model, evidence, inForce) : null,
     possible: possible(model, evidence, shares),

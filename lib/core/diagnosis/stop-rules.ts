@@ -35,6 +35,31 @@ export function rulesToAsk(tree: FaultTree, state: DiagnosisState): readonly Sto
   );
 }
 
+/** How a rule stands. `answer`: a rule in force is a "yes", however it came into force. `event`: the answer that another takes the place of; null where none does. */
+export type RuleStanding = {
+  readonly rule: StopRule;
+  readonly due: boolean;
+  readonly answer: "yes" | "no" | null;
+  readonly event: string | null;
+};
+
+/** Every rule that a person can be asked of this engine, due or not, with the answer that stands: danger may turn up at any time. */
+export function standingRules(tree: FaultTree, state: DiagnosisState): readonly RuleStanding[] {
+  const due = new Set(rulesToAsk(tree, state));
+  const inForce = new Set(rulesInForce(tree, state));
+  return applying(tree, state)
+    .filter((rule) => rule.ask !== undefined || inForce.has(rule))
+    .map((rule) => {
+      const last = state.order.events.findLast(
+        (event): event is EventOf<"rule-answered"> =>
+          event.kind === "rule-answered" && event.payload.rule === rule.key && state.live.has(event),
+      );
+      // A rule that was lifted comes into force again by a new answer, not by one in the place of the lifting.
+      const replaced = last && last.payload.answer !== "cleared" ? last.id : null;
+      return { rule, due: due.has(rule), answer: inForce.has(rule) ? "yes" : last ? "no" : null, event: replaced };
+    });
+}
+
 /** Rules in force: told, found or cranked into force, and not cleared since by someone who knew. Rules [T2], [T3]. */
 export function rulesInForce(tree: FaultTree, state: DiagnosisState): readonly StopRule[] {
   const seconds = crankSeconds(tree, state);

@@ -20,6 +20,8 @@ export type DiagnosisView = {
   conflicts: readonly { step: string; title: string; answers: readonly { event: string; says: string; device: string }[] }[];
   /** Rules to be asked now, before anything else. */
   rulesToAsk: readonly RuleShown[];
+  /** All rules that this engine can be asked of, in the tree's order, with the answers that stand. */
+  rules: readonly RuleAnswered[];
   /** Rules in force: stay on each later screen until cleared. */
   rulesInForce: readonly RuleShown[];
   /** null: the log has ended, rules have yet to be asked, or nothing is left but to call. */
@@ -57,6 +59,9 @@ export type RuleShown = {
   runOn: boolean;
   clearedWhen: string | null;
 };
+
+/** `due`: to be asked now. `event`: the answer that a change takes the place of. */
+export type RuleAnswered = RuleShown & { due: boolean; answer: "yes" | "no" | null; event: string | null };
 
 export type CautionShown = { key: string; signal: Signal; says: string };
 

@@ -52,6 +52,33 @@ describe("stop rules", () => {
     expect(view(small, [begun, ...no]).step).not.toBeNull();
   });
 
+  it("[T1] stay to be seen and changed, whatever was answered and whether they fit the complaint or not", () => {
+    const phone = new Device(1);
+    const standing = (events: Parameters<typeof fold>[0]) =>
+      view(small, events).rules.map(({ key, due, answer, event }) => ({ key, due, answer, event }));
+    const log = [phone.begin()];
+    expect(standing(log)).toEqual([
+      { key: "hot", due: false, answer: null, event: null },
+      { key: "fire", due: true, answer: null, event: null },
+    ]);
+    const no = phone.tell("rule-answered", { rule: "fire", answer: "no" });
+    log.push(no);
+    expect(standing(log)[1]).toEqual({ key: "fire", due: false, answer: "no", event: no.id });
+    log.push(phone.answer("gauge", "red"));
+    expect(standing(log)[0]).toEqual({ key: "hot", due: false, answer: "yes", event: null });
+  });
+
+  it("[T3] that were lifted come into force again with the next yes, not with one in the lifting's place", () => {
+    const phone = new Device(1);
+    const liftable = tree({ ...small, stopRules: [stopRule("fire", { ...always, clearedWhen: "It is out" })] });
+    const log = [phone.begin(), phone.tell("rule-answered", { rule: "fire", answer: "yes" })];
+    log.push(phone.tell("rule-answered", { rule: "fire", answer: "cleared" }));
+    expect(view(liftable, log).rules).toMatchObject([{ answer: "no", event: null }]);
+    log.push(phone.tell("rule-answered", { rule: "fire", answer: "yes" }));
+    expect(view(liftable, log).rules).toMatchObject([{ answer: "yes" }]);
+    expect(keys(rulesInForce(liftable, fold(log)))).toEqual(["fire"]);
+  });
+
   it("[T2] come into force on a finding at once", () => {
     const phone = new Device(1);
     expect(keys(rulesInForce(small, fold([phone.begin(), phone.answer("gauge", "red")])))).toEqual(["hot"]);
