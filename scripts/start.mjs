@@ -17,14 +17,16 @@ try {
   await ensureNodeModules();
   const { build } = await import("./lib/build.mjs");
 
+  const host = process.env.HOST ?? "127.0.0.1";
+  // Demo people sign in with a password that anyone can read: where others can come, they are there only if asked for.
+  const demo = process.env.DEMO ? process.env.DEMO !== "0" : isForThisMachine(host, addressOf(Number(process.env.PORT ?? 3000)));
   const database = (async () => {
     const { prepareDatabase } = await import("./lib/database.mjs");
-    return prepareDatabase(process.env.DATABASE_URL ?? (await ownServer()), { demo: process.env.DEMO !== "0" });
+    return prepareDatabase(process.env.DATABASE_URL ?? (await ownServer()), { demo });
   })();
   const [built, urls] = await Promise.allSettled([build(), database]);
   for (const result of [built, urls]) if (result.status === "rejected") throw result.reason;
 
-  const host = process.env.HOST ?? "127.0.0.1";
   const port = await portFor(host);
   const env = { ...urls.value.env, FILES_DIR: process.env.FILES_DIR ?? path.join(root, ".data/files"), ...(await ownMailbox(host, port)) };
   const site = await serve({ dir: built.value, port, host, env });
