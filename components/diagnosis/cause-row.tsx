@@ -5,7 +5,7 @@ import { Swatch, type Pattern } from "./swatch";
 export function CauseRow({ cause, pattern }: { cause: PossibleCause; pattern: Pattern }) {
   return (
     <details>
-      <summary className="grid min-h-12 grid-cols-[1fr_44px] items-center gap-2.5 text-sm">
+      <summary className="grid min-h-12 grid-cols-[1fr_44px_20px] items-center gap-2.5 text-sm">
         <span>
           <Swatch pattern={pattern} />
           {cause.title}

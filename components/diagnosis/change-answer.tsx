@@ -7,7 +7,6 @@ import { BackLink } from "./back-link";
 import { useHere } from "./here";
 import { RemedyResultForm } from "./remedy-result-form";
 import { ScreenHeading } from "./screen-heading";
-import { YesNo } from "./yes-no";
 
 /** Another answer in the place of one that was given. */
 export function ChangeAnswer() {
@@ -64,20 +63,6 @@ export function ChangeAnswer() {
             done();
           }}
         />
-      </Changing>
-    );
-  }
-  if (event?.kind === "rule-answered") {
-    const rule = tree.stopRules.find(({ key }) => key === event.payload.rule);
-    return (
-      <Changing title={rule?.ask ?? rule?.title ?? event.payload.rule} was={said?.says}>
-        <div className="mt-4">
-          <YesNo
-            label={rule?.ask ?? event.payload.rule}
-            value={event.payload.answer === "cleared" ? null : event.payload.answer}
-            onAnswer={(answer) => void record("rule-answered", { rule: event.payload.rule, answer }, event.id).then(done)}
-          />
-        </div>
       </Changing>
     );
   }

@@ -28,6 +28,7 @@ function Awake({ address, go }: Props) {
   const [reasoner] = useState(() => new Reasoner());
   const [fleetWanted] = useState(address.fleet);
   useEffect(() => surface.start(fleetWanted), [surface, fleetWanted]);
+  useEffect(() => reasoner.warm(), [reasoner]);
   const state = useObservable(surface.state);
   if (state.kind !== "ready") return <NotReady kind={state.kind} />;
   return <Fleet key={`${state.person.userId} ${state.person.fleetId}`} ready={state} reasoner={reasoner} address={address} go={go} />;

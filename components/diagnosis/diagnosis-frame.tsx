@@ -34,6 +34,18 @@ export function DiagnosisFrame({ children }: { children: ReactNode }) {
           >
             {given === 1 ? "1 answer given" : `${given} answers given`}
           </a>
+          {address.at !== "hand-over" && (
+            <a
+              href={`/diagnose?d=${summary.id}&at=hand-over`}
+              className="inline-flex min-h-12 items-center font-semibold underline underline-offset-4"
+              onClick={(event) => {
+                event.preventDefault();
+                go("hand-over");
+              }}
+            >
+              Call for help
+            </a>
+          )}
           <span className="ml-auto">{minutes === null ? "" : `${durationInWords(minutes)} so far`}</span>
         </>
       }

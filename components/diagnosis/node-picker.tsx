@@ -1,7 +1,9 @@
 "use client";
 
 import { useMemo, useState } from "react";
+import { titleFinder } from "@/lib/client/find-titles";
 import type { FaultTree } from "@/lib/core/tree/schema";
+import { Fold } from "@/components/ui/fold";
 import { TextField } from "@/components/ui/text-field";
 import { BigRow } from "./big-row";
 
@@ -22,8 +24,12 @@ export function NodePicker({
   onPick: (key: string) => void;
 }) {
   const [typed, setTyped] = useState("");
-  const words = typed.toLowerCase().split(/\s+/).filter(Boolean);
-  const found = useMemo(() => nodes.filter(({ title }) => words.every((word) => title.toLowerCase().includes(word))), [nodes, words]);
+  const find = useMemo(() => titleFinder(nodes), [nodes]);
+  const found = useMemo(() => {
+    const words = typed.toLowerCase().split(/\s+/).filter(Boolean);
+    const exact = nodes.filter(({ title }) => words.every((word) => title.toLowerCase().includes(word)));
+    return exact.length > 0 ? exact : find(typed);
+  }, [nodes, typed, find]);
   return (
     <div className="grid gap-4">
       <TextField id={id} label={label} value={typed} autoComplete="off" onChange={(event) => setTyped(event.target.value)} />
@@ -34,18 +40,15 @@ export function NodePicker({
         const here = found.filter((node) => node.system === system.key);
         if (here.length === 0) return null;
         const rows = here.map((node) => <BigRow key={node.key} title={node.title} onTap={() => onPick(node.key)} />);
-        return words.length > 0 ? (
+        return typed.trim() !== "" ? (
           <section key={system.key} aria-label={system.title} className="grid gap-2">
             <h2 className="text-base text-ink-2">{system.title}</h2>
             {rows}
           </section>
         ) : (
-          <details key={system.key}>
-            <summary className="flex min-h-12 items-center font-semibold">
-              {system.title} ({here.length})
-            </summary>
+          <Fold key={system.key} title={`${system.title} (${here.length})`}>
             <div className="grid gap-2">{rows}</div>
-          </details>
+          </Fold>
         );
       })}
       {found.length === 0 && <p>Nothing has these words in its title. Try one word of it.</p>}

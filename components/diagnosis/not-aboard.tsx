@@ -2,6 +2,7 @@
 
 import { useState } from "react";
 import { Button } from "@/components/ui/button";
+import { Fold } from "@/components/ui/fold";
 import { TextField } from "@/components/ui/text-field";
 import { useHere } from "./here";
 
@@ -15,9 +16,8 @@ export function NotAboard({ onSaid }: { onSaid: () => void }) {
   };
   const items = view.step ? [...view.step.tools, ...view.step.parts.map(({ title }) => title)] : [];
   return (
-    <details className="rounded-[10px] border-[1.5px] border-edge bg-sheet px-3.5">
-      <summary className="flex min-h-16 items-center font-semibold">A tool or part is not aboard</summary>
-      <div className="grid gap-2 pb-3.5">
+    <Fold title="A tool or part is not aboard">
+      <div className="grid gap-2">
         {items.map((item) => (
           <Button key={item} wide onClick={() => say(item)}>
             {item}
@@ -28,6 +28,6 @@ export function NotAboard({ onSaid }: { onSaid: () => void }) {
           Not aboard
         </Button>
       </div>
-    </details>
+    </Fold>
   );
 }

@@ -58,9 +58,7 @@ export function OpenDiagnosis({ id, ready, reasoner, phone, address, go }: Props
         <DiagnosisFrame>
           {state.failure && (
             <div className="mb-4">
-              <Notice tone="bad" title="The next step could not be worked out" live>
-                Your answers are kept. {state.failure}
-              </Notice>
+              <Failed why={state.failure} onAgain={state.again} />
             </div>
           )}
           <Screen />
@@ -79,9 +77,7 @@ export function OpenDiagnosis({ id, ready, reasoner, phone, address, go }: Props
           </Button>
         </div>
       ) : state.failure ? (
-        <Notice tone="bad" title="The next step could not be worked out" live>
-          Your answers are kept. {state.failure}
-        </Notice>
+        <Failed why={state.failure} onAgain={state.again} />
       ) : summary && !engine ? (
         <Notice tone="look" title="The engine of this diagnosis is not in this fleet any more">
           The answers are kept on this phone.
@@ -94,5 +90,17 @@ export function OpenDiagnosis({ id, ready, reasoner, phone, address, go }: Props
         <p role="status">Opening the diagnosis.</p>
       )}
     </Frame>
+  );
+}
+
+/** A way on from a failure: the answers are safe, and it may well work the next time. */
+function Failed({ why, onAgain }: { why: string; onAgain: () => void }) {
+  return (
+    <Notice tone="bad" title="The next step could not be worked out" live>
+      <p>Your answers are kept. What went wrong: {why}</p>
+      <Button className="mt-2" onClick={onAgain}>
+        Try again
+      </Button>
+    </Notice>
   );
 }

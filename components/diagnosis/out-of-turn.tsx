@@ -5,6 +5,7 @@ import type { Situation } from "@/lib/core/tree/schema";
 import { SITUATIONS } from "@/lib/client/hand-over/facts";
 import { Button } from "@/components/ui/button";
 import { Dialog } from "@/components/ui/dialog";
+import { Fold } from "@/components/ui/fold";
 import { Segmented } from "@/components/ui/segmented";
 import { BigRow } from "./big-row";
 import { BoatFirst } from "./boat-first";
@@ -30,6 +31,11 @@ export function OutOfTurn() {
       </Button>
       <Dialog open={open} onClose={() => setOpen(false)} title="Say something else" sheet>
         <div className="grid gap-2">
+          <BigRow
+            title="Something dangerous has turned up"
+            detail="Smoke, fuel, water, heat or hurt: what to do now"
+            onTap={leave(() => go("rules"))}
+          />
           <BigRow title="I have already looked at something" detail="Any check, in any order" onTap={leave(() => go("looked"))} />
           <BigRow title="I have already tried something" detail="Any repair, and what it did" onTap={leave(() => go("tried"))} />
           <BigRow
@@ -61,12 +67,9 @@ export function OutOfTurn() {
             }}
           />
           {castOff && <BoatFirst safe={false} onSafe={leave(() => setCastOff(false))} />}
-          <details className="rounded-[10px] border-[1.5px] border-edge bg-sheet px-3.5">
-            <summary className="flex min-h-16 items-center font-semibold">It is being cranked</summary>
-            <div className="pb-3.5">
-              <CrankTimer />
-            </div>
-          </details>
+          <Fold title="It is being cranked">
+            <CrankTimer />
+          </Fold>
           <NotAboard onSaid={() => setOpen(false)} />
           <NoteOnly onSaid={() => setOpen(false)} />
         </div>

@@ -1,60 +1,84 @@
 "use client";
 
 import { useRef, useState } from "react";
-import type { RuleShown } from "@/lib/core/diagnosis/view";
+import type { RuleAnswered } from "@/lib/core/diagnosis/view";
 import { useGuard } from "@/lib/client/screen/use-guard";
 import { Button } from "@/components/ui/button";
+import { Fold } from "@/components/ui/fold";
+import { BackLink } from "./back-link";
 import { Defers } from "./defers";
 import { useHere } from "./here";
 import { RuleCard } from "./rule-card";
-import { RuleSays } from "./rule-says";
 import { ScreenHeading } from "./screen-heading";
 
-/** The stop rules that fit, all at once and before anything else. What has been answered stays on the screen and can be changed. */
+/**
+ * The stop rules: those that are due before anything else, then what was
+ * answered before, changeable. Danger may turn up at any time, so the rest of
+ * them is a tap away, and in the open when nothing is due.
+ */
 export function Rules() {
-  const { view, record, go, thinking } = useHere();
-  const [shown, setShown] = useState<readonly RuleShown[]>(view.rulesToAsk);
+  const { view, record, go, thinking, address } = useHere();
   const [answers, setAnswers] = useState<Readonly<Record<string, "yes" | "no">>>({});
+  const [asked, setAsked] = useState<ReadonlySet<string>>(() => new Set(view.rulesToAsk.map(({ key }) => key)));
+  /** A card stays where it is while it is answered. */
+  const [atFirst] = useState(() => new Map(view.rules.map((rule) => [rule.key, rule.answer])));
   const written = useRef<Record<string, Promise<{ id: string }>>>({});
   const guard = useGuard();
-  const added = view.rulesToAsk.filter((rule) => !shown.some(({ key }) => key === rule.key));
-  if (added.length > 0) setShown([...shown, ...added]);
+  const added = view.rulesToAsk.filter(({ key }) => !asked.has(key));
+  if (added.length > 0) setAsked(new Set([...asked, ...added.map(({ key }) => key)]));
 
-  const answer = async (rule: string, said: "yes" | "no") => {
+  const stands = (rule: RuleAnswered) => answers[rule.key] ?? rule.answer;
+  const answer = async (rule: RuleAnswered, said: "yes" | "no") => {
+    setAnswers((all) => ({ ...all, [rule.key]: said }));
     // A quick change of mind replaces the first answer, even while that is still being written.
-    const before = written.current[rule];
-    const writing = (async () => record("rule-answered", { rule, answer: said }, (await before)?.id))();
-    written.current[rule] = writing;
+    const before = written.current[rule.key];
+    const writing = (async () =>
+      record("rule-answered", { rule: rule.key, answer: said }, (await before)?.id ?? rule.event ?? undefined))();
+    written.current[rule.key] = writing;
     await writing;
-    setAnswers((all) => ({ ...all, [rule]: said }));
   };
-  const open = shown.filter(({ key }) => !answers[key]);
+  const first = (rule: RuleAnswered) => (rule.key === address.which ? 0 : 1);
+  const due = view.rules.filter(({ key }) => asked.has(key));
+  const open = due.filter((rule) => stands(rule) === null);
+  const others = view.rules.filter(({ key }) => !asked.has(key));
+  const before = others.filter(({ key }) => (atFirst.get(key) ?? null) !== null).sort((a, b) => first(a) - first(b));
+  const rest = others.filter(({ key }) => (atFirst.get(key) ?? null) === null);
   const noneOfTheRest = async () => {
-    for (const { key } of open) await answer(key, "no");
+    for (const rule of open) await answer(rule, "no");
     go("step");
   };
-  /** Answered before this screen was opened again: what they say is not forgotten by a reload. */
-  const before = view.rulesInForce.filter(({ key }) => !shown.some((rule) => rule.key === key));
-  const inForce = shown.filter(({ key }) => answers[key] === "yes");
+  const cards = (rules: readonly RuleAnswered[]) => (
+    <div className="grid gap-3">
+      {rules.map((rule) => (
+        <RuleCard key={rule.key} rule={rule} answer={stands(rule)} onAnswer={(said) => void answer(rule, said)} />
+      ))}
+    </div>
+  );
   return (
     <div>
+      {open.length === 0 && <BackLink />}
       <ScreenHeading of="rules">Anything dangerous?</ScreenHeading>
-      <p className="mt-2 text-ink-2">These come before anything else. Each yes says what to do now.</p>
-      {before.map((rule) => (
-        <RuleSays key={rule.key} rule={rule} />
-      ))}
-      <div className="mt-4 grid gap-3">
-        {shown.map((rule) => (
-          <RuleCard key={rule.key} rule={rule} answer={answers[rule.key] ?? null} onAnswer={(said) => void answer(rule.key, said)} />
-        ))}
-        {shown.length === 0 && <p>No stop rule fits what has been said.</p>}
-      </div>
+      <p className="mt-2 mb-4 text-ink-2">These come before anything else. Each yes says what to do now.</p>
+      {cards(due)}
+      {before.length > 0 && (
+        <section aria-labelledby="answered-before">
+          <h2 id="answered-before" className="mt-6 mb-2">
+            Answered before
+          </h2>
+          <p className="mb-3 text-sm text-ink-2">Tap the other answer where it has changed.</p>
+          {cards(before)}
+        </section>
+      )}
+      {rest.length > 0 && (
+        <Fold title={`Other dangers (${rest.length})`} open={due.length === 0} className="mt-4">
+          {cards(rest)}
+        </Fold>
+      )}
+      {view.rules.length === 0 && <p>This fault tree has no stop rule for this engine.</p>}
       <div className="mt-5 grid gap-3">
-        {inForce.length + before.length > 0 && (
-          <Button tone="plain" size="large" wide onClick={() => go("hand-over")}>
-            Call for help: the hand-over page
-          </Button>
-        )}
+        <Button tone="plain" size="large" wide onClick={() => go("hand-over")}>
+          Call for help: the hand-over page
+        </Button>
         <Button
           tone="strong"
           size="large"
@@ -62,11 +86,7 @@ export function Rules() {
           aria-disabled={thinking && open.length === 0}
           onClick={() => guard("rules go on", () => void noneOfTheRest())}
         >
-          {open.length === shown.length && shown.length > 0
-            ? "None of these: go on"
-            : open.length > 0
-              ? "None of the others: go on"
-              : "Go on"}
+          {open.length === 0 ? "Go on" : open.length === due.length ? "None of these: go on" : "None of the others: go on"}
         </Button>
       </div>
       <Defers />

@@ -40,7 +40,7 @@ export function StillPossible() {
       ))}
       {foldedCount > 0 && (
         <details>
-          <summary className="grid min-h-12 grid-cols-[1fr_44px] items-center gap-2.5 text-sm">
+          <summary className="grid min-h-12 grid-cols-[1fr_44px_20px] items-center gap-2.5 text-sm">
             <span>
               <Swatch pattern="pale" />
               {foldedCount === 1 ? "One other" : `${foldedCount} others`}
@@ -59,7 +59,7 @@ export function StillPossible() {
           </div>
         </details>
       )}
-      <div className="grid min-h-12 grid-cols-[1fr_44px] items-center gap-2.5 text-sm">
+      <div className="grid min-h-12 grid-cols-[1fr_44px_20px] items-center gap-2.5 text-sm">
         <span>
           <Swatch pattern="empty" />
           Something not in this tree

@@ -9,6 +9,7 @@ import * as z from "zod";
 import { FormEnd } from "@/components/form/form-end";
 import { typedNumber } from "@/components/form/typed-number";
 import { useSave } from "@/components/form/use-save";
+import { Fold } from "@/components/ui/fold";
 import { TextField } from "@/components/ui/text-field";
 import { sendJson } from "@/lib/client/exchange/request";
 import type { Feature } from "@/lib/core/tree/schema";
@@ -62,12 +63,14 @@ export function NewEngineForm({ fleetId, boatId, suggestedName, features }: Prop
           />
         )}
       </div>
-      <details open={Boolean(errors.figures || errors.healthy || errors.cylinders || errors.ratedKw) || undefined}>
-        <summary className="flex min-h-12 items-center font-semibold">Say more about it now (it can wait)</summary>
+      <Fold
+        title="Say more about it now (it can wait)"
+        open={Boolean(errors.figures || errors.healthy || errors.cylinders || errors.ratedKw) || undefined}
+      >
         <div className="mt-3 grid gap-7">
           <ProfileFields features={features} register={register} errors={errors} />
         </div>
-      </details>
+      </Fold>
       <FormEnd submit="Add the engine" saving={saving} refusal={refusal} wrong={Object.keys(errors).length > 0} />
     </form>
   );

@@ -1,16 +1,28 @@
 import type { DiagnosisEvent } from "@/lib/core/contract/event";
+import { keepModels } from "@/lib/core/diagnosis/keep-models";
+import { view } from "@/lib/core/diagnosis/show";
 import type { DiagnosisView } from "@/lib/core/diagnosis/view";
 import type { FaultTree } from "@/lib/core/tree/schema";
 import type { Ask, Told } from "./protocol";
 
 class WorkerDied extends Error {}
 
-/** Asks the diagnosis core what to show; in a worker, or here where the browser has none. */
+/**
+ * Asks the diagnosis core what to show; in a worker, or here where that is not
+ * to be had. The core comes with the page, since a part that is fetched when it
+ * is first needed is not there without a signal.
+ */
 export class Reasoner {
   #worker: Worker | null = null;
   #kept = new Set<string>();
   #waiting = new Map<number, { done: (view: DiagnosisView) => void; failed: (why: Error) => void }>();
   #next = 1;
+  #models = keepModels();
+
+  /** Fetches and starts the worker while there is a signal, so that the first question is answered without one. */
+  warm(): void {
+    this.#start();
+  }
 
   async view(version: string, tree: FaultTree, events: readonly DiagnosisEvent[]): Promise<DiagnosisView> {
     try {
@@ -20,7 +32,7 @@ export class Reasoner {
       if (!(failure instanceof WorkerDied)) throw failure;
     }
     // Slower, and the screen waits; but there is a next step.
-    return (await import("@/lib/core/diagnosis/show")).view(tree, events);
+    return view(tree, events, this.#models);
   }
 
   #ask(worker: Worker, version: string, tree: FaultTree, events: readonly DiagnosisEvent[]): Promise<DiagnosisView> {

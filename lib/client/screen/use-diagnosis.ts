@@ -25,6 +25,8 @@ export type DiagnosisState = {
   /** Nothing of this diagnosis is on the phone, nor was to be had from the server. */
   missing: boolean;
   failure: string | null;
+  /** Works the step out once more after a failure. */
+  again: () => void;
   record: Recorder;
 };
 
@@ -37,6 +39,7 @@ export function useDiagnosis(ready: Ready, reasoner: Reasoner, diagnosisId: stri
   const [seen, setSeen] = useState<{ view: DiagnosisView; of: string } | null>(null);
   const [failure, setFailure] = useState<string | null>(null);
   const [lastRecorded, setLastRecorded] = useState<string | null>(null);
+  const [attempt, setAttempt] = useState(0);
   const asked = useRef(false);
 
   useEffect(() => {
@@ -82,7 +85,12 @@ export function useDiagnosis(ready: Ready, reasoner: Reasoner, diagnosisId: stri
     };
     // The fingerprint stands for the events: a settled receipt is no reason to think again.
     // eslint-disable-next-line react-hooks/exhaustive-deps
-  }, [reasoner, tree, version, fingerprint]);
+  }, [reasoner, tree, version, fingerprint, attempt]);
+
+  const again = useCallback(() => {
+    setFailure(null);
+    setAttempt((before) => before + 1);
+  }, []);
 
   const record = useCallback<Recorder>(
     async (kind, payload, supersedes) => {
@@ -105,6 +113,7 @@ export function useDiagnosis(ready: Ready, reasoner: Reasoner, diagnosisId: stri
     thinking,
     missing: missing && (events?.length ?? 0) === 0,
     failure,
+    again,
     record,
   };
 }

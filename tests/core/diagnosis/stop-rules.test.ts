@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import type { DiagnosisEvent } from "../../../lib/core/contract/event";
 import { crankSeconds } from "../../../lib/core/diagnosis/crank-seconds";
 import { fold } from "../../../lib/core/diagnosis/fold";
 import { forbidden, rulesInForce, rulesToAsk } from "../../../lib/core/diagnosis/stop-rules";
@@ -54,9 +55,9 @@ describe("stop rules", () => {
 
   it("[T1] stay to be seen and changed, whatever was answered and whether they fit the complaint or not", () => {
     const phone = new Device(1);
-    const standing = (events: Parameters<typeof fold>[0]) =>
+    const standing = (events: readonly DiagnosisEvent[]) =>
       view(small, events).rules.map(({ key, due, answer, event }) => ({ key, due, answer, event }));
-    const log = [phone.begin()];
+    const log: DiagnosisEvent[] = [phone.begin()];
     expect(standing(log)).toEqual([
       { key: "hot", due: false, answer: null, event: null },
       { key: "fire", due: true, answer: null, event: null },
@@ -71,7 +72,7 @@ describe("stop rules", () => {
   it("[T3] that were lifted come into force again with the next yes, not with one in the lifting's place", () => {
     const phone = new Device(1);
     const liftable = tree({ ...small, stopRules: [stopRule("fire", { ...always, clearedWhen: "It is out" })] });
-    const log = [phone.begin(), phone.tell("rule-answered", { rule: "fire", answer: "yes" })];
+    const log: DiagnosisEvent[] = [phone.begin(), phone.tell("rule-answered", { rule: "fire", answer: "yes" })];
     log.push(phone.tell("rule-answered", { rule: "fire", answer: "cleared" }));
     expect(view(liftable, log).rules).toMatchObject([{ answer: "no", event: null }]);
     log.push(phone.tell("rule-answered", { rule: "fire", answer: "yes" }));
