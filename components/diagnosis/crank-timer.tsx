@@ -8,19 +8,21 @@ import { Chip } from "@/components/ui/chip";
 import { clock } from "./clock";
 import { useHere } from "./here";
 
-const BURST_SECONDS = 10;
+/** A small starter is not made for longer; a step may ask for less. */
+const LONGEST_BURST = 10;
 const REST_SECONDS = 60;
 
 /** Cranking in bursts with rests between; both go on while the page is away. What is cranked adds up over all steps until the engine runs, since it fills a wet exhaust. */
-export function CrankTimer() {
+export function CrankTimer({ asks }: { /** Seconds that the step asks for; null: none is on the screen. */ asks: number | null }) {
+  const most = Math.min(LONGEST_BURST, asks ?? LONGEST_BURST);
   const { view, tree, summary, record } = useHere();
   const [burst, setBurst] = useKeptMoment(`gudgeon.burst.${summary.id}`);
   const [rest, setRest] = useKeptMoment(`gudgeon.rest.${summary.id}`);
   const cranking = useTicking(burst);
   const resting = useTicking(rest);
   const restLeft = resting === null ? 0 : Math.max(0, REST_SECONDS - resting);
-  const most = Math.min(...tree.stopRules.flatMap(({ when }) => when.crankSeconds ?? []));
-  const spent = view.crankSeconds + (cranking ?? 0) >= most;
+  const inAll = Math.min(...tree.stopRules.flatMap(({ when }) => when.crankSeconds ?? []));
+  const spent = view.crankSeconds + (cranking ?? 0) >= inAll;
   const stop = (ran: boolean) => {
     if (burst === null) return;
     const seconds = burstSeconds(burst, Date.now());
@@ -31,19 +33,21 @@ export function CrankTimer() {
   return (
     <section aria-label="Cranking" className="rounded-xl border-[1.5px] border-edge bg-sheet p-3.5">
       <div className="flex flex-wrap items-center justify-between gap-2">
-        <p className="font-semibold">Crank no more than {BURST_SECONDS} s at a time</p>
-        <Chip tone={spent || view.crankSeconds >= most - BURST_SECONDS ? "lead" : "quiet"}>
-          {Math.round(view.crankSeconds)} s{Number.isFinite(most) ? ` of ${most} s` : ""} since it last ran
+        <p className="font-semibold">Crank no more than {most} s at a time</p>
+        <Chip tone={spent || view.crankSeconds >= inAll - LONGEST_BURST ? "lead" : "quiet"}>
+          {view.crankSeconds === 0
+            ? "Not cranked yet since it last ran"
+            : `Cranked ${Math.round(view.crankSeconds)} s${Number.isFinite(inAll) ? ` of ${inAll} s` : ""} since it last ran`}
         </Chip>
       </div>
       {cranking !== null ? (
         <>
           <p className="dial my-2 text-3xl">{cranking.toFixed(1)} s</p>
           <p role="alert" className="min-h-6 font-semibold text-lead">
-            {cranking >= BURST_SECONDS
+            {cranking >= most
               ? "Stop cranking. Let the starter rest."
               : spent
-                ? `Stop cranking. It has had its ${most} s since it last ran.`
+                ? `Stop cranking. It has had its ${inAll} s since it last ran.`
                 : ""}
           </p>
           <div className="mt-1 grid grid-cols-2 gap-3">

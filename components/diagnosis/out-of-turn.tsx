@@ -68,7 +68,7 @@ export function OutOfTurn() {
           />
           {castOff && <BoatFirst safe={false} onSafe={leave(() => setCastOff(false))} />}
           <Fold title="It is being cranked">
-            <CrankTimer />
+            <CrankTimer asks={view.step?.cranks ?? null} />
           </Fold>
           <NotAboard onSaid={() => setOpen(false)} />
           <NoteOnly onSaid={() => setOpen(false)} />

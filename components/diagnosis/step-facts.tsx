@@ -6,8 +6,8 @@ const ENGINE: Record<EngineState, string | null> = {
   cold: "cold",
   stopped: "stopped",
   cranking: "cranking",
-  idling: "idling",
-  "under-load": "under load",
+  idling: "running, out of gear",
+  "under-load": "running in gear, under load",
 };
 const WHO: Record<Who, string | null> = {
   "skipper-at-sea": null,

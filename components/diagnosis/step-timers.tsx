@@ -12,7 +12,7 @@ export function StepTimers({ step }: { step: StepShown }) {
   const { summary } = useHere();
   return (
     <div className="mt-4 grid gap-3 empty:hidden">
-      {step.cranks !== null && <CrankTimer />}
+      {step.cranks !== null && <CrankTimer asks={step.cranks} />}
       {step.engine === "cold" && (
         <Countdown
           of={`cool.${summary.id}`}
