@@ -67,9 +67,12 @@ export function OutOfTurn() {
             }}
           />
           {castOff && <BoatFirst safe={false} onSafe={leave(() => setCastOff(false))} />}
-          <Fold title="It is being cranked">
-            <CrankTimer asks={view.step?.cranks ?? null} />
-          </Fold>
+          {/* A step that cranks has the clock on its own screen: one burst is never counted by two. */}
+          {(view.step?.cranks ?? null) === null && (
+            <Fold title="It is being cranked">
+              <CrankTimer asks={null} />
+            </Fold>
+          )}
           <NotAboard onSaid={() => setOpen(false)} />
           <NoteOnly onSaid={() => setOpen(false)} />
         </div>
