@@ -24,13 +24,13 @@ export function HandOverMessage({ facts }: { facts: HandOverFacts }) {
   };
   return (
     <section aria-label="As a text message" className="grid gap-2">
-      <TextArea id="message" label="As a text message" rows={6} value={text} onChange={(event) => setOwn(event.target.value)} />
+      <TextArea id="message" label="As a text message" rows={8} value={text} onChange={(event) => setOwn(event.target.value)} />
       <p className="text-sm text-ink-2">
         <span className="dial">{characters}</span> characters, {messages === 1 ? "one message" : `${messages} messages`}.
       </p>
       <div className="grid grid-cols-2 gap-2">
         <LinkButton href={`sms:?&body=${encodeURIComponent(text)}`} prefetch={false}>
-          Write it
+          Open it in messages
         </LinkButton>
         <Button onClick={() => void copy()}>Copy it</Button>
       </div>

@@ -13,15 +13,26 @@ import { HandOverMessage } from "./hand-over-message";
 import { HandOverPosition } from "./hand-over-position";
 import { HandOverRadio } from "./hand-over-radio";
 import { useHere } from "./here";
+import { HandOverPart } from "./hand-over-part";
+import { Photo } from "./photo";
 import { ScreenHeading } from "./screen-heading";
 
 /** One page for whoever comes to help: to show, print, send or read out. */
 export function HandOver() {
-  const { engine, tree, view, summary, go, record } = useHere();
+  const { engine, tree, view, summary, go, record, phone, ready } = useHere();
   const [position, setPosition] = useState<Position | null>(null);
   const now = useNow(60);
   const minutes = minutesBetween(summary.beganAt, now || summary.touchedAt);
-  const facts = gatherHandOver({ engine, tree, view, complaint: summary.complaint, minutes, position });
+  const facts = gatherHandOver({
+    engine,
+    tree,
+    view,
+    fleet: phone.fleet.name,
+    by: ready.person.name,
+    complaint: summary.complaint,
+    minutes,
+    position,
+  });
   return (
     <>
       <BackLink />
@@ -32,28 +43,28 @@ export function HandOver() {
         {now ? new Date(now).toLocaleString("en-GB", { dateStyle: "medium", timeStyle: "short" }) : ""} &middot;{" "}
         {SITUATIONS[facts.situation]} &middot; {durationInWords(minutes)} so far
       </p>
+      <p className="text-sm text-ink-2">
+        {facts.fleet}. Handed over by {facts.by}.
+      </p>
       <div className="mt-3 grid gap-4">
-        <Part
+        <HandOverPart
           title="Complaint"
           lines={[...facts.symptoms, ...(facts.complaint ? [`\u201c${facts.complaint}\u201d`] : [])]}
           none="None given."
         />
         {facts.rulesInForce.length > 0 && (
-          <Part
-            title="Stop rules in force"
-            lines={view.rulesInForce.map((rule) => `${rule.title}: ${rule.says[0] ?? rule.because}`)}
-            none=""
-          />
+          <HandOverPart title="Stop rules in force" lines={facts.rulesInForce.map(({ title, says }) => `${title}. ${says}`)} none="" />
         )}
-        <Part
+        <HandOverPart
           title="Engine"
-          lines={[...facts.engineIs, ...(facts.hours === null ? [] : [`${facts.hours} h at the last reading`])]}
+          lines={[...facts.engineIs, ...(facts.hours === null ? [] : [facts.hours])]}
           none="Nothing is known of its make and fittings."
         />
-        {facts.position && <Part title="Position" lines={[positionInFigures(facts.position)]} none="" />}
-        <Part title="Looked at" lines={facts.checked.map(({ title, says }) => `${title}: ${says}`)} none="Nothing yet." />
-        <Part title="Tried" lines={facts.tried.map(({ title, says }) => `${title}: ${says}`)} none="Nothing yet." />
-        <Part
+        {facts.position && <HandOverPart title="Position" lines={[positionInFigures(facts.position)]} none="" />}
+        <HandOverPart title="Found" lines={facts.checked.map(({ title, says }) => `${title}: ${says}`)} none="Nothing yet." />
+        {facts.notSeen.length > 0 && <HandOverPart title="Could not be looked at" lines={[facts.notSeen.join("; ")]} none="" />}
+        <HandOverPart title="Tried" lines={facts.tried.map(({ title, says }) => `${title}: ${says}`)} none="Nothing yet." />
+        <HandOverPart
           title="Still possible, of 100 engines like this"
           lines={[
             ...facts.possible.slice(0, 6).map(({ title, of100 }) => `${of100}: ${title}`),
@@ -61,7 +72,25 @@ export function HandOver() {
           ]}
           none=""
         />
-        {facts.crankSeconds > 0 && <Part title="Cranked since it last ran" lines={[`${Math.round(facts.crankSeconds)} s`]} none="" />}
+        {facts.notes.length > 0 && (
+          <HandOverPart title="Notes" lines={facts.notes.map(({ title, says }) => `${title}: \u201c${says}\u201d`)} none="" />
+        )}
+        {facts.photos.length > 0 && (
+          <section aria-label="Photos" className="break-inside-avoid">
+            <h2 className="text-base">Photos</h2>
+            <ul className="mt-1 flex flex-wrap gap-3">
+              {facts.photos.map(({ id, title }, at) => (
+                <li key={id} className="max-w-40 text-sm">
+                  <Photo id={id} number={at + 1} />
+                  {at + 1}: {title}
+                </li>
+              ))}
+            </ul>
+          </section>
+        )}
+        {facts.crankSeconds > 0 && (
+          <HandOverPart title="Cranked since it last ran" lines={[`${Math.round(facts.crankSeconds)} s`]} none="" />
+        )}
       </div>
       <div className="no-print mt-5 grid gap-5">
         <HandOverPosition position={position} onPosition={setPosition} />
@@ -85,22 +114,5 @@ export function HandOver() {
       </div>
       <Defers />
     </>
-  );
-}
-
-function Part({ title, lines, none }: { title: string; lines: readonly string[]; none: string }) {
-  return (
-    <section aria-label={title} className="break-inside-avoid">
-      <h2 className="text-base">{title}</h2>
-      {lines.length === 0 ? (
-        <p className="text-ink-2">{none}</p>
-      ) : (
-        <ul className="list-disc pl-5">
-          {lines.map((line) => (
-            <li key={line}>{line}</li>
-          ))}
-        </ul>
-      )}
-    </section>
   );
 }

@@ -28,40 +28,45 @@ export function messageLength(text: string): { characters: number; messages: num
   return { characters, messages: characters <= alone ? 1 : Math.ceil(characters / joined) };
 }
 
-/** Two joined messages: what gets through on a poor signal. */
-const MOST_CHARACTERS = 306;
+/** One message gets through on a poor signal where two do not; two at most. */
+const ONE_MESSAGE = 160;
+const TWO_MESSAGES = 306;
 
 /**
  * The hand-over as a text message. The first things matter most: who, what,
- * where, what must not be done; then as much of the findings as fits, the
- * latest first, and how many more there are.
+ * where, what must not be done; then as much of the findings as fits into one
+ * message, what matters most first, and how many more there are. Where not even
+ * the first finding fits, it is two messages. What could not be looked at is left out.
  */
 export function handOverMessage(facts: HandOverFacts): string {
-  const head = [
-    `${facts.boat}, ${facts.engine}: ${facts.symptoms.join("; ") || facts.complaint || "engine fault"}.`,
-    `${capital(SITUATIONS[facts.situation])}${facts.position ? ` ${positionForMessage(facts.position)}` : ""}.`,
-    ...facts.rulesInForce.map((rule) => `${rule}.`),
-    ...(facts.possible[0]
-      ? [
-          `Likeliest: ${facts.possible
-            .slice(0, 2)
-            .map(({ title, of100 }) => `${title} ${of100}/100`)
-            .join(", ")}.`,
-        ]
-      : []),
-  ];
-  const findings = [
+  const head = inPlainSigns(
+    [
+      `${facts.boat}, ${facts.engine}: ${facts.symptoms.join("; ") || facts.complaint || "engine fault"}.`,
+      `${capital(SITUATIONS[facts.situation])}${facts.position ? ` ${positionForMessage(facts.position)}` : ""}.`,
+      ...facts.rulesInForce.map(({ title }) => `In force: ${title}.`),
+    ].join(" "),
+  );
+  const [likeliest] = facts.possible;
+  const more = [
     ...facts.tried.map(({ title, says }) => `Tried ${title}: ${says}.`),
-    ...[...facts.checked].reverse().map(({ title, says }) => `${title}: ${says}.`),
+    ...facts.checked.map(({ title, says }) => `${title}: ${says}.`),
   ];
-  let text = inPlainSigns(head.join(" "));
-  for (const [index, finding] of findings.entries()) {
-    const left = findings.length - index - 1;
-    const next = `${text} ${inPlainSigns(finding)}`;
-    if (next.length + (left > 0 ? ` +${left} more.`.length : 0) > MOST_CHARACTERS) return `${text} +${left + 1} more.`;
+  // The first finding, then what it points to, then the rest.
+  const parts = [...more.slice(0, 1), ...(likeliest ? [`Maybe ${likeliest.title}, ${likeliest.of100} of 100.`] : []), ...more.slice(1)];
+  const short = filled(head, parts, ONE_MESSAGE);
+  return short.told > 0 || parts.length === 0 ? short.text : filled(head, parts, TWO_MESSAGES).text;
+}
+
+/** As many of the parts as fit, in their order, and how many were left out. */
+function filled(head: string, parts: readonly string[], most: number): { text: string; told: number } {
+  let text = head;
+  for (const [at, part] of parts.entries()) {
+    const left = parts.length - at - 1;
+    const next = `${text} ${inPlainSigns(part)}`;
+    if (next.length + (left > 0 ? ` +${left} more.`.length : 0) > most) return { text: `${text} +${left + 1} more.`, told: at };
     text = next;
   }
-  return text;
+  return { text, told: parts.length };
 }
 
 const inPlainSigns = (text: string): string => [...text].map((sign) => PLAIN[sign] ?? sign).join("");
