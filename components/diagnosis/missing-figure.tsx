@@ -1,6 +1,7 @@
 "use client";
 
 import { useState } from "react";
+import { FIGURE_LIMITS } from "@/lib/core/contract/figure-limits";
 import type { EngineFigure } from "@/lib/core/tree/schema";
 import { readNumber } from "@/lib/core/units/read-number";
 import { missingFigures } from "@/lib/client/missing-figures";
@@ -8,25 +9,19 @@ import { Button } from "@/components/ui/button";
 import { TextField } from "@/components/ui/text-field";
 import { useHere } from "./here";
 
-const ASKS: Record<EngineFigure, { ask: string; hint: string; from: number; to: number }> = {
+const ASKS: Record<EngineFigure, { ask: string; hint: string }> = {
   ratedRpm: {
     ask: "What is this engine's rated speed, in rpm?",
     hint: "On its plate or in the manual; often 2400 to 3600.",
-    from: 500,
-    to: 8000,
   },
   noLoadRpm: {
     ask: "What is its highest speed without load, in rpm?",
     hint: "In the manual; a little over the rated speed.",
-    from: 500,
-    to: 9000,
   },
-  idleRpm: { ask: "What is its idle speed, in rpm?", hint: "In the manual; often 700 to 950.", from: 300, to: 2000 },
+  idleRpm: { ask: "What is its idle speed, in rpm?", hint: "In the manual; often 700 to 950." },
   openingTemperatureC: {
     ask: "At what temperature does its thermostat open, in \u00b0C?",
     hint: "Stamped on the thermostat; often 60 to 85.",
-    from: 30,
-    to: 110,
   },
 };
 
@@ -38,7 +33,8 @@ export function MissingFigure({ checkKey }: { checkKey: string }) {
   const check = tree.checks.find(({ key }) => key === checkKey);
   const [figure] = check ? missingFigures(check, view.profile) : [];
   if (!figure) return null;
-  const { ask, hint, from, to } = ASKS[figure];
+  const { ask, hint } = ASKS[figure];
+  const { from, to } = FIGURE_LIMITS[figure];
   return (
     <form
       noValidate

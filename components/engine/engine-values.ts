@@ -1,6 +1,7 @@
 import * as z from "zod";
 import { asTyped, typedNumber } from "@/components/form/typed-number";
 import type { Engine, EngineChange, EngineProfile } from "@/lib/core/contract/engine";
+import { FIGURE_LIMITS, HEALTHY_LIMITS, type FigureLimits } from "@/lib/core/contract/figure-limits";
 import { convert } from "@/lib/core/units/units";
 import { FIGURES, HEALTHY, type FigureAsked } from "./figures";
 
@@ -22,6 +23,27 @@ export const EngineValues = z
     features: z.record(z.string(), z.string()),
     figures: z.record(z.string(), z.object({ typed: positive, unit: z.string() })),
     healthy: z.record(z.string(), z.object({ typed: number, unit: z.string() })),
+  })
+  .superRefine(({ figures, healthy }, ctx) => {
+    const check = (
+      at: string,
+      typed: typeof figures,
+      asked: readonly FigureAsked<string>[],
+      limits: Readonly<Record<string, FigureLimits>>,
+    ) => {
+      for (const [key, figure] of Object.entries(typed)) {
+        const value = inUnit(figure, asked, key);
+        const limit = limits[key];
+        if (value === null || !limit || (value >= limit.from && value <= limit.to)) continue;
+        ctx.addIssue({
+          code: "custom",
+          path: [at, key, "typed"],
+          message: outside(value, limit, asked.find((one) => one.key === key)?.unit ?? ""),
+        });
+      }
+    };
+    check("figures", figures, FIGURES, FIGURE_LIMITS);
+    check("healthy", healthy, HEALTHY, HEALTHY_LIMITS);
   })
   .transform(({ name, meter, hoursPerYear, features, figures, healthy, maker, model, serialNumber, cylinders, ratedKw }): EngineGiven => ({
     name,
@@ -51,6 +73,13 @@ function given<V, R>(record: Readonly<Record<string, V>>, read: (value: V, key: 
 function inUnit(figure: { typed: number | null; unit: string }, asked: readonly FigureAsked<string>[], key: string): number | null {
   const kept = asked.find((one) => one.key === key)?.unit;
   return figure.typed === null || kept === undefined ? null : convert(figure.typed, figure.unit, kept);
+}
+
+/** "3.000" is three to one reader and three thousand to another: what was understood is said, so that it can be put right. */
+function outside(value: number, { from, to }: FigureLimits, unit: string): string {
+  const thousand = value < from && value * 1000 >= from && value * 1000 <= to;
+  const meant = thousand ? ` For ${asTyped(value * 1000)} leave out the sign between the thousands.` : "";
+  return `This reads as ${asTyped(value)} ${unit}; between ${from} and ${to} ${unit} is likely.${meant}`;
 }
 
 /** A new engine: nothing is known but what nearly all have. */

@@ -7,7 +7,7 @@ import { useForm } from "react-hook-form";
 import { uuidv7 } from "uuidv7";
 import * as z from "zod";
 import { FormEnd } from "@/components/form/form-end";
-import { momentOf, today } from "@/components/form/day-typed";
+import { isAhead, momentOf, today } from "@/components/form/day-typed";
 import { typedNumber } from "@/components/form/typed-number";
 import { useSave } from "@/components/form/use-save";
 import { Choice } from "@/components/ui/choice";
@@ -16,7 +16,10 @@ import { sendJson } from "@/lib/client/exchange/request";
 
 const Values = z.object({
   reading: typedNumber({ from: 0, to: 200_000 }).refine((n) => n !== null, "Write what the meter shows."),
-  day: z.string().min(1, "Say which day."),
+  day: z
+    .string()
+    .min(1, "Say which day.")
+    .refine((day) => !isAhead(day), "That day is still to come."),
   reset: z.boolean(),
 });
 type Values = z.input<typeof Values>;
@@ -54,7 +57,15 @@ export function HourEntry({ fleetId, engineId }: { fleetId: string; engineId: st
           error={errors.reading?.message ?? says}
           {...form.register("reading")}
         />
-        <TextField id="read-on" type="date" label="Read on" error={errors.day?.message} {...form.register("day")} />
+        <TextField
+          id="read-on"
+          type="date"
+          label="Read on"
+          max={today()}
+          suppressHydrationWarning
+          error={errors.day?.message}
+          {...form.register("day")}
+        />
       </div>
       <Choice {...form.register("reset")}>The meter was replaced or set back since the last reading</Choice>
       <FormEnd submit="Write it down" saving={saving} refusal={says ? null : refusal} done={saved && "Written down."} />

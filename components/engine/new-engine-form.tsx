@@ -43,7 +43,9 @@ export function NewEngineForm({ fleetId, boatId, suggestedName, features }: Prop
         await sendJson(`${engines}/${id}/hours`, { id: readingId, engineId: id, reading, readAt: new Date().toISOString() });
       }
     });
-    if ("answer" in outcome) router.push(`/f/${fleetId}/engines/${id}`);
+    if ("answer" in outcome) return router.push(`/f/${fleetId}/engines/${id}`);
+    const named = outcome.refusal.errors.find(({ path }) => path === "name");
+    if (named) form.setError("name", { message: named.says }, { shouldFocus: true });
   });
   // The shared fields know the engine's part of the form; the reading is this form's own.
   const register = form.register as unknown as Parameters<typeof ClockFields>[0]["register"];
@@ -71,7 +73,7 @@ export function NewEngineForm({ fleetId, boatId, suggestedName, features }: Prop
           <ProfileFields features={features} register={register} errors={errors} />
         </div>
       </Fold>
-      <FormEnd submit="Add the engine" saving={saving} refusal={refusal} wrong={Object.keys(errors).length > 0} />
+      <FormEnd submit="Add the engine" saving={saving} refusal={errors.name ? null : refusal} wrong={Object.keys(errors).length > 0} />
     </form>
   );
 }

@@ -9,4 +9,7 @@ export function momentOf(day: string): string {
   return (day === today() ? new Date() : new Date(`${day}T12:00:00`)).toISOString();
 }
 
+/** A day after today, where it is typed. */
+export const isAhead = (day: string): boolean => day > today();
+
 const two = (n: number) => String(n).padStart(2, "0");

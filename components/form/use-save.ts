@@ -30,6 +30,9 @@ export function useSave() {
 function refusalOf(failure: unknown): Refusal {
   if (!(failure instanceof NoAnswer)) throw failure;
   const { status, because, errors, current } = failure;
-  const says = status === 0 ? "No answer from the server. What you typed is still here; try again when there is a signal." : because;
+  const says =
+    status === 0
+      ? "No answer from the server. What you typed is still here; try again when there is a signal."
+      : (errors[0]?.says ?? because);
   return { status, says, errors, current };
 }

@@ -1,5 +1,5 @@
 import * as z from "zod";
-import { momentOf } from "@/components/form/day-typed";
+import { isAhead, momentOf } from "@/components/form/day-typed";
 import { typedNumber } from "@/components/form/typed-number";
 import type { NewRepair } from "@/lib/core/contract/log";
 
@@ -8,7 +8,10 @@ const isSaid = ({ key, words }: { key: string; words: string }) => key !== "" ||
 
 /** A repair as its form holds it. */
 export const RepairValues = z.object({
-  day: z.string().min(1, "Say which day."),
+  day: z
+    .string()
+    .min(1, "Say which day.")
+    .refine((day) => !isAhead(day), "That day is still to come."),
   hours: typedNumber({ from: 0, to: 200_000 }),
   meterReset: z.boolean(),
   symptom: z.string(),

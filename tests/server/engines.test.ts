@@ -33,6 +33,18 @@ test("an engine sent again with another name or profile is refused: it would be 
   });
 });
 
+test("two engines of one name on a boat are refused, however it is written: nobody could tell them apart", async () => {
+  const boat = await afloat("Twin");
+  const twin = (name: string) => addEngineTo({ ...boat, engineId: uuidv7() }, { name });
+  await expect(twin("Main engine ")).rejects.toMatchObject({ status: 422, extras: { errors: [{ path: "name" }] } });
+  const starboard = { ...boat, engineId: uuidv7() };
+  await addEngineTo(starboard, { name: "starboard" });
+  const rename = withScope(boat.person, boat.fleetId, "engine:write", (scope) =>
+    changeEngine(scope, starboard.engineId, { name: "MAIN engine" }, 1),
+  );
+  await expect(rename).rejects.toMatchObject({ status: 422 });
+});
+
 describe("boats", () => {
   test("a boat sent twice is one boat; another under its id is refused", async () => {
     const boat = { id: uuidv7(), name: "Turnstone", callMinutes: { atAnchor: 300 } };
@@ -107,7 +119,7 @@ describe("the hour meter", () => {
   test("a meter that ran back is refused in words, unless it was replaced", async () => {
     await expect(read(ines.engineId, 20, 12)).rejects.toMatchObject({
       status: 422,
-      detail: expect.stringMatching(/showed 130 h on 2026-03-10/),
+      detail: expect.stringMatching(/showed 130 h on 10 Mar 2026/),
     });
     await read(ines.engineId, 20, 12, true);
     await read(ines.engineId, 25, 14);

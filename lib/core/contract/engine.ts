@@ -1,5 +1,6 @@
 import * as z from "zod";
 import { EngineFigure, HealthyReading, Key } from "../tree/schema";
+import { FIGURE_LIMITS, HEALTHY_LIMITS, type FigureLimits } from "./figure-limits";
 import { Id, Moment } from "./id";
 
 /** As many features as any tree will ask of. */
@@ -20,6 +21,19 @@ export const EngineProfile = z.strictObject({
   ratedKw: z.number().positive().max(2000).optional(),
 });
 export type EngineProfile = z.infer<typeof EngineProfile>;
+
+/** A profile as it is taken in: figures no engine has are refused. What was kept before is read as it is. */
+export const GivenProfile = EngineProfile.superRefine(({ figures, healthy }, ctx) => {
+  const within = (at: string, given: Readonly<Record<string, number | undefined>>, limits: Readonly<Record<string, FigureLimits>>) => {
+    for (const [key, value] of Object.entries(given)) {
+      const limit = limits[key];
+      if (value === undefined || !limit || (value >= limit.from && value <= limit.to)) continue;
+      ctx.addIssue({ code: "custom", path: [at, key], message: `This lies between ${limit.from} and ${limit.to} on any engine.` });
+    }
+  };
+  within("figures", figures, FIGURE_LIMITS);
+  within("healthy", healthy, HEALTHY_LIMITS);
+});
 
 export const NewBoat = z.strictObject({
   id: Id,
@@ -48,7 +62,7 @@ export const NewEngine = z.strictObject({
   hasHourMeter: z.boolean().default(true),
   /** For an engine without a meter: hours run in a usual year, from which hours are estimated. */
   estimatedHoursPerYear: z.number().positive().max(8760).optional(),
-  profile: EngineProfile.prefault({}),
+  profile: GivenProfile.prefault({}),
 });
 export type NewEngine = z.infer<typeof NewEngine>;
 
@@ -59,12 +73,13 @@ export const EngineChange = z
     name: NewEngine.shape.name,
     hasHourMeter: z.boolean(),
     estimatedHoursPerYear: z.number().positive().max(8760).nullable(),
-    profile: EngineProfile,
+    profile: GivenProfile,
   })
   .partial();
 export type EngineChange = z.infer<typeof EngineChange>;
 
 export const Engine = NewEngine.extend({
+  profile: EngineProfile,
   version: z.number().int(),
   createdAt: Moment,
   boatName: z.string(),

@@ -8,11 +8,12 @@ import { getBoat } from "@/lib/server/boats/queries";
 import { refuseEventId } from "@/lib/server/diagnoses/event-ids";
 import { canonical } from "@/lib/server/trees/content-hash";
 import { notAhead } from "@/lib/server/web/not-ahead";
-import { getEngine, listHourReadings } from "./queries";
+import { getEngine, listEngines, listHourReadings } from "./queries";
 
 /** Adds an engine to a boat. Sent twice it is one engine; another engine under the same id is refused. */
 export async function addEngine(scope: FleetScope<"engine:write">, engine: NewEngine): Promise<Engine> {
   await getBoat(scope, engine.boatId);
+  await refuseSameName(scope, engine);
   await scope.tx
     .insert(engines)
     .values({ ...engine, fleetId: scope.fleetId })
@@ -30,9 +31,22 @@ const contentOf = ({ name, hasHourMeter, estimatedHoursPerYear, profile }: NewEn
   profile,
 });
 
+const dayInWords = (moment: string): string =>
+  new Date(moment).toLocaleDateString("en-GB", { day: "numeric", month: "short", year: "numeric", timeZone: "UTC" });
+
+/** Two engines of one name on a boat: nobody could tell which one a diagnosis is of. */
+async function refuseSameName(scope: FleetScope, { id, boatId, name }: Pick<NewEngine, "id" | "boatId" | "name">): Promise<void> {
+  const alike = (other: string) => other.trim().toLowerCase() === name.trim().toLowerCase();
+  const other = (await listEngines(scope)).find((one) => one.id !== id && one.boatId === boatId && alike(one.name));
+  if (!other) return;
+  const says = `${other.boatName} has an engine called ${other.name} already. Give this one another name.`;
+  throw Problem.invalid([{ path: "name", says }]);
+}
+
 /** @throws Problem 412 when somebody changed the engine since `version` */
 export async function changeEngine(scope: FleetScope<"engine:write">, id: string, change: EngineChange, version: number): Promise<Engine> {
   if (change.boatId) await getBoat(scope, change.boatId);
+  if (change.boatId || change.name) await refuseSameName(scope, { ...(await getEngine(scope, id)), ...change, id });
   const changed = await scope.tx
     .update(engines)
     .set({ ...change, version: sql`${engines.version} + 1` })
@@ -75,7 +89,7 @@ export async function addHourReading(scope: FleetScope<"engine:write">, reading:
   if (!reading.reset) {
     const newest = (await listHourReadings(scope, reading.engineId)).find((r) => !r.doubtful && new Date(r.readAt) <= readAt);
     if (newest && newest.reading > reading.reading) {
-      const says = `The meter showed ${newest.reading} h on ${newest.readAt.slice(0, 10)} and does not run back. Look again, or say that it was replaced.`;
+      const says = `The meter showed ${newest.reading} h on ${dayInWords(newest.readAt)} and does not run back. Look again, or say that it was replaced.`;
       throw Problem.invalid([{ path: "reading", says }]);
     }
   }

@@ -22,6 +22,13 @@ describe("the engine's form", () => {
     expect(EngineValues.parse(engineValues(engine, features)).profile.features).toEqual({ "old-part": "fitted" });
   });
   test.each([
+    ["3.000", "rpm", "This reads as 3 rpm; between 500 and 8000 rpm is likely. For 3000 leave out the sign between the thousands."],
+    ["90", "rpm", "This reads as 90 rpm; between 500 and 8000 rpm is likely."],
+  ])("refuses a rated speed of %s %s, and says what it understood", (typed, unit, says) => {
+    const result = EngineValues.safeParse({ ...blank, figures: { ...blank.figures, ratedRpm: { typed, unit } } });
+    expect(result.error?.issues).toMatchObject([{ path: ["figures", "ratedRpm", "typed"], message: says }]);
+  });
+  test.each([
     ["cylinders", "2.5", "A whole number."],
     ["cylinders", "13", "At most 12."],
     ["ratedKw", "a lot", "Write a number, for example 12.5."],
