@@ -1,7 +1,9 @@
 import { Button } from "@/components/ui/button";
 
+type Props = { safe: boolean; onSafe: (safe: boolean) => void; /** To the page that helps whoever comes. */ onCall: () => void };
+
 /** Under way the boat comes before the engine. */
-export function BoatFirst({ safe, onSafe }: { safe: boolean; onSafe: (safe: boolean) => void }) {
+export function BoatFirst({ safe, onSafe, onCall }: Props) {
   if (safe)
     return (
       <p className="mt-3 flex flex-wrap items-center gap-x-3 text-sm">
@@ -21,9 +23,14 @@ export function BoatFirst({ safe, onSafe }: { safe: boolean; onSafe: (safe: bool
         <li>Losing ground towards danger? Call now, before looking at the engine: PAN PAN on VHF 16, MAYDAY if life is in grave danger.</li>
         <li>Show the signals of a vessel not under command, and keep a look-out.</li>
       </ol>
-      <Button tone="strong" size="large" wide className="mt-3" onClick={() => onSafe(true)}>
-        The boat is safe for now
-      </Button>
+      <div className="mt-3 grid gap-3">
+        <Button tone="strong" size="large" wide onClick={() => onSafe(true)}>
+          The boat is safe for now
+        </Button>
+        <Button size="large" wide onClick={onCall}>
+          Call for help: what to say
+        </Button>
+      </div>
     </section>
   );
 }

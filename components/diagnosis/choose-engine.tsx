@@ -1,15 +1,15 @@
 "use client";
 
-import { useEffect, useState } from "react";
 import { agoInWords } from "@/lib/client/duration";
 import type { Ready } from "@/lib/client/screen/surface";
 import type { useAddress } from "@/lib/client/screen/use-address";
 import { useNow } from "@/lib/client/screen/use-now";
-import { useObservable } from "@/lib/client/screen/use-observable";
 import { useTree } from "@/lib/client/screen/use-phone";
+import { useSummaries } from "@/lib/client/screen/use-summaries";
 import type { Summary } from "@/lib/client/store/summary";
 import type { Phone } from "@/lib/core/contract/phone";
 import { EmptyState } from "@/components/ui/empty-state";
+import { Fold } from "@/components/ui/fold";
 import { LinkButton } from "@/components/ui/link-button";
 import { BigRow } from "./big-row";
 import { Frame } from "./frame";
@@ -17,17 +17,12 @@ import { ScreenHeading } from "./screen-heading";
 
 type Props = { ready: Ready; phone: Phone; go: ReturnType<typeof useAddress>["go"] };
 
+/** More than this of what was left unfinished is folded: the engine comes first. */
+const IN_THE_OPEN = 3;
+
 /** The engine, last used first; above them what was left unfinished. */
 export function ChooseEngine({ ready, phone, go }: Props) {
-  const changes = useObservable(ready.store.changes);
-  const [summaries, setSummaries] = useState<readonly Summary[]>([]);
-  useEffect(() => {
-    let current = true;
-    void ready.store.summaries().then((all) => current && setSummaries(all));
-    return () => {
-      current = false;
-    };
-  }, [ready.store, changes]);
+  const summaries = useSummaries(ready.store);
   const now = useNow();
   const tree = useTree(ready.store, phone.treeVersion.id);
   const open = summaries.filter(({ ended, engineId }) => !ended && phone.engines.some(({ id }) => id === engineId));
@@ -39,6 +34,16 @@ export function ChooseEngine({ ready, phone, go }: Props) {
     phone.engines.filter((engine) => engine.id === id).map(({ boatName, name }) => `${boatName}, ${name}`)[0];
   const symptomTitle = (key: string) => tree?.symptoms.find((symptom) => symptom.key === key)?.title;
 
+  const row = (summary: Summary) => (
+    <BigRow
+      key={summary.id}
+      title={engineName(summary.engineId)}
+      detail={summary.symptoms.map(symptomTitle).filter(Boolean).join(" · ") || summary.complaint || "No symptom given"}
+      more={`Resume: ${summary.answers === 1 ? "1 answer" : `${summary.answers} answers`}${now ? `, ${agoInWords(summary.touchedAt, now)}` : ""}`}
+      onTap={() => go({ d: summary.id, at: "step" })}
+    />
+  );
+
   return (
     <Frame ready={ready} who={phone.fleet.name} under="Find the fault, prove the fix">
       {open.length > 0 && (
@@ -47,15 +52,12 @@ export function ChooseEngine({ ready, phone, go }: Props) {
             Left unfinished
           </h2>
           <div className="grid gap-2">
-            {open.map((summary) => (
-              <BigRow
-                key={summary.id}
-                title={engineName(summary.engineId)}
-                detail={summary.symptoms.map(symptomTitle).filter(Boolean).join(" · ") || summary.complaint || "No symptom given"}
-                more={`Resume: ${summary.answers === 1 ? "1 answer" : `${summary.answers} answers`}${now ? `, ${agoInWords(summary.touchedAt, now)}` : ""}`}
-                onTap={() => go({ d: summary.id, at: "step" })}
-              />
-            ))}
+            {open.slice(0, IN_THE_OPEN).map(row)}
+            {open.length > IN_THE_OPEN && (
+              <Fold title={`${open.length - IN_THE_OPEN} older`}>
+                <div className="grid gap-2">{open.slice(IN_THE_OPEN).map(row)}</div>
+              </Fold>
+            )}
           </div>
         </section>
       )}

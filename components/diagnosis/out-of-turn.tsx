@@ -66,7 +66,7 @@ export function OutOfTurn() {
               void record("situation-changed", { situation });
             }}
           />
-          {castOff && <BoatFirst safe={false} onSafe={leave(() => setCastOff(false))} />}
+          {castOff && <BoatFirst safe={false} onSafe={leave(() => setCastOff(false))} onCall={leave(() => go("hand-over"))} />}
           {/* A step that cranks has the clock on its own screen: one burst is never counted by two. */}
           {(view.step?.cranks ?? null) === null && (
             <Fold title="It is being cranked">

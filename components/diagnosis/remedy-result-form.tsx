@@ -17,19 +17,23 @@ const RESULTS: readonly { result: RemedyResult; title: string }[] = [
   { result: "could-not", title: "Could not do it" },
 ];
 
+/** As long as a proof may be. */
+const MOST_PROOF = 500;
+
 /** Did it cure it, and how was that proved? A cure is only believed once it has been tried under load. */
 export function RemedyResultForm({ of, proof, onResult }: { of: string; proof: string | null; onResult: (tried: Tried) => Promise<void> }) {
   const { note, photos, onNote, onPhotos, drop } = useKeptNote(of);
   const [cured, setCured] = useState(false);
   const [words, setWords] = useState("");
   const [given, setGiven] = useState(false);
+  const own = words.trim();
   const guard = useGuard();
   const settling = useSettling();
-  const give = (result: RemedyResult, says: string, how: string | null) =>
+  const give = (result: RemedyResult, says: string, how: string | null, also = "") =>
     guard(`${of} ${says}`, () => {
       if (given || settling) return;
       setGiven(true);
-      void onResult({ result, says, proof: how, note: note.trim(), photos }).then(drop);
+      void onResult({ result, says, proof: how, note: [note.trim(), also].filter(Boolean).join(" "), photos }).then(drop);
     });
   return (
     <div>
@@ -52,19 +56,21 @@ export function RemedyResultForm({ of, proof, onResult }: { of: string; proof: s
             <h2 className="text-lg">How was that proved?</h2>
             {proof && <p className="mt-1 mb-2">{proof}</p>}
             <div className="grid gap-2">
-              {proof && <AnswerButton onTap={() => give("cured", "Cured, proved", proof)}>Done, and it held</AnswerButton>}
+              {proof && (
+                <AnswerButton onTap={() => give("cured", "Cured, proved", [proof, own].filter(Boolean).join(" ").slice(0, MOST_PROOF))}>
+                  Done, and it held
+                </AnswerButton>
+              )}
               <TextField
                 id={`proof-${of}`}
-                label="Proved another way"
+                label="Proved another way, or what it showed"
                 optional
                 value={words}
                 maxLength={500}
                 onChange={(event) => setWords(event.target.value)}
               />
-              {words.trim().length > 2 && (
-                <AnswerButton onTap={() => give("cured", "Cured, proved", words.trim())}>Proved as written</AnswerButton>
-              )}
-              <AnswerButton quiet onTap={() => give("cured", "Cured, not proved yet", null)}>
+              {own.length > 2 && <AnswerButton onTap={() => give("cured", "Cured, proved", own)}>Proved as written</AnswerButton>}
+              <AnswerButton quiet onTap={() => give("cured", "Cured, not proved yet", null, own)}>
                 Not proved yet
               </AnswerButton>
             </div>

@@ -16,6 +16,7 @@ import { Checkbox } from "@/components/ui/checkbox";
 import { Segmented } from "@/components/ui/segmented";
 import { BoatFirst } from "./boat-first";
 import { Frame } from "./frame";
+import { GoOnFirst } from "./go-on-first";
 import { ScreenHeading } from "./screen-heading";
 import { SymptomHits } from "./symptom-hits";
 import { SymptomList } from "./symptom-list";
@@ -64,17 +65,21 @@ export function Say({ ready, phone, engine, go }: Props) {
     // It stands above the fold: the question comes to whoever missed it.
     if (!situation) document.querySelector<HTMLInputElement>('input[name="situation"]')?.focus();
     if (!situation || needsSafety || beginning) return;
-    guard("begin", () => {
-      setBeginning(true);
-      void begin({ store: ready.store, phone, engine, tree, draft: { ...draft, situation }, symptoms: picked }).then((d) => {
-        ready.exchange.nudge();
-        go({ d, at: "rules" });
-      });
+    guard("begin", () => start(situation, "rules"));
+  };
+  /** A call for help needs no more than where the boat is: what is said so far goes with it. */
+  const start = (situation: Situation, at: "rules" | "hand-over") => {
+    if (beginning) return;
+    setBeginning(true);
+    void begin({ store: ready.store, phone, engine, tree, draft: { ...draft, situation }, symptoms: picked }).then((d) => {
+      ready.exchange.nudge();
+      go({ d, at });
     });
   };
 
   return (
     <Frame ready={ready} who={who} line={line}>
+      <GoOnFirst ready={ready} engine={engine} tree={tree} onGoOn={(d) => go({ d, at: "step" })} />
       <Segmented<Situation>
         name="situation"
         legend="Where is the boat?"
@@ -91,7 +96,9 @@ export function Say({ ready, phone, engine, go }: Props) {
           Say where the boat is first. It decides what is safe to try.
         </p>
       )}
-      {draft.situation === "under-way" && <BoatFirst safe={draft.boatIsSafe} onSafe={(boatIsSafe) => change({ boatIsSafe })} />}
+      {draft.situation === "under-way" && (
+        <BoatFirst safe={draft.boatIsSafe} onSafe={(boatIsSafe) => change({ boatIsSafe })} onCall={() => start("under-way", "hand-over")} />
+      )}
       <div className="mt-6">
         <ScreenHeading of={engine.id}>What is the engine doing, or not doing?</ScreenHeading>
       </div>

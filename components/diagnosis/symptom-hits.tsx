@@ -27,9 +27,13 @@ export function SymptomHits({ symptoms, keys, isPicked, onToggle, said }: Props)
           ))}
         </div>
       )}
-      {found.length === 0 && said && (
+      {said && !found.some(({ key }) => isPicked(key)) && (
         <p className="mt-3 text-sm">
-          The tree has nothing in these words. Pick the nearest from the list below, or go on without: the checks then start wider.
+          {found.length === 0
+            ? "Nothing in the tree fits these words well. Pick"
+            : "Nothing fits these words well. Tick what is meant, pick"}{" "}
+          the nearest from the list below, or go on without: the checks then start wider. Fire, fuel, smoke, steam or an alarm: the next
+          screen asks about those first.
         </p>
       )}
     </div>

@@ -110,7 +110,7 @@ export function RepairForm({ fleetId, engineId, hasHourMeter, choices }: Props) 
         id="proof"
         label="How was it proved?"
         hint={known ? known.proof : "A cure that was not proved counts for less when the fault comes back."}
-        optional
+        optional={outcome === "held"}
         maxLength={500}
         autoComplete="off"
         error={errors.proof?.message}

@@ -7,28 +7,33 @@ const Said = z.object({ key: z.string(), words: z.string().trim().max(500) });
 const isSaid = ({ key, words }: { key: string; words: string }) => key !== "" || words !== "";
 
 /** A repair as its form holds it. */
-export const RepairValues = z.object({
-  day: z
-    .string()
-    .min(1, "Say which day.")
-    .refine((day) => !isAhead(day), "That day is still to come."),
-  hours: typedNumber({ from: 0, to: 200_000 }),
-  meterReset: z.boolean(),
-  symptom: z.string(),
-  cause: Said.refine(isSaid, "Say what was wrong, as well as you know it."),
-  remedy: Said.refine(isSaid, "Say what was done."),
-  outcome: z.enum(["cured", "held"]),
-  proof: z.string().trim().max(500),
-  minutes: typedNumber({ from: 0, to: 100_000 }),
-  parts: z.array(
-    z.object({
-      key: z.string(),
-      title: z.string().trim().max(200),
-      quantity: typedNumber({ from: 0.01, to: 1000 }),
-    }),
-  ),
-  note: z.string().max(4000, "Keep it under 4000 characters."),
-});
+export const RepairValues = z
+  .object({
+    day: z
+      .string()
+      .min(1, "Say which day.")
+      .refine((day) => !isAhead(day), "That day is still to come."),
+    hours: typedNumber({ from: 0, to: 200_000 }),
+    meterReset: z.boolean(),
+    symptom: z.string(),
+    cause: Said.refine(isSaid, "Say what was wrong, as well as you know it."),
+    remedy: Said.refine(isSaid, "Say what was done."),
+    outcome: z.enum(["cured", "held"]),
+    proof: z.string().trim().max(500),
+    minutes: typedNumber({ from: 0, to: 100_000 }),
+    parts: z.array(
+      z.object({
+        key: z.string(),
+        title: z.string().trim().max(200),
+        quantity: typedNumber({ from: 0.01, to: 1000 }),
+      }),
+    ),
+    note: z.string().max(4000, "Keep it under 4000 characters."),
+  })
+  .refine(({ outcome, proof }) => outcome === "held" || proof !== "", {
+    path: ["proof"],
+    message: "Say how it was proved. If it has not been, log it as held for now.",
+  });
 export type RepairValues = z.input<typeof RepairValues>;
 export type RepairGiven = z.output<typeof RepairValues>;
 
@@ -39,7 +44,7 @@ export const NO_REPAIR: RepairValues = {
   symptom: "",
   cause: { key: "", words: "" },
   remedy: { key: "", words: "" },
-  outcome: "cured",
+  outcome: "held",
   proof: "",
   minutes: "",
   parts: [],

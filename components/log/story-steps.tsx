@@ -7,11 +7,18 @@ import { StoryStepView } from "./story-step";
 export function StorySteps({ fleetId, steps }: { fleetId: string; steps: readonly StoryStep[] }) {
   const beliefOf = ({ believed, others, unknown }: StoryStep) => JSON.stringify([believed, others, unknown]);
   const moved = new Set(steps.filter((step, i) => i === 0 || beliefOf(step) !== beliefOf(steps[i - 1] as StoryStep)).map((s) => s.event));
+  const changed = new Set(steps.flatMap(({ changes }) => changes?.event ?? []));
   return (
     <ol className="grid gap-6">
       {storyGroups(steps).map((group) =>
         group.kind === "step" ? (
-          <StoryStepView key={group.step.event} fleetId={fleetId} step={group.step} showsBelief={moved.has(group.step.event)} />
+          <StoryStepView
+            key={group.step.event}
+            fleetId={fleetId}
+            step={group.step}
+            showsBelief={moved.has(group.step.event)}
+            changedLater={changed.has(group.step.event)}
+          />
         ) : (
           <NoDanger key={group.steps[0]?.event} steps={group.steps} />
         ),

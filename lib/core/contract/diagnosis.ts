@@ -50,6 +50,8 @@ export const StoryStep = z.strictObject({
   photos: z.array(Id),
   /** Why this step came next; null where it was said out of turn. */
   askedWhy: z.string().nullable(),
+  /** The earlier step that this one takes the place of, and what was said there; null where it changes none. */
+  changes: z.strictObject({ event: Id, was: z.string() }).nullable(),
   /** The likeliest causes then, as counts out of 100 that add up to 100 with `others` and `unknown`. */
   believed: z.array(z.strictObject({ key: Key, title: z.string(), of100: z.number().int() })),
   others: z.number().int(),

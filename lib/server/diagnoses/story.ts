@@ -70,6 +70,7 @@ function stepOf(event: DiagnosisEvent, before: DiagnosisView | null, after: Diag
       note: line.note,
       photos: [...line.photos],
       askedWhy: whyAsked(event, before),
+      changes: changedBy(event, before),
       believed: told.map(({ key, title, of100 }) => ({ key, title, of100 })),
       others: others.of100 + folded,
       unknown: unknown.of100,
@@ -91,6 +92,12 @@ function changeOf(event: DiagnosisEvent, before: DiagnosisView | null, after: Di
     note: null,
     photos: [],
   };
+}
+
+/** An answer given in the place of another. */
+function changedBy(event: DiagnosisEvent, before: DiagnosisView | null): StoryStep["changes"] {
+  const earlier = before?.said.find((said) => said.event === event.supersedes);
+  return earlier ? { event: earlier.event, was: earlier.says } : null;
 }
 
 function whyAsked(event: DiagnosisEvent, before: DiagnosisView | null): string | null {

@@ -13,12 +13,22 @@ const step = (event: string, kind: string, says: string, note: string | null = n
   note,
   photos: [],
   askedWhy: null,
+  changes: null,
   believed: [],
   others: 0,
   unknown: 0,
 });
 
 describe("the story of a diagnosis", () => {
+  test("lets a danger stand by itself that was answered in two ways, before and after", () => {
+    const steps = [
+      step("a", "rule-answered", "No"),
+      step("b", "rule-answered", "No"),
+      { ...step("c", "rule-answered", "No"), changes: { event: "b", was: "Yes" } },
+    ];
+    expect(storyGroups(steps).map(({ kind }) => kind)).toEqual(["no-danger", "step", "step"]);
+  });
+
   test("puts dangers that were ruled out into one line, and shows one that was there", () => {
     const steps = [
       step("a", "begun", ""),
