@@ -9,6 +9,8 @@ import { NoteAndPhotos } from "./note-and-photos";
 import { ReadingAnswer } from "./reading-answer";
 import { useKeptNote } from "./use-kept-note";
 
+const CANNOT = "Can\u2019t tell";
+
 export type Given = { answer: Answer; says: string; withdraws: string | null; note: string; photos: readonly string[] };
 
 type Props = {
@@ -58,7 +60,7 @@ export function AnswerForm({ of, ask, answers, reading, ifFitted, onAnswer }: Pr
             Not fitted on this engine
           </AnswerButton>
         )}
-        <AnswerButton quiet waits={settling} chosen={given === "Can't tell"} onTap={() => give({ cannotTell: true }, "Can't tell")}>
+        <AnswerButton quiet waits={settling} chosen={given === CANNOT} onTap={() => give({ cannotTell: true }, CANNOT)}>
           Can&rsquo;t tell, or can&rsquo;t get to it
         </AnswerButton>
       </div>

@@ -21,13 +21,18 @@ export function OutcomeParts({ form, change }: { form: OutcomeForm; change: (par
           >
             <span>{part.title}</span>
             <span className="inline-flex items-center gap-1">
-              <Button aria-label={`One less: ${part.title}`} disabled={part.quantity === 0} onClick={() => set(index, part.quantity - 1)}>
+              <Button
+                className="min-w-12"
+                aria-label={`One less: ${part.title}`}
+                disabled={part.quantity === 0}
+                onClick={() => set(index, part.quantity - 1)}
+              >
                 &minus;
               </Button>
               <span className="dial min-w-10 text-center" aria-live="polite">
                 {part.quantity}
               </span>
-              <Button aria-label={`One more: ${part.title}`} onClick={() => set(index, part.quantity + 1)}>
+              <Button className="min-w-12" aria-label={`One more: ${part.title}`} onClick={() => set(index, part.quantity + 1)}>
                 +
               </Button>
             </span>

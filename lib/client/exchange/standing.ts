@@ -39,7 +39,7 @@ export function standingInWords(standing: Standing, unsaved: boolean): string {
       return `The server did not take it this time. All is kept on this phone${standing.waiting > 0 ? `; ${waiting} to be sent` : ""}.`;
     case null:
       if (standing.waiting > 0) return `Kept on this phone; ${waiting} to be sent.`;
-      return standing.ashoreAt ? `All ashore at ${clock(standing.ashoreAt)}.` : "Kept on this phone.";
+      return standing.ashoreAt ? `Everything is kept ashore, last at ${clock(standing.ashoreAt)}.` : "Kept on this phone.";
   }
 }
 

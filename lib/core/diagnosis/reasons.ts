@@ -5,21 +5,24 @@ import type { NextStep } from "./next-step";
 import { outcomesOf } from "./outcomes";
 import { minutesSaid } from "./words";
 
+/** Below this a cause is too unlikely to be a reason for anything. */
+const WORTH_NAMING = 0.02;
+
 /**
- * Why this step, in words made from the numbers that chose it: what it tells
- * apart, what a finding would leave, what it costs. Rule [X4].
+ * Why this step, in two short sentences made from the numbers that chose it:
+ * what it tells apart, or what put it here; and what it costs. Rule [X4].
  *
  * @param clears titles of the rules in force that the step can lift.
  * @param minutes what the clock will show; null for a call.
  */
 export function whyStep(model: Model, evidence: Evidence, step: NextStep, clears: readonly string[], minutes: number | null): string {
-  const parts = [
-    leadOf(model, evidence, step, clears),
-    tellsOf(model, evidence, step),
-    minutes === null ? "" : costOf(model, step, minutes),
-  ];
-  return parts.filter((part) => part !== "").join(" ");
+  const lead = leadOf(model, evidence, step, clears);
+  // That the tree puts a check early is the lesser reason where the numbers have one.
+  const why = step.because === "pinned" && !step.gateTo ? tellsOf(model, evidence, step) || lead : lead || tellsOf(model, evidence, step);
+  return [why, minutes === null ? "" : costOf(model, step, minutes)].filter((part) => part !== "").join(" ");
 }
+
+const quoted = (title: string): string => `\u201c${title}\u201d`;
 
 function titleOf(model: Model, ref: { kind: "check" | "remedy" | "call"; key: string }): string {
   if (ref.kind === "check") return model.checks[model.checkAt.get(ref.key) ?? -1]?.check.title ?? ref.key;
@@ -27,7 +30,7 @@ function titleOf(model: Model, ref: { kind: "check" | "remedy" | "call"; key: st
 }
 
 function leadOf(model: Model, evidence: Evidence, step: NextStep, clears: readonly string[]): string {
-  if (step.gateTo) return `This has to come before "${titleOf(model, step.gateTo)}".`;
+  if (step.gateTo) return `This has to come before ${quoted(titleOf(model, step.gateTo))}.`;
   switch (step.because) {
     case "clears-a-rule":
       return clears.length > 0 ? `Only this shows whether it still holds: ${clears.join("; ")}.` : "A stop rule says so.";
@@ -38,7 +41,7 @@ function leadOf(model: Model, evidence: Evidence, step: NextStep, clears: readon
         ({ symptom, present }) => present && model.checks[model.checkAt.get(step.key) ?? -1]?.check.firstFor[symptom] !== undefined,
       );
       const title = model.tree.symptoms.find(({ key }) => key === symptom?.symptom)?.title;
-      return title === undefined ? "The tree puts this early." : `The tree puts this early for "${title}".`;
+      return title === undefined ? "The tree puts this early." : `The tree puts this early for ${quoted(title)}.`;
     }
     case "cheaper-than-trying":
       return "Looking on is still cheaper than trying parts or calling.";
@@ -75,18 +78,20 @@ type Swing = {
   readonly least: { finding: number; share: number };
 };
 
-/** The cause that the check moves most, and what its findings would leave of it. */
+/** The cause that the check moves most, and the one that the opposite finding speaks for. */
 function separates(model: Model, evidence: Evidence, check: CheckModel, shares: Float64Array): string {
   const swings = swingsOf(model, evidence, check, shares);
   const [first] = swings;
   if (!first || first.most.share - first.least.share < 0.005) return "";
-  const rival = swings.find((other) => other.most.finding !== first.most.finding && other.most.share - other.least.share > 0.02);
-  const cause = (swing: Swing): string => `"${model.causes[swing.index]?.title ?? ""}"`;
-  const finding = (at: number): string => `"${check.check.findings[at]?.title ?? ""}"`;
-  const lead = rival
-    ? `It tells ${cause(first)} from ${cause(rival)}.`
-    : `It tells most about ${cause(first)}, now ${of100(shares[first.index] ?? 0)}.`;
-  return `${lead} ${finding(first.most.finding)} would put ${rival ? cause(first) : "it"} at ${of100(first.most.share)}, ${finding(first.least.finding)} at ${of100(first.least.share)}.`;
+  const shareOf = (swing: Swing): number => shares[swing.index] ?? 0;
+  if (Math.max(first.most.share, shareOf(first)) < WORTH_NAMING) return "Little is left to tell apart here; this is the best of it.";
+  const rival = swings.find(
+    (other) => other.most.finding !== first.most.finding && other.most.share - other.least.share > 0.02 && shareOf(other) >= WORTH_NAMING,
+  );
+  const cause = (swing: Swing): string => quoted(model.causes[swing.index]?.title ?? "");
+  return rival
+    ? `It tells ${cause(first)} from ${cause(rival)}: ${of100(shareOf(first))} and ${of100(shareOf(rival))} now.`
+    : `It tells most about ${cause(first)}: ${of100(shareOf(first))} now.`;
 }
 
 function swingsOf(model: Model, evidence: Evidence, check: CheckModel, shares: Float64Array): readonly Swing[] {
@@ -116,5 +121,6 @@ function costOf(model: Model, step: NextStep, minutes: number): string {
     flags.opensFuelClean ||
     flags.opensHighPressureFuel ||
     flags.opensHoseBelowWater;
-  return `Costs ${minutesSaid(minutes)}${opens || step.kind === "remedy" ? "" : "; nothing has to be opened"}.`;
+  const takes = minutesSaid(minutes);
+  return `${takes.charAt(0).toUpperCase()}${takes.slice(1)}${opens || step.kind === "remedy" ? "" : "; nothing has to be opened"}.`;
 }

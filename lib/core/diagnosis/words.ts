@@ -15,7 +15,7 @@ export const SITUATIONS_SAID: Readonly<Record<Situation, string>> = {
   "under-way": "Under way",
 };
 
-export const CANNOT_TELL = "Can't tell, or can't get to it";
+export const CANNOT_TELL = "Can\u2019t tell, or can\u2019t get to it";
 export const NOT_FITTED = "Not fitted";
 
 /** A figure as a gauge shows it: three digits that count, no trailing zeros. */

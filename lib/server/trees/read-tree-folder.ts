@@ -3,6 +3,7 @@ import { readdir, readFile } from "node:fs/promises";
 import path from "node:path";
 import { isMap, isScalar, isSeq, LineCounter, parseDocument, type Document } from "yaml";
 import { didYouMean } from "@/lib/core/tree/nearest";
+import { typographicAll } from "@/lib/core/tree/typographic";
 import { isListName, LIST_KINDS } from "@/lib/core/tree/flaw";
 
 /** A place in a tree's files, for messages: file relative to the folder, line from 1. */
@@ -107,7 +108,7 @@ function joinSources(sources: Source[]): TreeFolder | { faults: FileFault[] } {
     const inFile = origin.inFile.length === 2 ? [...origin.inFile, ...rest] : origin.inFile;
     return { file: origin.source.file, line: origin.source.lines.linePos(offsetOf(origin.source.yaml, inFile)).line };
   };
-  return { document, placeOf };
+  return { document: typographicAll(document) as TreeFolder["document"], placeOf };
 }
 
 /** Where the deepest part of the path that exists begins: its key in a map, itself in a list. */

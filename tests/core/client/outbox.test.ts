@@ -70,7 +70,7 @@ describe("what is said of it", () => {
   const base = { ...NOTHING_YET, ashoreAt: new Date(2026, 0, 5, 14, 2).toISOString() };
 
   it("says that all is ashore, and when, only when nothing waits", () => {
-    expect(standingInWords(base, false)).toBe("All ashore at 14:02.");
+    expect(standingInWords(base, false)).toBe("Everything is kept ashore, last at 14:02.");
     expect(standingInShort({ ...base, waiting: 2 }, false)).toBe("Kept here: 2 to send");
     expect(standingInShort({ ...base, waiting: 3, sending: true }, false)).toBe("Sending 3");
   });

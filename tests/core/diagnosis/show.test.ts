@@ -102,7 +102,8 @@ describe("what a screen shows", () => {
     const log = [begin(phone)];
     const first = ask(log).step;
     expect(first).toMatchObject({ kind: "check", key: "vacuum", ifFitted: false });
-    expect(first?.why).toMatch(/"filter".*of 100.*nothing has to be opened/);
+    expect(first?.why).toMatch(/\u201cfilter\u201d.*of 100 now\. .*nothing has to be opened/);
+    expect(first?.why.match(/[.](?= |$)/g)).toHaveLength(2);
     expect(first?.reading?.bands).toHaveLength(2);
     const then = ask([...log, phone.answer("vacuum", "high")]).step;
     expect(then).toMatchObject({ kind: "remedy", key: "element", proof: "It runs as it should." });
