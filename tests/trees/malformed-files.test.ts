@@ -6,6 +6,7 @@ import { stringify } from "yaml";
 import { parseTree } from "@/lib/core/tree/parse-tree";
 import { readTreeFolder } from "@/lib/server/trees/read-tree-folder";
 import { smallDocument } from "../support/small-tree";
+import { typographicAll } from "@/lib/core/tree/typographic";
 
 let folder: string;
 beforeEach(async () => void (folder = await mkdtemp(path.join(tmpdir(), "tree-"))));
@@ -33,7 +34,7 @@ test("files are joined in the order of their paths", async () => {
     "checks.yml": stringify({ checks }),
     "notes.txt": "not read",
   });
-  expect("document" in read && read.document).toEqual(smallDocument());
+  expect("document" in read && read.document).toEqual(typographicAll(smallDocument()));
 });
 
 test("an empty file, one with comments only and an empty list are no faults", async () => {

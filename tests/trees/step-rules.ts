@@ -31,7 +31,7 @@ export type Rule = {
 };
 
 /** Only what plainly forbids excuses a clause; "no", "not" and "without" say too many other things. */
-const FORBIDS = /\b(never|do not|don't|must not|nobody)\b/i;
+const FORBIDS = /\b(never|do not|don['\u2019]t|must not|nobody)\b/i;
 const fuelFlag = ({ step: { flags } }: Step): boolean =>
   flags.opensFuelDirty === true || flags.opensFuelClean === true || flags.opensHighPressureFuel === true;
 const skipper = ({ step: { who } }: Step): boolean => who === "skipper-at-sea" || who === "skipper-in-port";

@@ -3,6 +3,7 @@ import type { FaultTree } from "@/lib/core/tree/schema";
 import { shippedTree } from "../support/shipped-tree";
 import { allWordsOf, clausesOf, FORBIDDEN, isForbidden, OBSERVED, STEP_RULES, stepsOf, type Rule, type Step } from "./step-rules";
 import { STEP_EXCEPTIONS } from "./step-exceptions";
+import { typographic } from "@/lib/core/tree/typographic";
 
 let tree: FaultTree;
 beforeAll(async () => {
@@ -24,14 +25,14 @@ const hitsOf = ({ speaks, holds }: Rule): Hit[] =>
 describe("what the steps say agrees with what the step carries", () => {
   test.each(STEP_RULES)("$key: $wants", (rule) => {
     const excused = ({ node, clause }: Hit) =>
-      STEP_EXCEPTIONS.some((one) => one.rule === rule.key && one.node === node && clause.includes(one.words));
+      STEP_EXCEPTIONS.some((one) => one.rule === rule.key && one.node === node && clause.includes(typographic(one.words)));
     expect(hitsOf(rule).filter((hit) => !excused(hit))).toEqual([]);
   });
 
   test("every exception is still needed", () => {
     const idle = STEP_EXCEPTIONS.filter(({ rule, node, words }) => {
       const of = STEP_RULES.find(({ key }) => key === rule);
-      return of === undefined || !hitsOf(of).some((hit) => hit.node === node && hit.clause.includes(words));
+      return of === undefined || !hitsOf(of).some((hit) => hit.node === node && hit.clause.includes(typographic(words)));
     });
     expect(idle).toEqual([]);
   });
