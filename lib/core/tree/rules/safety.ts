@@ -139,7 +139,7 @@ const flagsForgotten = (tree: FaultTree): Found[] =>
   stepsOf(tree).flatMap((node) =>
     TELL_TALES.filter(
       ({ word, has }) =>
-        !has(node.step.flags) && node.step.steps.some((text) => word.test(text) && !/\b(never|do not|don't|without)\b/i.test(text)),
+        !has(node.step.flags) && node.step.steps.some((text) => word.test(text) && !/\b(never|do not|don['\u2019]t|without)\b/i.test(text)),
     ).map(({ flag }) => ({
       node: stepNode(node),
       says: `its steps read as if it needs the flag "${flag}".`,
