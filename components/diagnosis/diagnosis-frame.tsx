@@ -46,7 +46,10 @@ export function DiagnosisFrame({ children }: { children: ReactNode }) {
               Call for help
             </a>
           )}
-          <span className="ml-auto">{minutes === null ? "" : `${durationInWords(minutes)} so far`}</span>
+          <span className="ml-auto">
+            {minutes === null ? "" : durationInWords(minutes)}
+            <span className="visually-hidden"> so far</span>
+          </span>
         </>
       }
       aside={WITH_POSSIBLE.has(address.at) ? <StillPossible /> : undefined}

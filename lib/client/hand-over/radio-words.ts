@@ -15,7 +15,7 @@ export function radioWords(facts: HandOverFacts): string[] {
       ? `My position is ${positionSpoken(facts.position)}.`
       : "My position is: give latitude and longitude, or bearing and distance from a charted place.",
     ...facts.rulesInForce.map(({ title }) => `Danger on board: ${lower(title)}.`),
-    `I am ${SITUATIONS[facts.situation]}. My ${facts.engine} is in trouble: ${(facts.symptoms.join(", and ") || facts.complaint || "engine fault").toLowerCase()}.`,
+    `I am ${SITUATIONS[facts.situation]}. My ${/engine|motor/i.test(facts.engine) ? facts.engine : `${facts.engine} engine`} is in trouble: ${(facts.symptoms.join(", and ") || facts.complaint || "engine fault").toLowerCase()}.`,
     ...(facts.checked.length > 0
       ? [
           `We found: ${facts.checked
