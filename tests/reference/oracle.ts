@@ -1,3 +1,4 @@
+import { callingMinutes } from "../../lib/core/diagnosis/calling-minutes";
 import type { Model } from "../../lib/core/diagnosis/model";
 
 /**
@@ -15,7 +16,10 @@ export function leastMinutes(model: Model): number {
     if (before !== undefined) return before;
     let total = 0;
     for (const weight of weights) total += weight;
-    let best = model.callMinutes;
+    let best = callingMinutes(
+      model,
+      weights.map((weight) => weight / total),
+    );
     model.checks.forEach((check, at) => {
       if (answers[at] !== -1 || check.minutes >= best) return;
       let cost = check.minutes;

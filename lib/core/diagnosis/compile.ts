@@ -1,5 +1,5 @@
 import { shareOfEngines } from "../tree/applies";
-import type { Cause, Check, FaultTree, Remedy } from "../tree/schema";
+import type { Cause, Check, FaultTree, Remedy, Situation } from "../tree/schema";
 import { BASE_RATES } from "../tree/strength";
 import { treatedAsRail } from "../tree/treated-as-rail";
 import { probabilityOf } from "./cause-row";
@@ -54,6 +54,7 @@ export function compile(tree: FaultTree, setting: Setting): Model {
     remedies,
     remedyAt: placesOf(remedies),
     callMinutes: setting.callMinutes ?? COSTS.call[setting.situation],
+    helpersMinutes: helpersMinutes(remedies, prior, setting.situation),
   };
 }
 
@@ -123,4 +124,26 @@ function compileRemedy(remedy: Remedy, step: StepModel, causes: readonly Cause[]
     linkedAt: Int32Array.from(linkedAt),
     linkedCure: Float64Array.from(linkedAt, (index) => cure[index] ?? 0),
   };
+}
+
+/**
+ * What whoever is called still has to do: the least work that puts the cause
+ * right, with all tools at hand; for what is not in the tree, or has no remedy
+ * in it, the mean. Rule [C7].
+ */
+function helpersMinutes(remedies: readonly RemedyModel[], prior: Float64Array, situation: Situation): Float64Array {
+  const least = new Float64Array(prior.length).fill(Infinity);
+  for (const { remedy, linkedAt, linkedCure } of remedies) {
+    if (remedy.temporary) continue;
+    linkedAt.forEach((at, link) => (least[at] = Math.min(least[at]!, fixedMinutes(remedy, situation) / (linkedCure[link] ?? 0))));
+  }
+  let sum = 0;
+  let total = 0;
+  least.forEach((minutes, index) => {
+    if (minutes === Infinity) return;
+    sum += minutes * prior[index]!;
+    total += prior[index]!;
+  });
+  const mean = total > 0 ? sum / total : 0;
+  return least.map((minutes) => (minutes === Infinity ? mean : minutes));
 }

@@ -1,6 +1,6 @@
 import type { Check, EngineState, Remedy, Situation } from "../tree/schema";
 
-/** What steps cost, in minutes. One table, shown to whoever asks. Rules [C1]-[C6]. */
+/** What steps cost, in minutes. One table, shown to whoever asks. Rules [C1]-[C7]. */
 export const COSTS = {
   /** Times the work. */
   access: { easy: 1, moderate: 1.3, hard: 1.8 },
@@ -15,6 +15,11 @@ export const COSTS = {
   /** What is still owed after a temporary remedy. */
   heldOnly: { alongside: 120, "at-anchor": 60, "under-way": 60 },
   call: { alongside: 240, "at-anchor": 480, "under-way": 720 },
+  /**
+   * What whoever is called still needs to find the cause, for each nat that is open. On the shipped tree a nat costs 75 to
+   * 250 minutes of looking once the first ten minutes are over, and those who come have the same looks to make.
+   */
+  helperFinds: 150,
 } as const;
 
 /** Work, access, mess and harm, and a remedy's try-out: what does not depend on what was done before. */

@@ -21,12 +21,16 @@ export function heard(model: Model, findings: Evidence["findings"]): readonly He
     const sight = one.check.check.sameSight;
     if (sight === undefined) continue;
     const before = loudestOf.get(sight);
-    if (!before || loudness(one) > loudness(before)) loudestOf.set(sight, one);
+    if (!before || speaksLouder(one, before)) loudestOf.set(sight, one);
   }
   return all.filter((one) => one.check.check.sameSight === undefined || loudestOf.get(one.check.check.sameSight) === one);
 }
 
 const loudness = (one: Heard): number => one.check.loudness[one.finding] ?? 0;
+
+/** Of two findings that see the same thing, does the first count? Ties: the first key. Rule [E3]. */
+export const speaksLouder = (one: Heard, other: Heard): boolean =>
+  loudness(one) > loudness(other) || (loudness(one) === loudness(other) && one.check.key < other.check.key);
 
 /** Which findings of the check say again what has been reported; empty: none does. */
 export function restating(check: CheckModel, reported: ReadonlySet<string>): readonly number[] {

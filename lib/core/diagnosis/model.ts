@@ -75,4 +75,6 @@ export type Model = {
   readonly remedies: readonly RemedyModel[];
   readonly remedyAt: ReadonlyMap<string, number>;
   readonly callMinutes: number;
+  /** Minutes of work that is left to whoever is called, for each hypothesis. */
+  readonly helpersMinutes: Float64Array;
 };

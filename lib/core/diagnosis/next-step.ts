@@ -1,21 +1,31 @@
 import { believe } from "./believe";
+import { callingMinutes } from "./calling-minutes";
+import { candidatesOf, SAME, type Candidate } from "./candidates";
 import { standingMinutes } from "./costs";
 import { AT_REST, type Evidence } from "./evidence";
-import { ExpectedCost } from "./expected-cost";
-import { heard, reportedIn } from "./finding-weight";
+import { ExpectedCost, type BestTry } from "./expected-cost";
 import { firstSteps, type Pinned } from "./first-steps";
 import { Gates, type StepRef } from "./gates";
-import type { CheckModel, Model } from "./model";
-import { entropyOf, informationOf, outcomesOf, type Outcomes } from "./outcomes";
+import type { Model } from "./model";
+import { PlanAhead, type Act } from "./plan-ahead";
 
-/** So many of the most telling checks for their minutes are looked at in full. */
+/** So many of the most telling checks for their minutes are looked at one step ahead. */
 const LOOKED_AT = 12;
-/** A remedy less likely than this to cure is a long shot. */
+/** Of these, so many are thought through further, beside the most telling. */
+const THOUGHT_THROUGH = 2;
+/** Beliefs followed for each act that is thought through: as many as this pays for, in checks times hypotheses, within these limits. */
+const WORK = 8000;
+const BELIEFS = { least: 10, most: 40 };
+/** Checks that a plan may use later: so many of the most telling now, and for each of so many of the likeliest causes the one that shows it soonest. */
+const LATER = 16;
+const SHOWN_SOONEST = 8;
+/** A cause under this share is left out of the reckoning, and at most so many are in it. */
+const KEPT_FROM = 0.002;
+const KEPT_MOST = 32;
+/** A remedy less likely than this to cure is a long shot: nothing is put off for it. */
 const LONG_SHOT = 0.3;
-/** Under this, in nats, a check tells nothing worth a minute. */
-const TELLS_NOTHING = 1e-4;
-/** Values closer than this are the same; the key decides. */
-const SAME = 1e-9;
+
+type Chosen = { readonly act: Act; readonly value: number; readonly key: string };
 
 export type Because = Pinned["because"] | "tells-most" | "cheaper-than-trying" | "likely-cure" | "nothing-better";
 
@@ -33,20 +43,11 @@ export type NextStep = {
   readonly shares: Float64Array;
 };
 
-type Candidate = {
-  readonly check: CheckModel;
-  readonly minutes: number;
-  readonly outcomes: Outcomes;
-  readonly information: number;
-  readonly gate: StepRef | null;
-};
-
 /**
  * The step that makes the expected cost to a cured engine least: a check, a
  * remedy, or a call for help. One-step look-ahead over the dozen checks that
- * tell most for their minutes, over the order of cure chance per minute; where
- * it would give up or try a long shot while asking on is cheaper, it asks.
- * Rules [G1]-[G5], [N1]-[N8].
+ * tell most for their minutes picks a few; these, the best remedies and a call
+ * are then thought through. Rules [G1]-[G5], [N1]-[N10].
  */
 export function nextStep(model: Model, evidence: Evidence): NextStep {
   const standing = evidence.standing ?? AT_REST;
@@ -69,99 +70,93 @@ export function nextStep(model: Model, evidence: Evidence): NextStep {
     };
   if (standing.mustCall) return { ...call, because: "clears-a-rule", expected: null };
 
-  const cost = new ExpectedCost(model, gates, standing);
-  const candidates = candidatesOf(model, evidence, gates, shares);
-  const trying = cost.from(shares);
-  const asking = bestCheck(candidates, cost, shares, trying.minutes);
-  const remedy = trying.remedy === null ? undefined : model.remedies[trying.remedy];
-  const asked = (candidate: Candidate, because: Because, expected: number): NextStep => {
-    const own: StepRef = { kind: "check", key: candidate.check.key };
-    const ref = candidate.gate ?? own;
-    return { ...ref, because, gateTo: candidate.gate ? own : null, minutes: minutesOf(ref), expected, shares };
-  };
-  if (asking && asking.value < trying.minutes - SAME) return asked(asking.candidate, "tells-most", asking.value);
-  const guarded = cheaperToAsk(candidates, cost, shares, trying.minutes, remedy ? chanceOf(remedy.cure, shares) : 0);
-  if (guarded) return asked(guarded.candidate, "cheaper-than-trying", guarded.value);
-  if (!remedy) return { ...call, because: "nothing-better", expected: trying.minutes };
-  const own: StepRef = { kind: "remedy", key: remedy.key };
-  const gate = gates.gateOf(remedy);
+  const kept = keptOf(model, shares);
+  const weights = Float64Array.from(kept, (index) => shares[index]!);
+  const total = weights.reduce((sum, weight) => sum + weight, 0);
+  weights.forEach((weight, place) => (weights[place] = weight / total));
+  const cost = new ExpectedCost(model, gates, standing, kept);
+  const trying = cost.from(weights);
+  const candidates = usable(candidatesOf(model, evidence, gates, shares), weights, kept);
+  const plan = new PlanAhead(candidates, cost, kept);
+  const looks = candidates.slice(0, LOOKED_AT).map((_, place) => ({ place, value: plan.worthOf({ kind: "check", place }, weights, 0) }));
+  const telling = [...looks].sort((a, b) => a.value - b.value).slice(0, THOUGHT_THROUGH);
+  const acts: Act[] = [...new Set([0, ...telling.map(({ place }) => place)])]
+    .filter((place) => place < candidates.length)
+    .map((place) => ({ kind: "check", place }));
+  if (trying.first !== null) acts.push({ kind: "remedy", place: trying.first });
+  const beliefs = Math.round(Math.min(BELIEFS.most, Math.max(BELIEFS.least, WORK / (kept.length * Math.max(1, candidates.length)))));
+  let best: Chosen | null = null;
+  for (const act of acts) {
+    const value = plan.worthOf(act, weights, beliefs);
+    const key = act.kind === "check" ? candidates[act.place]!.check.key : model.remedies[cost.options[act.place]!.at]!.key;
+    if (!best || value < best.value - SAME || (value < best.value + SAME && key < best.key)) best = { act, value, key };
+  }
+  best = putOff(best, plan, cost, weights, trying, model) ?? best;
+  const helpersMinutes = Float64Array.from(kept, (index) => model.helpersMinutes[index]!);
+  const calling = callingMinutes({ callMinutes: model.callMinutes, helpersMinutes }, weights);
+  if (!best || best.value >= calling - SAME) return { ...call, because: "nothing-better", expected: calling };
+  const own: StepRef = { kind: best.act.kind, key: best.key };
+  if (best.act.kind === "check") {
+    const { gate } = candidates[best.act.place]!;
+    const alone = looks[best.act.place];
+    const because = alone && alone.value < trying.minutes - SAME ? "tells-most" : "cheaper-than-trying";
+    const ref = gate ?? own;
+    return { ...ref, because, gateTo: gate ? own : null, minutes: minutesOf(ref), expected: best.value, shares };
+  }
+  const gate = gates.gateOf(model.remedies[model.remedyAt.get(best.key) ?? -1]!);
   const ref = gate.open || gate.shut ? own : gate.first;
-  return { ...ref, because: "likely-cure", gateTo: ref === own ? null : own, minutes: minutesOf(ref), expected: trying.minutes, shares };
-}
-
-function chanceOf(cure: Float64Array, shares: Float64Array): number {
-  let chance = 0;
-  for (let index = 0; index < cure.length; index++) chance += cure[index]! * shares[index]!;
-  return chance;
-}
-
-/** Checks that could be asked now or after their gates, the most telling for their minutes first. */
-function candidatesOf(model: Model, evidence: Evidence, gates: Gates, shares: Float64Array): readonly Candidate[] {
-  const standing = evidence.standing ?? AT_REST;
-  const reported = reportedIn(evidence);
-  const seen = new Set(heard(model, evidence.findings).map((one) => one.check.check.sameSight));
-  const all: Candidate[] = [];
-  for (const check of model.checks) {
-    if (!check.linked || gates.isDone({ kind: "check", key: check.key }) || !gates.isFeasible(check)) continue;
-    if (check.check.sameSight !== undefined && seen.has(check.check.sameSight)) continue;
-    const gate = gates.gateOf(check);
-    if (!gate.open && gate.shut) continue;
-    const outcomes = outcomesOf(model, check, reported);
-    const information = informationOf(outcomes, shares) * check.share * (gate.open ? 1 : gate.pass);
-    if (information < TELLS_NOTHING) continue;
-    const minutes = check.minutes + standingMinutes(check.check, standing) + (gate.open ? 0 : gate.minutes);
-    all.push({ check, minutes, outcomes, information, gate: gate.open ? null : gate.first });
-  }
-  const rate = (one: Candidate): number => one.information / one.minutes;
-  return all.sort((a, b) => (Math.abs(rate(a) - rate(b)) > SAME ? rate(b) - rate(a) : a.check.key < b.check.key ? -1 : 1));
-}
-
-type Asking = { readonly candidate: Candidate; readonly value: number };
-
-function bestCheck(candidates: readonly Candidate[], cost: ExpectedCost, shares: Float64Array, otherwise: number): Asking | null {
-  let best: Asking | null = null;
-  for (const candidate of candidates.slice(0, LOOKED_AT)) {
-    const value = candidate.minutes + after(candidate, cost, shares, otherwise);
-    if (!best || value < best.value - SAME || (value < best.value + SAME && candidate.check.key < best.candidate.check.key))
-      best = { candidate, value };
-  }
-  return best;
-}
-
-/** Expected minutes that remain once the check is answered; where it is not fitted, nothing is learnt. */
-function after({ check, outcomes }: Candidate, cost: ExpectedCost, shares: Float64Array, otherwise: number): number {
-  const then = new Float64Array(shares.length);
-  let sum = 0;
-  outcomes.predict.forEach((row, finding) => {
-    const weigh = outcomes.weigh[finding]!;
-    let chance = 0;
-    for (let index = 0; index < shares.length; index++) {
-      chance += shares[index]! * row[index]!;
-      then[index] = shares[index]! * weigh[index]!;
-    }
-    sum += chance * cost.from(then).minutes;
-  });
-  return check.share * sum + (1 - check.share) * otherwise;
+  return { ...ref, because: "likely-cure", gateTo: ref === own ? null : own, minutes: minutesOf(ref), expected: best.value, shares };
 }
 
 /**
- * Guard against giving up too early. With a diffuse belief no single answer
- * changes the plan, so each looks worthless, though ten would settle it. If the
- * price of knowing (minutes a nat, times the nats that are open) and the cost
- * once known are less than the plan, the check with the best price is asked. Rule [N5].
+ * A check that would not change what is tried next is put off until the try has
+ * failed: asked first it costs its minutes always, asked after only then. Both
+ * ways are followed to the same depth. Rule [N5].
  */
-function cheaperToAsk(
-  candidates: readonly Candidate[],
+function putOff(
+  best: Chosen | null,
+  plan: PlanAhead,
   cost: ExpectedCost,
-  shares: Float64Array,
-  plan: number,
-  chance: number,
-): Asking | null {
-  const candidate = candidates[0];
-  if (!candidate || chance >= LONG_SHOT) return null;
-  const known = cost.known();
-  let bound = 0;
-  for (let index = 0; index < shares.length; index++) bound += shares[index]! * known[index]!;
-  const value = bound + (candidate.minutes / candidate.information) * entropyOf(shares);
-  return value < plan - SAME ? { candidate, value } : null;
+  weights: Float64Array,
+  trying: BestTry,
+  model: Model,
+): Chosen | null {
+  const option = trying.option;
+  if (best?.act.kind !== "check" || option === null || cost.chanceOf(option, weights) < LONG_SHOT) return null;
+  const asking = plan.worthOf(best.act, weights, 0);
+  const after = plan.worthOf({ kind: "remedy", place: option }, weights, 0, best.act);
+  if (asking < after - SAME) return null;
+  return { act: { kind: "remedy", place: option }, value: after, key: model.remedies[cost.options[option]!.at]!.key };
+}
+
+/** The hypotheses that are reckoned with, likeliest first; the unknown always. */
+function keptOf(model: Model, shares: Float64Array): readonly number[] {
+  const keyOf = (index: number): string => model.causes[index]?.key ?? "";
+  const kept = model.causes
+    .map((_, index) => index)
+    .filter((index) => shares[index]! >= KEPT_FROM)
+    .sort((a, b) => shares[b]! - shares[a]! || (keyOf(a) < keyOf(b) ? -1 : 1));
+  return [...kept.slice(0, KEPT_MOST), model.unknownAt];
+}
+
+/** Of all checks those that tell most now, and those that would show one of the likeliest causes soonest if it were the one. */
+function usable(candidates: readonly Candidate[], weights: Float64Array, kept: readonly number[]): readonly Candidate[] {
+  const count = Math.min(SHOWN_SOONEST, kept.length);
+  const soonest = new Int32Array(count).fill(-1);
+  const most = new Float64Array(count);
+  candidates.forEach(({ outcomes, minutes, learns }, candidate) => {
+    const tells = new Float64Array(count);
+    for (const row of outcomes.predict) {
+      let chance = 0;
+      for (let place = 0; place < kept.length; place++) chance += weights[place]! * row[kept[place]!]!;
+      for (let place = 0; place < count; place++) tells[place] = tells[place]! + row[kept[place]!]! * Math.log(row[kept[place]!]! / chance);
+    }
+    for (let place = 0; place < count; place++) {
+      const rate = (tells[place]! * learns) / minutes;
+      if (rate <= most[place]!) continue;
+      most[place] = rate;
+      soonest[place] = candidate;
+    }
+  });
+  return candidates.filter((_, place) => place < LATER || soonest.includes(place));
 }

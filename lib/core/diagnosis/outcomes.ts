@@ -1,4 +1,5 @@
-import { restating } from "./finding-weight";
+import { addFinding, restating, speaksLouder, type Heard } from "./finding-weight";
+import { negEntropyOf } from "./compile-check";
 import type { CheckModel, Model } from "./model";
 
 /** A check as the planner sees it now: what it would show, and what each finding would then weigh. */
@@ -14,8 +15,18 @@ export type Outcomes = {
 /** A sound engine's row says nothing of an engine with the symptom: most then show it again. Rule [N6]. */
 const SHOWS_AGAIN = 0.95;
 
-/** The outcomes of a check, once symptoms that it restates have been reported. Rules [E4], [N6]. */
-export function outcomesOf(model: Model, check: CheckModel, reported: ReadonlySet<string>): Outcomes {
+/**
+ * The outcomes of a check, once symptoms that it restates have been reported
+ * and something else may already have seen the same. Rules [E3], [E4], [N6], [N9].
+ *
+ * @param seen the finding that counts so far of the checks that see the same thing.
+ */
+export function outcomesOf(model: Model, check: CheckModel, reported: ReadonlySet<string>, seen?: Heard): Outcomes {
+  const plain = reportedOutcomes(model, check, reported);
+  return seen ? { ...plain, weigh: insteadOf(seen, check, plain.weigh, reported), negEntropy: null } : plain;
+}
+
+function reportedOutcomes(model: Model, check: CheckModel, reported: ReadonlySet<string>): Outcomes {
   const again = restating(check, reported);
   if (again.length === 0) return { predict: check.rows, weigh: check.rows, negEntropy: check.negEntropy };
   const sum = (findings: readonly number[], index: number): number =>
@@ -30,6 +41,29 @@ export function outcomesOf(model: Model, check: CheckModel, reported: ReadonlySe
   );
   const weigh = check.rows.map((row, finding) => (again.includes(finding) ? row.map((share, index) => share / sum(again, index)) : row));
   return { predict, weigh, negEntropy: null };
+}
+
+/** A louder finding takes the place of what was seen; a quieter one changes nothing. */
+function insteadOf(seen: Heard, check: CheckModel, weigh: readonly Float64Array[], reported: ReadonlySet<string>): readonly Float64Array[] {
+  const before = new Float64Array(weigh[0]?.length ?? 0);
+  addFinding(seen, reported, before);
+  return weigh.map((row, finding) =>
+    speaksLouder({ check, finding }, seen)
+      ? row.map((share, index) => share / Math.exp(before[index] ?? 0))
+      : new Float64Array(row.length).fill(1),
+  );
+}
+
+/**
+ * What a second look at the same thing may show, given what the first has
+ * shown: in proportion to what each finding would change, so that asking is not
+ * expected to move belief either way. Rule [N9].
+ */
+export function secondLook({ predict, weigh }: Outcomes, shares: Float64Array): Outcomes {
+  const chances = predict.map((row) => row.reduce((sum, one, index) => sum + one * (shares[index] ?? 0), 0));
+  const sums = shares.map((_, index) => weigh.reduce((sum, row, finding) => sum + (row[index] ?? 0) * (chances[finding] ?? 0), 0));
+  const rows = weigh.map((row, finding) => row.map((one, index) => (one * (chances[finding] ?? 0)) / (sums[index] ?? 1)));
+  return { predict: rows, weigh: rows, negEntropy: negEntropyOf(rows) };
 }
 
 /** How much the check is expected to tell, in nats. */

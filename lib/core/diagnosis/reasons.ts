@@ -1,5 +1,5 @@
 import type { Evidence } from "./evidence";
-import { reportedIn } from "./finding-weight";
+import { heard, reportedIn } from "./finding-weight";
 import type { CheckModel, Model } from "./model";
 import type { NextStep } from "./next-step";
 import { outcomesOf } from "./outcomes";
@@ -95,7 +95,9 @@ function separates(model: Model, evidence: Evidence, check: CheckModel, shares: 
 }
 
 function swingsOf(model: Model, evidence: Evidence, check: CheckModel, shares: Float64Array): readonly Swing[] {
-  const { weigh } = outcomesOf(model, check, reportedIn(evidence));
+  const sight = check.check.sameSight;
+  const seen = sight === undefined ? undefined : heard(model, evidence.findings).find((one) => one.check.check.sameSight === sight);
+  const { weigh } = outcomesOf(model, check, reportedIn(evidence), seen);
   const totals = weigh.map((row) => row.reduce((sum, weight, index) => sum + weight * (shares[index] ?? 0), 0));
   const swings = model.causes.map((_, index): Swing => {
     const then = weigh.map((row, finding) => ({ finding, share: ((shares[index] ?? 0) * (row[index] ?? 0)) / (totals[finding] || 1) }));

@@ -55,7 +55,64 @@ describe("the next step", () => {
   });
 
   it("[N4] calls sooner where a call is cheap", () => {
-    expect(step(pair(), { symptoms: weak }, { callMinutes: 1 }).kind).toBe("call");
+    const told = { symptoms: weak, findings: [{ check: "look", finding: null }] };
+    // Whoever comes mends at once what he has found; who tries here first mends the wrong thing half the time.
+    const found = { remedies: [remedy("mend-a", { minutes: 600 }), remedy("mend-b", { minutes: 600 })] };
+    expect(step(pair(found), told, { callMinutes: 1 }).kind).toBe("call");
+    expect(step(pair(found), told, { callMinutes: 2400 }).kind).toBe("remedy");
+  });
+
+  it("[C7] asks what is cheaper to look at now than for whoever is called, though it will be called", () => {
+    const looking = (minutes: number) =>
+      pair({
+        checks: [check("look", ["fine", "odd"], { minutes })],
+        remedies: [remedy("mend-a", { who: "workshop" }), remedy("mend-b", { who: "workshop" })],
+      });
+    expect(step(looking(2), { symptoms: weak })).toMatchObject({ kind: "check", key: "look" });
+    expect(step(looking(200), { symptoms: weak }).kind).toBe("call");
+  });
+
+  it("[N5] puts off what would not change the next try until that has failed", () => {
+    // "look" tells b from c; a is so likely that its mending comes first whatever is seen.
+    const three = tree({
+      checks: [check("look", ["fine", "odd"], { minutes: 4 })],
+      remedies: ["a", "b", "c"].map((key) => remedy(`mend-${key}`, { minutes: 30 })),
+      causes: [
+        cause("a", { base: 20, shows: { weak: "usually" }, curedBy: { "mend-a": "nearly always" } }),
+        cause("b", { base: 2, shows: { weak: "usually" }, gives: { look: { odd: 0.5 } }, curedBy: { "mend-b": "nearly always" } }),
+        cause("c", { base: 2, shows: { weak: "usually" }, curedBy: { "mend-c": "nearly always" } }),
+      ],
+    });
+    expect(step(three, { symptoms: weak })).toMatchObject({ kind: "remedy", key: "mend-a" });
+    const failed = [{ remedy: "mend-a", result: "no-change" as const }];
+    expect(step(three, { symptoms: weak, remedies: failed })).toMatchObject({ kind: "check", key: "look" });
+  });
+
+  it("[N9] offers a stronger look at what has been seen already, and not a weaker one", () => {
+    const seen = (links: Record<string, FaultTree["causes"][number]["gives"][string]>) =>
+      pair({
+        checks: [
+          check("glance", ["fine", "odd"], { minutes: 1, sameSight: "part" }),
+          check("measure", ["fine", "odd"], { minutes: 2, sameSight: "part" }),
+        ],
+        causes: [
+          cause("a", { shows: { weak: "usually" }, gives: links, curedBy: { "mend-a": "nearly always" } }),
+          cause("b", { shows: { weak: "usually" }, curedBy: { "mend-b": "nearly always" } }),
+        ],
+      });
+    const glanced = { symptoms: weak, findings: [{ check: "glance", finding: "odd" }] };
+    expect(step(seen({ glance: { odd: "x5" }, measure: { odd: "x60" } }), glanced).key).toBe("measure");
+    expect(step(seen({ glance: { odd: "x60" }, measure: { odd: "x5" } }), glanced).kind).toBe("remedy");
+  });
+
+  it("[N10] asks less of someone who cannot tell", () => {
+    const aside = Array.from({ length: 12 }, (_, index) => `aside-${index}`);
+    const asked = pair({
+      checks: [check("look", ["fine", "odd"], { minutes: 8 }), ...aside.map((key) => check(key, ["fine", "odd"]))],
+    });
+    const after = (finding: string | null) => step(asked, { symptoms: weak, findings: aside.map((key) => ({ check: key, finding })) });
+    expect(after("fine").key).toBe("look");
+    expect(after(null).kind).toBe("remedy");
   });
 
   it("[N5] asks on where no single answer would change the plan but many would settle it", () => {
@@ -74,7 +131,7 @@ describe("the next step", () => {
         check(`bit-${bit}`, [finding("no", { usual: true, sound: 0.95 }), finding("yes", { sound: 0.05 })], { minutes: 3 }),
       ),
     });
-    expect(step(many, { symptoms: weak })).toMatchObject({ kind: "check", because: "cheaper-than-trying" });
+    expect(step(many, { symptoms: weak })).toMatchObject({ kind: "check", key: "bit-0" });
   });
 
   it("[N1] asks what was changed last before any reckoning, then the mechanic's own order", () => {
