@@ -166,6 +166,7 @@ export const BAND_FIGURES: readonly BandFigure[] = [
     },
     practice(`${check}: raised | high otherwise`, [7, 8], "inHg", { note: "suits large flows; a small engine starves before" }),
   ]),
+  { edge: "feed-pressure: low | in-order", figure: 200, unit: "kPa", standing: "published", source: "tm383 prob. 5, the least for unit injectors" },
   practice("lift-pump-pressure: low | in-order", 0.1, "bar", { note: "small diaphragm and pulse pumps, 0.1 to 0.35 bar" }),
   {
     edge: "lift-pump-pressure: in-order | high",
@@ -175,6 +176,29 @@ export const BAND_FIGURES: readonly BandFigure[] = [
     standing: "published",
     source: "lift3, top of 5.5 to 6.5 psi, for a 6.2 L engine",
     note: "a small pump has no business above it",
+  },
+
+  // Fuel quality
+  {
+    edge: "water-ppm: within | over",
+    figure: 200 / 10_000,
+    unit: "%",
+    standing: "published",
+    source: "nzf, EN 590 as tabled: water 200 mg/kg at most",
+  },
+  {
+    edge: "fuel-density: thin | in-order",
+    figure: 0.82,
+    unit: "g/ml",
+    standing: "from-memory",
+    source: "en590, temperate grades: 0.820 to 0.845 at 15 °C",
+  },
+  {
+    edge: "fuel-temperature: cold | mild",
+    figure: 5,
+    unit: "°C",
+    standing: "from-memory",
+    source: "en590, mildest temperate class: filters at +5 °C",
   },
 
   // Injection
@@ -236,6 +260,9 @@ export const WITHOUT_FIGURE: Readonly<Record<string, string>> = {
   "start-time: slow | long plus": "keeps the distances of the bands without its own time",
   "rpm-noload: reaches | over times": "a droop of 12 % and the 3 % of a rev counter",
   "fuel-burn: low | usual": "a sixth less than before is more than a sounding of the tank errs",
+  "element-life: short | long": "half of the interval",
+  "element-life: very-short | short": "a tenth of the interval, as in a filter every 20 hours",
+  "fuel-temperature: freezing | cold": "ten degrees under the mildest class; what winter fuel stands differs by land",
   "filter-vacuum: near-nothing | in-order": "what a small gauge can show at all",
   "filter-vacuum-teed: near-nothing | in-order": "what a small gauge can show at all",
   "vacuum-before-filter: low | high": "a tank level with the engine and a clean line; the check's note says so",
