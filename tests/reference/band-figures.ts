@@ -59,6 +59,10 @@ export const BAND_FIGURES: readonly BandFigure[] = [
   practice("full-load-temperature: normal | high [raw-water] plus", [8, 10], "°C"),
   practice("full-load-temperature: normal | high [raw-water] otherwise", 65, "°C", { note: "50 to 65 is normal" }),
 
+  practice("thermostat-pot: open-or-early | right times", [0.94, 0.97], "times", { note: "2 to 3 °C under a stamp of 50 to 82 °C" }),
+  practice("thermostat-pot: right | late-or-never times", [1.03, 1.06], "times", { note: "2 to 3 °C over a stamp of 50 to 82 °C" }),
+  practice("coolant-strength: weak | right", 30, "%"),
+
   // Cranking
   practice("battery-rest-volts: low | part [v12]", 12.2, "V", { note: "under 12.2 V speaks for a flat battery" }),
   practice("battery-rest-volts: part | full [v12]", 12.5, "V", { note: "over 12.5 V speaks against it" }),
@@ -129,6 +133,9 @@ export const BAND_FIGURES: readonly BandFigure[] = [
     note: "the same page's 0.75 psi is 20.8 inH2O",
   },
 
+  practice("elbow-height: low | doubtful", 200, "mm", { note: "without a vented loop, 200 to 300 mm above the waterline at least" }),
+  practice("elbow-height: doubtful | high", 300, "mm"),
+
   // First looks
   practice("start-time: normal | slower otherwise", 3, "s"),
   practice("start-time: slower | slow otherwise", 5, "s"),
@@ -166,7 +173,13 @@ export const BAND_FIGURES: readonly BandFigure[] = [
     },
     practice(`${check}: raised | high otherwise`, [7, 8], "inHg", { note: "suits large flows; a small engine starves before" }),
   ]),
-  { edge: "feed-pressure: low | in-order", figure: 200, unit: "kPa", standing: "published", source: "tm383 prob. 5, the least for unit injectors" },
+  {
+    edge: "feed-pressure: low | in-order",
+    figure: 200,
+    unit: "kPa",
+    standing: "published",
+    source: "tm383 prob. 5, the least for unit injectors",
+  },
   practice("lift-pump-pressure: low | in-order", 0.1, "bar", { note: "small diaphragm and pulse pumps, 0.1 to 0.35 bar" }),
   {
     edge: "lift-pump-pressure: in-order | high",
@@ -229,6 +242,9 @@ export const BAND_FIGURES: readonly BandFigure[] = [
   practice("oil-use-rate: usual | raised", 0.5, "%"),
   practice("oil-use-rate: raised | high", 1, "%"),
 
+  // Raw water
+  practice("raw-flow: under-half | short", 50, "%", { note: "under half of its usual flow" }),
+
   // Turbo
   practice("boost: low | right", 80, "%", { note: "of the maker's figure" }),
   practice("charge-air-temperature: cool | hot", 50, "°C"),
@@ -236,6 +252,9 @@ export const BAND_FIGURES: readonly BandFigure[] = [
 
 /** Edges that rest on no figure: judgement, said so, to be put right by the log of proved cures. */
 export const WITHOUT_FIGURE: Readonly<Record<string, string>> = {
+  "raw-flow: short | good": "a bucket and a watch err by a tenth, a pump's wear takes the other tenth",
+  "cap-test: weak | holds": "a tester's gauge errs by a tenth; the stamped figure is what it should hold",
+  "coolant-strength: right | strong": "beyond it antifreeze carries heat worse and protects no better; no figure was looked up",
   "hatch-open: none | slight": "20 rpm is what a steady hand can tell on a rev counter",
   "glow-volts: large | nothing [v12]": "nothing arrives when the loss is all the battery has; 9 V allows for one that sags",
   "glow-volts: large | nothing [v24]": "twice the 12 V judgement",
@@ -341,6 +360,16 @@ export const LIES_IN: readonly LiesIn[] = [
     unit: "%",
     finding: "enough",
     source: "common practice: a 20 kW engine, 300 ml a minute",
+  },
+  { check: "thermostat-pot", value: 79 / 77, unit: "times", finding: "right", source: "common practice, 2 degrees over a stamp of 77 °C" },
+  { check: "thermostat-pot", value: 48 / 50, unit: "times", finding: "right", source: "common practice, 2 degrees under a stamp of 50 °C" },
+  { check: "coolant-strength", value: 50, unit: "%", finding: "right", source: "common practice, mixed half and half" },
+  {
+    check: "raw-flow",
+    value: (100 * 102) / 2 / (0.4 * 85),
+    unit: "%",
+    finding: "good",
+    source: "tm277, 102 L/min at full speed, half of it at half the revs, for an engine of some 85 kW",
   },
   { check: "oil-use-rate", value: 0.3, unit: "%", finding: "usual", source: "common practice" },
   {
