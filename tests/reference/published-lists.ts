@@ -1,9 +1,9 @@
 /**
  * Lists of causes as training courses and manuals print them, item by item in
  * our own words, and the causes of the shipped tree that stand for each.
- * A list belongs here if it is about hard starting or lost power, or about
- * the smoke or misfire that goes with them. Lists about other complaints (blue smoke,
- * knock, oil, coolant, charging, runaway, an engine that will not crank) have no symptom in this tree yet.
+ * Lists about hard starting, lost power, the smoke or misfire that goes with them, an engine
+ * that will not crank, and charging. Lists about other complaints (blue smoke,
+ * knock, oil, coolant, runaway) stand here as they are taken up.
  */
 export type PublishedItem = {
   /** In our own words. */
@@ -17,7 +17,7 @@ export type PublishedList = {
   key: string;
   source: string;
   /** The symptom of the tree that the list is about. */
-  symptom: "hard-start-cold" | "hard-start-hot" | "lost-top-end-rpm";
+  symptom: "hard-start-cold" | "hard-start-hot" | "lost-top-end-rpm" | "no-crank-silent" | "no-crank-click" | "not-charging";
   about: string;
   items: readonly PublishedItem[];
 };
@@ -217,6 +217,44 @@ export const PUBLISHED_LISTS: readonly PublishedList[] = [
         item: "no fuel delivered",
         causes: ["fuel-drains-back", "fuel-line-air-leak", "electric-pump-check-valve-leak", "injector-leakoff-high"],
       },
+    ],
+  },
+  {
+    key: "engine does not crank, silent",
+    source: "tm383 prob. 29",
+    symptom: "no-crank-silent",
+    about: "an engine that will not crank, where nothing is heard",
+    items: [
+      { item: "low battery", causes: ["battery-discharged"] },
+      { item: "solenoid", causes: ["starter-solenoid-worn"] },
+      {
+        item: "switch and its circuit",
+        causes: ["key-switch-faulty", "start-circuit-volt-drop", "neutral-switch-open", "start-fuse-open"],
+      },
+    ],
+  },
+  {
+    key: "engine does not crank, with a click",
+    source: "tm383 prob. 29",
+    symptom: "no-crank-click",
+    about: "an engine that will not crank, where something clicks",
+    items: [
+      { item: "low battery", causes: ["battery-discharged", "battery-dead-cell"] },
+      { item: "cables and connections", causes: ["positive-connection-bad", "engine-ground-bad"] },
+      { item: "solenoid", causes: ["starter-solenoid-worn"] },
+      { item: "starter", causes: ["starter-motor-worn", "starter-seized"] },
+      { item: "seized inside", causes: ["piston-seized"] },
+    ],
+  },
+  {
+    key: "no charge, workboat",
+    source: "tm209-21 table 4-1, item 12",
+    symptom: "not-charging",
+    about: "the ammeter shows no charge",
+    items: [
+      { item: "loose connection", causes: ["alternator-output-open", "excitation-missing"] },
+      { item: "belt slack or broken", causes: ["alternator-belt-slack", "alternator-belt-broken"] },
+      { item: "the ammeter itself", causes: ["panel-ground-bad"] },
     ],
   },
 ];
