@@ -376,7 +376,7 @@ export const LIES_IN: readonly LiesIn[] = [
   { check: "alternator-volts", value: 14.5, unit: "V", kind: "v12", finding: "right", source: "m-alt, top" },
   { check: "alternator-volts", value: 27, unit: "V", kind: "v24", finding: "right", source: "m-alt, low end, doubled" },
   { check: "alternator-volts", value: 29, unit: "V", kind: "v24", finding: "right", source: "m-alt, top, doubled" },
-  { check: "belt-tension", value: 0.5, unit: "in", finding: "right", source: "common practice, half an inch" },
+  { check: "belt-tension", value: 12.7, unit: "mm", finding: "right", source: "common practice, half an inch" },
   { check: "belt-tension", value: 10, unit: "mm", finding: "right", source: "common practice, low end" },
   { check: "excitation", value: 1, unit: "V", kind: "v12", finding: "small", source: "common practice, low end of good" },
   { check: "excitation", value: 2, unit: "V", kind: "v12", finding: "small", source: "common practice, top of good" },
