@@ -277,6 +277,56 @@ export const BAND_FIGURES: readonly BandFigure[] = [
   // Turbo
   practice("boost: low | right", 80, "%", { note: "of the maker's figure" }),
   practice("charge-air-temperature: cool | hot", 50, "°C"),
+  // Lubrication
+  practice("lamp-seconds: quick | slow", 5, "s", { note: "a small engine has pressure in 1 to 5 s; the published 15 s is of large ones" }),
+  practice("lamp-seconds: slow | stays-on", 10, "s", { note: "allowed just after an oil and filter change" }),
+  { edge: "oil-pressure-gauge: lost | low", figure: 0.5, unit: "bar", standing: "from-memory", source: "from-memory, never under it" },
+  { edge: "oil-pressure-gauge: low | good", figure: 0.7, unit: "bar", standing: "from-memory", source: "from-memory, hot idle" },
+  {
+    edge: "oil-pressure-cruise: low | good otherwise",
+    figure: 2.5,
+    unit: "bar",
+    standing: "from-memory",
+    source: "from-memory, 2.5 to 5 bar at cruise",
+  },
+  practice("oil-lab-fuel: within | raised", 3, "%"),
+  practice("oil-lab-fuel: raised | high", 5, "%"),
+
+  // Controls
+  practice("run-solenoid-volts: low | full [v12]", 10, "V"),
+  scaled("run-solenoid-volts: low | full [v24]", 10, "V", 2),
+  practice("stop-solenoid-volts: low | full [v12]", 10, "V"),
+  scaled("stop-solenoid-volts: low | full [v24]", 10, "V", 2),
+
+  // Shaft
+  practice("gland-drip: too-dry | in-order [packed]", 1, "count", { note: "1 to 3 drops a minute" }),
+  practice("gland-drip: in-order | drips [packed]", 4, "count", { note: "4 is the first number over 3" }),
+  practice("gland-drip: in-order | drips [face]", 1, "count", { note: "a face seal is dry" }),
+  practice("cutless-play: tight | worn", 1.5, "mm", { note: "on a shaft of 25 to 35 mm" }),
+  {
+    edge: "shaft-runout: in-line | some",
+    figure: 0.002,
+    unit: "in",
+    within: 0.002,
+    standing: "published",
+    source: "m-align p. 39, run-out of the flange",
+  },
+  {
+    edge: "alignment: in-line | doubtful",
+    figure: 0.003,
+    unit: "in",
+    within: 0.005,
+    standing: "published",
+    source: "m-align p. 39, faces overall",
+  },
+  {
+    edge: "alignment: doubtful | out",
+    figure: 0.002 * 4,
+    unit: "in",
+    within: 0.005,
+    standing: "published",
+    source: "align2, 0.002 in for each inch of flange, for one of 4 in",
+  },
 ];
 
 /** Edges that rest on no figure: judgement, said so, to be put right by the log of proved cures. */
@@ -337,6 +387,19 @@ export const WITHOUT_FIGURE: Readonly<Record<string, string>> = {
   "compression: very-low | low": "a figure that no cold start survives; the manuals give the limit only",
   "valve-clearance: tight | right": "a feeler's step under the book; the trade only names none at all",
   "boost: right | high": "a gauge's error over the maker's figure",
+  "oil-pressure-cruise: lost | low": "no bearing of these engines lives on less than 1 bar at speed",
+  "oil-pressure-cruise: low | good plus": "a gauge's error and a warmer day, under its own reading when well",
+  "oil-pressure-cruise: good | high": "1 bar over the top of what is common",
+  "run-solenoid-volts: none | low [v12]": "nothing, but for leakage and the meter",
+  "run-solenoid-volts: none | low [v24]": "twice the 12 V judgement",
+  "stop-solenoid-volts: none | low [v12]": "nothing, but for leakage and the meter",
+  "stop-solenoid-volts: none | low [v24]": "twice the 12 V judgement",
+  "idle-rpm: low | right times": "the 3 % of a rev counter and a steady hand",
+  "idle-rpm: right | high times": "a high idle is no fault before it is plainly one",
+  "gland-drip: drips | streams [packed]": "a drop a second",
+  "gland-drip: drips | streams [face]": "a drop a second",
+  "gear-pressure: low | in-order": "no figure was found; the maker's limit goes first",
+  "shaft-runout: some | bent": "five times what the maker allows on the flange",
 };
 
 /** Published, recalled or usual values, and the finding that each has to fall in. */
@@ -430,4 +493,8 @@ export const LIES_IN: readonly LiesIn[] = [
     finding: "normal",
     source: "tm209-17, workboat, low end",
   },
+  { check: "lamp-seconds", value: 15, unit: "s", finding: "stays-on", source: "m-crank, the limit for large engines" },
+  { check: "oil-pressure-gauge", value: 10, unit: "psi", finding: "low", source: "from memory, 0.69 bar: the round figure in psi" },
+  { check: "oil-pressure-cruise", value: 5, unit: "bar", finding: "good", source: "from memory, top of the common range" },
+  { check: "gland-drip", value: 3, unit: "count", kind: "packed", finding: "in-order", source: "common practice, turning" },
 ];
