@@ -2,8 +2,8 @@
  * Lists of causes as training courses and manuals print them, item by item in
  * our own words, and the causes of the shipped tree that stand for each.
  * Lists about hard starting, lost power, the smoke or misfire that goes with them, an engine
- * that will not crank, and charging. Lists about other complaints (blue smoke,
- * knock, oil, coolant, runaway) stand here as they are taken up.
+ * that will not crank, and charging. Lists about other complaints (knock,
+ * oil, coolant, runaway) stand here as they are taken up.
  */
 export type PublishedItem = {
   /** In our own words. */
@@ -17,7 +17,17 @@ export type PublishedList = {
   key: string;
   source: string;
   /** The symptom of the tree that the list is about. */
-  symptom: "hard-start-cold" | "hard-start-hot" | "lost-top-end-rpm" | "no-crank-silent" | "no-crank-click" | "not-charging";
+  symptom:
+    | "hard-start-cold"
+    | "hard-start-hot"
+    | "lost-top-end-rpm"
+    | "no-crank-silent"
+    | "no-crank-click"
+    | "not-charging"
+    | "smoke-black"
+    | "smoke-white"
+    | "smoke-blue"
+    | "runs-cold";
   about: string;
   items: readonly PublishedItem[];
 };
@@ -255,6 +265,103 @@ export const PUBLISHED_LISTS: readonly PublishedList[] = [
       { item: "loose connection", causes: ["alternator-output-open", "excitation-missing"] },
       { item: "belt slack or broken", causes: ["alternator-belt-slack", "alternator-belt-broken"] },
       { item: "the ammeter itself", causes: ["panel-ground-bad"] },
+    ],
+  },
+  {
+    key: "black smoke as the complaint, Navy",
+    source: "en3 p. en32-106",
+    symptom: "smoke-black",
+    about: "fuel that is not burnt",
+    items: [
+      { item: "back pressure in the exhaust", causes: ["exhaust-elbow-coked", "exhaust-manifold-coked", "exhaust-outlet-blocked"] },
+      { item: "air held back on its way in", causes: ["air-filter-blocked", "intake-obstructed", "engine-space-airless"] },
+      { item: "a turbo at fault", causes: ["turbo-fouled", "charge-air-leak"] },
+      { item: "injection at the wrong moment", causes: ["injection-timing-late"] },
+      { item: "an injector at fault", causes: ["injector-dribble", "injector-low-pressure"] },
+      { item: "too much load", causes: ["hull-fouled", "prop-oversized", "accessory-load"] },
+      { item: "low compression by valves or rings", causes: ["valves-leaking", "rings-stuck"] },
+    ],
+  },
+  {
+    key: "black smoke as the complaint, construction mechanic",
+    source: "cmb p. 209",
+    symptom: "smoke-black",
+    about: "fuel that is not burnt",
+    items: [
+      { item: "the wrong grade of fuel", causes: ["low-cetane-stale-fuel"] },
+      { item: "too little air", causes: ["air-filter-blocked"] },
+      { item: "back pressure", causes: ["exhaust-elbow-coked"] },
+      { item: "pump timing", causes: ["injection-timing-late"] },
+      { item: "the pump itself", causes: ["injection-pump-worn"] },
+      { item: "valve clearances", causes: ["valve-clearance-tight"] },
+      { item: "nozzles", causes: ["injector-dribble"] },
+      { item: "the advance unit", causes: ["cold-advance-or-excess-fuel-fault"] },
+    ],
+  },
+  {
+    key: "white smoke as the complaint, construction mechanic",
+    source: "cmb p. 209",
+    symptom: "smoke-white",
+    about: "fuel that is not hot enough to burn, or water in the cylinder",
+    items: [
+      { item: "rings that let compression by", causes: ["rings-worn"] },
+      { item: "a scored piston", causes: ["piston-or-rod-damaged"] },
+      { item: "valves that do not seat", causes: ["valves-leaking"] },
+      { item: "water in the chamber", causes: ["head-gasket-blown", "head-or-block-cracked"] },
+      { item: "injectors", causes: ["injector-dribble"] },
+      { item: "fuel that ignites badly", causes: ["low-cetane-stale-fuel"] },
+    ],
+  },
+  {
+    key: "blue smoke, construction mechanic",
+    source: "cmb p. 209",
+    symptom: "smoke-blue",
+    about: "oil that is burnt",
+    items: [
+      { item: "too much oil", causes: ["oil-overfilled"] },
+      { item: "the breather", causes: ["breather-blocked", "breather-oil-carryover"] },
+      { item: "valve guides", causes: ["valve-guides-worn"] },
+      { item: "rings and bores", causes: ["rings-worn"] },
+      { item: "scored pistons", causes: ["piston-or-rod-damaged"] },
+      { item: "the turbo's oil seal", causes: ["turbo-oil-seal-leak"] },
+      { item: "glazed liners", causes: ["bores-glazed"] },
+    ],
+  },
+  {
+    key: "blue smoke, Navy",
+    source: "en3 p. en32-106",
+    symptom: "smoke-blue",
+    about: "oil that is burnt; the course calls it bluish white",
+    items: [
+      { item: "worn or stuck rings", causes: ["rings-worn", "rings-stuck"] },
+      { item: "worn liners", causes: ["rings-worn", "bores-glazed"] },
+      { item: "valve guides", causes: ["valve-guides-worn"] },
+      { item: "a cracked piston", causes: ["piston-or-rod-damaged"] },
+      { item: "an injector that leaks", causes: ["injector-dribble"] },
+    ],
+  },
+  {
+    key: "black smoke, education body",
+    source: "ens, December 2011",
+    symptom: "smoke-black",
+    about: "black smoke, and black smoke at high revs",
+    items: [
+      { item: "the air inlet", causes: ["air-filter-blocked"] },
+      { item: "carbon in the exhaust elbow's hose", causes: ["exhaust-elbow-coked"] },
+      { item: "a line round the propeller", causes: ["prop-rope"] },
+      { item: "a fouled hull", causes: ["hull-fouled"] },
+      { item: "equipment the engine drives", causes: ["accessory-load"] },
+      { item: "a propeller that is too large", causes: ["prop-oversized"] },
+    ],
+  },
+  {
+    key: "runs cold, roller",
+    source: "tm383 problem 27",
+    symptom: "runs-cold",
+    about: "the coolant does not reach its temperature",
+    items: [
+      { item: "long idling or light load", causes: ["light-load-idling"] },
+      { item: "the regulator stuck open", causes: ["thermostat-stuck-open"] },
     ],
   },
 ];
