@@ -2,8 +2,8 @@
  * Lists of causes as training courses and manuals print them, item by item in
  * our own words, and the causes of the shipped tree that stand for each.
  * Lists about hard starting, lost power, the smoke or misfire that goes with them, an engine
- * that will not crank, and charging. Lists about other complaints (knock,
- * oil, coolant, runaway) stand here as they are taken up.
+ * that will not crank, charging, oil and a runaway. Lists about other complaints
+ * (knock, coolant) stand here as they are taken up.
  */
 export type PublishedItem = {
   /** In our own words. */
@@ -27,7 +27,12 @@ export type PublishedList = {
     | "smoke-black"
     | "smoke-white"
     | "smoke-blue"
-    | "runs-cold";
+    | "runs-cold"
+    | "low-oil-pressure"
+    | "oil-level-rising"
+    | "oil-milky"
+    | "crankcase-fumes"
+    | "runaway";
   about: string;
   items: readonly PublishedItem[];
 };
@@ -362,6 +367,74 @@ export const PUBLISHED_LISTS: readonly PublishedList[] = [
     items: [
       { item: "long idling or light load", causes: ["light-load-idling"] },
       { item: "the regulator stuck open", causes: ["thermostat-stuck-open"] },
+    ],
+  },
+  {
+    key: "oil pressure, Navy",
+    source: "en1c ch. 9",
+    symptom: "low-oil-pressure",
+    about: "what is looked at once the engine is stopped for lost pressure",
+    items: [
+      { item: "the level in the sump", causes: ["oil-level-low"] },
+      { item: "the piping", causes: ["oil-leak-external"] },
+      { item: "the filters", causes: ["oil-filter-blocked", "oil-filter-misfitted"] },
+      { item: "the strainers", causes: ["oil-pickup-blocked"] },
+      { item: "the pump", causes: ["oil-pump-worn"] },
+    ],
+  },
+  {
+    key: "oil pressure, truck",
+    source: "tm272 table 4-1, item 7",
+    symptom: "low-oil-pressure",
+    about: "with a good pump the pressure is lost in the bearings",
+    items: [
+      { item: "the pump", causes: ["oil-pump-worn"] },
+      { item: "worn bearings of the crank", causes: ["bearings-worn"] },
+      {
+        item: "worn bearings of the cam",
+        leftOut: "opened by the same workshop in the same job; no check aboard tells them from the crank's",
+      },
+    ],
+  },
+  {
+    key: "fuel in the oil, truck",
+    source: "tm272 table 4-1, item 8",
+    symptom: "oil-level-rising",
+    about: "fuel thins the oil and raises its level",
+    items: [{ item: "the injectors", causes: ["injector-dribble"] }],
+  },
+  {
+    key: "coolant in the oil, truck",
+    source: "tm272 table 4-1, item 8",
+    symptom: "oil-milky",
+    about: "coolant makes the oil milky",
+    items: [
+      { item: "the head gasket", causes: ["head-gasket-blown"] },
+      { item: "head, liner or block", causes: ["head-or-block-cracked"] },
+      { item: "the oil cooler", causes: ["oil-cooler-internal-leak"] },
+      {
+        item: "core plugs of the head",
+        leftOut: "found by the pressure test with the head's cover off, and mended as a cracked casting is",
+      },
+    ],
+  },
+  {
+    key: "ring wear, blow-by",
+    source: "en1c p. 3-28, fig. 3-18",
+    symptom: "crankcase-fumes",
+    about: "worn rings let gas into the crankcase",
+    items: [{ item: "rings worn or stuck", causes: ["rings-worn", "rings-stuck"] }],
+  },
+  {
+    key: "runaway, Navy",
+    source: "en2 p. 3-37",
+    symptom: "runaway",
+    about: "an engine that overspeeds and does not obey",
+    items: [
+      { item: "the governor or its linkage", causes: ["governor-worn", "governor-linkage-sticking"] },
+      { item: "a control rack that jams", causes: ["injection-rack-stuck"] },
+      { item: "oil in the air passages", causes: ["breather-oil-carryover", "oil-overfilled", "turbo-oil-seal-leak"] },
+      { item: "an injector that leaks", leftOut: "on these engines it thins the oil first; the runaway is then that of oil-fuel-diluted" },
     ],
   },
 ];
