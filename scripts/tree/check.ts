@@ -2,7 +2,8 @@ import { parseArgs } from "node:util";
 import path from "node:path";
 import { linkRatios } from "@/lib/core/tree/link-ratios";
 import type { FaultTree } from "@/lib/core/tree/schema";
-import { readTree, Refusal, type TreeRead } from "./read-tree";
+import { barred, type Figure } from "./bars";
+import { readTree, SHIPPED, type TreeRead } from "./read-tree";
 
 /** Says whether a tree is sound: every flaw with its place, then the counts. */
 export async function check(args: string[]): Promise<number> {
@@ -11,8 +12,7 @@ export async function check(args: string[]): Promise<number> {
     allowPositionals: true,
     options: { json: { type: "boolean" }, links: { type: "boolean" } },
   });
-  const folder = positionals[0];
-  if (folder === undefined) throw new Refusal("Say which folder: npm run tree -- check trees/small-marine-diesel");
+  const folder = positionals[0] ?? SHIPPED;
   const read = await readTree(folder);
   if (values.links && read.tree !== null) console.log(linkLines(read.tree).join("\n"));
   const errors = read.flaws.filter((flaw) => flaw.severity === "error").length;
@@ -50,11 +50,12 @@ function counts({ tree }: TreeRead): [string, number][] {
     ["cautions", tree.cautions.length],
     ["stopRules", tree.stopRules.length],
     ["knownCases", tree.knownCases.length],
+    ["drawings", 0],
   ];
 }
 
-const figures = (read: TreeRead, errors: number) =>
-  [...counts(read), ["errors", errors] as const].map(([figure, value]) => ({ figure, value }));
+const figures = (read: TreeRead, errors: number): Figure[] =>
+  [...counts(read), ["errors", errors] as const].map(([figure, value]) => barred(figure, value, read.tree));
 
 /** A line a cause, and under it a line a linked check with what its findings say. */
 function linkLines(tree: FaultTree): string[] {

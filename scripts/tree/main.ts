@@ -4,16 +4,17 @@ import { Refusal } from "./read-tree";
 import { schema } from "./schema";
 import { show } from "./show";
 
-const usage = `npm run tree -- check DIR [--json] [--links]
+const usage = `npm run tree -- check [DIR] [--json] [--links]
   Is the tree sound? Names every flaw with its file and line; ends with 1 on errors.
   --links: how far each linked finding speaks for its cause.
-npm run tree -- show DIR --symptom KEY [--symptom KEY] [--feature KEY=OPTION]
+npm run tree -- show [DIR] --symptom KEY [--symptom KEY] [--feature KEY=OPTION]
     [--situation alongside|at-anchor|under-way] [--person WHO] [--depth 4] [--chance 0.15]
   The order of questions, with the answers that are likely enough to follow.
-npm run tree -- prove DIR [--cases FILE.jsonl|FILE.yaml] [--person WHO] [--bar FIGURE=VALUE] [--json]
+npm run tree -- prove [DIR] [--cases FILE.jsonl|FILE.yaml] [--person WHO] [--bar FIGURE=VALUE] [--json]
   Known cases replayed: is the right cause believed, and what does the way to it cost.
 npm run tree -- schema
-  Writes trees/fault-tree.schema.json anew.`;
+  Writes trees/fault-tree.schema.json anew.
+DIR is trees/small-marine-diesel where none is named.`;
 
 const commands: Record<string, (args: string[]) => Promise<number>> = { check, prove, schema, show };
 

@@ -4,6 +4,9 @@ import { findFlaws } from "@/lib/core/tree/soundness";
 import type { FaultTree } from "@/lib/core/tree/schema";
 import { readTreeFolder, type Place } from "@/lib/server/trees/read-tree-folder";
 
+/** The tree that is meant where none is named; npm runs its scripts at the root. */
+export const SHIPPED = "trees/small-marine-diesel";
+
 export type TreeRead = {
   /** null: the files or the shape are at fault, and nothing more can be said. */
   tree: FaultTree | null;
@@ -45,8 +48,7 @@ function pathOf(document: Record<string, unknown>, node: Flaw["node"]): (string 
 export class Refusal extends Error {}
 
 /** The tree, where it is sound enough to reason with. */
-export async function readTreeOrSay(folder: string | undefined): Promise<FaultTree> {
-  if (folder === undefined) throw new Refusal("Say which folder: trees/small-marine-diesel, for example.");
+export async function readTreeOrSay(folder: string = SHIPPED): Promise<FaultTree> {
   const { tree, flaws } = await readTree(folder);
   const errors = flaws.filter(({ severity }) => severity === "error").length;
   if (tree === null || errors > 0)

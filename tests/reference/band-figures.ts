@@ -36,6 +36,26 @@ export const BAND_FIGURES: readonly BandFigure[] = [
   practice("intake-vacuum: middling | high", 20, "inH2O", { within: 0.05, note: "5 short of the published limit of 25" }),
   practice("hatch-open: slight | clear-gain", 50, "rpm"),
 
+  // Charging
+  practice("belt-tension: over-tight | right", 5, "mm", { note: "on a span of 300 mm; under 5 wears bearings out" }),
+  practice("belt-tension: right | slack", 15, "mm", { note: "10 to 13 mm is the aim" }),
+  { edge: "alternator-volts: low | right [v12]", figure: 13.5, unit: "V", standing: "published", source: "m-alt, 13.5 to 14.5 V" },
+  practice("alternator-volts: right | high [v12]", 14.8, "V", { note: "smart regulators go to 14.8" }),
+  practice("alternator-volts: high | over [v12]", 15, "V", { note: "15.0 and more, unless equalising is meant" }),
+  scaled("alternator-volts: low | right [v24]", 13.5, "V", 2),
+  scaled("alternator-volts: right | high [v24]", 14.8, "V", 2),
+  scaled("alternator-volts: high | over [v24]", 15, "V", 2),
+  practice("alternator-to-battery: small | large [v12]", 0.5, "V"),
+  scaled("alternator-to-battery: small | large [v24]", 0.5, "V", 2),
+  practice("banks-apart: small | large [v12]", 0.2, "V"),
+  scaled("banks-apart: small | large [v24]", 0.2, "V", 2),
+  practice("alternator-ripple: small | some", 0.1, "V"),
+  practice("alternator-ripple: some | large", 0.5, "V"),
+  practice("alternator-amps: none | flowing", 3, "A", { note: "0 to 3 A into a battery that is not full is no charge" }),
+  practice("off-drain: quiet | small", 5, "mA", { note: "start bank switched off" }),
+  practice("off-drain: small | over", 20, "mA", { note: "memories and alarms, each named" }),
+  practice("off-drain: over | far-over", 50, "mA", { note: "1.2 Ah a day: a start bank in two months" }),
+
   // Cold start
   practice("glow-volts: small | some [v12]", 1, "V"),
   practice("glow-volts: some | large [v12]", 2, "V"),
@@ -58,6 +78,10 @@ export const BAND_FIGURES: readonly BandFigure[] = [
   }),
   practice("full-load-temperature: normal | high [raw-water] plus", [8, 10], "°C"),
   practice("full-load-temperature: normal | high [raw-water] otherwise", 65, "°C", { note: "50 to 65 is normal" }),
+
+  practice("thermostat-pot: open-or-early | right times", [0.94, 0.97], "times", { note: "2 to 3 °C under a stamp of 50 to 82 °C" }),
+  practice("thermostat-pot: right | late-or-never times", [1.03, 1.06], "times", { note: "2 to 3 °C over a stamp of 50 to 82 °C" }),
+  practice("coolant-strength: weak | right", 30, "%"),
 
   // Cranking
   practice("battery-rest-volts: low | part [v12]", 12.2, "V", { note: "under 12.2 V speaks for a flat battery" }),
@@ -99,6 +123,12 @@ export const BAND_FIGURES: readonly BandFigure[] = [
   { edge: "crank-rpm: very-slow | slow", figure: 100, unit: "rpm", standing: "published", source: "crk1, cold, for a light-truck diesel" },
   practice("crank-rpm: slow | fair", 150, "rpm"),
   practice("crank-rpm: fair | healthy", 200, "rpm", { note: "200 to 300 is healthy warm" }),
+  practice("start-signal-volts: low | good [v12]", [8, 9], "V", { note: "below about 8 to 9 V a solenoid may not pull in" }),
+  practice("start-signal-volts: low | good [v24]", [16, 18], "V", { note: "8 to 9 V on 12 V" }),
+  practice("hydrometer-spread: even | one-apart", 0.05, "SG"),
+  practice("hydrometer-mean: very-low | low", 1.155, "SG", { note: "a quarter, at 27 degC" }),
+  practice("hydrometer-mean: low | part", 1.19, "SG", { note: "half" }),
+  practice("hydrometer-mean: part | full", 1.225, "SG", { note: "three quarters" }),
   practice("starter-amps: low | middling [v12]", 100, "A"),
   practice("starter-amps: middling | high [v12]", 300, "A"),
   scaled("starter-amps: low | middling [v24]", 100, "A", 0.5),
@@ -128,6 +158,9 @@ export const BAND_FIGURES: readonly BandFigure[] = [
     source: "m-bp technical data pp. 11-12, with a turbo",
     note: "the same page's 0.75 psi is 20.8 inH2O",
   },
+
+  practice("elbow-height: low | doubtful", 200, "mm", { note: "without a vented loop, 200 to 300 mm above the waterline at least" }),
+  practice("elbow-height: doubtful | high", 300, "mm"),
 
   // First looks
   practice("start-time: normal | slower otherwise", 3, "s"),
@@ -166,6 +199,13 @@ export const BAND_FIGURES: readonly BandFigure[] = [
     },
     practice(`${check}: raised | high otherwise`, [7, 8], "inHg", { note: "suits large flows; a small engine starves before" }),
   ]),
+  {
+    edge: "feed-pressure: low | in-order",
+    figure: 200,
+    unit: "kPa",
+    standing: "published",
+    source: "tm383 prob. 5, the least for unit injectors",
+  },
   practice("lift-pump-pressure: low | in-order", 0.1, "bar", { note: "small diaphragm and pulse pumps, 0.1 to 0.35 bar" }),
   {
     edge: "lift-pump-pressure: in-order | high",
@@ -175,6 +215,29 @@ export const BAND_FIGURES: readonly BandFigure[] = [
     standing: "published",
     source: "lift3, top of 5.5 to 6.5 psi, for a 6.2 L engine",
     note: "a small pump has no business above it",
+  },
+
+  // Fuel quality
+  {
+    edge: "water-ppm: within | over",
+    figure: 200 / 10_000,
+    unit: "%",
+    standing: "published",
+    source: "nzf, EN 590 as tabled: water 200 mg/kg at most",
+  },
+  {
+    edge: "fuel-density: thin | in-order",
+    figure: 0.82,
+    unit: "g/ml",
+    standing: "from-memory",
+    source: "en590, temperate grades: 0.820 to 0.845 at 15 °C",
+  },
+  {
+    edge: "fuel-temperature: cold | mild",
+    figure: 5,
+    unit: "°C",
+    standing: "from-memory",
+    source: "en590, mildest temperate class: filters at +5 °C",
   },
 
   // Injection
@@ -189,6 +252,9 @@ export const BAND_FIGURES: readonly BandFigure[] = [
   },
   practice("leakoff-compare: one-raised | one-double", 200, "%", { note: "more than double the rest" }),
   practice("rail-pressure: low | in-order", 200, "bar", { note: "200 to 300 bar permits injection" }),
+
+  // Instruments
+  practice("panel-ground: small | over", 0.2, "V"),
 
   // Mechanical
   {
@@ -205,13 +271,69 @@ export const BAND_FIGURES: readonly BandFigure[] = [
   practice("oil-use-rate: usual | raised", 0.5, "%"),
   practice("oil-use-rate: raised | high", 1, "%"),
 
+  // Raw water
+  practice("raw-flow: under-half | short", 50, "%", { note: "under half of its usual flow" }),
+
   // Turbo
   practice("boost: low | right", 80, "%", { note: "of the maker's figure" }),
   practice("charge-air-temperature: cool | hot", 50, "°C"),
+  // Lubrication
+  practice("lamp-seconds: quick | slow", 5, "s", { note: "a small engine has pressure in 1 to 5 s; the published 15 s is of large ones" }),
+  practice("lamp-seconds: slow | stays-on", 10, "s", { note: "allowed just after an oil and filter change" }),
+  { edge: "oil-pressure-gauge: lost | low", figure: 0.5, unit: "bar", standing: "from-memory", source: "from-memory, never under it" },
+  { edge: "oil-pressure-gauge: low | good", figure: 0.7, unit: "bar", standing: "from-memory", source: "from-memory, hot idle" },
+  {
+    edge: "oil-pressure-cruise: low | good otherwise",
+    figure: 2.5,
+    unit: "bar",
+    standing: "from-memory",
+    source: "from-memory, 2.5 to 5 bar at cruise",
+  },
+  practice("oil-lab-fuel: within | raised", 3, "%"),
+  practice("oil-lab-fuel: raised | high", 5, "%"),
+
+  // Controls
+  practice("run-solenoid-volts: low | full [v12]", 10, "V"),
+  scaled("run-solenoid-volts: low | full [v24]", 10, "V", 2),
+  practice("stop-solenoid-volts: low | full [v12]", 10, "V"),
+  scaled("stop-solenoid-volts: low | full [v24]", 10, "V", 2),
+
+  // Shaft
+  practice("gland-drip: too-dry | in-order [packed]", 1, "count", { note: "1 to 3 drops a minute" }),
+  practice("gland-drip: in-order | drips [packed]", 4, "count", { note: "4 is the first number over 3" }),
+  practice("gland-drip: in-order | drips [face]", 1, "count", { note: "a face seal is dry" }),
+  practice("cutless-play: tight | worn", 1.5, "mm", { note: "on a shaft of 25 to 35 mm" }),
+  {
+    edge: "shaft-runout: in-line | some",
+    figure: 0.002,
+    unit: "in",
+    within: 0.002,
+    standing: "published",
+    source: "m-align p. 39, run-out of the flange",
+  },
+  {
+    edge: "alignment: in-line | doubtful",
+    figure: 0.003,
+    unit: "in",
+    within: 0.005,
+    standing: "published",
+    source: "m-align p. 39, faces overall",
+  },
+  {
+    edge: "alignment: doubtful | out",
+    figure: 0.002 * 4,
+    unit: "in",
+    within: 0.005,
+    standing: "published",
+    source: "align2, 0.002 in for each inch of flange, for one of 4 in",
+  },
 ];
 
 /** Edges that rest on no figure: judgement, said so, to be put right by the log of proved cures. */
 export const WITHOUT_FIGURE: Readonly<Record<string, string>> = {
+  "raw-flow: short | good": "a bucket and a watch err by a tenth, a pump's wear takes the other tenth",
+  "cap-test: weak | holds": "a tester's gauge errs by a tenth; the stamped figure is what it should hold",
+  "coolant-strength: right | strong": "beyond it antifreeze carries heat worse and protects no better; no figure was looked up",
   "hatch-open: none | slight": "20 rpm is what a steady hand can tell on a rev counter",
   "glow-volts: large | nothing [v12]": "nothing arrives when the loss is all the battery has; 9 V allows for one that sags",
   "glow-volts: large | nothing [v24]": "twice the 12 V judgement",
@@ -225,6 +347,16 @@ export const WITHOUT_FIGURE: Readonly<Record<string, string>> = {
   "full-load-temperature: high | alarm [raw-water]": "15 over the top of normal; no figure for an alarm on a raw-water engine was found",
   "battery-rest-volts: very-low | low [v12]": "between flat, 11.9 V, and a dead cell, about 10.5 V",
   "battery-rest-volts: very-low | low [v24]": "twice the 12 V judgement",
+  "alternator-volts: none | low [v12]": "what a full battery shows by itself, and a little",
+  "alternator-volts: none | low [v24]": "twice the 12 V judgement",
+  "excitation: none | small [v12]": "half of the least that is good, 1 V",
+  "excitation: none | small [v24]": "twice the 12 V judgement",
+  "excitation: small | full [v12]": "between the 1 to 2 V of a good field and what the battery has",
+  "excitation: small | full [v24]": "twice the 12 V judgement",
+  "start-signal-volts: none | low [v12]": "nothing, but for a leak through a wet plug",
+  "start-signal-volts: none | low [v24]": "twice the 12 V judgement",
+  "disconnect-overnight: holds | falls [v12]": "a good battery settles by less in a night, once it has rested four hours",
+  "disconnect-overnight: holds | falls [v24]": "twice the 12 V judgement",
   "drop-positive: over | far-over [v12]": "twice the allowance",
   "drop-positive: over | far-over [v24]": "twice the allowance",
   "drop-negative: over | far-over [v12]": "two and a half times the allowance",
@@ -236,6 +368,9 @@ export const WITHOUT_FIGURE: Readonly<Record<string, string>> = {
   "start-time: slow | long plus": "keeps the distances of the bands without its own time",
   "rpm-noload: reaches | over times": "a droop of 12 % and the 3 % of a rev counter",
   "fuel-burn: low | usual": "a sixth less than before is more than a sounding of the tank errs",
+  "element-life: short | long": "half of the interval",
+  "element-life: very-short | short": "a tenth of the interval, as in a filter every 20 hours",
+  "fuel-temperature: freezing | cold": "ten degrees under the mildest class; what winter fuel stands differs by land",
   "filter-vacuum: near-nothing | in-order": "what a small gauge can show at all",
   "filter-vacuum-teed: near-nothing | in-order": "what a small gauge can show at all",
   "vacuum-before-filter: low | high": "a tank level with the engine and a clean line; the check's note says so",
@@ -252,6 +387,19 @@ export const WITHOUT_FIGURE: Readonly<Record<string, string>> = {
   "compression: very-low | low": "a figure that no cold start survives; the manuals give the limit only",
   "valve-clearance: tight | right": "a feeler's step under the book; the trade only names none at all",
   "boost: right | high": "a gauge's error over the maker's figure",
+  "oil-pressure-cruise: lost | low": "no bearing of these engines lives on less than 1 bar at speed",
+  "oil-pressure-cruise: low | good plus": "a gauge's error and a warmer day, under its own reading when well",
+  "oil-pressure-cruise: good | high": "1 bar over the top of what is common",
+  "run-solenoid-volts: none | low [v12]": "nothing, but for leakage and the meter",
+  "run-solenoid-volts: none | low [v24]": "twice the 12 V judgement",
+  "stop-solenoid-volts: none | low [v12]": "nothing, but for leakage and the meter",
+  "stop-solenoid-volts: none | low [v24]": "twice the 12 V judgement",
+  "idle-rpm: low | right times": "the 3 % of a rev counter and a steady hand",
+  "idle-rpm: right | high times": "a high idle is no fault before it is plainly one",
+  "gland-drip: drips | streams [packed]": "a drop a second",
+  "gland-drip: drips | streams [face]": "a drop a second",
+  "gear-pressure: low | in-order": "no figure was found; the maker's limit goes first",
+  "shaft-runout: some | bent": "five times what the maker allows on the flange",
 };
 
 /** Published, recalled or usual values, and the finding that each has to fall in. */
@@ -288,6 +436,17 @@ export const LIES_IN: readonly LiesIn[] = [
   { check: "battery-rest-volts", value: 11.89, unit: "V", kind: "v12", finding: "low", source: "bci, flat, from memory" },
   { check: "battery-rest-volts", value: 10.5, unit: "V", kind: "v12", finding: "very-low", source: "common practice, a dead cell" },
   { check: "battery-rest-volts", value: 25.32, unit: "V", kind: "v24", finding: "full", source: "rvqa, full, doubled" },
+  { check: "alternator-volts", value: 14.5, unit: "V", kind: "v12", finding: "right", source: "m-alt, top" },
+  { check: "alternator-volts", value: 27, unit: "V", kind: "v24", finding: "right", source: "m-alt, low end, doubled" },
+  { check: "alternator-volts", value: 29, unit: "V", kind: "v24", finding: "right", source: "m-alt, top, doubled" },
+  { check: "belt-tension", value: 12.7, unit: "mm", finding: "right", source: "common practice, half an inch" },
+  { check: "belt-tension", value: 10, unit: "mm", finding: "right", source: "common practice, low end" },
+  { check: "excitation", value: 1, unit: "V", kind: "v12", finding: "small", source: "common practice, low end of good" },
+  { check: "excitation", value: 2, unit: "V", kind: "v12", finding: "small", source: "common practice, top of good" },
+  { check: "excitation", value: 12, unit: "V", kind: "v12", finding: "full", source: "m-alt, what the exciter is fed with" },
+  { check: "hydrometer-mean", value: 1.26, unit: "SG", finding: "full", source: "rvqa, low end of full" },
+  { check: "hydrometer-mean", value: 1.2, unit: "SG", finding: "part", source: "rvqa, low end of half" },
+  { check: "hydrometer-mean", value: 1.12, unit: "SG", finding: "very-low", source: "common practice, flat" },
   { check: "crank-rpm", value: 100, unit: "rpm", finding: "slow", source: "crk1, least for a cold start: slow, not hopeless" },
   { check: "crank-rpm", value: 180, unit: "rpm", finding: "fair", source: "crk1, least for a hot start" },
   { check: "crank-rpm", value: 240, unit: "rpm", finding: "healthy", source: "crk2, a car diesel with pre-chambers" },
@@ -315,6 +474,16 @@ export const LIES_IN: readonly LiesIn[] = [
     finding: "enough",
     source: "common practice: a 20 kW engine, 300 ml a minute",
   },
+  { check: "thermostat-pot", value: 79 / 77, unit: "times", finding: "right", source: "common practice, 2 degrees over a stamp of 77 °C" },
+  { check: "thermostat-pot", value: 48 / 50, unit: "times", finding: "right", source: "common practice, 2 degrees under a stamp of 50 °C" },
+  { check: "coolant-strength", value: 50, unit: "%", finding: "right", source: "common practice, mixed half and half" },
+  {
+    check: "raw-flow",
+    value: (100 * 102) / 2 / (0.4 * 85),
+    unit: "%",
+    finding: "good",
+    source: "tm277, 102 L/min at full speed, half of it at half the revs, for an engine of some 85 kW",
+  },
   { check: "oil-use-rate", value: 0.3, unit: "%", finding: "usual", source: "common practice" },
   {
     check: "full-load-temperature",
@@ -324,4 +493,8 @@ export const LIES_IN: readonly LiesIn[] = [
     finding: "normal",
     source: "tm209-17, workboat, low end",
   },
+  { check: "lamp-seconds", value: 15, unit: "s", finding: "stays-on", source: "m-crank, the limit for large engines" },
+  { check: "oil-pressure-gauge", value: 10, unit: "psi", finding: "low", source: "from memory, 0.69 bar: the round figure in psi" },
+  { check: "oil-pressure-cruise", value: 5, unit: "bar", finding: "good", source: "from memory, top of the common range" },
+  { check: "gland-drip", value: 3, unit: "count", kind: "packed", finding: "in-order", source: "common practice, turning" },
 ];

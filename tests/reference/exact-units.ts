@@ -18,6 +18,7 @@ const PASCALS: Readonly<Record<string, number>> = {
 const toBase = (value: number, unit: string): { value: number; base: string } => {
   const pascals = PASCALS[unit];
   if (pascals !== undefined) return { value: value * pascals, base: "Pa" };
+  if (unit === "in") return { value: value * INCH_M * 1000, base: "mm" };
   if (unit === "F") return { value: ((value - 32) * 5) / 9, base: "°C" };
   return { value, base: unit };
 };

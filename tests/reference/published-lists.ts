@@ -1,9 +1,9 @@
 /**
  * Lists of causes as training courses and manuals print them, item by item in
  * our own words, and the causes of the shipped tree that stand for each.
- * A list belongs here if it is about hard starting or lost power, or about
- * the smoke or misfire that goes with them. Lists about other complaints (blue smoke,
- * knock, oil, coolant, charging, runaway, an engine that will not crank) have no symptom in this tree yet.
+ * Lists about hard starting, lost power, the smoke or misfire that goes with them, an engine
+ * that will not crank, charging, oil and a runaway. Lists about other complaints
+ * (knock, coolant) stand here as they are taken up.
  */
 export type PublishedItem = {
   /** In our own words. */
@@ -17,7 +17,22 @@ export type PublishedList = {
   key: string;
   source: string;
   /** The symptom of the tree that the list is about. */
-  symptom: "hard-start-cold" | "hard-start-hot" | "lost-top-end-rpm";
+  symptom:
+    | "hard-start-cold"
+    | "hard-start-hot"
+    | "lost-top-end-rpm"
+    | "no-crank-silent"
+    | "no-crank-click"
+    | "not-charging"
+    | "smoke-black"
+    | "smoke-white"
+    | "smoke-blue"
+    | "runs-cold"
+    | "low-oil-pressure"
+    | "oil-level-rising"
+    | "oil-milky"
+    | "crankcase-fumes"
+    | "runaway";
   about: string;
   items: readonly PublishedItem[];
 };
@@ -217,6 +232,209 @@ export const PUBLISHED_LISTS: readonly PublishedList[] = [
         item: "no fuel delivered",
         causes: ["fuel-drains-back", "fuel-line-air-leak", "electric-pump-check-valve-leak", "injector-leakoff-high"],
       },
+    ],
+  },
+  {
+    key: "engine does not crank, silent",
+    source: "tm383 prob. 29",
+    symptom: "no-crank-silent",
+    about: "an engine that will not crank, where nothing is heard",
+    items: [
+      { item: "low battery", causes: ["battery-discharged"] },
+      { item: "solenoid", causes: ["starter-solenoid-worn"] },
+      {
+        item: "switch and its circuit",
+        causes: ["key-switch-faulty", "start-circuit-volt-drop", "neutral-switch-open", "start-fuse-open"],
+      },
+    ],
+  },
+  {
+    key: "engine does not crank, with a click",
+    source: "tm383 prob. 29",
+    symptom: "no-crank-click",
+    about: "an engine that will not crank, where something clicks",
+    items: [
+      { item: "low battery", causes: ["battery-discharged", "battery-dead-cell"] },
+      { item: "cables and connections", causes: ["positive-connection-bad", "engine-ground-bad"] },
+      { item: "solenoid", causes: ["starter-solenoid-worn"] },
+      { item: "starter", causes: ["starter-motor-worn", "starter-seized"] },
+      { item: "seized inside", causes: ["piston-seized"] },
+    ],
+  },
+  {
+    key: "no charge, workboat",
+    source: "tm209-21 table 4-1, item 12",
+    symptom: "not-charging",
+    about: "the ammeter shows no charge",
+    items: [
+      { item: "loose connection", causes: ["alternator-output-open", "excitation-missing"] },
+      { item: "belt slack or broken", causes: ["alternator-belt-slack", "alternator-belt-broken"] },
+      { item: "the ammeter itself", causes: ["panel-ground-bad"] },
+    ],
+  },
+  {
+    key: "black smoke as the complaint, Navy",
+    source: "en3 p. en32-106",
+    symptom: "smoke-black",
+    about: "fuel that is not burnt",
+    items: [
+      { item: "back pressure in the exhaust", causes: ["exhaust-elbow-coked", "exhaust-manifold-coked", "exhaust-outlet-blocked"] },
+      { item: "air held back on its way in", causes: ["air-filter-blocked", "intake-obstructed", "engine-space-airless"] },
+      { item: "a turbo at fault", causes: ["turbo-fouled", "charge-air-leak"] },
+      { item: "injection at the wrong moment", causes: ["injection-timing-late"] },
+      { item: "an injector at fault", causes: ["injector-dribble", "injector-low-pressure"] },
+      { item: "too much load", causes: ["hull-fouled", "prop-oversized", "accessory-load"] },
+      { item: "low compression by valves or rings", causes: ["valves-leaking", "rings-stuck"] },
+    ],
+  },
+  {
+    key: "black smoke as the complaint, construction mechanic",
+    source: "cmb p. 209",
+    symptom: "smoke-black",
+    about: "fuel that is not burnt",
+    items: [
+      { item: "the wrong grade of fuel", causes: ["low-cetane-stale-fuel"] },
+      { item: "too little air", causes: ["air-filter-blocked"] },
+      { item: "back pressure", causes: ["exhaust-elbow-coked"] },
+      { item: "pump timing", causes: ["injection-timing-late"] },
+      { item: "the pump itself", causes: ["injection-pump-worn"] },
+      { item: "valve clearances", causes: ["valve-clearance-tight"] },
+      { item: "nozzles", causes: ["injector-dribble"] },
+      { item: "the advance unit", causes: ["cold-advance-or-excess-fuel-fault"] },
+    ],
+  },
+  {
+    key: "white smoke as the complaint, construction mechanic",
+    source: "cmb p. 209",
+    symptom: "smoke-white",
+    about: "fuel that is not hot enough to burn, or water in the cylinder",
+    items: [
+      { item: "rings that let compression by", causes: ["rings-worn"] },
+      { item: "a scored piston", causes: ["piston-or-rod-damaged"] },
+      { item: "valves that do not seat", causes: ["valves-leaking"] },
+      { item: "water in the chamber", causes: ["head-gasket-blown", "head-or-block-cracked"] },
+      { item: "injectors", causes: ["injector-dribble"] },
+      { item: "fuel that ignites badly", causes: ["low-cetane-stale-fuel"] },
+    ],
+  },
+  {
+    key: "blue smoke, construction mechanic",
+    source: "cmb p. 209",
+    symptom: "smoke-blue",
+    about: "oil that is burnt",
+    items: [
+      { item: "too much oil", causes: ["oil-overfilled"] },
+      { item: "the breather", causes: ["breather-blocked", "breather-oil-carryover"] },
+      { item: "valve guides", causes: ["valve-guides-worn"] },
+      { item: "rings and bores", causes: ["rings-worn"] },
+      { item: "scored pistons", causes: ["piston-or-rod-damaged"] },
+      { item: "the turbo's oil seal", causes: ["turbo-oil-seal-leak"] },
+      { item: "glazed liners", causes: ["bores-glazed"] },
+    ],
+  },
+  {
+    key: "blue smoke, Navy",
+    source: "en3 p. en32-106",
+    symptom: "smoke-blue",
+    about: "oil that is burnt; the course calls it bluish white",
+    items: [
+      { item: "worn or stuck rings", causes: ["rings-worn", "rings-stuck"] },
+      { item: "worn liners", causes: ["rings-worn", "bores-glazed"] },
+      { item: "valve guides", causes: ["valve-guides-worn"] },
+      { item: "a cracked piston", causes: ["piston-or-rod-damaged"] },
+      { item: "an injector that leaks", causes: ["injector-dribble"] },
+    ],
+  },
+  {
+    key: "black smoke, education body",
+    source: "ens, December 2011",
+    symptom: "smoke-black",
+    about: "black smoke, and black smoke at high revs",
+    items: [
+      { item: "the air inlet", causes: ["air-filter-blocked"] },
+      { item: "carbon in the exhaust elbow's hose", causes: ["exhaust-elbow-coked"] },
+      { item: "a line round the propeller", causes: ["prop-rope"] },
+      { item: "a fouled hull", causes: ["hull-fouled"] },
+      { item: "equipment the engine drives", causes: ["accessory-load"] },
+      { item: "a propeller that is too large", causes: ["prop-oversized"] },
+    ],
+  },
+  {
+    key: "runs cold, roller",
+    source: "tm383 problem 27",
+    symptom: "runs-cold",
+    about: "the coolant does not reach its temperature",
+    items: [
+      { item: "long idling or light load", causes: ["light-load-idling"] },
+      { item: "the regulator stuck open", causes: ["thermostat-stuck-open"] },
+    ],
+  },
+  {
+    key: "oil pressure, Navy",
+    source: "en1c ch. 9",
+    symptom: "low-oil-pressure",
+    about: "what is looked at once the engine is stopped for lost pressure",
+    items: [
+      { item: "the level in the sump", causes: ["oil-level-low"] },
+      { item: "the piping", causes: ["oil-leak-external"] },
+      { item: "the filters", causes: ["oil-filter-blocked", "oil-filter-misfitted"] },
+      { item: "the strainers", causes: ["oil-pickup-blocked"] },
+      { item: "the pump", causes: ["oil-pump-worn"] },
+    ],
+  },
+  {
+    key: "oil pressure, truck",
+    source: "tm272 table 4-1, item 7",
+    symptom: "low-oil-pressure",
+    about: "with a good pump the pressure is lost in the bearings",
+    items: [
+      { item: "the pump", causes: ["oil-pump-worn"] },
+      { item: "worn bearings of the crank", causes: ["bearings-worn"] },
+      {
+        item: "worn bearings of the cam",
+        leftOut: "opened by the same workshop in the same job; no check aboard tells them from the crank's",
+      },
+    ],
+  },
+  {
+    key: "fuel in the oil, truck",
+    source: "tm272 table 4-1, item 8",
+    symptom: "oil-level-rising",
+    about: "fuel thins the oil and raises its level",
+    items: [{ item: "the injectors", causes: ["injector-dribble"] }],
+  },
+  {
+    key: "coolant in the oil, truck",
+    source: "tm272 table 4-1, item 8",
+    symptom: "oil-milky",
+    about: "coolant makes the oil milky",
+    items: [
+      { item: "the head gasket", causes: ["head-gasket-blown"] },
+      { item: "head, liner or block", causes: ["head-or-block-cracked"] },
+      { item: "the oil cooler", causes: ["oil-cooler-internal-leak"] },
+      {
+        item: "core plugs of the head",
+        leftOut: "found by the pressure test with the head's cover off, and mended as a cracked casting is",
+      },
+    ],
+  },
+  {
+    key: "ring wear, blow-by",
+    source: "en1c p. 3-28, fig. 3-18",
+    symptom: "crankcase-fumes",
+    about: "worn rings let gas into the crankcase",
+    items: [{ item: "rings worn or stuck", causes: ["rings-worn", "rings-stuck"] }],
+  },
+  {
+    key: "runaway, Navy",
+    source: "en2 p. 3-37",
+    symptom: "runaway",
+    about: "an engine that overspeeds and does not obey",
+    items: [
+      { item: "the governor or its linkage", causes: ["governor-worn", "governor-linkage-sticking"] },
+      { item: "a control rack that jams", causes: ["injection-rack-stuck"] },
+      { item: "oil in the air passages", causes: ["breather-oil-carryover", "oil-overfilled", "turbo-oil-seal-leak"] },
+      { item: "an injector that leaks", leftOut: "on these engines it thins the oil first; the runaway is then that of oil-fuel-diluted" },
     ],
   },
 ];

@@ -3,6 +3,7 @@ import { tmpdir } from "node:os";
 import path from "node:path";
 import { afterEach, beforeEach, describe, expect, test, vi } from "vitest";
 import { stringify } from "yaml";
+import { barred } from "@/scripts/tree/bars";
 import { check } from "@/scripts/tree/check";
 import { prove } from "@/scripts/tree/prove";
 import { readCases } from "@/scripts/tree/read-cases";
@@ -30,7 +31,7 @@ describe("tree -- check", () => {
     await write(smallDocument());
     expect(await check([folder])).toBe(0);
     expect(said).toEqual([
-      "2 symptoms, 3 causes, 4 checks, 2 readings, 3 remedies, 1 cautions, 2 stopRules, 1 knownCases",
+      "2 symptoms, 3 causes, 4 checks, 2 readings, 3 remedies, 1 cautions, 2 stopRules, 1 knownCases, 0 drawings",
       "The tree is sound.",
     ]);
   });
@@ -58,9 +59,19 @@ describe("tree -- check", () => {
       "cautions",
       "stopRules",
       "knownCases",
+      "drawings",
       "errors",
     ]);
-    expect(figures.at(-1)).toEqual({ figure: "errors", value: 0 });
+    expect(figures[0]).toEqual({ figure: "symptoms", value: 2 });
+    expect(figures.at(-1)).toEqual({ figure: "errors", value: 0, bar: 0, holds: true });
+  });
+
+  test("holds the shipped tree to the size it has reached, and every tree to no errors", () => {
+    const shipped = { key: "small-marine-diesel" };
+    expect(barred("causes", 201, shipped)).toEqual({ figure: "causes", value: 201, bar: 201, holds: true });
+    expect(barred("causes", 200, shipped)).toMatchObject({ holds: false });
+    expect(barred("readings", 79, shipped)).toEqual({ figure: "readings", value: 79 });
+    expect(barred("errors", 1, { key: "own" })).toEqual({ figure: "errors", value: 1, bar: 0, holds: false });
   });
 
   test("shows how far each link speaks", async () => {

@@ -13,8 +13,10 @@ export type Evidence = {
 };
 
 export type Standing = EngineStanding & {
-  /** Engine states that stop rules in force, or the symptoms themselves, rule out. */
+  /** Engine states that stop rules in force rule out. */
   readonly ruledOut: ReadonlySet<EngineState>;
+  /** Engine states that cannot be had while the symptoms last; a step that only tries to crank can still be tried. */
+  readonly lost?: ReadonlySet<EngineState>;
   /** A rule in force says to call or to hand over. */
   readonly mustCall: boolean;
   /** Checks that would lift a rule in force. */

@@ -36,9 +36,13 @@ export class Gates {
     return ref.kind === "check" ? this.#found.has(ref.key) : this.#tried.has(ref.key);
   }
 
-  /** Could this person do the step as the engine now stands, gates apart? */
+  /** Could this person do the step as the engine now stands, gates apart? Rule [G6]. */
   isFeasible(step: CheckModel | RemedyModel): boolean {
-    return step.offered && !statesOf(step).some((state) => this.#standing.ruledOut.has(state));
+    const { ruledOut, lost } = this.#standing;
+    const needs = statesOf(step);
+    return (
+      step.offered && !needs.some((state) => ruledOut.has(state)) && (stateOf(step) === "any" || !needs.some((state) => lost?.has(state)))
+    );
   }
 
   gateOf(step: CheckModel | RemedyModel, depth = 0): Gate {

@@ -10,9 +10,10 @@ export function standingOf(tree: FaultTree, state: DiagnosisState, inForce: read
   const lost = tree.symptoms.filter((symptom) => symptoms.has(symptom.key)).flatMap((symptom) => symptom.rulesOut ?? []);
   const done = state.order.events.flatMap((event) => stepDone(tree, state, event));
   const open = new Set(done.flatMap((step) => (step.opens ? [step.opens.area] : [])));
-  const ruledOut = new Set<EngineState>([...lost, ...inForce.flatMap(forbidden)]);
+  const lostStates = new Set<EngineState>(lost);
+  const ruledOut = new Set<EngineState>(inForce.flatMap(forbidden));
   const runs = (engine: EngineState): boolean => engine === "idling" || engine === "under-load";
-  let hot = state.situation === "under-way" && !ruledOut.has("idling");
+  let hot = state.situation === "under-way" && !ruledOut.has("idling") && !lostStates.has("idling");
   let running = false;
   for (const { engine } of done) {
     if (engine === "any") continue;
@@ -25,6 +26,7 @@ export function standingOf(tree: FaultTree, state: DiagnosisState, inForce: read
     running,
     open,
     ruledOut,
+    lost: lostStates,
     mustCall: inForce.some((rule) => rule.kind === "call" || rule.kind === "hand-over"),
     clearing: inForce.flatMap((rule) => rule.clearedBy.map((ref) => ref.check)),
   };

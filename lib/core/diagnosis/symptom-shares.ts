@@ -45,9 +45,8 @@ function shareNotBehind(root: Cause, symptom: string, causes: readonly Cause[], 
   let through = 0;
   causes.forEach((nearer, index) => {
     const strength = nearer.broughtOnBy[root.key];
-    const curable = Object.keys(nearer.curedBy).length > 0;
-    if (strength !== undefined && curable && nearer.shows[symptom] !== undefined)
-      through += (probabilityOf(strength) * (weights[index] ?? 0)) / weight;
+    if (strength === undefined || nearer.shows[symptom] === undefined || Object.keys(nearer.curedBy).length === 0) return;
+    through += (probabilityOf(strength) * (weights[index] ?? 0)) / weight;
   });
   return Math.max(0, 1 - through);
 }

@@ -26,13 +26,17 @@ export function shareOfEngines(
   return share;
 }
 
-/** How many of all engines have one of these options, from 0 to 1: the options without a share part what the others leave. */
-function shareOfOptions(feature: Feature | undefined, wanted: readonly string[]): number {
-  if (feature === undefined) return 0.5;
+/** How many of all engines have each option, from 0 to 1 with a sum of 1: the options without a share part what the others leave. */
+export function optionShares(feature: Pick<Feature, "options">): Map<string, number> {
   const named = feature.options.reduce((sum, option) => sum + (option.share ?? 0), 0);
   const unnamed = feature.options.filter((option) => option.share === undefined).length;
   const rest = unnamed === 0 ? 0 : Math.max(0, 1 - named) / unnamed;
   const total = named + rest * unnamed;
-  const sum = feature.options.filter((option) => wanted.includes(option.key)).reduce((all, option) => all + (option.share ?? rest), 0);
-  return total === 0 ? 0 : sum / total;
+  return new Map(feature.options.map((option) => [option.key, total === 0 ? 0 : (option.share ?? rest) / total]));
+}
+
+function shareOfOptions(feature: Feature | undefined, wanted: readonly string[]): number {
+  if (feature === undefined) return 0.5;
+  const shares = optionShares(feature);
+  return [...new Set(wanted)].reduce((sum, option) => sum + (shares.get(option) ?? 0), 0);
 }

@@ -41,7 +41,29 @@ export function compareTrees(before: FaultTree, after: FaultTree): Difference[] 
       what: "changed",
       says: `${after.title}: ${field}, ${became(before[field], after[field], names)}.`,
     }));
-  return [...head, ...Object.keys(LIST_KINDS).flatMap((list) => compareLists(list as ListName, before, after, names))];
+  return [
+    ...head,
+    ...Object.keys(LIST_KINDS).flatMap((list) => compareLists(list as ListName, before, after, names)),
+    ...compareInseparable(before, after, names),
+  ];
+}
+
+/** Pairs that checks cannot tell apart have no key: the two causes name them, in either order. */
+function compareInseparable(before: FaultTree, after: FaultTree, names: Names): Difference[] {
+  const byPair = ({ inseparable = [] }: FaultTree) => new Map(inseparable.map((pair) => [[...pair.causes].sort().join(" "), pair]));
+  const [old, now] = [byPair(before), byPair(after)];
+  return [...new Set([...now.keys(), ...old.keys()])].flatMap((name): Difference[] => {
+    const [was, is] = [old.get(name), now.get(name)];
+    const pair = `not told apart: ${name
+      .split(" ")
+      .map((key) => names.get(key) ?? key)
+      .join(" and ")}`;
+    if (was?.because === is?.because) return [];
+    const node = { kind: "tree" as const, key: after.key };
+    if (was === undefined) return [{ node, what: "added", says: `${pair}: listed.` }];
+    if (is === undefined) return [{ node, what: "removed", says: `${pair}: taken out of the list.` }];
+    return [{ node, what: "changed", says: `${pair}: the reason, ${became(was.because, is.because, names)}.` }];
+  });
 }
 
 function compareLists(list: ListName, before: FaultTree, after: FaultTree, names: Names): Difference[] {

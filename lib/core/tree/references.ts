@@ -26,6 +26,13 @@ export function referencesOf(tree: FaultTree): Reference[] {
     ...tree.causes.flatMap((cause) => from("cause", cause.key, causeRefs(cause))),
     ...tree.stopRules.flatMap((rule) => from("stop rule", rule.key, stopRuleRefs(rule))),
     ...tree.knownCases.flatMap((known) => from("known case", known.key, knownCaseRefs(known))),
+    ...(tree.inseparable ?? []).flatMap(({ causes }) =>
+      from(
+        "tree",
+        tree.key,
+        causes.map((key): Out => ({ to: "cause", key, field: "inseparable" })),
+      ),
+    ),
   ];
 }
 

@@ -6,6 +6,7 @@ import { keyRules } from "./rules/keys";
 import { knownCaseRules } from "./rules/known-cases";
 import { orderRules } from "./rules/order";
 import { reachRules } from "./rules/reach";
+import { rivalRules } from "./rules/rivals";
 import type { Rule } from "./rules/rule";
 import { safetyRules } from "./rules/safety";
 import { stopRuleRules } from "./rules/stop-rules";
@@ -19,6 +20,7 @@ export const RULES: readonly Rule[] = [
   ...findingRules,
   ...bandRules,
   ...causeRules,
+  ...rivalRules,
   ...orderRules,
   ...symptomRules,
   ...safetyRules,

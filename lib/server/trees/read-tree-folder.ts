@@ -20,7 +20,8 @@ export type TreeFolder = {
 
 type Source = { file: string; yaml: Document.Parsed; lines: LineCounter };
 
-const LISTS = Object.keys(LIST_KINDS);
+/** Lists that are joined; "inseparable" holds no nodes, and a tree may do without it. */
+const LISTS = [...Object.keys(LIST_KINDS), "inseparable"];
 const SCALARS = ["format", "key", "title", "about"];
 
 /**
@@ -56,7 +57,7 @@ async function yamlFiles(folder: string): Promise<string[]> {
 
 function joinSources(sources: Source[]): TreeFolder | { faults: FileFault[] } {
   const faults: FileFault[] = [];
-  const document: Record<string, unknown> = Object.fromEntries(LISTS.map((list) => [list, []]));
+  const document: Record<string, unknown> = Object.fromEntries(Object.keys(LIST_KINDS).map((list) => [list, []]));
   /** Where each value, and each item of each list, came from. */
   const origins = new Map<string, { source: Source; inFile: (string | number)[] }>();
 
@@ -75,13 +76,13 @@ function joinSources(sources: Source[]): TreeFolder | { faults: FileFault[] } {
     for (const { key: keyNode, value } of yaml.contents.items) {
       const offset = isScalar(keyNode) ? (keyNode.range?.[0] ?? 0) : 0;
       const key = String(isScalar(keyNode) ? keyNode.value : keyNode);
-      if (isListName(key)) {
+      if (LISTS.includes(key)) {
         if (value === null || (isScalar(value) && value.value === null)) continue;
         if (!isSeq(value)) {
           fault(offset, `"${key}" has to be a list.`, 'Begin each item with "- ".');
           continue;
         }
-        const joined = document[key] as unknown[];
+        const joined = (document[key] ??= []) as unknown[];
         value.items.forEach((_item, index) => {
           origins.set(`${key}/${joined.length}`, { source, inFile: [key, index] });
           joined.push(values[key]?.[index]);

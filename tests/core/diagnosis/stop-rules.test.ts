@@ -196,3 +196,44 @@ describe("stop rules", () => {
     expect(view(small, log).step?.kind).toBe("call");
   });
 });
+
+describe("an engine that does not turn", () => {
+  const dead = tree({
+    symptoms: [{ ...symptom("silent"), rulesOut: ["cranking", "idling", "under-load"] }],
+    stopRules: [
+      stopRule("locked", {
+        forbids: ["cranking"],
+        kind: "no-crank",
+        when: { symptoms: ["silent"], findings: [] },
+        ask: "Did it stop dead?",
+        clearedWhen: "It turns by hand",
+      }),
+    ],
+    checks: [
+      check("try", ["nothing", "turns"], { engine: "any", flags: { cranks: 2 } }),
+      check("smoke", ["none", "white"], { engine: "cranking", flags: { cranks: 5 } }),
+      check("cold-start", ["none", "starts"], { engine: "cold", flags: { cranks: 10 } }),
+    ],
+    remedies: [remedy("mend", { minutes: 60 }), remedy("mend-b", { minutes: 60 })],
+    causes: [
+      cause("a", {
+        shows: { silent: "usually" },
+        gives: { try: { turns: "x20" }, smoke: { white: "x60" }, "cold-start": { starts: "x60" } },
+        curedBy: { mend: "usually" },
+      }),
+      cause("b", { shows: { silent: "usually" }, curedBy: { "mend-b": "usually" } }),
+    ],
+  });
+  const stepAfter = (answer: "no" | "yes") => {
+    const phone = new Device(1);
+    return view(dead, [phone.begin({ symptoms: ["silent"] }), phone.tell("rule-answered", { rule: "locked", answer })]).step;
+  };
+
+  it("[G6] can still be tried, but is not asked what only a turning engine shows", () => {
+    expect(stepAfter("no")).toMatchObject({ kind: "check", key: "try" });
+  });
+
+  it("[G6] is not even tried while a rule says not to crank", () => {
+    expect(["mend", "mend-b"]).toContain(stepAfter("yes")?.key);
+  });
+});

@@ -53,6 +53,22 @@ test("findings put in another order are said, for people see them in order", () 
   expect(says((t) => void t.checks[1]!.findings.reverse())).toEqual(["Look into the bowl: findings, put in another order."]);
 });
 
+test("pairs that no check tells apart are named by their causes, in either order", () => {
+  const listed = (because: string, turned = false): FaultTree => ({
+    ...smallTree(),
+    inseparable: [{ causes: turned ? ["tank-dirty", "filter-blocked"] : ["filter-blocked", "tank-dirty"], because }],
+  });
+  const between = (before: FaultTree, after: FaultTree) => compareTrees(before, after).map((difference) => difference.says);
+  expect(between(smallTree(), listed("Same dirt."))).toEqual(["not told apart: Primary filter blocked and Dirt in the tank: listed."]);
+  expect(between(listed("Same dirt."), listed("Same cure.", true))).toEqual([
+    "not told apart: Primary filter blocked and Dirt in the tank: the reason, 'Same dirt.' became 'Same cure.'.",
+  ]);
+  expect(between(listed("Same dirt."), listed("Same dirt.", true))).toEqual([]);
+  expect(between(listed("Same dirt."), smallTree())).toEqual([
+    "not told apart: Primary filter blocked and Dirt in the tank: taken out of the list.",
+  ]);
+});
+
 test("steps are compared as a whole, and long texts are cut", () => {
   const [said] = says((t) => (t.checks[1]!.steps = ["Look ".repeat(40)]));
   expect(said).toMatch(/^Look into the bowl: steps, 'Look with a torch\.' became 'Look .*\.\.\.'\.$/);

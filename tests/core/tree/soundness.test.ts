@@ -12,6 +12,14 @@ function the<T extends { key: string }>(nodes: readonly T[], key: string): T {
 
 type Breach = { breaks: string; change: (tree: FaultTree) => void; node: string; says?: RegExp };
 
+/** The dirty tank acts by itself, and so is a rival of the blocked filter that stands behind it otherwise. */
+const asRivals =
+  (change: Breach["change"]): Breach["change"] =>
+  (tree) => {
+    the(tree.causes, "filter-blocked").broughtOnBy = {};
+    change(tree);
+  };
+
 /** Rule -> ways to break it, each by one change to a sound tree. */
 const breaches: Record<string, Breach[]> = {
   "key-twice": [
@@ -136,6 +144,12 @@ const breaches: Record<string, Breach[]> = {
       change: (t) => (the(t.stopRules, "overheat").clearedBy = [{ check: "bowl-look", finding: "cool" }]),
       node: "stop rule overheat",
       says: /"clearedBy"/,
+    },
+    {
+      breaks: "an unknown cause listed as inseparable",
+      change: (t) => (t.inseparable = [{ causes: ["tank-dirty", "gremlins"], because: "Nobody saw one." }]),
+      node: "tree small",
+      says: /"inseparable"/,
     },
     {
       breaks: "a known case with an unknown cause",
@@ -355,6 +369,18 @@ const breaches: Record<string, Breach[]> = {
       breaks: "causes that only tools can tell",
       change: (t) => delete the(t.causes, "battery-flat").gives["crank-sound"],
       node: "symptom no-crank",
+      says: /linked to its cause/,
+    },
+    {
+      breaks: "a look that speaks of one cause only",
+      change: (t) => delete the(t.causes, "tank-dirty").gives["bowl-look"],
+      node: "symptom lost-rpm",
+      says: /linked to 2 of its causes/,
+    },
+    {
+      breaks: "a look that the symptom rules out",
+      change: (t) => (the(t.symptoms, "lost-rpm").rulesOut = ["stopped"]),
+      node: "symptom lost-rpm",
     },
   ],
   "phrase-twice": [
@@ -533,6 +559,78 @@ const breaches: Record<string, Breach[]> = {
       node: "stop rule engine-fire",
     },
   ],
+  "rival-not-told-apart": [
+    {
+      breaks: "a rival whose every finding the other shows too",
+      change: asRivals((t) => (the(t.causes, "filter-blocked").gives["filter-vacuum"] = { "very-high": 0.5, high: 0.1 })),
+      node: "cause tank-dirty",
+      says: /after lost-rpm, on the commonest engine, no finding speaks for it against its likely rival filter-blocked/,
+    },
+    {
+      breaks: "a telling finding that is seen too seldom to wait for",
+      change: asRivals((t) => {
+        the(t.causes, "filter-blocked").gives = { "filter-vacuum": { "near-zero": 0.3 } };
+        the(t.causes, "tank-dirty").gives = { "bowl-look": { slime: 0.7 } };
+      }),
+      node: "cause filter-blocked",
+    },
+    {
+      breaks: "a telling finding that only says the symptom again",
+      change: asRivals((t) => (the(t.checks, "filter-vacuum").findings[1]!.restates = "lost-rpm")),
+      node: "cause tank-dirty",
+    },
+  ],
+  "inseparable-unlisted": [
+    {
+      breaks: "two rivals that no check tells apart",
+      change: asRivals((t) => delete the(t.causes, "filter-blocked").gives["filter-vacuum"]),
+      node: "cause filter-blocked",
+      says: /after lost-rpm, on the commonest engine, no check tells it and tank-dirty apart/,
+    },
+    {
+      breaks: "a check that one common kind of engine cannot have",
+      change: asRivals((t) => (the(t.checks, "filter-vacuum").appliesTo = { features: { voltage: ["v12"] } })),
+      node: "cause filter-blocked",
+      says: /on an engine with voltage v24/,
+    },
+    {
+      breaks: "a check in an engine state that the symptom rules out",
+      change: asRivals((t) => (the(t.symptoms, "lost-rpm").rulesOut = ["under-load"])),
+      node: "cause filter-blocked",
+    },
+    {
+      breaks: "a check that would open a common rail",
+      change: asRivals((t) => (the(t.checks, "filter-vacuum").flags = { opensHighPressureFuel: true })),
+      node: "cause filter-blocked",
+      says: /on an engine with injection common-rail/,
+    },
+  ],
+  "inseparable-in-vain": [
+    {
+      breaks: "a listed pair that checks tell apart",
+      change: asRivals((t) => (t.inseparable = [{ causes: ["tank-dirty", "filter-blocked"], because: "Both are dirt." }])),
+      node: "cause tank-dirty",
+      says: /checks tell them apart/,
+    },
+    {
+      breaks: "a listed pair that no symptom brings together",
+      change: (t) => (t.inseparable = [{ causes: ["tank-dirty", "battery-flat"], because: "Both are old." }]),
+      node: "cause tank-dirty",
+      says: /no symptom makes both likely/,
+    },
+    {
+      breaks: "a pair listed twice",
+      change: asRivals((t) => {
+        delete the(t.causes, "filter-blocked").gives["filter-vacuum"];
+        t.inseparable = [
+          { causes: ["tank-dirty", "filter-blocked"], because: "Both are dirt." },
+          { causes: ["filter-blocked", "tank-dirty"], because: "Both are dirt." },
+        ];
+      }),
+      node: "cause filter-blocked",
+      says: /lists it and tank-dirty twice/,
+    },
+  ],
   "known-case-reading": [
     {
       breaks: "a finding with nothing said",
@@ -570,6 +668,29 @@ describe.each(Object.entries(breaches))("%s", (rule, ways) => {
     expect(named?.mend).toMatch(/^[A-Z].+[.?]$/);
     if (says !== undefined) expect(found.map((flaw) => flaw.says).join("\n")).toMatch(says);
   });
+});
+
+test("rivals that checks tell apart both ways are no flaw", () => {
+  const tree = smallTree();
+  the(tree.causes, "filter-blocked").broughtOnBy = {};
+  expect(findFlaws(tree)).toEqual([]);
+});
+
+test("a pair that no check tells apart may stand once it is listed with its reason", () => {
+  const tree = smallTree();
+  the(tree.causes, "filter-blocked").broughtOnBy = {};
+  delete the(tree.causes, "filter-blocked").gives["filter-vacuum"];
+  tree.inseparable = [{ causes: ["tank-dirty", "filter-blocked"], because: "The same dirt, and the same cure in the end." }];
+  const rules = findFlaws(tree).map(({ rule }) => rule);
+  expect(rules.filter((rule) => /rival|inseparable/.test(rule))).toEqual([]);
+});
+
+test("a pair told apart one way only may be listed too", () => {
+  const tree = smallTree();
+  the(tree.causes, "filter-blocked").broughtOnBy = {};
+  the(tree.causes, "filter-blocked").gives["filter-vacuum"] = { "very-high": 0.5, high: 0.1 };
+  tree.inseparable = [{ causes: ["tank-dirty", "filter-blocked"], because: "The same dirt, and the same cure in the end." }];
+  expect(findFlaws(tree)).toEqual([]);
 });
 
 test("errors come before what is only to be looked at", () => {

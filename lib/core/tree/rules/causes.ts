@@ -2,11 +2,9 @@ import { factorOf, probabilityOf } from "../../diagnosis/cause-row";
 import { linkRatios } from "../link-ratios";
 import type { Cause, Check, FaultTree } from "../schema";
 import type { Strength } from "../finding-link";
+import { TELLING } from "../telling-apart";
 import { causeNode, findLoop, twice, type Found, type Rule } from "./rule";
 import { findingsOfSpan } from "./bands";
-
-/** A finding tells when it is seen so many times as often with the cause as on a sound engine. */
-export const TELLING = 4;
 
 const incurable = (tree: FaultTree): Found[] =>
   tree.causes

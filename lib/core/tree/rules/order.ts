@@ -38,9 +38,12 @@ const pinsThatTie = (tree: FaultTree): Found[] =>
       }));
   });
 
-/** The first question about a complaint has to be one that anybody can answer with nothing in hand. */
+/** A check sorts a symptom's causes when it is linked to so many of them, or to the only one. */
+const SORTS = 2;
+
+/** The first question about a complaint has to be one that anybody can answer with nothing in hand, and its answer has to sort the causes. */
 const symptomsWithoutALook = (tree: FaultTree): Found[] =>
-  tree.symptoms.flatMap(({ key }) => {
+  tree.symptoms.flatMap(({ key, rulesOut }) => {
     const first = pinsOf(tree, key)[0]?.check;
     if (first !== undefined && first.tools.length > 0) {
       return [
@@ -52,18 +55,20 @@ const symptomsWithoutALook = (tree: FaultTree): Found[] =>
       ];
     }
     const causes = tree.causes.filter(({ shows }) => shows[key] !== undefined);
+    const enough = Math.min(SORTS, causes.length);
     const byHand = tree.checks.some(
       (check) =>
         check.tools.length === 0 &&
-        (check.asksWhatChanged || check.firstFor[key] !== undefined || causes.some(({ gives }) => gives[check.key] !== undefined)),
+        !rulesOut?.includes(check.engine) &&
+        causes.filter(({ gives }) => gives[check.key] !== undefined).length >= enough,
     );
-    return byHand || causes.length === 0
+    return byHand
       ? []
       : [
           {
             node: symptomNode(key),
-            says: "no check of its causes can be made without tools.",
-            mend: "Add one that only looks, listens or feels.",
+            says: `no check that needs no tools and can be made while it lasts is linked to ${enough === 1 ? "its cause" : `${enough} of its causes`}.`,
+            mend: "Add one that only looks, listens or feels, or link one.",
           },
         ];
   });
