@@ -5,7 +5,7 @@ const PLUGS = [128, 180, 232, 284];
 
 export function GlowBusBar() {
   return (
-    <Picture of="glow-bus-bar" height={300}>
+    <Picture of="glow-bus-bar" height={286}>
       <path d="M10 112H112" strokeWidth={8} />
       <path d="M10 112H112" stroke="var(--fill)" strokeWidth={4} />
       <Box x={100} y={170} w={224} h={46} of="metal" />

@@ -20,8 +20,8 @@ function PumpOnCam({ x, high }: { x: number; high: boolean }) {
 
 export function PrimerLever() {
   return (
-    <Picture of="primer-lever" height={272}>
-      <Divide to={264} />
+    <Picture of="primer-lever" height={244}>
+      <Divide to={236} />
       <Tick x={16} y={16} />
       <Label x={32} y={22} bold>
         Cam low

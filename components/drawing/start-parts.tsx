@@ -2,9 +2,9 @@ import { Box, Label, Part } from "./parts";
 
 type Way = "heavy" | "quiet";
 
-/** Battery, switch, starter and the engine as the way back, 328 by 210 under `y`. `lit` legs are drawn as carrying current. */
+/** Battery, switch, starter and the engine as the way back, 328 by 210 under `y`. A heavy leg is filled, a quiet one hollow. */
 export function StartLoop({ y, positive, negative }: { y: number; positive: Way; negative: Way }) {
-  const cable = (way: Way) => (way === "heavy" ? "var(--fill)" : "var(--edge)");
+  const cable = (way: Way) => (way === "heavy" ? "var(--fill)" : "var(--sheet)");
   return (
     <g transform={`translate(0 ${y})`}>
       <path d="M30 128V44H72M112 44H212V60" stroke="var(--ink)" strokeWidth={9} strokeLinecap="butt" />
