@@ -1,10 +1,11 @@
 import type { StepShown } from "@/lib/core/diagnosis/view";
+import { StepDrawing } from "@/components/drawing/step-drawing";
 import { CautionPanel } from "@/components/ui/caution-panel";
 import { ScreenHeading } from "./screen-heading";
 import { StepFacts } from "./step-facts";
 import { StepList } from "./step-list";
 
-/** Why, what, with what, what can hurt, then how: in this order, so that a caution is read before the hand moves. */
+/** Why, what, with what, what can hurt, how it looks, then how: in this order, so that a caution is read before the hand moves. */
 export function StepHead({ step }: { step: StepShown }) {
   return (
     <>
@@ -20,6 +21,7 @@ export function StepHead({ step }: { step: StepShown }) {
           ))}
         </div>
       )}
+      {step.drawing && <StepDrawing drawing={step.drawing} />}
       <StepList steps={step.steps} />
     </>
   );

@@ -1,3 +1,4 @@
+import { StepDrawing } from "@/components/drawing/step-drawing";
 import { CautionPanel } from "@/components/ui/caution-panel";
 import type { Check, Remedy } from "@/lib/core/tree/schema";
 import { ENGINE_STATES, WHO } from "./in-words";
@@ -29,6 +30,11 @@ export function StepFacts({ id, step, part }: Props) {
         </div>
       )}
       <Facts title="Tools" items={step.tools} />
+      {step.drawing && (
+        <div className="mt-4">
+          <StepDrawing drawing={step.drawing} />
+        </div>
+      )}
       <section className="mt-4">
         <h3 className="text-sm font-normal text-ink-2">Steps</h3>
         <ol className="list-decimal pl-6">

@@ -85,6 +85,7 @@ const document = {
       title: "Look into the bowl",
       ask: "What is in the bowl?",
       firstFor: { "lost-rpm": 1 },
+      drawing: "separator-bowl",
       steps: ["Look with a torch."],
       findings: [
         { key: "bright", title: "Bright fuel", usual: true },

@@ -29,6 +29,7 @@ export function showStep(model: Model, evidence: Evidence, step: NextStep, clear
     ifFitted: compiled.share < 1,
     cautions: cautionsOf(node, model.tree, model.setting.profile),
     steps: [...marked(safety.first, true), ...marked(node.steps, false), ...marked(safety.last, true)],
+    drawing: node.drawing ?? null,
     cranks: node.flags.cranks ?? null,
     who: node.who,
   };
@@ -104,6 +105,7 @@ const CALL: StepShown = {
   ask: "What came of it?",
   answers: [],
   reading: null,
+  drawing: null,
   cranks: null,
   proof: null,
   temporary: false,

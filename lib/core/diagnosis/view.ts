@@ -80,6 +80,8 @@ export type StepShown = {
   cautions: readonly CautionShown[];
   /** Safety first and last steps stand in the list, in place, marked. */
   steps: readonly { text: string; safety: boolean }[];
+  /** Key of a drawing; a tree newer than this program may name one that is not known here. */
+  drawing: string | null;
   ask: string;
   answers: readonly { finding: string; title: string; withdraws: string | null }[];
   reading:

@@ -123,6 +123,8 @@ const step = {
   flags: SafetyFlags.default({}),
   cautions: z.array(Key).default([]),
   steps: z.array(Text).min(1).max(12),
+  /** One of the drawings of drawings.ts, where words are not enough. */
+  drawing: Key.optional(),
   after: z.array(Precedence).default([]),
   appliesTo: AppliesTo.optional(),
   sources: Citations,

@@ -1,6 +1,7 @@
 import type { Flaw } from "./flaw";
 import { bandRules } from "./rules/bands";
 import { causeRules } from "./rules/causes";
+import { drawingRules } from "./rules/drawings";
 import { findingRules } from "./rules/findings";
 import { keyRules } from "./rules/keys";
 import { knownCaseRules } from "./rules/known-cases";
@@ -24,6 +25,7 @@ export const RULES: readonly Rule[] = [
   ...orderRules,
   ...symptomRules,
   ...safetyRules,
+  ...drawingRules,
   ...stopRuleRules,
   ...knownCaseRules,
 ];

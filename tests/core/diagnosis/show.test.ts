@@ -115,6 +115,12 @@ describe("what a screen shows", () => {
     expect(then?.cautions.map(({ key }) => key)).toContain("fuel-spill");
   });
 
+  it("[X5] names the step's drawing, or none", () => {
+    const drawn = tree({ ...small, checks: small.checks.map((one) => (one.key === "vacuum" ? { ...one, drawing: "fuel-path" } : one)) });
+    expect(view(drawn, [begin(new Device(1))]).step).toMatchObject({ key: "vacuum", drawing: "fuel-path" });
+    expect(ask([begin(new Device(1))]).step).toMatchObject({ key: "vacuum", drawing: null });
+  });
+
   it("[E4] offers to withdraw a symptom that a finding contradicts", () => {
     const phone = new Device(1);
     const model = tree({ ...small, checks: small.checks.map((one) => (one.key === "colour" ? { ...one, firstFor: { smoke: 1 } } : one)) });

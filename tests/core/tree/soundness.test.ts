@@ -40,6 +40,19 @@ const breaches: Record<string, Breach[]> = {
       node: "stop rule fuel-ashore",
     },
   ],
+  "unknown-drawing": [
+    {
+      breaks: "a drawing that nobody has drawn",
+      change: (t) => (the(t.checks, "bowl-look").drawing = "separator-bowel"),
+      node: "check bowl-look",
+      says: /"separator-bowel".*no such drawing/,
+    },
+    {
+      breaks: "a remedy with the name of a thing that every object has",
+      change: (t) => (the(t.remedies, "clean-tank").drawing = "constructor"),
+      node: "remedy clean-tank",
+    },
+  ],
   "part-twice": [
     {
       breaks: "two findings with one key",
