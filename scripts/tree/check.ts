@@ -50,7 +50,7 @@ function counts({ tree }: TreeRead): [string, number][] {
     ["cautions", tree.cautions.length],
     ["stopRules", tree.stopRules.length],
     ["knownCases", tree.knownCases.length],
-    ["drawings", 0],
+    ["drawings", new Set([...tree.checks, ...tree.remedies].flatMap(({ drawing }) => drawing ?? [])).size],
   ];
 }
 

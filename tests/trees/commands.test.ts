@@ -31,7 +31,7 @@ describe("tree -- check", () => {
     await write(smallDocument());
     expect(await check([folder])).toBe(0);
     expect(said).toEqual([
-      "2 symptoms, 3 causes, 4 checks, 2 readings, 3 remedies, 1 cautions, 2 stopRules, 1 knownCases, 0 drawings",
+      "2 symptoms, 3 causes, 4 checks, 2 readings, 3 remedies, 1 cautions, 2 stopRules, 1 knownCases, 1 drawings",
       "The tree is sound.",
     ]);
   });
