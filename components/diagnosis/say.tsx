@@ -114,7 +114,14 @@ export function Say({ ready, phone, engine, go }: Props) {
         autoCapitalize="none"
         className="mt-2 w-full rounded-xl border-2 border-fill bg-sheet p-3.5 text-xl"
       />
-      <SymptomHits symptoms={tree.symptoms} keys={shown} isPicked={isPicked} onToggle={toggle} said={draft.complaint.trim().length > 2} />
+      <SymptomHits
+        symptoms={tree.symptoms}
+        keys={shown}
+        isPicked={isPicked}
+        onToggle={toggle}
+        said={draft.complaint.trim().length > 2}
+        onlyNearest={hits.length > 0 && hits.every(({ weak }) => weak)}
+      />
       <button type="button" aria-expanded={listOpen} className="link mt-2 min-h-12" onClick={() => setListOpen(!listOpen)}>
         {listOpen ? "Close the list" : "Pick from a list by system"}
       </button>

@@ -7,13 +7,16 @@ type Props = {
   isPicked: (key: string) => boolean;
   onToggle: (key: string) => void;
   said: boolean;
+  /** All of them are guesses: the words say none of them. */
+  onlyNearest: boolean;
 };
 
-/** What the words may mean. The nearest are ticked; a tap unticks. */
-export function SymptomHits({ symptoms, keys, isPicked, onToggle, said }: Props) {
+/** What the words may mean. What fits is ticked; a tap unticks. Guesses are offered, never ticked. */
+export function SymptomHits({ symptoms, keys, isPicked, onToggle, said, onlyNearest }: Props) {
   const found = keys.flatMap((key) => symptoms.filter((symptom) => symptom.key === key));
   return (
     <div aria-live="polite">
+      {onlyNearest && found.length > 0 && <p className="mt-3 text-sm">Nothing says just that; nearest:</p>}
       {found.length > 0 && (
         <div className="mt-2.5 overflow-hidden rounded-xl border-[1.5px] border-edge bg-sheet">
           {found.map((symptom) => (

@@ -1,44 +1,57 @@
-/** Everyday words that say the same of an engine. */
-const SAME: readonly string[] = [
-  "slow slowly ages forever ever long sluggish",
-  "start starts starting started fire fires fired catch catches",
-  "stop stops stopped stopping die dies died dying quit quits stall stalls stalled",
-  "rev revs rpm rpms revving revolution revolutions",
-  "hot warm",
-  "hard difficult reluctant badly bad",
-];
-const MEANS = new Map(SAME.flatMap((line) => line.split(" ").map((word) => [word, line.split(" ")[0] ?? word] as const)));
+import Fuse from "fuse.js";
 
-/** A word without its ending and with its everyday meaning: "clicking" and "clicks" are one, and so are "dies" and "stops". */
-export function plainWord(word: string): string {
-  const meant = MEANS.get(word);
-  if (meant) return meant;
-  const stem = word.length > 4 ? word.replace(/(?:ing|ies|ed|es|s|y)$/, "") : word.replace(/s$/, "");
-  return stem.length > 2 ? (MEANS.get(stem) ?? stem) : word;
-}
+/** A word of the tree or the thesaurus that a typed one may be. `like`: 1 the same, 0 nothing alike. */
+export type Likeness = { word: string; like: number };
 
-/** The everyday word that a typed one is a slip of the finger away from; itself where there is none. */
-export function mendedWord(typed: string): string {
-  if (typed.length < 6) return typed;
-  const near = [...MEANS.keys()].find(
-    (word) => word.length >= 6 && Math.abs(word.length - typed.length) < 2 && slipsBetween(word, typed) <= 1,
-  );
-  return near ?? typed;
-}
+const MOST = 5;
+/** Looser than the slips allowed below: the library gathers, the slips decide. */
+const THRESHOLD = 0.34;
+const UNFINISHED = 0.85;
+const LEAST_UNFINISHED = 3;
 
 /**
- * How alike a typed word is to one of the tree's: 1 the same or another form of it, 0 not at all. The
- * beginning of a word is a word not typed to its end; one slip of the finger is
- * allowed in four letters, two in eight.
+ * Finds the known words that a typed one may stand for: itself, the word it is
+ * the beginning of (typed not to its end), or one it is a slip of the finger
+ * away from. One slip is allowed in four letters, two in nine. Answers are kept,
+ * so that a key pressed looks up one word.
  */
+export function wordFinder(known: Iterable<string>): (typed: string) => readonly Likeness[] {
+  const words = [...new Set(known)];
+  const all = new Set(words);
+  const fuse = new Fuse(words, { threshold: THRESHOLD, includeScore: true, ignoreFieldNorm: true });
+  const kept = new Map<string, readonly Likeness[]>();
+  return (typed) => {
+    const before = kept.get(typed);
+    if (before) return before;
+    const found = all.has(typed) ? [{ word: typed, like: 1 }] : likeWords(typed);
+    kept.set(typed, found);
+    return found;
+  };
+
+  function likeWords(typed: string): readonly Likeness[] {
+    if (typed.length < LEAST_UNFINISHED || /\d/.test(typed)) return [];
+    const likes = fuse
+      .search(typed, { limit: 60 })
+      .map(({ item }) => ({ word: item, like: wordLikeness(typed, item) }))
+      .filter(({ like }) => like > 0);
+    const best = Math.max(0, ...likes.map(({ like }) => like));
+    // A word far behind the nearest is not what was meant.
+    return likes
+      .filter(({ like }) => like > best - 0.1)
+      .sort((a, b) => b.like - a.like || a.word.length - b.word.length || (a.word < b.word ? -1 : 1))
+      .slice(0, MOST);
+  }
+}
+
+/** How alike a typed word is to a known one: 1 the same, 0 not at all. */
 export function wordLikeness(typed: string, word: string): number {
-  if (typed === word || plainWord(typed) === plainWord(word)) return 1;
-  if (typed.length >= 3 && word.startsWith(typed)) return 0.85;
+  if (typed === word) return 1;
+  if (typed.length >= LEAST_UNFINISHED && word.startsWith(typed)) return UNFINISHED;
   const most = Math.max(typed.length, word.length);
-  const allowed = most >= 8 ? 2 : most >= 4 ? 1 : 0;
+  const allowed = most >= 9 ? 2 : most >= 4 ? 1 : 0;
   if (allowed === 0 || Math.abs(typed.length - word.length) > allowed || (most < 6 && typed[0] !== word[0])) return 0;
   const slips = slipsBetween(typed, word);
-  return slips > allowed ? 0 : 1 - (0.6 * slips) / most;
+  return slips > allowed ? 0 : 1 - (1.2 * slips) / most;
 }
 
 /** Letters wrong, missing, too many, or two in the wrong order (optimal string alignment). */

@@ -278,10 +278,6 @@ export const KnownCase = z.strictObject({
 });
 export type KnownCase = z.infer<typeof KnownCase>;
 
-/** Two likely rivals that no check can tell apart, and why that is so, or why it does not matter. */
-export const Inseparable = z.strictObject({ causes: z.tuple([Key, Key]), because: Text });
-export type Inseparable = z.infer<typeof Inseparable>;
-
 export const FaultTree = z.strictObject({
   format: z.literal(1),
   key: Key,
@@ -297,6 +293,7 @@ export const FaultTree = z.strictObject({
   remedies: z.array(Remedy),
   stopRules: z.array(StopRule),
   knownCases: z.array(KnownCase).default([]),
-  inseparable: z.array(Inseparable).optional(),
+  /** Likely rivals that no check can tell apart, and why that is so, or why it does not matter. */
+  inseparable: z.array(z.strictObject({ causes: z.tuple([Key, Key]), because: Text })).optional(),
 });
 export type FaultTree = z.infer<typeof FaultTree>;

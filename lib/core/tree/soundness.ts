@@ -8,7 +8,7 @@ import { knownCaseRules } from "./rules/known-cases";
 import { orderRules } from "./rules/order";
 import { reachRules } from "./rules/reach";
 import { rivalRules } from "./rules/rivals";
-import type { Rule } from "./rules/rule";
+import type { Once, Rule } from "./rules/rule";
 import { safetyRules } from "./rules/safety";
 import { stopRuleRules } from "./rules/stop-rules";
 import { symptomRules } from "./rules/symptoms";
@@ -32,6 +32,16 @@ export const RULES: readonly Rule[] = [
 
 /** Everything wrong with a tree that its shape alone does not show: errors first, then in the order of the rules. */
 export function findFlaws(tree: FaultTree): Flaw[] {
-  const flaws = RULES.flatMap(({ name, severity, find }) => find(tree).map((found): Flaw => ({ severity, rule: name, ...found })));
+  const once = onceFor(tree);
+  const flaws = RULES.flatMap(({ name, severity, find }) => find(tree, once).map((found): Flaw => ({ severity, rule: name, ...found })));
   return [...flaws.filter(({ severity }) => severity === "error"), ...flaws.filter(({ severity }) => severity === "look-at")];
+}
+
+/** Kept for one run only: a tree may be changed before the next. */
+function onceFor(tree: FaultTree): Once {
+  const done = new Map<unknown, unknown>();
+  return <T>(work: (tree: FaultTree) => T): T => {
+    if (!done.has(work)) done.set(work, work(tree));
+    return done.get(work) as T;
+  };
 }

@@ -1,6 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import { complaintsOf, symptomFinder } from "@/lib/client/find-symptoms";
+import { symptomFinder } from "@/lib/client/find-symptoms";
+import { complaintsOf } from "@/lib/client/plain-words";
 import type { Symptom } from "@/lib/core/tree/schema";
 
 const symptom = (key: string, title: string, detail: string, phrases: string[]): Symptom => ({
@@ -112,5 +113,32 @@ describe("finding a symptom by plain words", () => {
     expect(find("start")).toEqual(symptomFinder([...SYMPTOMS])("start"));
     const scores = find("slow revs under load").map(({ fits, score }) => [fits ? 0 : 1, score] as const);
     expect(scores).toEqual([...scores].sort((a, b) => a[0] - b[0] || a[1] - b[1]));
+  });
+
+  it("offers the nearest, unticked and marked, where nothing says just that", () => {
+    const hits = find("the needle fell off and rolled away into the cold dark sea");
+    expect(hits.map(({ key }) => key)).toContain("overheat");
+    expect(hits.length).toBeLessThanOrEqual(3);
+    expect(hits.every(({ weak, fits }) => weak && !fits)).toBe(true);
+  });
+
+  it("marks nothing that is ticked as a guess", () => {
+    for (const text of ["wont rev, fadse when pushd", "too hot", "takes forever to start"])
+      for (const { fits, weak } of find(text)) expect(fits && weak).toBe(false);
+  });
+
+  it("puts the ticked ones first, in the order they were said", () => {
+    expect(ticked("fades when pushed, running hot")).toEqual(["fades-and-stops", "overheat"]);
+    expect(ticked("running hot, fades when pushed")).toEqual(["overheat", "fades-and-stops"]);
+  });
+
+  it("ticks nothing for words that half the tree has, and what people say word for word all the same", () => {
+    const starts = ["morning", "lunch", "winter", "berth"].map((when) =>
+      symptom(`start-${when}`, `Will not start at ${when}`, "It does not start", [`won't start in the ${when}`]),
+    );
+    const among = symptomFinder([...SYMPTOMS, ...starts, symptom("no-start", "Will not start", "Never", ["won't start"])]);
+    const ticks = (text: string) => among(text).flatMap(({ key, fits }) => (fits ? [key] : []));
+    expect(ticks("wont start")).toEqual(["no-start"]);
+    expect(symptomFinder([...SYMPTOMS, ...starts])("wont start").some(({ fits }) => fits)).toBe(false);
   });
 });

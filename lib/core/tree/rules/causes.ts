@@ -3,7 +3,7 @@ import { linkRatios } from "../link-ratios";
 import type { Cause, Check, FaultTree } from "../schema";
 import type { Strength } from "../finding-link";
 import { TELLING } from "../telling-apart";
-import { causeNode, findLoop, twice, type Found, type Rule } from "./rule";
+import { causeNode, findLoop, twice, type Found, type Once, type Rule } from "./rule";
 import { findingsOfSpan } from "./bands";
 
 const incurable = (tree: FaultTree): Found[] =>
@@ -15,9 +15,9 @@ const incurable = (tree: FaultTree): Found[] =>
       mend: 'Name one under "curedBy"; handing over to a workshop is one too.',
     }));
 
-function withoutTellingCheck(tree: FaultTree): Found[] {
+function withoutTellingCheck(tree: FaultTree, once: Once): Found[] {
   const best = new Map<string, { ratio: number; check: string; finding: string }>();
-  for (const link of linkRatios(tree)) if (link.ratio > (best.get(link.cause)?.ratio ?? 0)) best.set(link.cause, link);
+  for (const link of once(linkRatios)) if (link.ratio > (best.get(link.cause)?.ratio ?? 0)) best.set(link.cause, link);
   return tree.causes
     .filter(({ key }) => (best.get(key)?.ratio ?? 0) < TELLING)
     .map((cause) => {
@@ -47,8 +47,8 @@ const linkedRows = (tree: FaultTree): LinkedRow[] =>
 const strengthsOf = (links: LinkedRow["links"]): number[] =>
   Object.values(links).flatMap((link) => (factorOf(link) === null ? [probabilityOf(link as Strength)] : []));
 
-function rowsOverOne(tree: FaultTree): Found[] {
-  return linkedRows(tree).flatMap(({ cause, check, links }) => {
+function rowsOverOne(_: FaultTree, once: Once): Found[] {
+  return once(linkedRows).flatMap(({ cause, check, links }) => {
     const sum = strengthsOf(links).reduce((all, share) => all + share, 0);
     return sum <= 1 + 1e-9
       ? []
@@ -63,8 +63,8 @@ function rowsOverOne(tree: FaultTree): Found[] {
 }
 
 /** All findings have a strength and leave a good part unsaid: the row is then scaled up, which was hardly meant. */
-function rowsShortOfOne(tree: FaultTree): Found[] {
-  return linkedRows(tree).flatMap(({ cause, check, links }) => {
+function rowsShortOfOne(_: FaultTree, once: Once): Found[] {
+  return once(linkedRows).flatMap(({ cause, check, links }) => {
     const strengths = strengthsOf(links);
     const sum = strengths.reduce((all, share) => all + share, 0);
     if (strengths.length < check.findings.length || sum >= 0.9) return [];
@@ -78,8 +78,8 @@ function rowsShortOfOne(tree: FaultTree): Found[] {
   });
 }
 
-function findingsLinkedTwice(tree: FaultTree): Found[] {
-  return linkedRows(tree).flatMap(({ cause, check, links }) =>
+function findingsLinkedTwice(_: FaultTree, once: Once): Found[] {
+  return once(linkedRows).flatMap(({ cause, check, links }) =>
     twice(Object.keys(links).flatMap((spec) => findingsOfSpan(check, spec) ?? [])).map((finding) => ({
       node: causeNode(cause),
       says: `it links finding ${finding} of check ${check.key} twice, once within a span.`,
@@ -88,8 +88,8 @@ function findingsLinkedTwice(tree: FaultTree): Found[] {
   );
 }
 
-function spansUnknown(tree: FaultTree): Found[] {
-  return linkedRows(tree).flatMap(({ cause, check, links }) =>
+function spansUnknown(_: FaultTree, once: Once): Found[] {
+  return once(linkedRows).flatMap(({ cause, check, links }) =>
     Object.keys(links)
       .filter((spec) => spec.includes("..") && findingsOfSpan(check, spec) === null)
       .map((spec) => ({
@@ -117,9 +117,9 @@ function broughtOnInACircle(tree: FaultTree): Found[] {
 }
 
 /** A link that moves nothing costs its author work and its reader trust. */
-function linksThatSayNothing(tree: FaultTree): Found[] {
+function linksThatSayNothing(_: FaultTree, once: Once): Found[] {
   const strongest = new Map<string, { cause: string; check: string; shift: number }>();
-  for (const { cause, check, ratio } of linkRatios(tree)) {
+  for (const { cause, check, ratio } of once(linkRatios)) {
     const id = `${cause} ${check}`;
     strongest.set(id, { cause, check, shift: Math.max(strongest.get(id)?.shift ?? 0, Math.abs(Math.log(ratio))) });
   }

@@ -1,7 +1,7 @@
 import type { NodeKind } from "../flaw";
 import { referencesOf } from "../references";
 import type { FaultTree } from "../schema";
-import { causeNode, checkNode, symptomNode, type Found, type Rule } from "./rule";
+import { causeNode, checkNode, symptomNode, type Found, type Once, type Rule } from "./rule";
 
 /** Does any node of these kinds name it, in one of these fields? */
 function namedIn(tree: FaultTree): (to: NodeKind, key: string, ...fields: string[]) => boolean {
@@ -9,8 +9,8 @@ function namedIn(tree: FaultTree): (to: NodeKind, key: string, ...fields: string
   return (to, key, ...fields) => fields.some((field) => all.has(`${to} ${key} ${field}`));
 }
 
-function symptomsNoCauseShows(tree: FaultTree): Found[] {
-  const named = namedIn(tree);
+function symptomsNoCauseShows(tree: FaultTree, once: Once): Found[] {
+  const named = once(namedIn);
   return tree.symptoms
     .filter(({ key }) => !named("symptom", key, "shows"))
     .map(({ key }) => ({
@@ -20,8 +20,8 @@ function symptomsNoCauseShows(tree: FaultTree): Found[] {
     }));
 }
 
-function checksNothingHangsOn(tree: FaultTree): Found[] {
-  const named = namedIn(tree);
+function checksNothingHangsOn(tree: FaultTree, once: Once): Found[] {
+  const named = once(namedIn);
   return tree.checks
     .filter(({ key, asksWhatChanged }) => !named("check", key, "gives", "after", "when > findings", "clearedBy") && !asksWhatChanged)
     .map((check) => ({
@@ -31,8 +31,8 @@ function checksNothingHangsOn(tree: FaultTree): Found[] {
     }));
 }
 
-function remediesNoCauseNeeds(tree: FaultTree): Found[] {
-  const named = namedIn(tree);
+function remediesNoCauseNeeds(tree: FaultTree, once: Once): Found[] {
+  const named = once(namedIn);
   return tree.remedies
     .filter(({ key }) => !named("remedy", key, "curedBy", "after"))
     .map(({ key }) => ({
@@ -42,8 +42,8 @@ function remediesNoCauseNeeds(tree: FaultTree): Found[] {
     }));
 }
 
-function cautionsNobodyCites(tree: FaultTree): Found[] {
-  const named = namedIn(tree);
+function cautionsNobodyCites(tree: FaultTree, once: Once): Found[] {
+  const named = once(namedIn);
   return tree.cautions
     .filter(({ key }) => !named("caution", key, "cautions"))
     .map(({ key }) => ({
@@ -53,8 +53,8 @@ function cautionsNobodyCites(tree: FaultTree): Found[] {
     }));
 }
 
-function causesThatShowNothing(tree: FaultTree): Found[] {
-  const named = namedIn(tree);
+function causesThatShowNothing(tree: FaultTree, once: Once): Found[] {
+  const named = once(namedIn);
   return tree.causes
     .filter(({ key, shows }) => Object.keys(shows).length === 0 && !named("cause", key, "broughtOnBy"))
     .map((cause) => ({

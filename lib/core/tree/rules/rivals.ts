@@ -1,7 +1,7 @@
 import { likelyRivals, type Rivals } from "../rivals";
 import type { Cause, FaultTree } from "../schema";
 import { tellingApart, TELLING } from "../telling-apart";
-import { causeNode, type Found, type Rule } from "./rule";
+import { causeNode, type Found, type Once, type Rule } from "./rule";
 
 type Pair = { a: Cause; b: Cause; untold: { which: "a" | "b" | "both"; where: Rivals } | null };
 
@@ -31,9 +31,9 @@ const onEngine = ({ kind: { differsBy } }: Rivals): string =>
 
 const WANTED = `at least ${TELLING} times as often and at least "sometimes"`;
 
-function rivalsWithoutTellingFinding(tree: FaultTree): Found[] {
+function rivalsWithoutTellingFinding(tree: FaultTree, once: Once): Found[] {
   const excused = listed(tree);
-  return [...pairsOf(tree)].flatMap(([name, { a, b, untold }]) => {
+  return [...once(pairsOf)].flatMap(([name, { a, b, untold }]) => {
     if (untold === null || untold.which === "both" || excused.has(name)) return [];
     const [cause, rival] = untold.which === "a" ? [a, b] : [b, a];
     return [
@@ -46,9 +46,9 @@ function rivalsWithoutTellingFinding(tree: FaultTree): Found[] {
   });
 }
 
-function inseparableUnlisted(tree: FaultTree): Found[] {
+function inseparableUnlisted(tree: FaultTree, once: Once): Found[] {
   const excused = listed(tree);
-  return [...pairsOf(tree)].flatMap(([name, { a, b, untold }]) =>
+  return [...once(pairsOf)].flatMap(([name, { a, b, untold }]) =>
     untold?.which !== "both" || excused.has(name)
       ? []
       : [
@@ -61,10 +61,11 @@ function inseparableUnlisted(tree: FaultTree): Found[] {
   );
 }
 
-function listedInVain(tree: FaultTree): Found[] {
-  const pairs = pairsOf(tree);
+function listedInVain(tree: FaultTree, once: Once): Found[] {
+  if (tree.inseparable === undefined || tree.inseparable.length === 0) return [];
+  const pairs = once(pairsOf);
   const seen = new Set<string>();
-  return (tree.inseparable ?? []).flatMap(({ causes: [a, b] }) => {
+  return tree.inseparable.flatMap(({ causes: [a, b] }) => {
     const name = nameOf(a, b);
     const again = seen.has(name);
     seen.add(name);

@@ -4,12 +4,15 @@ import type { Cause, Check, FaultTree, Remedy, StopRule } from "../schema";
 /** What a rule says of one node; its name and severity stand in the rule itself. */
 export type Found = Pick<Flaw, "node" | "says" | "mend">;
 
+/** What several rules look up, done once a run. */
+export type Once = <T>(work: (tree: FaultTree) => T) => T;
+
 /** One thing that a sound tree keeps to. */
 export type Rule = {
   /** Stable: tests, screens and people refer to it. */
   name: string;
   severity: Flaw["severity"];
-  find: (tree: FaultTree) => Found[];
+  find: (tree: FaultTree, once: Once) => Found[];
 };
 
 export type StepNode = { kind: "check"; step: Check } | { kind: "remedy"; step: Remedy };

@@ -1,0 +1,42 @@
+const HOW_LONG = "the figure is how long to do it or to wait; what is seen then is a look, not a number";
+const HOW_TO = "the figure is how to set the engine or the tool, or a limit at which to stop; what is seen is a look";
+const DIFFERENCE = "a difference of two temperatures, which does not convert as a temperature does; bands in words, both scales given";
+
+/** Checks that name a figure and are no reading, each with the reason. */
+export const FIGURE_EXCEPTIONS: Readonly<Record<string, string>> = {
+  "after-the-stop": HOW_LONG,
+  "belt-off-noise": HOW_LONG,
+  "calorifier-hoses": HOW_LONG,
+  "clear-hose-suction": HOW_LONG,
+  "exhaust-water": HOW_LONG,
+  "gland-look": HOW_LONG,
+  "lift-pump-squirt": HOW_LONG,
+  "neutral-vs-gear": HOW_LONG,
+  "oil-level": HOW_LONG,
+  "preheat-drill": HOW_LONG,
+  "prime-first": HOW_LONG,
+  "pump-cooling": HOW_LONG,
+  "raw-pump-outlet": HOW_LONG,
+  "restart-soon": HOW_LONG,
+  "shaft-turning": HOW_LONG,
+  "smoke-crank": HOW_LONG,
+  "smoke-run": HOW_LONG,
+  "strainer-run": HOW_LONG,
+  "tank-sample": HOW_LONG,
+  "wash-look": HOW_LONG,
+  "white-when": HOW_LONG,
+  "charge-lamp-running": HOW_TO,
+  "electric-pump-valve": HOW_TO,
+  "injector-spray": HOW_TO,
+  leakdown: "the figure is the air let in; the finding is where it is heard to come out",
+  "pressure-test": "the figure is the pressure pumped up, which differs by the cap; the finding is whether it holds, and where it goes",
+  "thermostat-warm": HOW_TO,
+  "exhaust-port-temp": DIFFERENCE,
+  "hx-drop": DIFFERENCE,
+  "hx-rise": DIFFERENCE,
+  "ir-vs-gauge": DIFFERENCE,
+  "compression-pattern": "compares readings that the check before it has taken, cylinder against cylinder",
+  "electric-pump": "the figure tells why a good pump may fall silent; the finding is whether it runs",
+  "oil-service": "what the manual asks differs by engine; the finding is whether it was kept",
+  "raw-pump-turns": "the figure is a well belt's give; the finding is whether the pump turns",
+};
