@@ -9,7 +9,8 @@ const IN_LINE = { features: { injection: "in-line-pump" } };
 export class Look {
   readonly tree: FaultTree;
   constructor(tree: FaultTree) {
-    this.tree = tree;
+    // Apostrophes are rounded when a tree's folder is read; the table is written with straight ones.
+    this.tree = JSON.parse(JSON.stringify(tree).replaceAll("\u2019", "'")) as FaultTree;
   }
 
   check = (key: string): Check => named("check", this.tree.checks, key);

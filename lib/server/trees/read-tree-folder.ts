@@ -4,7 +4,7 @@ import path from "node:path";
 import { isMap, isScalar, isSeq, LineCounter, parseDocument, type Document } from "yaml";
 import { didYouMean } from "@/lib/core/tree/nearest";
 import { typographicAll } from "@/lib/core/tree/typographic";
-import { isListName, LIST_KINDS } from "@/lib/core/tree/flaw";
+import { LIST_KINDS } from "@/lib/core/tree/flaw";
 
 /** A place in a tree's files, for messages: file relative to the folder, line from 1. */
 export type Place = { file: string; line: number };
