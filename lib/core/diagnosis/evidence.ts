@@ -15,6 +15,8 @@ export type Evidence = {
 export type Standing = EngineStanding & {
   /** Engine states that stop rules in force, or the symptoms themselves, rule out. */
   readonly ruledOut: ReadonlySet<EngineState>;
+  /** A rule in force forbids starting: no repair can be tried out until it is lifted. */
+  readonly mayNotStart: boolean;
   /** A rule in force says to call or to hand over. */
   readonly mustCall: boolean;
   /** Checks that would lift a rule in force. */
@@ -23,4 +25,12 @@ export type Standing = EngineStanding & {
 
 export const NO_EVIDENCE: Evidence = { symptoms: [], findings: [], remedies: [] };
 
-export const AT_REST: Standing = { hot: false, running: false, open: new Set(), ruledOut: new Set(), mustCall: false, clearing: [] };
+export const AT_REST: Standing = {
+  hot: false,
+  running: false,
+  open: new Set(),
+  ruledOut: new Set(),
+  mayNotStart: false,
+  mustCall: false,
+  clearing: [],
+};
