@@ -28,6 +28,11 @@ export function CallStep({ step }: { step: StepShown | null }) {
         <Button tone="strong" size="large" wide onClick={() => go("hand-over")}>
           The hand-over page
         </Button>
+        {step?.goOn && (
+          <Button size="large" wide onClick={() => go("step", step.goOn?.key)}>
+            {step.goOn.kind === "check" ? "Go on looking" : "Go on trying"}: {step.goOn.title}
+          </Button>
+        )}
         <Button size="large" wide onClick={() => go("outcome")}>
           End it and log the outcome
         </Button>

@@ -13,10 +13,12 @@ import { CrankTimer } from "./crank-timer";
 import { useHere } from "./here";
 import { NoteOnly } from "./note-only";
 import { NotAboard } from "./not-aboard";
+import { useStepDue } from "./step-due";
 
 /** Whatever one wants to say without being asked. */
 export function OutOfTurn() {
   const { view, go, record, setUndo } = useHere();
+  const due = useStepDue();
   const [open, setOpen] = useState(false);
   /** The boat has got under way since: what makes her safe comes before the engine. */
   const [castOff, setCastOff] = useState(false);
@@ -68,7 +70,7 @@ export function OutOfTurn() {
           />
           {castOff && <BoatFirst safe={false} onSafe={leave(() => setCastOff(false))} onCall={leave(() => go("hand-over"))} />}
           {/* A step that cranks has the clock on its own screen: one burst is never counted by two. */}
-          {(view.step?.cranks ?? null) === null && (
+          {(due?.cranks ?? null) === null && (
             <Fold title="It is being cranked">
               <CrankTimer asks={null} />
             </Fold>

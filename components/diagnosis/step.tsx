@@ -12,13 +12,14 @@ import { RemedyStep } from "./remedy-step";
 import { ReturnNotice } from "./return-notice";
 import { RulesInForce } from "./rules-in-force";
 import { ScreenHeading } from "./screen-heading";
+import { useStepDue } from "./step-due";
 import { UndoBar } from "./undo-bar";
 
 /** What to do now: one step, and nothing else to decide. */
 export function Step() {
   const { view, thinking } = useHere();
   useWakeLock(true);
-  const { step } = view;
+  const step = useStepDue();
   return (
     <div aria-busy={thinking}>
       <UndoBar />

@@ -146,6 +146,7 @@ function curableHere(model: Model, evidence: Evidence, shares: Float64Array, cau
   return model.remedies.some((remedy) => {
     const strength = cause.curedBy[remedy.key];
     if (strength === undefined || probabilityOf(strength) < CURES || !gates.isFeasible(remedy)) return false;
+    if (evidence.standing?.mayNotStart && remedy.remedy.tryOut.minutes > 0) return false;
     const gate = gates.gateOf(remedy);
     return gate.open || !gate.shut;
   });

@@ -52,8 +52,9 @@ describe.each([
       );
     });
 
-    it("asks and tries at most 32 things", () => {
-      expect(Math.max(...played.map(({ steps }) => steps.length))).toBeLessThanOrEqual(32);
+    // 32 while the tree had 88 causes, 34 on the whole one of 217.
+    it("asks and tries at most 34 things", () => {
+      expect(Math.max(...played.map(({ steps }) => steps.length))).toBeLessThanOrEqual(34);
     });
   },
 );

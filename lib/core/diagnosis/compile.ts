@@ -21,7 +21,7 @@ const BETTER_LEAST = 0.002;
 /**
  * Makes a tree ready for arithmetic: what does not apply to this engine here is
  * left out, words become numbers, and "something not in this tree" joins as the
- * last hypothesis. Rules [B1]-[B4], [K1], [M1], [W1]-[W4]; rows [L1]-[L6]; symptoms [S1]-[S3].
+ * last hypothesis. Rules [B1]-[B4], [K1], [M1], [W1]-[W5]; rows [L1]-[L6]; symptoms [S1]-[S3].
  */
 export function compile(tree: FaultTree, setting: Setting): Model {
   const shareFor = (node: { appliesTo?: Cause["appliesTo"] }): number =>
@@ -90,9 +90,19 @@ function stepModel(step: Check | Remedy, share: number, setting: Setting): StepM
   return {
     key: step.key,
     share,
-    offered: unionsAllowed && whoMay(step, setting.person, setting.situation) && (!missing || alongside),
+    offered: unionsAllowed && fuelAllowed(step, setting) && whoMay(step, setting.person, setting.situation) && (!missing || alongside),
     minutes: fixedMinutes(step, setting.situation) + (missing && alongside ? COSTS.fetchAlongside : 0),
   };
+}
+
+/**
+ * A step that opens clean fuel and goes by the kind of injection is one that
+ * must not be done on the wrong kind: while it is not known, nobody short of a
+ * workshop is asked to; a skipper neither on what is, or may be, rail. Rule [W5].
+ */
+function fuelAllowed(step: Check | Remedy, { profile, person }: Setting): boolean {
+  if (!step.flags.opensFuelClean || step.appliesTo?.features?.injection === undefined || person === "workshop") return true;
+  return person === "mechanic" ? profile.features.injection !== undefined : !treatedAsRail(profile);
 }
 
 function isMissing(step: Check | Remedy, notAboard: readonly string[]): boolean {

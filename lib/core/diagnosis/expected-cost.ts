@@ -146,6 +146,7 @@ function optionsOf(model: Model, gates: Gates, standing: Standing, kept: readonl
   const placeOf = new Map(kept.map((index, place) => [index, place]));
   const optionOf = (remedy: RemedyModel, at: number): readonly Option[] => {
     if (gates.isDone({ kind: "remedy", key: remedy.key }) || !gates.isFeasible(remedy)) return [];
+    if (standing.mayNotStart && remedy.remedy.tryOut.minutes > 0) return [];
     const gate = gates.gateOf(remedy);
     if (!gate.open && gate.shut) return [];
     const links = [...remedy.linkedAt].flatMap((index, link) => {

@@ -2,11 +2,11 @@ import { believe } from "./believe";
 import { callingMinutes } from "./calling-minutes";
 import { candidatesOf, SAME, type Candidate } from "./candidates";
 import { standingMinutes } from "./costs";
-import { AT_REST, type Evidence } from "./evidence";
+import { AT_REST, type Evidence, type Standing } from "./evidence";
 import { ExpectedCost, type BestTry } from "./expected-cost";
 import { firstSteps, type Pinned } from "./first-steps";
 import { Gates, type StepRef } from "./gates";
-import type { Model } from "./model";
+import type { Model, RemedyModel } from "./model";
 import { PlanAhead, type Act } from "./plan-ahead";
 
 /** So many of the most telling checks for their minutes are looked at one step ahead. */
@@ -25,7 +25,7 @@ const KEPT_MOST = 32;
 /** A remedy less likely than this to cure is a long shot: nothing is put off for it. */
 const LONG_SHOT = 0.3;
 
-type Chosen = { readonly act: Act; readonly value: number; readonly key: string };
+type Chosen = { readonly act: Act; readonly value: number };
 
 export type Because = Pinned["because"] | "tells-most" | "cheaper-than-trying" | "likely-cure" | "nothing-better";
 
@@ -41,71 +41,88 @@ export type NextStep = {
   /** Expected minutes to a cured engine from here, this step first; null for a step that no reckoning chose. */
   readonly expected: number | null;
   readonly shares: Float64Array;
+  /** At a call: the check that tells most for its minutes, else the best remedy, for whoever goes on all the same. */
+  readonly goOn: NextStep | null;
 };
 
 /**
  * The step that makes the expected cost to a cured engine least: a check, a
  * remedy, or a call for help. One-step look-ahead over the dozen checks that
- * tell most for their minutes picks a few; these, the best remedies and a call
- * are then thought through. Rules [G1]-[G5], [N1]-[N10].
+ * tell most for their minutes picks a few; these, the best remedy and a call
+ * are then thought through. Rules [G1]-[G5], [N1]-[N11].
  */
 export function nextStep(model: Model, evidence: Evidence): NextStep {
   const standing = evidence.standing ?? AT_REST;
   const { shares } = believe(model, evidence);
   const gates = new Gates(model, evidence, standing, shares);
-  const call = { kind: "call", key: "call", gateTo: null, minutes: model.callMinutes, shares } as const;
-  const minutesOf = (ref: StepRef): number => {
-    const step = ref.kind === "check" ? model.checks[model.checkAt.get(ref.key) ?? -1] : model.remedies[model.remedyAt.get(ref.key) ?? -1];
-    return step ? step.minutes + standingMinutes("check" in step ? step.check : step.remedy, standing) : 0;
-  };
-  const first = standing.mustCall ? null : firstSteps(model, evidence, gates, shares, standing.clearing);
-  if (first)
-    return {
-      ...first.ref,
-      because: first.because,
-      gateTo: first.gateTo === null ? null : { kind: "check", key: first.gateTo },
-      minutes: minutesOf(first.ref),
-      expected: null,
-      shares,
-    };
-  if (standing.mustCall) return { ...call, because: "clears-a-rule", expected: null };
+  if (standing.mustCall) return { ...CALL, because: "clears-a-rule", minutes: model.callMinutes, expected: null, shares, goOn: null };
+  const first = firstSteps(model, evidence, gates, shares, standing.clearing);
+  if (!first) return reckoned(model, evidence, gates, shares);
+  const gateTo = first.gateTo === null ? null : ({ kind: "check", key: first.gateTo } as const);
+  const minutes = minutesOf(model, standing, first.ref);
+  return { ...first.ref, because: first.because, gateTo, minutes, expected: null, shares, goOn: null };
+}
 
+const CALL = { kind: "call", key: "call", gateTo: null } as const;
+
+function reckoned(model: Model, evidence: Evidence, gates: Gates, shares: Float64Array): NextStep {
+  const standing = evidence.standing ?? AT_REST;
   const kept = keptOf(model, shares);
-  const weights = Float64Array.from(kept, (index) => shares[index]!);
-  const total = weights.reduce((sum, weight) => sum + weight, 0);
-  weights.forEach((weight, place) => (weights[place] = weight / total));
+  const weights = weightsOf(kept, shares);
   const cost = new ExpectedCost(model, gates, standing, kept);
   const trying = cost.from(weights);
   const candidates = usable(candidatesOf(model, evidence, gates, shares), weights, kept);
   const plan = new PlanAhead(candidates, cost, kept);
   const looks = candidates.slice(0, LOOKED_AT).map((_, place) => ({ place, value: plan.worthOf({ kind: "check", place }, weights, 0) }));
-  const telling = [...looks].sort((a, b) => a.value - b.value).slice(0, THOUGHT_THROUGH);
-  const acts: Act[] = [...new Set([0, ...telling.map(({ place }) => place)])]
-    .filter((place) => place < candidates.length)
-    .map((place) => ({ kind: "check", place }));
-  if (trying.first !== null) acts.push({ kind: "remedy", place: trying.first });
+  const thought = thoughtThrough(looks, trying);
   const beliefs = Math.round(Math.min(BELIEFS.most, Math.max(BELIEFS.least, WORK / (kept.length * Math.max(1, candidates.length)))));
+  const keyOf = ({ kind, place }: Act): string =>
+    kind === "check" ? candidates[place]!.check.key : model.remedies[cost.options[place]!.at]!.key;
   let best: Chosen | null = null;
-  for (const act of acts) {
+  for (const act of thought) {
     const value = plan.worthOf(act, weights, beliefs);
-    const key = act.kind === "check" ? candidates[act.place]!.check.key : model.remedies[cost.options[act.place]!.at]!.key;
-    if (!best || value < best.value - SAME || (value < best.value + SAME && key < best.key)) best = { act, value, key };
+    if (!best || value < best.value - SAME || (value < best.value + SAME && keyOf(act) < keyOf(best.act))) best = { act, value };
   }
-  best = putOff(best, plan, cost, weights, trying, model) ?? best;
+  best = putOff(best, plan, cost, weights, trying) ?? best;
   const helpersMinutes = Float64Array.from(kept, (index) => model.helpersMinutes[index]!);
   const calling = callingMinutes({ callMinutes: model.callMinutes, helpersMinutes }, weights);
-  if (!best || best.value >= calling - SAME) return { ...call, because: "nothing-better", expected: calling };
-  const own: StepRef = { kind: best.act.kind, key: best.key };
-  if (best.act.kind === "check") {
-    const { gate } = candidates[best.act.place]!;
-    const alone = looks[best.act.place];
-    const because = alone && alone.value < trying.minutes - SAME ? "tells-most" : "cheaper-than-trying";
+  /** The act as a step, or what has to come before it. */
+  const stepOf = ({ act, value }: Chosen): NextStep => {
+    const own: StepRef = { kind: act.kind, key: keyOf(act) };
+    const gate = act.kind === "check" ? candidates[act.place]!.gate : gateBefore(gates, model.remedies[cost.options[act.place]!.at]!);
     const ref = gate ?? own;
-    return { ...ref, because, gateTo: gate ? own : null, minutes: minutesOf(ref), expected: best.value, shares };
-  }
-  const gate = gates.gateOf(model.remedies[model.remedyAt.get(best.key) ?? -1]!);
-  const ref = gate.open || gate.shut ? own : gate.first;
-  return { ...ref, because: "likely-cure", gateTo: ref === own ? null : own, minutes: minutesOf(ref), expected: best.value, shares };
+    const telling = act.kind === "check" && looks[act.place]!.value < trying.minutes - SAME;
+    const because = act.kind === "remedy" ? "likely-cure" : telling ? "tells-most" : "cheaper-than-trying";
+    return { ...ref, because, gateTo: gate && own, minutes: minutesOf(model, standing, ref), expected: value, shares, goOn: null };
+  };
+  if (best && best.value < calling - SAME) return stepOf(best);
+  const [act] = thought;
+  const goOn = act ? stepOf({ act, value: plan.worthOf(act, weights, 0) }) : null;
+  return { ...CALL, because: "nothing-better", minutes: model.callMinutes, expected: calling, shares, goOn };
+}
+
+function gateBefore(gates: Gates, remedy: RemedyModel): StepRef | null {
+  const gate = gates.gateOf(remedy);
+  return gate.open || gate.shut ? null : gate.first;
+}
+
+function minutesOf(model: Model, standing: Standing, ref: StepRef): number {
+  const step = ref.kind === "check" ? model.checks[model.checkAt.get(ref.key) ?? -1] : model.remedies[model.remedyAt.get(ref.key) ?? -1];
+  return step ? step.minutes + standingMinutes("check" in step ? step.check : step.remedy, standing) : 0;
+}
+
+/** The most telling check first, then those that do best one step ahead, then the remedy with the best cure chance per minute. */
+function thoughtThrough(looks: readonly { readonly place: number; readonly value: number }[], trying: BestTry): readonly Act[] {
+  const best = [...looks].sort((a, b) => a.value - b.value).slice(0, THOUGHT_THROUGH);
+  const checks = [...new Set([...looks.slice(0, 1), ...best])].map(({ place }): Act => ({ kind: "check", place }));
+  return trying.first === null ? checks : [...checks, { kind: "remedy", place: trying.first }];
+}
+
+/** The shares of the hypotheses that are kept, made to sum to 1. */
+function weightsOf(kept: readonly number[], shares: Float64Array): Float64Array {
+  const weights = Float64Array.from(kept, (index) => shares[index]!);
+  const total = weights.reduce((sum, weight) => sum + weight, 0);
+  return weights.map((weight) => weight / total);
 }
 
 /**
@@ -113,20 +130,13 @@ export function nextStep(model: Model, evidence: Evidence): NextStep {
  * failed: asked first it costs its minutes always, asked after only then. Both
  * ways are followed to the same depth. Rule [N5].
  */
-function putOff(
-  best: Chosen | null,
-  plan: PlanAhead,
-  cost: ExpectedCost,
-  weights: Float64Array,
-  trying: BestTry,
-  model: Model,
-): Chosen | null {
+function putOff(best: Chosen | null, plan: PlanAhead, cost: ExpectedCost, weights: Float64Array, trying: BestTry): Chosen | null {
   const option = trying.option;
   if (best?.act.kind !== "check" || option === null || cost.chanceOf(option, weights) < LONG_SHOT) return null;
   const asking = plan.worthOf(best.act, weights, 0);
   const after = plan.worthOf({ kind: "remedy", place: option }, weights, 0, best.act);
   if (asking < after - SAME) return null;
-  return { act: { kind: "remedy", place: option }, value: after, key: model.remedies[cost.options[option]!.at]!.key };
+  return { act: { kind: "remedy", place: option }, value: after };
 }
 
 /** The hypotheses that are reckoned with, likeliest first; the unknown always. */

@@ -11,7 +11,13 @@ import type { StepShown } from "./view";
 
 /** A step as the screen shows it: cautions and safety steps in place, answers, bands in numbers. Rules [X4], [X5]. */
 export function showStep(model: Model, evidence: Evidence, step: NextStep, clears: readonly string[]): StepShown {
-  if (step.kind === "call") return { ...CALL, why: whyStep(model, evidence, step, clears, null), minutes: Math.round(step.minutes) };
+  if (step.kind === "call")
+    return {
+      ...CALL,
+      why: whyStep(model, evidence, step, clears, null),
+      minutes: Math.round(step.minutes),
+      goOn: step.goOn && showStep(model, evidence, step.goOn, clears),
+    };
   const compiled =
     step.kind === "check" ? model.checks[model.checkAt.get(step.key) ?? -1] : model.remedies[model.remedyAt.get(step.key) ?? -1];
   if (!compiled) throw new Error(`the planner chose "${step.key}", which the model does not have`);
@@ -32,6 +38,7 @@ export function showStep(model: Model, evidence: Evidence, step: NextStep, clear
     drawing: node.drawing ?? null,
     cranks: node.flags.cranks ?? null,
     who: node.who,
+    goOn: null,
   };
   return "ask" in node ? { ...shown, ...checkParts(model, evidence, node) } : { ...shown, ...remedyParts(node) };
 }
@@ -110,4 +117,5 @@ const CALL: StepShown = {
   proof: null,
   temporary: false,
   who: "skipper-at-sea",
+  goOn: null,
 };

@@ -4,7 +4,7 @@ import type { Standing } from "./evidence";
 import type { DiagnosisState } from "./fold";
 import { forbidden } from "./stop-rules";
 
-/** How the engine stands after the last step, and what rules and symptoms take away. Rules [C3], [C4], [T5]. */
+/** How the engine stands after the last step, and what rules and symptoms take away. Rules [C3], [C4], [T5], [T7]. */
 export function standingOf(tree: FaultTree, state: DiagnosisState, inForce: readonly StopRule[]): Standing {
   const symptoms = new Set(state.symptoms.filter((one) => one.present).map((one) => one.symptom));
   const lost = tree.symptoms.filter((symptom) => symptoms.has(symptom.key)).flatMap((symptom) => symptom.rulesOut ?? []);
@@ -26,7 +26,11 @@ export function standingOf(tree: FaultTree, state: DiagnosisState, inForce: read
     running,
     open,
     ruledOut,
+<<<<<<< HEAD
     lost: lostStates,
+=======
+    mayNotStart: inForce.some((rule) => forbidden(rule).includes("idling")),
+>>>>>>> 8d129072fb666794d3052abe7fecbbcc71d161d4
     mustCall: inForce.some((rule) => rule.kind === "call" || rule.kind === "hand-over"),
     clearing: inForce.flatMap((rule) => rule.clearedBy.map((ref) => ref.check)),
   };

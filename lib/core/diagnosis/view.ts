@@ -94,6 +94,8 @@ export type StepShown = {
   proof: string | null;
   temporary: boolean;
   who: Who;
+  /** At a call: what is best to do here by whoever goes on all the same; null where nothing is left, or a rule says to call. */
+  goOn: StepShown | null;
 };
 
 export type Possible = {

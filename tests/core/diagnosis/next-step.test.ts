@@ -105,6 +105,18 @@ describe("the next step", () => {
     expect(step(seen({ glance: { odd: "x60" }, measure: { odd: "x5" } }), glanced).kind).toBe("remedy");
   });
 
+  it("[N11] says with a call what is best to do here all the same", () => {
+    const dear = (over: Partial<FaultTree>) =>
+      step(pair({ checks: [check("look", ["fine", "odd"], { minutes: 200 })], ...over }), { symptoms: weak }, { callMinutes: 1 });
+    const long = ["mend-a", "mend-b"].map((key) => remedy(key, { minutes: 900 }));
+    expect(dear({ remedies: long })).toMatchObject({ kind: "call", goOn: { kind: "check", key: "look" } });
+    expect(dear({ remedies: long, checks: [] })).toMatchObject({ kind: "call", goOn: { kind: "remedy", key: "mend-a" } });
+    const workshop = ["mend-a", "mend-b"].map((key) => remedy(key, { who: "workshop" }));
+    expect(dear({ remedies: workshop, checks: [] })).toMatchObject({ kind: "call", goOn: null });
+    const mustCall = { ...AT_REST, mustCall: true };
+    expect(step(pair(), { symptoms: weak, standing: mustCall })).toMatchObject({ kind: "call", goOn: null });
+  });
+
   it("[N10] asks less of someone who cannot tell", () => {
     const aside = Array.from({ length: 12 }, (_, index) => `aside-${index}`);
     const asked = pair({
@@ -231,6 +243,19 @@ describe("the next step", () => {
     for (const features of [{} as Record<string, string>, { injection: "common-rail" }, { injection: "unit-injectors" }])
       for (const person of ["mechanic", "workshop"] as const)
         expect(step(union, { symptoms: weak }, { profile: { ...setting.profile, features }, person }).kind).toBe("remedy");
+  });
+
+  it("[W5] opens clean fuel only where the kind of injection is known to bear it, and for a skipper never on rail", () => {
+    const applies = { features: { injection: ["in-line-pump", "common-rail"] } };
+    const opened = pair({ checks: [check("look", ["fine", "odd"], { flags: { opensFuelClean: true }, appliesTo: applies })] });
+    const kindFor = (person: Setting["person"], injection?: string) =>
+      step(opened, { symptoms: weak }, { person, profile: { ...setting.profile, features: injection ? { injection } : {} } }).kind;
+    expect(kindFor("skipper-in-port")).toBe("remedy");
+    expect(kindFor("mechanic")).toBe("remedy");
+    expect(kindFor("workshop")).toBe("check");
+    expect(kindFor("skipper-in-port", "in-line-pump")).toBe("check");
+    expect(kindFor("skipper-in-port", "common-rail")).toBe("remedy");
+    expect(kindFor("mechanic", "common-rail")).toBe("check");
   });
 
   it("[W3] what is not aboard is not offered at sea, and fetched alongside only if worth it", () => {

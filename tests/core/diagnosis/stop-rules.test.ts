@@ -195,6 +195,33 @@ describe("stop rules", () => {
     ];
     expect(view(small, log).step?.kind).toBe("call");
   });
+
+  it("[T7] leave out what has to be tried out while it must not be started, but not what lifts them", () => {
+    const phone = new Device(1);
+    const locked = tree({
+      ...small,
+      stopRules: [
+        stopRule("water", {
+          kind: "no-crank",
+          forbids: ["cranking"],
+          ask: "Water in the cylinders?",
+          clearedBy: [{ check: "hand", finding: "cool" }],
+        }),
+      ],
+      remedies: [remedy("dry", { minutes: 10 }), ...small.remedies],
+      checks: small.checks.map((one) => (one.key === "hand" ? { ...one, after: [{ remedy: "dry" }] } : one)),
+    });
+    const log: DiagnosisEvent[] = [phone.begin({ symptoms: ["overheat"] }), phone.tell("rule-answered", { rule: "water", answer: "yes" })];
+    expect(view(locked, log).step).toMatchObject({ kind: "remedy", key: "dry" });
+    log.push(phone.tell("remedy-tried", { remedy: "dry", result: "no-change", photos: [] }), phone.answer("hand", "hot"));
+    expect(view(locked, log).step).toMatchObject({
+      kind: "call",
+      goOn: null,
+      why: "While it must not be started no repair can be proved here.",
+    });
+    log.push(phone.answer("hand", "cool", { supersedes: log.at(-1)!.id }));
+    expect(view(locked, log).step?.kind).not.toBe("call");
+  });
 });
 
 describe("an engine that does not turn", () => {
