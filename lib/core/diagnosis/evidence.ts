@@ -15,13 +15,10 @@ export type Evidence = {
 export type Standing = EngineStanding & {
   /** Engine states that stop rules in force rule out. */
   readonly ruledOut: ReadonlySet<EngineState>;
-<<<<<<< HEAD
   /** Engine states that cannot be had while the symptoms last; a step that only tries to crank can still be tried. */
   readonly lost?: ReadonlySet<EngineState>;
-=======
   /** A rule in force forbids starting: no repair can be tried out until it is lifted. */
   readonly mayNotStart: boolean;
->>>>>>> 8d129072fb666794d3052abe7fecbbcc71d161d4
   /** A rule in force says to call or to hand over. */
   readonly mustCall: boolean;
   /** Checks that would lift a rule in force. */

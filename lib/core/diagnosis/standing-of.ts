@@ -26,11 +26,8 @@ export function standingOf(tree: FaultTree, state: DiagnosisState, inForce: read
     running,
     open,
     ruledOut,
-<<<<<<< HEAD
     lost: lostStates,
-=======
     mayNotStart: inForce.some((rule) => forbidden(rule).includes("idling")),
->>>>>>> 8d129072fb666794d3052abe7fecbbcc71d161d4
     mustCall: inForce.some((rule) => rule.kind === "call" || rule.kind === "hand-over"),
     clearing: inForce.flatMap((rule) => rule.clearedBy.map((ref) => ref.check)),
   };
