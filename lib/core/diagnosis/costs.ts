@@ -16,8 +16,8 @@ export const COSTS = {
   heldOnly: { alongside: 120, "at-anchor": 60, "under-way": 60 },
   call: { alongside: 240, "at-anchor": 480, "under-way": 720 },
   /**
-   * What whoever is called still needs to find the cause, for each nat that is open. On the shipped tree a nat costs 75 to
-   * 250 minutes of looking once the first ten minutes are over, and those who come have the same looks to make.
+   * What whoever is called still needs to find the cause, for each nat that is open: they have the same looks to make. A judgement;
+   * SPEC.md [C7] says what it was held against.
    */
   helperFinds: 150,
 } as const;

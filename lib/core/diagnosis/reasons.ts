@@ -46,7 +46,8 @@ function leadOf(model: Model, evidence: Evidence, step: NextStep, clears: readon
     case "cheaper-than-trying":
       return "Looking on is still cheaper than trying parts or calling.";
     case "nothing-better":
-      if (evidence.standing?.mayNotStart) return "While it must not be started no repair can be proved here.";
+      if (evidence.standing?.mayNotStart)
+        return "While it must not be started no repair can be proved here: first do what lifts the rule, if that can be done.";
       return "Nothing left to look at or to try here is likely to pay for its time.";
     case "likely-cure":
     case "tells-most":

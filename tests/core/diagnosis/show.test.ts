@@ -97,6 +97,15 @@ describe("what a screen shows", () => {
     ]);
   });
 
+  it("[N11] shows what is best to do all the same where it says to call, with its reason, steps and answers", () => {
+    const phone = new Device(1);
+    const tried = (remedy: string) => phone.tell("remedy-tried", { remedy, result: "no-change", photos: [] });
+    const { step } = ask([begin(phone), phone.answer("vacuum", "high"), tried("element"), tried("decoke")]);
+    expect(step).toMatchObject({ kind: "call", minutes: 240, goOn: { kind: "check", key: "colour", ask: "colour?", goOn: null } });
+    expect(step?.goOn?.steps.length).toBeGreaterThan(0);
+    expect(step?.goOn?.answers.map(({ finding }) => finding)).toEqual(["clear", "black"]);
+  });
+
   it("[X4] gives a reason from the numbers, [X5] and safety steps in place", () => {
     const phone = new Device(1);
     const log = [begin(phone)];

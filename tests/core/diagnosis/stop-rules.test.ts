@@ -217,7 +217,7 @@ describe("stop rules", () => {
     expect(view(locked, log).step).toMatchObject({
       kind: "call",
       goOn: null,
-      why: "While it must not be started no repair can be proved here.",
+      why: "While it must not be started no repair can be proved here: first do what lifts the rule, if that can be done.",
     });
     log.push(phone.answer("hand", "cool", { supersedes: log.at(-1)!.id }));
     expect(view(locked, log).step?.kind).not.toBe("call");
