@@ -56,12 +56,12 @@ test("a cold start leads to a proved cure and stands in the log step by step", a
   const { document: tree } = await fleet.tree();
 
   await say(page, fleet, engine.id, "takes forever to start in the morning", "Slow to start from cold");
-  await playAt(page, tree, "battery-discharged");
+  await playAt(page, tree, "glow-plug-failed");
   await logIt(page, (engine.hours ?? 0) + 3);
 
   await expect(async () => {
     const [newest] = await fleet.log(engine.id);
-    expect(newest).toMatchObject({ outcome: "cured", cause: { key: "battery-discharged" } });
+    expect(newest).toMatchObject({ outcome: "cured", cause: { key: "glow-plug-failed" } });
   }).toPass();
   await page.getByRole("link", { name: "Step by step in the log" }).click();
   await expect(page.getByRole("heading", { name: "Slow to start from cold" })).toBeVisible();
