@@ -6,8 +6,11 @@ import { AT_REST, type Evidence, type Standing } from "./evidence";
 import { ExpectedCost, type BestTry } from "./expected-cost";
 import { firstSteps, type Pinned } from "./first-steps";
 import { Gates, type StepRef } from "./gates";
+import { inTheDark } from "./in-the-dark";
 import type { Model, RemedyModel } from "./model";
+import { optionsOf } from "./options";
 import { PlanAhead, type Act } from "./plan-ahead";
+import { PlanChecks } from "./plan-checks";
 
 /** So many of the most telling checks for their minutes are looked at one step ahead. */
 const LOOKED_AT = 12;
@@ -67,37 +70,48 @@ const CALL = { kind: "call", key: "call", gateTo: null } as const;
 
 function reckoned(model: Model, evidence: Evidence, gates: Gates, shares: Float64Array): NextStep {
   const standing = evidence.standing ?? AT_REST;
+  const options = optionsOf(model, gates, standing);
+  const candidates = candidatesOf(model, evidence, gates, shares);
+  /** The act as a step, or what has to come before it. */
+  const stepOf = (own: StepRef, gate: StepRef | null, because: Because, expected: number): NextStep => {
+    const ref = gate ?? own;
+    return { ...ref, because, gateTo: gate && own, minutes: minutesOf(model, standing, ref), expected, shares, goOn: null };
+  };
+  const asking = (candidate: Candidate, because: Because, expected: number): NextStep =>
+    stepOf({ kind: "check", key: candidate.check.key }, candidate.gate, because, expected);
+  const [mostTelling] = candidates;
+  const dark = inTheDark(model, options, shares, candidates);
+  if (mostTelling && dark !== null) return asking(mostTelling, "tells-most", dark);
+
   const kept = keptOf(model, shares);
   const weights = weightsOf(kept, shares);
-  const cost = new ExpectedCost(model, gates, standing, kept);
+  const cost = new ExpectedCost(options, model, kept);
   const trying = cost.from(weights);
-  const candidates = usable(candidatesOf(model, evidence, gates, shares), weights, kept);
-  const plan = new PlanAhead(candidates, cost, kept);
-  const looks = candidates.slice(0, LOOKED_AT).map((_, place) => ({ place, value: plan.worthOf({ kind: "check", place }, weights, 0) }));
+  const later = usable(candidates, weights, kept);
+  const beliefs = Math.round(Math.min(BELIEFS.most, Math.max(BELIEFS.least, WORK / (kept.length * Math.max(1, later.length)))));
+  const plan = new PlanAhead(new PlanChecks(later, kept), cost, weights, beliefs);
+  const looks = later.slice(0, LOOKED_AT).map((_, place) => ({ place, value: plan.worthOf({ kind: "check", place }, 0) }));
   const thought = thoughtThrough(looks, trying);
-  const beliefs = Math.round(Math.min(BELIEFS.most, Math.max(BELIEFS.least, WORK / (kept.length * Math.max(1, candidates.length)))));
-  const keyOf = ({ kind, place }: Act): string =>
-    kind === "check" ? candidates[place]!.check.key : model.remedies[cost.options[place]!.at]!.key;
+  const keyOf = ({ kind, place }: Act): string => (kind === "check" ? later[place]!.check.key : cost.options[place]!.remedy.key);
   let best: Chosen | null = null;
   for (const act of thought) {
-    const value = plan.worthOf(act, weights, beliefs);
+    const value = plan.worthOf(act, beliefs);
     if (!best || value < best.value - SAME || (value < best.value + SAME && keyOf(act) < keyOf(best.act))) best = { act, value };
   }
   best = putOff(best, plan, cost, weights, trying) ?? best;
-  const helpersMinutes = Float64Array.from(kept, (index) => model.helpersMinutes[index]!);
-  const calling = callingMinutes({ callMinutes: model.callMinutes, helpersMinutes }, weights);
-  /** The act as a step, or what has to come before it. */
-  const stepOf = ({ act, value }: Chosen): NextStep => {
-    const own: StepRef = { kind: act.kind, key: keyOf(act) };
-    const gate = act.kind === "check" ? candidates[act.place]!.gate : gateBefore(gates, model.remedies[cost.options[act.place]!.at]!);
-    const ref = gate ?? own;
-    const telling = act.kind === "check" && looks[act.place]!.value < trying.minutes - SAME;
-    const because = act.kind === "remedy" ? "likely-cure" : telling ? "tells-most" : "cheaper-than-trying";
-    return { ...ref, because, gateTo: gate && own, minutes: minutesOf(model, standing, ref), expected: value, shares, goOn: null };
+  const actOf = ({ act, value }: Chosen): NextStep => {
+    if (act.kind === "check") {
+      const telling = looks[act.place]!.value < trying.minutes - SAME;
+      return asking(later[act.place]!, telling ? "tells-most" : "cheaper-than-trying", value);
+    }
+    const { remedy } = cost.options[act.place]!;
+    return stepOf({ kind: "remedy", key: remedy.key }, gateBefore(gates, remedy), "likely-cure", value);
   };
-  if (best && best.value < calling - SAME) return stepOf(best);
+  const helpersMinutes = Float64Array.from(kept, (index) => model.helpersMinutes[index]!);
+  const calling = callingMinutes({ callMinutes: model.callMinutes, helpersMinutes, helperFinds: model.helperFinds }, weights);
+  if (best && best.value < calling - SAME) return actOf(best);
   const [act] = thought;
-  const goOn = act ? stepOf({ act, value: plan.worthOf(act, weights, 0) }) : null;
+  const goOn = act ? actOf({ act, value: plan.worthOf(act, 0) }) : null;
   return { ...CALL, because: "nothing-better", minutes: model.callMinutes, expected: calling, shares, goOn };
 }
 
@@ -133,8 +147,8 @@ function weightsOf(kept: readonly number[], shares: Float64Array): Float64Array 
 function putOff(best: Chosen | null, plan: PlanAhead, cost: ExpectedCost, weights: Float64Array, trying: BestTry): Chosen | null {
   const option = trying.option;
   if (best?.act.kind !== "check" || option === null || cost.chanceOf(option, weights) < LONG_SHOT) return null;
-  const asking = plan.worthOf(best.act, weights, 0);
-  const after = plan.worthOf({ kind: "remedy", place: option }, weights, 0, best.act);
+  const asking = plan.worthOf(best.act, 0);
+  const after = plan.worthOf({ kind: "remedy", place: option }, 0, best.act);
   if (asking < after - SAME) return null;
   return { act: { kind: "remedy", place: option }, value: after };
 }
@@ -154,8 +168,9 @@ function usable(candidates: readonly Candidate[], weights: Float64Array, kept: r
   const count = Math.min(SHOWN_SOONEST, kept.length);
   const soonest = new Int32Array(count).fill(-1);
   const most = new Float64Array(count);
+  const tells = new Float64Array(count);
   candidates.forEach(({ outcomes, minutes, learns }, candidate) => {
-    const tells = new Float64Array(count);
+    tells.fill(0);
     for (const row of outcomes.predict) {
       let chance = 0;
       for (let place = 0; place < kept.length; place++) chance += weights[place]! * row[kept[place]!]!;
