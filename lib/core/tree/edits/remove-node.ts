@@ -34,11 +34,7 @@ const UNLINKED: Readonly<Partial<Record<ListName, (tree: FaultTree, key: string)
     checks: tree.checks.map((check): Check => ({
       ...check,
       firstFor: without(check.firstFor, key),
-      findings: check.findings.map((finding): Finding => {
-        if (finding.restates !== key) return finding;
-        const { restates: _gone, ...rest } = finding;
-        return rest;
-      }),
+      findings: check.findings.map((finding): Finding => (finding.restates === key ? { ...finding, restates: undefined } : finding)),
     })),
     stopRules: tree.stopRules.map((rule): StopRule => ({
       ...rule,
