@@ -92,10 +92,14 @@ export function HandOver() {
           <HandOverPart title="Cranked since it last ran" lines={[`${Math.round(facts.crankSeconds)} s`]} none="" />
         )}
       </div>
-      <div className="no-print mt-5 grid gap-5">
-        <HandOverPosition position={position} onPosition={setPosition} />
+      <div className="mt-5 grid gap-5">
+        <div className="no-print">
+          <HandOverPosition position={position} onPosition={setPosition} />
+        </div>
         <HandOverMessage facts={facts} />
         <HandOverRadio facts={facts} />
+      </div>
+      <div className="no-print mt-5 grid gap-5">
         <Button size="large" wide onClick={() => window.print()}>
           Print this page
         </Button>

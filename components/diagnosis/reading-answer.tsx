@@ -5,6 +5,7 @@ import { figure, readGauge } from "@/lib/client/read-gauge";
 import type { StepShown } from "@/lib/core/diagnosis/view";
 import { unitsOf } from "@/lib/core/units/units";
 import { Button } from "@/components/ui/button";
+import { Form } from "@/components/ui/form";
 import { inputLook } from "@/components/ui/field";
 import { unitSign } from "./unit-sign";
 
@@ -31,8 +32,7 @@ export function ReadingAnswer({ of, scale, kept, given, onRead }: Props) {
   const good = read && "band" in read ? read : null;
   const id = `reading-${of}`;
   return (
-    <form
-      noValidate
+    <Form
       onSubmit={(event) => {
         event.preventDefault();
         setTried(true);
@@ -77,7 +77,7 @@ export function ReadingAnswer({ of, scale, kept, given, onRead }: Props) {
       <Button type="submit" tone="strong" size="large" wide aria-disabled={given}>
         {good ? `Enter ${figure(good.value)} ${unitSign(unit)}` : "Enter the reading"}
       </Button>
-    </form>
+    </Form>
   );
 }
 

@@ -47,7 +47,7 @@ export function PickOrSay({ id, label, hint, options, suggested = [], value, onC
     );
   }
   const typed = value.words.trim();
-  const hits = typed.length > 1 ? find(typed) : options.filter(({ key }) => suggested.includes(key));
+  const hits = typed.length > 1 ? find(typed) : suggested.flatMap((key) => options.filter((option) => option.key === key));
   return (
     <div className="grid gap-2">
       <TextField
