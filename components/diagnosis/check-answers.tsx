@@ -2,6 +2,7 @@
 
 import type { CheckAsked } from "@/lib/client/check-shown";
 import { keptWith } from "@/lib/client/kept-with";
+import { saidTogether } from "@/lib/client/said-together";
 import type { EventOf } from "@/lib/core/contract/event";
 import { AnswerForm } from "./answer-form";
 import { useHere } from "./here";
@@ -20,7 +21,7 @@ export function CheckAnswers({ asked, before }: Props) {
         onAnswer={async ({ answer, says, withdraws, note, photos }) => {
           const payload = { check: asked.key, answer, ...keptWith(before?.payload, { note, photos }) };
           const event = await record("answered", payload, before?.id);
-          setUndo({ event: event.id, says: `${asked.title}: ${says}`, withdraws });
+          setUndo({ event: event.id, says: saidTogether(asked.title, says), withdraws });
           // Whoever came from the list of answers goes back to it.
           if (address.at === "change") go("said", undefined, "replace");
           else goOnFrom(event.id);

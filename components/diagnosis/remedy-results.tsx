@@ -1,6 +1,7 @@
 "use client";
 
 import { keptWith } from "@/lib/client/kept-with";
+import { saidTogether } from "@/lib/client/said-together";
 import type { EventOf } from "@/lib/core/contract/event";
 import { useHere } from "./here";
 import { RemedyResultForm } from "./remedy-result-form";
@@ -20,7 +21,7 @@ export function RemedyResults({ remedy, before }: Props) {
       onResult={async ({ result, proof, note, photos, says }) => {
         const payload = { remedy: remedy.key, result, ...(proof ? { proof } : {}), ...keptWith(before?.payload, { note, photos }) };
         const event = await record("remedy-tried", payload, before?.id);
-        setUndo({ event: event.id, says: `${remedy.title}: ${says}`, withdraws: null });
+        setUndo({ event: event.id, says: saidTogether(remedy.title, says), withdraws: null });
         if (address.at === "change") return go("said", undefined, "replace");
         goOnFrom(event.id);
         if (result === "cured") go("outcome");

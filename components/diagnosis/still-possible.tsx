@@ -70,8 +70,8 @@ export function StillPossible() {
       </div>
       {complaints > 1 && (
         <p className="mt-1 text-sm text-ink-2">
-          Reckoned as one fault behind all {inWords(complaints)} complaints. If they came at different times there may be two: begin a
-          diagnosis for each.
+          Reckoned as one fault behind {complaints === 2 ? "both" : `all ${inWords(complaints)}`} complaints. If they came at different
+          times there may be two: begin a diagnosis for each.
         </p>
       )}
     </section>

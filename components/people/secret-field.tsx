@@ -33,7 +33,7 @@ export function SecretField({ id, name, label, hint, autoComplete, error }: Prop
           <button
             type="button"
             aria-pressed={shown}
-            aria-label={`Show: ${label}`}
+            aria-label="Show what is typed"
             onClick={() => setShown(!shown)}
             className="link absolute inset-y-0 right-0 min-w-16 px-3 text-sm"
           >

@@ -1,6 +1,7 @@
 "use client";
 
 import Link from "next/link";
+import { Button } from "@/components/ui/button";
 import { Notice } from "@/components/ui/notice";
 import type { FormState } from "@/lib/core/contract/form-state";
 import { ActionForm } from "./action-form";
@@ -14,12 +15,12 @@ const inTheMail = (says: string, given: FormData, again: () => void) => (
   <Notice tone="good" title="Look in your mail" live>
     <p>{says}</p>
     <p className="mt-1">
-      It goes to <b>{String(given.get("email"))}</b>. Nothing there after some minutes? Look where unwanted mail is put, or{" "}
-      <button type="button" className="link min-h-12" onClick={again}>
-        send it again, or to another address
-      </button>
-      .
+      It goes to <b className="break-all">{String(given.get("email"))}</b>. Nothing there after some minutes? Look where unwanted mail is
+      put.
     </p>
+    <Button className="mt-3" onClick={again}>
+      Send it again, or to another address
+    </Button>
   </Notice>
 );
 

@@ -7,7 +7,7 @@ export function Checkbox({
   ...rest
 }: Omit<ComponentProps<"input">, "type" | "className"> & { children: ReactNode; /** What the tick does. */ hint?: ReactNode }) {
   return (
-    <label className="flex min-h-12 items-center gap-3">
+    <label className={hint ? "flex min-h-12 items-start gap-3 py-2.5" : "flex min-h-12 items-center gap-3"}>
       <span className="relative grid size-6 flex-none place-items-center">
         <input
           type="checkbox"

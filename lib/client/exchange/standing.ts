@@ -19,7 +19,7 @@ export function standingInShort(standing: Standing, unsaved: boolean): string {
   if (standing.waiting > 0) return `Kept here: ${standing.waiting} to send`;
   if (standing.trouble === "sign-in") return "Signed out: kept here";
   if (standing.trouble !== null) return "Kept here";
-  return standing.ashoreAt ? `All ashore ${clock(standing.ashoreAt)}` : "Kept on this phone";
+  return standing.ashoreAt ? `Kept ashore ${clock(standing.ashoreAt)}` : "Kept on this phone";
 }
 
 /** The whole sentence, for the line under the screen. */

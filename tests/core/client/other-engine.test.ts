@@ -42,7 +42,7 @@ describe("does the other engine do it too?", () => {
 
   it("stands among the answers, where it can be changed like any other, and so does that nobody can tell", async () => {
     const saidOf = async (said: string) => (await begun(TWINS, said)).said.find(({ key }) => key === "other-engine");
-    expect(await saidOf("both")).toMatchObject({ kind: "answered", says: "Yes, the other does it too", mayChange: true });
+    expect(await saidOf("both")).toMatchObject({ kind: "answered", says: "The other does it too", mayChange: true });
     expect(await saidOf("cannot-tell")).toMatchObject({ kind: "answered", mayChange: true });
   });
 
