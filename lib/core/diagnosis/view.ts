@@ -56,12 +56,13 @@ export type RuleShown = {
   ask: string | null;
   because: string;
   says: readonly string[];
+  /** The one exception holds: run on to safety where stopping now endangers people or boat. */
   runOn: boolean;
   clearedWhen: string | null;
 };
 
-/** `due`: to be asked now. `event`: the answer that a change takes the place of. */
-export type RuleAnswered = RuleShown & { due: boolean; answer: "yes" | "no" | null; event: string | null };
+/** `due`: to be asked now. `found`: in force by what was found or cranked, not by a yes. `event`: the answer that a change takes the place of. */
+export type RuleAnswered = RuleShown & { due: boolean; answer: "yes" | "no" | null; found: boolean; event: string | null };
 
 export type CautionShown = { key: string; signal: Signal; says: string };
 
