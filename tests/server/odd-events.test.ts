@@ -153,7 +153,8 @@ describe("a diagnosis", () => {
     const other = uuidv7();
     const features = Object.fromEntries(many.map((i) => [`feature-${i}`, "yes"]));
     const begun = phoneOf(other).begin(ines.engineId, treeId, { profile: { features, figures: {}, healthy: {} } });
-    await expect(post(other, [begun])).rejects.toMatchObject({ status: 404 });
+    expect(await post(other, [begun])).toMatchObject([{ result: "rejected", because: expect.stringMatching(/more than an engine has/) }]);
+    await expect(read((scope) => getDiagnosis(scope, other))).rejects.toMatchObject({ status: 404 });
   });
 });
 

@@ -1,6 +1,5 @@
 import "server-only";
-import { and, asc, eq } from "drizzle-orm";
-import { diagnoses } from "@/db/schema/diagnoses";
+import { and, eq } from "drizzle-orm";
 import { hourReadings } from "@/db/schema/boats";
 import { logEntries } from "@/db/schema/log-entries";
 import type { LogEntry, NewRepair } from "@/lib/core/contract/log";
@@ -12,7 +11,6 @@ import { canonical } from "@/lib/server/trees/content-hash";
 import { documentOf, getCurrentTreeVersion } from "@/lib/server/trees/queries";
 import { notAhead } from "@/lib/server/web/not-ahead";
 import { namesOf, unknownIn } from "./outcome-names";
-import { projectDiagnosis } from "./project-diagnosis";
 import { getLogEntry } from "./queries";
 
 /** Writes a repair into an engine's log that was done without a diagnosis. Sent twice it is one line. */
@@ -100,14 +98,3 @@ const asSent = ({
   cause: causeKey ?? causeTitle,
   remedy: remedyKey ?? remedyTitle,
 });
-
-/** Works out every diagnosis' line of the log anew from its events, as after a mend of the fold. Gives the number of diagnoses. */
-export async function rebuildLog(scope: FleetScope<"log:write">): Promise<number> {
-  const rows = await scope.tx
-    .select({ id: diagnoses.id })
-    .from(diagnoses)
-    .where(and(eq(diagnoses.fleetId, scope.fleetId)))
-    .orderBy(asc(diagnoses.id));
-  for (const { id } of rows) await projectDiagnosis(scope, id);
-  return rows.length;
-}

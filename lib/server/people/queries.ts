@@ -79,6 +79,14 @@ export async function fleetsOf({ userId }: { userId: string }): Promise<{ id: st
   return named;
 }
 
+/** Somebody of every fleet: work that is done for all fleets runs behind each one's wall. */
+export async function memberOfEachFleet(): Promise<{ fleetId: string; userId: string }[]> {
+  return identityDatabase()
+    .selectDistinctOn([memberships.fleetId], { fleetId: memberships.fleetId, userId: memberships.userId })
+    .from(memberships)
+    .orderBy(asc(memberships.fleetId), asc(memberships.userId));
+}
+
 export async function getFleet(scope: FleetScope): Promise<Fleet> {
   const [row] = await scope.tx.select().from(fleets).where(eq(fleets.id, scope.fleetId));
   if (!row) throw Problem.notFound();
