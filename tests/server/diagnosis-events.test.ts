@@ -10,7 +10,7 @@ import { withScope } from "@/lib/server/auth/scope";
 import { recordEvents, type PostedEvent } from "@/lib/server/diagnoses/commands";
 import { getDiagnosis, getEvents, listDiagnoses } from "@/lib/server/diagnoses/queries";
 import { readStory } from "@/lib/server/diagnoses/story";
-import { listHourReadings } from "@/lib/server/engines/queries";
+import { listHourReadings } from "@/lib/server/engines/readings";
 import { rebuildLog, rebuildLogs } from "@/lib/server/log/rebuild-logs";
 import { getLogEntry } from "@/lib/server/log/queries";
 import { afloat, phoneOf, shipTree, type Afloat } from "../support/afloat";
@@ -75,7 +75,12 @@ describe("events from an outbox", () => {
       minutes: 40,
       by: "Ines",
     });
-    const readings = await withScope(ines.person, ines.fleetId, "fleet:read", (scope) => listHourReadings(scope, ines.engineId));
+    const readings = await withScope(
+      ines.person,
+      ines.fleetId,
+      "fleet:read",
+      async (scope) => (await listHourReadings(scope, ines.engineId)).items,
+    );
     expect(readings.map((r) => [r.id, r.reading])).toContainEqual([events[5]?.id, 100]);
   });
 
@@ -210,7 +215,8 @@ describe("two phones on one diagnosis", () => {
     await post(id, [phone.write("taken-up-again", {})]);
     expect(await diagnosis(id)).toMatchObject({ outcome: null, endedAt: null });
     expect(await entry(id)).toMatchObject({ outcome: null, cause: null });
-    const readings = () => withScope(ines.person, ines.fleetId, "fleet:read", (scope) => listHourReadings(scope, ines.engineId));
+    const readings = () =>
+      withScope(ines.person, ines.fleetId, "fleet:read", async (scope) => (await listHourReadings(scope, ines.engineId)).items);
     expect((await readings()).map((r) => r.id)).not.toContain(events[5]?.id);
     const again = phone.write("ended", { outcome: "held", causeInWords: "  Rag in the tank outlet ", engineHours: 151, parts: [] });
     await post(id, [again]);

@@ -48,6 +48,7 @@ export const invitationOf = (row: typeof invitations.$inferSelect): Invitation =
   invitedByName: row.invitedByName,
   createdAt: row.createdAt.toISOString(),
   expiresAt: row.expiresAt.toISOString(),
+  sentAt: row.sentAt?.toISOString() ?? null,
 });
 
 export type PeekedInvitation = Invitation & { fleetId: string; fleetName: string; hasAccount: boolean };
