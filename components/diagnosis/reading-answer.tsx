@@ -3,10 +3,10 @@
 import { useState } from "react";
 import { figure, readGauge } from "@/lib/client/read-gauge";
 import type { StepShown } from "@/lib/core/diagnosis/view";
+import { unitSign } from "@/lib/core/units/unit-sign";
 import { unitsOf } from "@/lib/core/units/units";
 import { Button } from "@/components/ui/button";
 import { inputLook } from "@/components/ui/field";
-import { unitSign } from "./unit-sign";
 
 type Props = {
   of: string;
