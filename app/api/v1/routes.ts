@@ -21,6 +21,12 @@ import * as phone from "./fleets/[fleetId]/phone/route";
 import * as repeats from "./fleets/[fleetId]/repeats/route";
 import * as fleet from "./fleets/[fleetId]/route";
 import * as trees from "./fleets/[fleetId]/trees/route";
+import * as treeDraft from "./fleets/[fleetId]/trees/draft/route";
+import * as publication from "./fleets/[fleetId]/trees/draft/publication/route";
+import * as treeDraftFile from "./fleets/[fleetId]/trees/draft/file/route";
+import * as loggedCases from "./fleets/[fleetId]/trees/logged-cases/route";
+import * as treeReading from "./fleets/[fleetId]/trees/reading/route";
+import * as treeVersionFile from "./fleets/[fleetId]/trees/versions/[versionId]/file/route";
 import * as treeVersion from "./fleets/[fleetId]/trees/versions/[versionId]/route";
 import * as me from "./me/route";
 
@@ -44,7 +50,13 @@ export const routes: Routes = {
   "/fleets/{fleetId}/diagnoses/{diagnosisId}/story": story,
   "/fleets/{fleetId}/files/{fileId}": file,
   "/fleets/{fleetId}/trees": trees,
+  "/fleets/{fleetId}/trees/draft": treeDraft,
+  "/fleets/{fleetId}/trees/draft/file": treeDraftFile,
+  "/fleets/{fleetId}/trees/draft/publication": publication,
+  "/fleets/{fleetId}/trees/logged-cases": loggedCases,
+  "/fleets/{fleetId}/trees/reading": treeReading,
   "/fleets/{fleetId}/trees/versions/{versionId}": treeVersion,
+  "/fleets/{fleetId}/trees/versions/{versionId}/file": treeVersionFile,
   "/fleets/{fleetId}/phone": phone,
   "/fleets/{fleetId}/people": people,
   "/fleets/{fleetId}/people/{userId}": person,
