@@ -12,6 +12,7 @@ import { dayOf, isAhead, momentOf, today } from "@/components/form/day-typed";
 import { asTyped, typedNumber } from "@/components/form/typed-number";
 import { useSave } from "@/components/form/use-save";
 import { Choice } from "@/components/ui/choice";
+import { Form } from "@/components/ui/form";
 import { TextField } from "@/components/ui/text-field";
 import { sendJson } from "@/lib/client/exchange/request";
 import type { Reading } from "@/lib/core/contract/engine";
@@ -59,7 +60,7 @@ export function HourEntry({ fleetId, engineId, standing }: Props) {
   const { errors } = form.formState;
   const says = refusal?.errors.find(({ path }) => path === "reading")?.says;
   return (
-    <form className="grid gap-4" onSubmit={submit} noValidate>
+    <Form className="grid gap-4" onSubmit={submit}>
       <div className="grid gap-4 sm:grid-cols-2">
         <TextField
           id="reading"
@@ -87,6 +88,6 @@ export function HourEntry({ fleetId, engineId, standing }: Props) {
         refusal={says ? null : refusal}
         done={saved && (standing ? "Corrected." : "Written down.")}
       />
-    </form>
+    </Form>
   );
 }

@@ -9,6 +9,7 @@ import { CorrectedMeanwhile } from "@/components/form/corrected-meanwhile";
 import { FormEnd } from "@/components/form/form-end";
 import { useSave } from "@/components/form/use-save";
 import { Choice } from "@/components/ui/choice";
+import { Form } from "@/components/ui/form";
 import { Segmented } from "@/components/ui/segmented";
 import { Select } from "@/components/ui/select";
 import { TextArea } from "@/components/ui/text-area";
@@ -16,7 +17,7 @@ import { TextField } from "@/components/ui/text-field";
 import { sendJson } from "@/lib/client/exchange/request";
 import type { Repair } from "@/lib/core/contract/log";
 import { PartFields } from "./part-fields";
-import { PickOrSay, type Said } from "./pick-or-say";
+import { PickOrSay, type Said } from "@/components/form/pick-or-say";
 import type { RepairChoices } from "./repair-choices";
 import { newRepair, NO_REPAIR, repairChange, RepairValues, valuesOf } from "./repair-values";
 
@@ -69,7 +70,7 @@ export function RepairForm({ fleetId, engineId, hasHourMeter, choices, standing 
   });
   const hoursSay = refusal?.errors.find(({ path }) => path === "engineHours")?.says;
   return (
-    <form className="grid max-w-2xl gap-5" onSubmit={submit} noValidate>
+    <Form className="grid max-w-2xl gap-5" onSubmit={submit}>
       <div className="grid gap-4 sm:grid-cols-2">
         <TextField id="day" type="date" label="Done on" error={errors.day?.message} {...register("day")} />
         {hasHourMeter && (
@@ -146,6 +147,6 @@ export function RepairForm({ fleetId, engineId, hasHourMeter, choices, standing 
         refusal={hoursSay ? null : refusal}
         wrong={Object.keys(errors).length > 0}
       />
-    </form>
+    </Form>
   );
 }

@@ -13,7 +13,7 @@ export type CausalOrder = {
 
 /**
  * Orders a log by who knew what: device and sequence, and the heads each event
- * says it had seen. The same for any order of arrival and any repeats. Rules [F1], [F2], [F8].
+ * says it had seen. The same for any order of arrival and any repeats. Rules [F1], [F2], [F9].
  */
 export function causalOrder(log: readonly DiagnosisEvent[]): CausalOrder {
   const events = distinct(log);
@@ -79,7 +79,7 @@ function clocksOf(events: readonly DiagnosisEvent[]): ReadonlyMap<string, Clock>
  * The newest event of another device that this one is believed to have seen. A
  * head that the log does not have counts up to what there is, and never to an
  * event whose device says it saw this one before: a phone cannot claim what is
- * still to be said. Rule [F8].
+ * still to be said. Rule [F9].
  */
 function believedHead(event: DiagnosisEvent, theirs: readonly DiagnosisEvent[], claimed: number): DiagnosisEvent | undefined {
   const upTo = theirs.filter(({ sequence }) => sequence <= claimed);

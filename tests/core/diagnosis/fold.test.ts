@@ -138,7 +138,7 @@ describe("the fold of a log", () => {
     expect(state.profile.figures.ratedRpm).toBe(3000);
   });
 
-  describe("[F8] heads that the log does not have", () => {
+  describe("[F9] heads that the log does not have", () => {
     /** A log in which some events claim to have seen far more than was ever said. */
     const boastfulLog = fc
       .tuple(anyLog, fc.array(fc.tuple(fc.nat(99), fc.integer({ min: 1, max: 4 }), fc.constantFrom(1, 7, 40, 2 ** 31 - 1))))
