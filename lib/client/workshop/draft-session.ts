@@ -97,3 +97,9 @@ export function tookUp(session: DraftSession, base: FaultTree, newer: { id: stri
     takesUp: newer.id,
   };
 }
+
+/** Takes in what an earlier draft still had to save when it was closed. */
+export function broughtOver(session: DraftSession, earlier: DraftSession): DraftSession {
+  const { tree, collisions } = mergeTrees(earlier.saved.document, earlier.tree, session.tree);
+  return { ...edited(session, tree, "Brought over from the draft before"), collisions: [...session.collisions, ...collisions] };
+}
