@@ -11,7 +11,6 @@ import {
   type Edge,
   type Node,
   type NodeChange,
-  applyNodeChanges,
 } from "@xyflow/react";
 import { useCallback, useEffect, useMemo, useRef, useState } from "react";
 import { drawnPart } from "@/components/tree/drawn-part";
@@ -53,52 +52,50 @@ function Canvas({ bench, graph, symptom, node: open, onOpen }: Props) {
   const clipboard = useRef<Fragment | null>(null);
   const part = useMemo(() => drawnPart(graph), [graph]);
   const places = useMemo(() => placesOf(part), [part]);
-  const laidOut = useMemo(
+  const [picked, setPicked] = useState<ReadonlySet<string>>(new Set());
+  const idOfOpen = open === null ? null : idOf(open, symptom);
+  const nodes = useMemo(
     () =>
-      nodesOf(part, places, true).map((node): Node => {
-        const at = moved[node.id];
-        return at ? { ...node, position: at } : node;
-      }),
-    [part, places, moved],
+      nodesOf(part, places, true).map((node): Node => ({
+        ...node,
+        position: moved[node.id] ?? node.position,
+        selected: picked.has(node.id) || (picked.size === 0 && node.id === idOfOpen),
+      })),
+    [part, places, moved, picked, idOfOpen],
   );
-  const [nodes, setNodes] = useState(laidOut);
-  useEffect(() => setNodes((now) => keepSelection(laidOut, now)), [laidOut]);
   const edges = useMemo(
     () =>
-      edgesOf(part).map((edge): Edge => ({
-        ...edge,
-        id: linkId(edge.source, edge.sourceHandle ?? null, edge.target),
-        selected: chosenLink === linkId(edge.source, edge.sourceHandle ?? null, edge.target),
-        focusable: true,
-      })),
+      edgesOf(part).map((edge): Edge => {
+        const id = linkId(edge.source, edge.sourceHandle ?? null, edge.target);
+        return { ...edge, id, selected: chosenLink === id, focusable: true };
+      }),
     [part, chosenLink],
   );
-  const idOfOpen = open === null ? null : idOf(open, symptom);
   useEffect(() => {
-    if (idOfOpen === null) return;
-    setNodes((now) =>
-      now.some(({ id, selected }) => id === idOfOpen && !selected) ? now.map((node) => ({ ...node, selected: node.id === idOfOpen })) : now,
-    );
-    void fitView({ nodes: [{ id: idOfOpen }], minZoom: 0.5, maxZoom: 1, duration: 200 });
+    if (idOfOpen !== null) void fitView({ nodes: [{ id: idOfOpen }], minZoom: 0.5, maxZoom: 1, duration: 200 });
   }, [idOfOpen, fitView]);
 
+  // Nodes are the tree's: of what the picture says of them only choosing and moving is taken.
   const onNodesChange = useCallback(
     (changes: NodeChange[]) => {
-      setNodes((now) =>
-        applyNodeChanges(
-          changes.filter(({ type }) => type !== "remove"),
-          now,
-        ),
+      const selects = changes.filter((change) => change.type === "select");
+      if (selects.length > 0)
+        setPicked((now) => {
+          const next = new Set(now);
+          for (const { id, selected } of selects)
+            if (selected) next.add(id);
+            else next.delete(id);
+          return next;
+        });
+      const positions = changes.flatMap((change) =>
+        change.type === "position" && change.position ? [[change.id, change.position] as const] : [],
       );
-      const settled = changes.flatMap((change) =>
-        change.type === "position" && change.dragging === false && change.position ? [[change.id, change.position] as const] : [],
-      );
-      if (settled.length === 0) return;
-      setMoved((now) => {
-        const next = { ...now, ...Object.fromEntries(settled) };
-        keepHandPlaces(draftId, symptom, next);
-        return next;
-      });
+      if (positions.length > 0)
+        setMoved((now) => {
+          const next = { ...now, ...Object.fromEntries(positions) };
+          keepHandPlaces(draftId, symptom, next);
+          return next;
+        });
     },
     [draftId, symptom],
   );
@@ -124,13 +121,13 @@ function Canvas({ bench, graph, symptom, node: open, onOpen }: Props) {
       return setChosenLink(null);
     }
     let without = tree;
-    const picked = nodes.filter(({ selected }) => selected).map(({ id }) => refOf(id, symptom));
-    for (const { list, key } of picked) {
+    const chosen = nodes.filter(({ selected }) => selected).map(({ id }) => refOf(id, symptom));
+    for (const { list, key } of chosen) {
       const removed = removeNode(without, list, key);
       if ("refused" in removed) return bench.refused.set(removed.refused);
       without = removed.tree;
     }
-    bench.edit(without, picked.length === 1 ? `${picked[0]?.key ?? ""} taken out` : `${picked.length} nodes taken out`);
+    bench.edit(without, chosen.length === 1 ? `${chosen[0]?.key ?? ""} taken out` : `${chosen.length} nodes taken out`);
     onOpen(null);
   };
   const copyChosen = () => {
@@ -192,11 +189,6 @@ function Canvas({ bench, graph, symptom, node: open, onOpen }: Props) {
       {chosenLink !== null && <LinkPicker bench={bench} symptom={symptom} id={chosenLink} onClose={() => setChosenLink(null)} />}
     </div>
   );
-}
-
-function keepSelection(laidOut: readonly Node[], before: readonly Node[]): Node[] {
-  const selected = new Set(before.filter((node) => node.selected).map(({ id }) => id));
-  return laidOut.map((node) => (selected.has(node.id) ? { ...node, selected: true } : node));
 }
 
 function refOf(id: string, symptom: string): { list: ListName; key: string } {
