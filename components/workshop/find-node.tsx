@@ -29,7 +29,8 @@ export function FindNode({ tree, onOpen }: Props) {
     >
       <TextField
         id="find-node"
-        label="Find a symptom, check, cause…"
+        label={<span className="visually-hidden">Find a node by its name</span>}
+        placeholder="Find a symptom, check, cause…"
         type="search"
         autoComplete="off"
         value={typed}

@@ -3,13 +3,15 @@
 import { useRouter } from "next/navigation";
 import { useRef, useState } from "react";
 import { Button } from "@/components/ui/button";
+import { LightSwitch } from "@/components/ui/light-switch";
+import { onDeep } from "./on-deep";
 import { Dialog } from "@/components/ui/dialog";
 import { Notice } from "@/components/ui/notice";
 import { NoAnswer, remove, request } from "@/lib/client/exchange/request";
 import type { Workbench } from "@/lib/client/workshop/workbench";
 import { FaultTree } from "@/lib/core/tree/schema";
 
-type Props = { fleetId: string; bench: Workbench; onGone: () => void };
+type Props = { fleetId: string; bench: Workbench };
 
 /** Take the draft along, bring a tree in, give the draft up. */
 export function MoreMenu({ fleetId, bench }: Props) {
@@ -58,9 +60,12 @@ export function MoreMenu({ fleetId, bench }: Props) {
   };
   return (
     <>
-      <Button onClick={() => setOpen(true)}>More</Button>
+      <button type="button" className={onDeep()} onClick={() => setOpen(true)}>
+        More
+      </button>
       <Dialog open={open} onClose={() => setOpen(false)} title="The whole draft">
         <div className="grid gap-5">
+          <LightSwitch />
           {says && (
             <Notice tone={says.tone} live>
               <ul>

@@ -1,6 +1,6 @@
 "use client";
 
-import { Copy, Trash2 } from "lucide-react";
+import { Copy, Trash2, X } from "lucide-react";
 import { useEffect, useMemo, useRef } from "react";
 import { Button } from "@/components/ui/button";
 import type { Workbench } from "@/lib/client/workshop/workbench";
@@ -16,8 +16,7 @@ import type { Place } from "./place";
 type Props = {
   bench: Workbench;
   tree: FaultTree;
-  node: Place["node"];
-  symptom: string;
+  node: NonNullable<Place["node"]>;
   onChange: (list: ListName) => (node: TreeNode, says: string) => void;
   onOpen: (node: Place["node"]) => void;
 };
@@ -54,7 +53,15 @@ export function NodeSheet({ bench, tree, node: open, onChange, onOpen }: Props) 
     onOpen({ list: open.list, key: copy.key });
   };
   return (
-    <aside aria-label="The chosen node" tabIndex={0} className="overflow-y-auto rounded-xl border border-rule bg-sheet p-4 lg:max-h-[85vh]">
+    <aside aria-label="The chosen node" tabIndex={0} className="min-h-0 overflow-y-auto border-l border-rule bg-sheet p-4">
+      <button
+        type="button"
+        aria-label="Close"
+        onClick={() => onOpen(null)}
+        className="float-right inline-flex min-h-12 min-w-12 items-center justify-center rounded-lg border-[1.5px] border-edge bg-sheet"
+      >
+        <X aria-hidden size={22} />
+      </button>
       <p className="text-sm text-ink-2 first-letter:uppercase">{LIST_KINDS[open.list]}</p>
       <h2 ref={heading} tabIndex={-1}>
         {name}

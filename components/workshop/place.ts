@@ -1,10 +1,10 @@
 "use client";
 
-import { usePathname, useRouter, useSearchParams } from "next/navigation";
+import { usePathname, useSearchParams } from "next/navigation";
 import { useCallback, useMemo } from "react";
 import { isListName, type ListName } from "@/lib/core/tree/flaw";
 
-export const VIEWS = ["graph", "table", "order", "try", "prove", "learn"] as const;
+export const VIEWS = ["graph", "table"] as const;
 export type View = (typeof VIEWS)[number];
 
 /** Where in the workshop one is: in the address, so that back, reload and a link to a colleague work. */
@@ -13,12 +13,14 @@ export type Place = { view: View; symptom: string | null; node: { list: ListName
 export function usePlace(): [Place, (to: Partial<Place>) => void] {
   const search = useSearchParams();
   const path = usePathname();
-  const router = useRouter();
   const place = useMemo(() => readPlace(search), [search]);
+  // Not the router's push: nothing on the server changes, and nothing has to be fetched.
   const go = useCallback(
-    (to: Partial<Place>) =>
-      router.push(`${path}?${writePlace({ ...readPlace(new URLSearchParams(window.location.search)), ...to })}`, { scroll: false }),
-    [router, path],
+    (to: Partial<Place>) => {
+      const query = writePlace({ ...readPlace(new URLSearchParams(window.location.search)), ...to });
+      window.history.pushState(null, "", query === "" ? path : `${path}?${query}`);
+    },
+    [path],
   );
   return [place, go];
 }

@@ -14,6 +14,7 @@ import type { Workbench } from "@/lib/client/workshop/workbench";
 import { TreeVersionDocument, type TreeVersionInfo } from "@/lib/core/contract/tree";
 import { compareTrees } from "@/lib/core/tree/differences";
 import type { FaultTree } from "@/lib/core/tree/schema";
+import { onDeep } from "./on-deep";
 import type { Checked } from "./use-checked";
 
 type Props = { fleetId: string; bench: Workbench; checked: Checked; current: TreeVersionInfo };
@@ -23,9 +24,13 @@ export function Publish({ fleetId, bench, checked, current }: Props) {
   const [open, setOpen] = useState(false);
   return (
     <>
-      <Button tone="strong" onClick={() => setOpen(true)}>
+      <button
+        type="button"
+        className={onDeep("bg-on-deep! text-deep! night:bg-transparent! night:text-on-deep!")}
+        onClick={() => setOpen(true)}
+      >
         Publish
-      </Button>
+      </button>
       <Dialog open={open} onClose={() => setOpen(false)} title="Publish the draft">
         {open && <PublishForm fleetId={fleetId} bench={bench} checked={checked} current={current} />}
       </Dialog>

@@ -8,9 +8,9 @@ export function SymptomList({ tree, here, onChoose }: Props) {
   const counts = new Map<string, number>();
   for (const cause of tree.causes) for (const key of Object.keys(cause.shows)) counts.set(key, (counts.get(key) ?? 0) + 1);
   return (
-    <nav aria-label="Symptoms">
+    <nav aria-label="Symptoms" className="flex min-h-0 flex-col">
       <p className="px-2 text-sm text-ink-2">Showing what hangs on</p>
-      <ul className="max-h-[60vh] overflow-y-auto">
+      <ul className="max-h-72 overflow-y-auto lg:max-h-none">
         {tree.symptoms.map(({ key, title }) => (
           <li key={key}>
             <button

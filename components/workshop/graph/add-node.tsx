@@ -36,7 +36,7 @@ export function AddNode({ bench, tree, symptom, onOpen }: Props) {
   };
   return (
     <>
-      <Button className="ml-auto" onClick={() => setOpen(true)}>
+      <Button onClick={() => setOpen(true)}>
         <Plus aria-hidden size={18} /> Add
       </Button>
       <Dialog open={open} onClose={() => setOpen(false)} title="Add to the tree">

@@ -29,7 +29,6 @@ import type { Place } from "../place";
 import { handPlaces, keepHandPlaces } from "./hand-places";
 import { linkBetween, linkId, linkOfId } from "./link-of";
 import { LinkPicker } from "./link-picker";
-import { MapKeys } from "./map-keys";
 
 type Props = { bench: Workbench; graph: TreeGraph; symptom: string; node: Place["node"]; onOpen: (node: Place["node"]) => void };
 
@@ -143,7 +142,7 @@ function Canvas({ bench, graph, symptom, node: open, onOpen }: Props) {
 
   return (
     <div
-      className="tree-map relative h-[68vh] min-h-96 overflow-hidden rounded-xl border border-rule bg-paper text-sm leading-[22px]"
+      className="tree-map relative min-h-96 flex-1 overflow-hidden rounded-xl border border-rule bg-paper text-sm leading-[22px]"
       onKeyDown={(event) => {
         if (isTyping(event.target)) return;
         const key = event.key.toLowerCase();
@@ -185,7 +184,6 @@ function Canvas({ bench, graph, symptom, node: open, onOpen }: Props) {
         <Lanes places={places} />
         <Controls showInteractive={false} />
       </ReactFlow>
-      <MapKeys />
       {chosenLink !== null && <LinkPicker bench={bench} symptom={symptom} id={chosenLink} onClose={() => setChosenLink(null)} />}
     </div>
   );

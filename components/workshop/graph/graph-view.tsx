@@ -7,13 +7,14 @@ import { Button } from "@/components/ui/button";
 import type { Workbench } from "@/lib/client/workshop/workbench";
 import type { FaultTree } from "@/lib/core/tree/schema";
 import type { Place } from "../place";
+import { MapKeys } from "./map-keys";
 import { AddNode } from "./add-node";
 
 // React Flow is large; the shell stands before it comes.
 const EditMap = dynamic(() => import("./edit-map").then((module) => module.EditMap), {
   ssr: false,
   loading: () => (
-    <p role="status" className="h-[68vh] min-h-96 rounded-xl border border-rule p-4">
+    <p role="status" className="min-h-96 flex-1 rounded-xl border border-rule p-4">
       Drawing…
     </p>
   ),
@@ -31,13 +32,14 @@ export function GraphView({ bench, tree, symptom, node, onOpen }: Props) {
   if (!graph) return <p className="py-6">This symptom is no longer in the draft. Choose another at the left.</p>;
   const total = graph.causes.length + graph.folded;
   return (
-    <div className="grid gap-3">
+    <div className="flex min-h-0 flex-1 flex-col gap-3">
       <div className="flex flex-wrap items-center gap-x-4 gap-y-2">
         <h2>{graph.symptom.title}</h2>
         <p className="text-sm text-ink-2">
           {graph.folded > 0 ? `The likeliest ${graph.causes.length} of ${total} causes.` : `${total} causes.`}
         </p>
         {total > LIKELIEST && <Button onClick={() => setAll(!all)}>{all ? `Only the likeliest ${LIKELIEST}` : "Show all"}</Button>}
+        <MapKeys />
         <AddNode bench={bench} tree={tree} symptom={symptom} onOpen={onOpen} />
       </div>
       <EditMap key={`${symptom} ${all}`} bench={bench} graph={graph} symptom={symptom} node={node} onOpen={onOpen} />

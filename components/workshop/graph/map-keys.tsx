@@ -1,4 +1,8 @@
-import { Fold } from "@/components/ui/fold";
+"use client";
+
+import { useState } from "react";
+import { Button } from "@/components/ui/button";
+import { Dialog } from "@/components/ui/dialog";
 
 const KEYS = [
   ["Tab", "to the next node or link"],
@@ -12,10 +16,14 @@ const KEYS = [
 
 /** What the keyboard does in the picture. */
 export function MapKeys() {
+  const [open, setOpen] = useState(false);
   return (
-    <div className="absolute top-2 right-2 z-10 max-w-72 rounded-lg bg-sheet px-3 text-sm">
-      <Fold title="Keys">
-        <dl className="grid grid-cols-[auto_1fr] gap-x-3 pb-2">
+    <>
+      <Button className="ml-auto" onClick={() => setOpen(true)}>
+        Keys
+      </Button>
+      <Dialog open={open} onClose={() => setOpen(false)} title="Keys in the picture">
+        <dl className="grid grid-cols-[auto_1fr] gap-x-4 gap-y-1">
           {KEYS.map(([key, does]) => (
             <div key={key} className="contents">
               <dt className="font-semibold">{key}</dt>
@@ -23,7 +31,7 @@ export function MapKeys() {
             </div>
           ))}
         </dl>
-      </Fold>
-    </div>
+      </Dialog>
+    </>
   );
 }

@@ -5,7 +5,13 @@ import { sameValue } from "@/lib/core/tree/same-value";
 import type { FaultTree } from "@/lib/core/tree/schema";
 
 /** What the server last said of the draft. */
-export type SavedDraft = { id: string; version: number; document: FaultTree };
+export type SavedDraft = {
+  id: string;
+  version: number;
+  document: FaultTree;
+  /** The shipped version whose content it has taken up. */
+  takenUp: string;
+};
 
 /**
  * One person's work on the fleet's draft: a value, so that it can be kept on

@@ -98,11 +98,6 @@ export class Workbench {
     if (unsaved(this.session.get())) this.#later(0);
   }
 
-  /** The shipped version whose content was taken up and is not saved yet. */
-  get takenUp(): string | undefined {
-    return this.session.get().takesUp;
-  }
-
   /** Published or given up: what this device kept of it has done its work. */
   async forget(): Promise<void> {
     this.close();
@@ -172,7 +167,7 @@ export class Workbench {
   }
 }
 
-const savedOf = ({ id, version, document }: TreeDraft): SavedDraft => ({ id, version, document });
+const savedOf = ({ id, version, document, takenUp }: TreeDraft): SavedDraft => ({ id, version, document, takenUp });
 
 /**
  * Opens the fleet's draft, or begins it from `versionId` where there is none,

@@ -45,7 +45,7 @@ export default async function TreesPage({ params }: PageProps<"/f/[fleetId]/tree
       />
       {mayEdit && (
         <p className="mb-4">
-          <LinkButton tone="strong" href={`/f/${fleetId}/trees/workshop`} prefetch={false}>
+          <LinkButton tone="strong" href={`/workshop/${fleetId}`} prefetch={false}>
             Open the workshop
           </LinkButton>
         </p>
