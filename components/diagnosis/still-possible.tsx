@@ -1,5 +1,6 @@
 "use client";
 
+import { inWords } from "@/lib/client/count-in-words";
 import { CauseRow } from "./cause-row";
 import { useHere } from "./here";
 import { Swatch, type Pattern } from "./swatch";
@@ -13,6 +14,7 @@ const PATTERNS: readonly Pattern[] = ["solid", "hatched", "barred"];
 export function StillPossible() {
   const { view } = useHere();
   const { causes, others, unknown } = view.possible;
+  const complaints = view.symptoms.filter(({ present }) => present).length;
   const open = causes.slice(0, IN_THE_OPEN);
   const folded = causes.slice(IN_THE_OPEN);
   const foldedOf100 = folded.reduce((sum, { of100 }) => sum + of100, others.of100);
@@ -66,6 +68,12 @@ export function StillPossible() {
         </span>
         <span className="dial text-right">{unknown.of100}</span>
       </div>
+      {complaints > 1 && (
+        <p className="mt-1 text-sm text-ink-2">
+          Reckoned as one fault behind {complaints === 2 ? "both" : `all ${inWords(complaints)}`} complaints. If they came at different
+          times there may be two: begin a diagnosis for each.
+        </p>
+      )}
     </section>
   );
 }

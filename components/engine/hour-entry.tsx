@@ -11,6 +11,7 @@ import { isAhead, momentOf, today } from "@/components/form/day-typed";
 import { typedNumber } from "@/components/form/typed-number";
 import { useSave } from "@/components/form/use-save";
 import { Choice } from "@/components/ui/choice";
+import { Form } from "@/components/ui/form";
 import { TextField } from "@/components/ui/text-field";
 import { sendJson } from "@/lib/client/exchange/request";
 
@@ -47,7 +48,7 @@ export function HourEntry({ fleetId, engineId }: { fleetId: string; engineId: st
   const { errors } = form.formState;
   const says = refusal?.errors.find(({ path }) => path === "reading")?.says;
   return (
-    <form className="grid gap-4" onSubmit={submit} noValidate>
+    <Form className="grid gap-4" onSubmit={submit}>
       <div className="grid gap-4 sm:grid-cols-2">
         <TextField
           id="reading"
@@ -69,6 +70,6 @@ export function HourEntry({ fleetId, engineId }: { fleetId: string; engineId: st
       </div>
       <Choice {...form.register("reset")}>The meter was replaced or set back since the last reading</Choice>
       <FormEnd submit="Write it down" saving={saving} refusal={says ? null : refusal} done={saved && "Written down."} />
-    </form>
+    </Form>
   );
 }

@@ -8,13 +8,14 @@ import { uuidv7 } from "uuidv7";
 import { FormEnd } from "@/components/form/form-end";
 import { useSave } from "@/components/form/use-save";
 import { Choice } from "@/components/ui/choice";
+import { Form } from "@/components/ui/form";
 import { Segmented } from "@/components/ui/segmented";
 import { Select } from "@/components/ui/select";
 import { TextArea } from "@/components/ui/text-area";
 import { TextField } from "@/components/ui/text-field";
 import { sendJson } from "@/lib/client/exchange/request";
 import { PartFields } from "./part-fields";
-import { PickOrSay, type Said } from "./pick-or-say";
+import { PickOrSay, type Said } from "@/components/form/pick-or-say";
 import type { RepairChoices } from "./repair-choices";
 import { newRepair, NO_REPAIR, RepairValues } from "./repair-values";
 
@@ -57,7 +58,7 @@ export function RepairForm({ fleetId, engineId, hasHourMeter, choices }: Props) 
   });
   const hoursSay = refusal?.errors.find(({ path }) => path === "engineHours")?.says;
   return (
-    <form className="grid max-w-2xl gap-5" onSubmit={submit} noValidate>
+    <Form className="grid max-w-2xl gap-5" onSubmit={submit}>
       <div className="grid gap-4 sm:grid-cols-2">
         <TextField id="day" type="date" label="Done on" error={errors.day?.message} {...register("day")} />
         {hasHourMeter && (
@@ -128,6 +129,6 @@ export function RepairForm({ fleetId, engineId, hasHourMeter, choices }: Props) 
       <PartFields control={control} register={register} wrong={(i) => errors.parts?.[i]?.quantity?.message} />
       <TextArea id="note" label="Note" optional maxLength={4000} error={errors.note?.message} {...register("note")} />
       <FormEnd submit="Write it into the log" saving={saving} refusal={hoursSay ? null : refusal} wrong={Object.keys(errors).length > 0} />
-    </form>
+    </Form>
   );
 }
