@@ -1,30 +1,25 @@
 "use client";
 
 import { useState } from "react";
+import type { CheckAsked } from "@/lib/client/check-shown";
 import type { Answer } from "@/lib/core/contract/event";
-import type { StepShown } from "@/lib/core/diagnosis/view";
 import { useGuard, useSettling } from "@/lib/client/screen/use-guard";
 import { AnswerButton } from "./answer-button";
 import { NoteAndPhotos } from "./note-and-photos";
-import { ReadingAnswer } from "./reading-answer";
-import { useKeptNote } from "./use-kept-note";
+import { ReadingAnswer, type Typed } from "./reading-answer";
+import { useKeptNote, useKeptWords } from "./use-kept-note";
 
 const CANNOT = "Can\u2019t tell";
 
 export type Given = { answer: Answer; says: string; withdraws: string | null; note: string; photos: readonly string[] };
 
-type Props = {
-  of: string;
-  ask: string;
-  answers: StepShown["answers"];
-  reading: StepShown["reading"];
-  ifFitted: boolean;
-  onAnswer: (given: Given) => Promise<void>;
-};
+type Props = { asked: CheckAsked; onAnswer: (given: Given) => Promise<void> };
 
 /** The question and its answers. Each tap is kept at once; there is no send button to forget. */
-export function AnswerForm({ of, ask, answers, reading, ifFitted, onAnswer }: Props) {
+export function AnswerForm({ asked, onAnswer }: Props) {
+  const { key: of, ask, answers, reading, ifFitted } = asked;
   const { note, photos, onNote, onPhotos, drop } = useKeptNote(of);
+  const [typed, type, dropTyped] = useKeptWords<Typed>(of, { typed: "", unit: "" });
   const [given, setGiven] = useState<string | null>(null);
   const guard = useGuard();
   const settling = useSettling();
@@ -33,7 +28,10 @@ export function AnswerForm({ of, ask, answers, reading, ifFitted, onAnswer }: Pr
     guard(`${of} ${says}`, () => {
       if (given !== null || settling) return;
       setGiven(says);
-      void onAnswer({ answer, says, withdraws, note: note.trim(), photos }).then(drop);
+      void onAnswer({ answer, says, withdraws, note: note.trim(), photos }).then(() => {
+        drop();
+        dropTyped();
+      });
     });
   return (
     <div role="group" aria-labelledby={`ask-${of}`}>
@@ -41,7 +39,13 @@ export function AnswerForm({ of, ask, answers, reading, ifFitted, onAnswer }: Pr
         {ask}
       </h2>
       {withBands && (
-        <ReadingAnswer of={of} scale={reading} given={given !== null} onRead={(value, unit, says) => give({ value, unit }, says)} />
+        <ReadingAnswer
+          of={of}
+          scale={reading}
+          kept={[typed, type]}
+          given={given !== null}
+          onRead={(value, unit, says) => give({ value, unit }, says)}
+        />
       )}
       {withBands && <p className="mt-4 mb-2 text-sm text-ink-2">No figure to be had? Say it in words.</p>}
       <div className="grid gap-2">

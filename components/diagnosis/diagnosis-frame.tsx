@@ -7,7 +7,7 @@ import { Frame } from "./frame";
 import { useHere } from "./here";
 import { StillPossible } from "./still-possible";
 
-const WITH_POSSIBLE = new Set(["step", "rules", "looked", "tried", "change"]);
+const WITH_POSSIBLE = new Set(["step", "rules", "looked", "tried", "change", "answered"]);
 
 /** The band over every screen of a diagnosis: engine, complaint, answers given, minutes so far. */
 export function DiagnosisFrame({ children }: { children: ReactNode }) {

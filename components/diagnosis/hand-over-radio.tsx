@@ -4,7 +4,7 @@ import { radioWords } from "@/lib/client/hand-over/radio-words";
 /** What to read out, a line a breath. */
 export function HandOverRadio({ facts }: { facts: HandOverFacts }) {
   return (
-    <section aria-labelledby="radio" className="rounded-xl border-[1.5px] border-edge bg-sheet p-3.5">
+    <section aria-labelledby="radio" className="break-inside-avoid rounded-xl border-[1.5px] border-edge bg-sheet p-3.5">
       <h2 id="radio" className="text-lg">
         To read out over the radio
       </h2>

@@ -5,6 +5,7 @@ import { durationInWords, minutesBetween } from "@/lib/client/duration";
 import { SITUATIONS, type Position } from "@/lib/client/hand-over/facts";
 import { gatherHandOver } from "@/lib/client/hand-over/gather";
 import { positionInFigures } from "@/lib/client/hand-over/position";
+import { saidTogether } from "@/lib/client/said-together";
 import { useNow } from "@/lib/client/screen/use-now";
 import { Button } from "@/components/ui/button";
 import { BackLink } from "./back-link";
@@ -61,9 +62,9 @@ export function HandOver() {
           none="Nothing is known of its make and fittings."
         />
         {facts.position && <HandOverPart title="Position" lines={[positionInFigures(facts.position)]} none="" />}
-        <HandOverPart title="Found" lines={facts.checked.map(({ title, says }) => `${title}: ${says}`)} none="Nothing yet." />
+        <HandOverPart title="Found" lines={facts.checked.map(({ title, says }) => saidTogether(title, says))} none="Nothing yet." />
         {facts.notSeen.length > 0 && <HandOverPart title="Could not be looked at" lines={[facts.notSeen.join("; ")]} none="" />}
-        <HandOverPart title="Tried" lines={facts.tried.map(({ title, says }) => `${title}: ${says}`)} none="Nothing yet." />
+        <HandOverPart title="Tried" lines={facts.tried.map(({ title, says }) => saidTogether(title, says))} none="Nothing yet." />
         <HandOverPart
           title="Still possible, of 100 engines like this"
           lines={[
@@ -92,10 +93,14 @@ export function HandOver() {
           <HandOverPart title="Cranked since it last ran" lines={[`${Math.round(facts.crankSeconds)} s`]} none="" />
         )}
       </div>
-      <div className="no-print mt-5 grid gap-5">
-        <HandOverPosition position={position} onPosition={setPosition} />
+      <div className="mt-5 grid gap-5">
+        <div className="no-print">
+          <HandOverPosition position={position} onPosition={setPosition} />
+        </div>
         <HandOverMessage facts={facts} />
         <HandOverRadio facts={facts} />
+      </div>
+      <div className="no-print mt-5 grid gap-5">
         <Button size="large" wide onClick={() => window.print()}>
           Print this page
         </Button>

@@ -26,8 +26,10 @@ export type Here = {
   go: (at: Address["at"], which?: string, how?: "push" | "replace") => void;
   toEngines: () => void;
   record: Recorder;
-  /** What was said last on this screen, to be undone with one tap. */
-  undo: { event: string; says: string; withdraws: string | null } | null;
+  /** Goes to the step that is due, and leaves a trail: the phone's own back leads to the answer that was just given. */
+  goOnFrom: (event: string) => void;
+  /** What was said last, to be undone with one tap; or, where it was many things at once, to be looked at. */
+  undo: { event: string; says: string; withdraws: string | null } | { says: string; look: Address["at"] } | null;
   setUndo: (undo: Here["undo"]) => void;
 };
 

@@ -26,7 +26,7 @@ export function KeptLine({ ready }: { ready: Ready }) {
         </Link>
       )}
       {standing.waiting > 0 && standing.trouble !== "sign-in" && !standing.sending && (
-        <button type="button" className="link min-h-12" onClick={() => ready.exchange.nudge(true)}>
+        <button type="button" className="link min-h-12" onClick={() => ready.exchange.sendNow()}>
           Send now
         </button>
       )}

@@ -6,6 +6,7 @@ import type { EngineFigure } from "@/lib/core/tree/schema";
 import { readNumber } from "@/lib/core/units/read-number";
 import { missingFigures } from "@/lib/client/missing-figures";
 import { Button } from "@/components/ui/button";
+import { Form } from "@/components/ui/form";
 import { TextField } from "@/components/ui/text-field";
 import { useHere } from "./here";
 
@@ -36,8 +37,7 @@ export function MissingFigure({ checkKey }: { checkKey: string }) {
   const { ask, hint } = ASKS[figure];
   const { from, to } = FIGURE_LIMITS[figure];
   return (
-    <form
-      noValidate
+    <Form
       className="mt-4 grid gap-2 rounded-xl border-[1.5px] border-edge bg-sheet p-3.5"
       onSubmit={(event) => {
         event.preventDefault();
@@ -60,6 +60,6 @@ export function MissingFigure({ checkKey }: { checkKey: string }) {
         onChange={(event) => setTyped(event.target.value)}
       />
       <Button type="submit">Use this figure</Button>
-    </form>
+    </Form>
   );
 }

@@ -2,6 +2,7 @@
 
 import { Camera } from "lucide-react";
 import { useState } from "react";
+import { MOST_PHOTOS } from "@/lib/client/kept-with";
 import { shrinkPhoto } from "@/lib/client/shrink-photo";
 import { TextArea } from "@/components/ui/text-area";
 import { useHere } from "./here";
@@ -14,8 +15,6 @@ type Props = {
   photos: readonly string[];
   onPhotos: (photos: readonly string[]) => void;
 };
-
-const MOST_PHOTOS = 12;
 
 /** A note and pictures, if wanted, folded away: they go with the answer that is given next. */
 export function NoteAndPhotos({ of, note, onNote, photos, onPhotos }: Props) {

@@ -27,6 +27,13 @@ export function OpenDiagnosis({ id, ready, reasoner, phone, address, go }: Props
   const state = useDiagnosis(ready, reasoner, id);
   const [undo, setUndo] = useState<Here["undo"]>(null);
   const goHere = useCallback<Here["go"]>((at, which, how) => go({ d: id, at, which: which ?? null }, how), [go, id]);
+  const goOnFrom = useCallback<Here["goOnFrom"]>(
+    (event) => {
+      go({ d: id, at: "answered", which: event }, "replace");
+      go({ d: id, at: "step" });
+    },
+    [go, id],
+  );
   const toEngines = useCallback(() => go({ at: "engines" }), [go]);
   const { summary, tree, view } = state;
   const engine = phone.engines.find((one) => one.id === summary?.engineId);
@@ -44,13 +51,14 @@ export function OpenDiagnosis({ id, ready, reasoner, phone, address, go }: Props
             thinking: state.thinking,
             address,
             go: goHere,
+            goOnFrom,
             toEngines,
             record: state.record,
             undo,
             setUndo,
           }
         : null,
-    [ready, phone, engine, tree, view, summary, state.events, state.thinking, address, goHere, toEngines, state.record, undo],
+    [ready, phone, engine, tree, view, summary, state.events, state.thinking, address, goHere, goOnFrom, toEngines, state.record, undo],
   );
   if (here)
     return (

@@ -7,6 +7,7 @@ import { basisOf, FOLLOWS_THE_CURE, outcomeOf, startingForm, type FormErrors, ty
 import { useGuard } from "@/lib/client/screen/use-guard";
 import { useKeptForm } from "@/lib/client/screen/use-kept-form";
 import { Button } from "@/components/ui/button";
+import { Form } from "@/components/ui/form";
 import { TextArea } from "@/components/ui/text-area";
 import { TextField } from "@/components/ui/text-field";
 import { BackLink } from "./back-link";
@@ -56,8 +57,7 @@ function FilledIn() {
     <>
       <BackLink />
       <ScreenHeading of="outcome">How did it end?</ScreenHeading>
-      <form
-        noValidate
+      <Form
         className="mt-3 grid gap-5"
         onSubmit={(event) => {
           event.preventDefault();
@@ -105,7 +105,7 @@ function FilledIn() {
         <Button type="submit" tone="strong" size="large" wide>
           Log it
         </Button>
-      </form>
+      </Form>
     </>
   );
 }

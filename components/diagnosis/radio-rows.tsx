@@ -4,15 +4,16 @@ type Props<V extends string> = {
   name: string;
   legend: string;
   options: readonly { value: V; title: string; detail?: string }[];
-  value: V;
+  value: V | null;
+  showLegend?: boolean;
   onChange: (value: V) => void;
 };
 
 /** One of several, each with a line of its own. */
-export function RadioRows<V extends string>({ name, legend, options, value, onChange }: Props<V>) {
+export function RadioRows<V extends string>({ name, legend, options, value, showLegend = false, onChange }: Props<V>) {
   return (
     <fieldset>
-      <legend className="visually-hidden">{legend}</legend>
+      <legend className={showLegend ? "mb-2 font-semibold" : "visually-hidden"}>{legend}</legend>
       <div className="overflow-hidden rounded-xl border-[1.5px] border-edge bg-sheet">
         {options.map((option) => (
           <label

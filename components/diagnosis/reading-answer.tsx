@@ -3,31 +3,36 @@
 import { useState } from "react";
 import { figure, readGauge } from "@/lib/client/read-gauge";
 import type { StepShown } from "@/lib/core/diagnosis/view";
+import { unitSign } from "@/lib/core/units/unit-sign";
 import { unitsOf } from "@/lib/core/units/units";
 import { Button } from "@/components/ui/button";
+import { Form } from "@/components/ui/form";
 import { inputLook } from "@/components/ui/field";
-import { unitSign } from "./unit-sign";
+
+/** A reading as it is typed; an empty unit is the scale's own. */
+export type Typed = { typed: string; unit: string };
 
 type Props = {
   of: string;
   scale: NonNullable<StepShown["reading"]>;
+  /** What is typed so far, and how it is changed. */
+  kept: readonly [Typed, (part: Partial<Typed>) => void];
   given: boolean;
   onRead: (value: number, unit: string, says: string) => void;
 };
 
 /** A figure with its unit. What it means is shown before it is given, so that a wrong unit is seen. */
-export function ReadingAnswer({ of, scale, given, onRead }: Props) {
-  const [typed, setTyped] = useState("");
-  const [unit, setUnit] = useState(scale.unit);
+export function ReadingAnswer({ of, scale, kept, given, onRead }: Props) {
+  const [{ typed, unit: picked }, change] = kept;
   const [tried, setTried] = useState(false);
   const units = unitsOf(scale.quantity);
+  const unit = units.some(({ symbol }) => symbol === picked) ? picked : scale.unit;
   const read = readGauge(typed, unit, scale);
   const wrong = read && "wrong" in read ? read.wrong : null;
   const good = read && "band" in read ? read : null;
   const id = `reading-${of}`;
   return (
-    <form
-      noValidate
+    <Form
       onSubmit={(event) => {
         event.preventDefault();
         setTried(true);
@@ -42,7 +47,7 @@ export function ReadingAnswer({ of, scale, given, onRead }: Props) {
             inputMode={scale.from < 0 ? "text" : "decimal"}
             autoComplete="off"
             value={typed}
-            onChange={(event) => setTyped(event.target.value)}
+            onChange={(event) => change({ typed: event.target.value })}
             aria-invalid={wrong !== null || undefined}
             aria-describedby={`${id}-means`}
             className={`${inputLook} dial min-h-16 text-xl`}
@@ -50,7 +55,7 @@ export function ReadingAnswer({ of, scale, given, onRead }: Props) {
         </label>
         <label className="grid gap-1 text-sm font-semibold">
           Unit
-          <select value={unit} onChange={(event) => setUnit(event.target.value)} className={`${inputLook} min-h-16`}>
+          <select value={unit} onChange={(event) => change({ unit: event.target.value })} className={`${inputLook} min-h-16`}>
             {units.map(({ symbol, title }) => (
               <option key={symbol} value={symbol} title={title}>
                 {unitSign(symbol)}
@@ -72,7 +77,7 @@ export function ReadingAnswer({ of, scale, given, onRead }: Props) {
       <Button type="submit" tone="strong" size="large" wide aria-disabled={given}>
         {good ? `Enter ${figure(good.value)} ${unitSign(unit)}` : "Enter the reading"}
       </Button>
-    </form>
+    </Form>
   );
 }
 

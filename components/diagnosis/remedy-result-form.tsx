@@ -6,7 +6,7 @@ import { useGuard, useSettling } from "@/lib/client/screen/use-guard";
 import { TextField } from "@/components/ui/text-field";
 import { AnswerButton } from "./answer-button";
 import { NoteAndPhotos } from "./note-and-photos";
-import { useKeptNote } from "./use-kept-note";
+import { useKeptNote, useKeptWords } from "./use-kept-note";
 
 export type Tried = { result: RemedyResult; proof: string | null; note: string; photos: readonly string[]; says: string };
 
@@ -23,8 +23,7 @@ const MOST_PROOF = 500;
 /** Did it cure it, and how was that proved? A cure is only believed once it has been tried under load. */
 export function RemedyResultForm({ of, proof, onResult }: { of: string; proof: string | null; onResult: (tried: Tried) => Promise<void> }) {
   const { note, photos, onNote, onPhotos, drop } = useKeptNote(of);
-  const [cured, setCured] = useState(false);
-  const [words, setWords] = useState("");
+  const [{ cured, words }, type, dropTyped] = useKeptWords(of, { cured: false, words: "" });
   const [given, setGiven] = useState(false);
   const own = words.trim();
   const guard = useGuard();
@@ -33,7 +32,10 @@ export function RemedyResultForm({ of, proof, onResult }: { of: string; proof: s
     guard(`${of} ${says}`, () => {
       if (given || settling) return;
       setGiven(true);
-      void onResult({ result, says, proof: how, note: [note.trim(), also].filter(Boolean).join(" "), photos }).then(drop);
+      void onResult({ result, says, proof: how, note: [note.trim(), also].filter(Boolean).join(" "), photos }).then(() => {
+        drop();
+        dropTyped();
+      });
     });
   return (
     <div>
@@ -44,7 +46,7 @@ export function RemedyResultForm({ of, proof, onResult }: { of: string; proof: s
             key={result}
             waits={settling}
             chosen={result === "cured" && cured}
-            onTap={() => (result === "cured" ? guard(`${of} cured`, () => setCured(true)) : give(result, title, null))}
+            onTap={() => (result === "cured" ? guard(`${of} cured`, () => type({ cured: true })) : give(result, title, null))}
           >
             {title}
           </AnswerButton>
@@ -67,7 +69,7 @@ export function RemedyResultForm({ of, proof, onResult }: { of: string; proof: s
                 optional
                 value={words}
                 maxLength={500}
-                onChange={(event) => setWords(event.target.value)}
+                onChange={(event) => type({ words: event.target.value })}
               />
               {own.length > 2 && <AnswerButton onTap={() => give("cured", "Cured, proved", own)}>Proved as written</AnswerButton>}
               <AnswerButton quiet onTap={() => give("cured", "Cured, not proved yet", null, own)}>

@@ -14,7 +14,8 @@ export function RuleSays({ rule, folded = false }: { rule: RuleShown; folded?: b
       </ol>
       {rule.runOn && (
         <p className="mt-2 text-sm">
-          <b>The one exception:</b> if stopping now endangers people or boat, run on at the lowest useful power to safety, call, then stop.
+          <b>The one exception:</b> {rule.kind === "no-crank" ? "if it is running, and stopping now" : "if stopping now"} endangers people
+          or boat, run on at the lowest useful power to safety, call, then stop.
         </p>
       )}
     </details>

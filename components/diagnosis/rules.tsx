@@ -1,6 +1,7 @@
 "use client";
 
 import { useRef, useState } from "react";
+import { inWords } from "@/lib/client/count-in-words";
 import type { RuleAnswered } from "@/lib/core/diagnosis/view";
 import { useGuard } from "@/lib/client/screen/use-guard";
 import { Button } from "@/components/ui/button";
@@ -9,6 +10,7 @@ import { BackLink } from "./back-link";
 import { Defers } from "./defers";
 import { useHere } from "./here";
 import { RuleCard } from "./rule-card";
+import { RulesFound } from "./rules-found";
 import { ScreenHeading } from "./screen-heading";
 
 /**
@@ -17,7 +19,7 @@ import { ScreenHeading } from "./screen-heading";
  * them is a tap away, and in the open when nothing is due.
  */
 export function Rules() {
-  const { view, record, go, thinking, address } = useHere();
+  const { view, record, go, thinking, address, setUndo } = useHere();
   const [answers, setAnswers] = useState<Readonly<Record<string, "yes" | "no">>>({});
   const [asked, setAsked] = useState<ReadonlySet<string>>(() => new Set(view.rulesToAsk.map(({ key }) => key)));
   /** A card stays where it is while it is answered. */
@@ -40,11 +42,13 @@ export function Rules() {
   const first = (rule: RuleAnswered) => (rule.key === address.which ? 0 : 1);
   const due = view.rules.filter(({ key }) => asked.has(key));
   const open = due.filter((rule) => stands(rule) === null);
-  const others = view.rules.filter(({ key }) => !asked.has(key));
+  const others = view.rules.filter(({ key, found }) => !asked.has(key) && !found);
   const before = others.filter(({ key }) => (atFirst.get(key) ?? null) !== null).sort((a, b) => first(a) - first(b));
   const rest = others.filter(({ key }) => (atFirst.get(key) ?? null) === null);
   const noneOfTheRest = async () => {
     for (const rule of open) await answer(rule, "no");
+    if (open.length > 0)
+      setUndo({ says: `${open.length === 1 ? "One danger" : `${capital(inWords(open.length))} dangers`}: answered no`, look: "rules" });
     go("step");
   };
   const cards = (rules: readonly RuleAnswered[]) => (
@@ -59,6 +63,7 @@ export function Rules() {
       {open.length === 0 && <BackLink />}
       <ScreenHeading of="rules">Anything dangerous?</ScreenHeading>
       <p className="mt-2 mb-4 text-ink-2">These come before anything else. Each yes says what to do now.</p>
+      <RulesFound />
       {cards(due)}
       {before.length > 0 && (
         <section aria-labelledby="answered-before">
@@ -86,10 +91,19 @@ export function Rules() {
           aria-disabled={thinking && open.length === 0}
           onClick={() => guard("rules go on", () => void noneOfTheRest())}
         >
-          {open.length === 0 ? "Go on" : open.length === due.length ? "None of these: go on" : "None of the others: go on"}
+          {noneOf(open.length, due.length)}
         </Button>
       </div>
       <Defers />
     </div>
   );
 }
+
+/** What the one button answers with "no", by number: nobody should say more than they have read. */
+function noneOf(open: number, due: number): string {
+  if (open === 0) return "Go on";
+  if (open === 1) return due === 1 ? "No: go on" : "Not the other one: go on";
+  return open === due ? `None of these ${inWords(open)}: go on` : `None of the other ${inWords(open)}: go on`;
+}
+
+const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);

@@ -1,5 +1,7 @@
 "use client";
 
+import type { Said } from "@/lib/core/diagnosis/view";
+import { Fold } from "@/components/ui/fold";
 import { Notice } from "@/components/ui/notice";
 import { BackLink } from "./back-link";
 import { Conflicts } from "./conflicts";
@@ -11,6 +13,8 @@ import { ScreenHeading } from "./screen-heading";
 export function SaidScreen() {
   const { view, events } = useHere();
   const refused = events.filter(({ rejected }) => rejected !== undefined);
+  // The dangers that are none would bury what was found.
+  const [noDanger, answers] = [view.said.filter(isNoDanger), view.said.filter((said) => !isNoDanger(said))];
   return (
     <>
       <BackLink />
@@ -29,10 +33,21 @@ export function SaidScreen() {
       )}
       {view.said.length === 0 && <p className="mt-4">Nothing yet.</p>}
       <ol className="mt-4 grid gap-3">
-        {view.said.map((said) => (
+        {answers.map((said) => (
           <SaidRow key={said.event} said={said} />
         ))}
       </ol>
+      {noDanger.length > 0 && (
+        <Fold title={`Dangers answered no (${noDanger.length})`} className="mt-3">
+          <ol className="grid gap-3">
+            {noDanger.map((said) => (
+              <SaidRow key={said.event} said={said} />
+            ))}
+          </ol>
+        </Fold>
+      )}
     </>
   );
 }
+
+const isNoDanger = ({ kind, says }: Said): boolean => kind === "rule-answered" && says === "No";

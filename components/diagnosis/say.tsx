@@ -8,6 +8,7 @@ import { useDraft } from "@/lib/client/screen/use-draft";
 import { useGuard } from "@/lib/client/screen/use-guard";
 import { useTree } from "@/lib/client/screen/use-phone";
 import { begin } from "@/lib/client/begin";
+import { inWords } from "@/lib/client/count-in-words";
 import type { Engine } from "@/lib/core/contract/engine";
 import type { Phone } from "@/lib/core/contract/phone";
 import type { Situation } from "@/lib/core/tree/schema";
@@ -17,13 +18,12 @@ import { Segmented } from "@/components/ui/segmented";
 import { BoatFirst } from "./boat-first";
 import { Frame } from "./frame";
 import { GoOnFirst } from "./go-on-first";
+import { OtherEngine } from "./other-engine";
 import { ScreenHeading } from "./screen-heading";
 import { SymptomHits } from "./symptom-hits";
 import { SymptomList } from "./symptom-list";
 
 type Props = { ready: Ready; phone: Phone; engine: Engine; address: Address; go: ReturnType<typeof useAddress>["go"] };
-
-const NUMBERS = ["", "this one", "these two", "these three", "these four", "these five", "these six"];
 
 /** Where the boat is and what is wrong, in the person's own words. */
 export function Say({ ready, phone, engine, go }: Props) {
@@ -56,7 +56,6 @@ export function Say({ ready, phone, engine, go }: Props) {
   const picked = tree.symptoms.map(({ key }) => key).filter(isPicked);
   const toggle = (key: string) => change({ chosen: { ...draft.chosen, [key]: !isPicked(key) } });
   const shown = [...hits.map(({ key }) => key), ...picked.filter((key) => !fits.has(key))];
-  const other = phone.engines.find((one) => one.boatId === engine.boatId && one.id !== engine.id);
   const needsSafety = draft.situation === "under-way" && !draft.boatIsSafe;
 
   const goOn = () => {
@@ -126,22 +125,22 @@ export function Say({ ready, phone, engine, go }: Props) {
         {listOpen ? "Close the list" : "Pick from a list by system"}
       </button>
       {listOpen && <SymptomList tree={tree} isPicked={isPicked} onToggle={toggle} />}
-      {other && picked.length > 0 && (
-        <div className="mt-5">
-          <Segmented
-            name="other-engine"
-            legend={`Does the other one do it: ${other.name}?`}
-            options={[
-              { value: "does-not", title: "No" },
-              { value: "does", title: "Yes, it does too" },
-            ]}
-            value={draft.otherEngine}
-            onChange={(otherEngine) => change({ otherEngine })}
-          />
-        </div>
+      {picked.length > 0 && (
+        <OtherEngine
+          tree={tree}
+          engine={engine}
+          engines={phone.engines}
+          situation={draft.situation}
+          value={draft.otherEngine}
+          onChange={(otherEngine) => change({ otherEngine })}
+        />
       )}
       <div className="mt-4">
-        <Checkbox checked={draft.mechanic} onChange={(event) => change({ mechanic: event.target.checked })}>
+        <Checkbox
+          checked={draft.mechanic}
+          hint="Steps that need a mechanic’s hands and tools are then asked for too: opening fuel pipes, measuring compression."
+          onChange={(event) => change({ mechanic: event.target.checked })}
+        >
           A mechanic is at the engine
         </Checkbox>
       </div>
@@ -151,7 +150,11 @@ export function Say({ ready, phone, engine, go }: Props) {
         </p>
       )}
       <Button tone="strong" size="large" wide className="mt-4" onClick={goOn}>
-        {picked.length === 0 ? "Go on without a symptom" : `Go on with ${NUMBERS[picked.length] ?? `these ${picked.length}`}`}
+        {picked.length === 0
+          ? "Go on without a symptom"
+          : picked.length === 1
+            ? "Go on with this one"
+            : `Go on with these ${inWords(picked.length)}`}
       </Button>
     </Frame>
   );

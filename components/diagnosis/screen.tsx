@@ -41,6 +41,7 @@ function ScreenNamed({ at }: { at: ScreenName }) {
     case "said":
       return <SaidScreen />;
     case "change":
+    case "answered":
       return <ChangeAnswer />;
     case "looked":
       return <Looked />;

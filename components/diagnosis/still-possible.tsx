@@ -1,9 +1,11 @@
 "use client";
 
+import { inWords } from "@/lib/client/count-in-words";
 import { CauseRow } from "./cause-row";
 import { useHere } from "./here";
 import { Swatch, type Pattern } from "./swatch";
 import { Ticks } from "./ticks";
+import { TwoFaults } from "./two-faults";
 
 /** How many causes stand in the open; the rest is folded. */
 const IN_THE_OPEN = 3;
@@ -13,6 +15,7 @@ const PATTERNS: readonly Pattern[] = ["solid", "hatched", "barred"];
 export function StillPossible() {
   const { view } = useHere();
   const { causes, others, unknown } = view.possible;
+  const complaints = view.symptoms.filter(({ present }) => present).length;
   const open = causes.slice(0, IN_THE_OPEN);
   const folded = causes.slice(IN_THE_OPEN);
   const foldedOf100 = folded.reduce((sum, { of100 }) => sum + of100, others.of100);
@@ -35,6 +38,7 @@ export function StillPossible() {
           { pattern: "empty", count: unknown.of100 },
         ]}
       />
+      <TwoFaults />
       {open.map((cause, index) => (
         <CauseRow key={cause.key} cause={cause} pattern={pattern(index)} />
       ))}
@@ -66,6 +70,12 @@ export function StillPossible() {
         </span>
         <span className="dial text-right">{unknown.of100}</span>
       </div>
+      {complaints > 1 && (
+        <p className="mt-1 text-sm text-ink-2">
+          Reckoned as one fault behind {complaints === 2 ? "both" : `all ${inWords(complaints)}`} complaints. If they came at different
+          times there may be two: begin a diagnosis for each.
+        </p>
+      )}
     </section>
   );
 }

@@ -1,11 +1,9 @@
 import type { Symptom } from "@/lib/core/tree/schema";
-import { SymptomRow } from "./symptom-row";
+import { SymptomRows, type Picking } from "./symptom-rows";
 
-type Props = {
+type Props = Picking & {
   symptoms: readonly Symptom[];
   keys: readonly string[];
-  isPicked: (key: string) => boolean;
-  onToggle: (key: string) => void;
   said: boolean;
   /** All of them are guesses: the words say none of them. */
   onlyNearest: boolean;
@@ -18,16 +16,8 @@ export function SymptomHits({ symptoms, keys, isPicked, onToggle, said, onlyNear
     <div aria-live="polite">
       {onlyNearest && found.length > 0 && <p className="mt-3 text-sm">Nothing says just that; nearest:</p>}
       {found.length > 0 && (
-        <div className="mt-2.5 overflow-hidden rounded-xl border-[1.5px] border-edge bg-sheet">
-          {found.map((symptom) => (
-            <SymptomRow
-              key={symptom.key}
-              title={symptom.title}
-              detail={symptom.detail}
-              picked={isPicked(symptom.key)}
-              onToggle={() => onToggle(symptom.key)}
-            />
-          ))}
+        <div className="mt-2.5">
+          <SymptomRows symptoms={found} isPicked={isPicked} onToggle={onToggle} />
         </div>
       )}
       {said && !found.some(({ key }) => isPicked(key)) && (

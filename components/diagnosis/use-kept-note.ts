@@ -17,3 +17,9 @@ export function useKeptNote(of: string) {
     drop,
   };
 }
+
+/** Words typed into one field of a step, kept from the first letter until the step is answered. */
+export function useKeptWords<T extends object>(of: string, empty: T): [T, (part: Partial<T>) => void, () => void] {
+  const { summary } = useHere();
+  return useKeptForm<T>(`gudgeon.typed.${summary.id}.${of}`, () => empty);
+}

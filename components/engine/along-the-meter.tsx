@@ -2,48 +2,62 @@ import type { LogEntry } from "@/lib/core/contract/log";
 
 type Props = { entries: readonly LogEntry[]; hoursNow: number | null; systems: readonly { key: string; title: string }[] };
 
-const WIDTH = 960;
-const LEFT = 170;
-const ROW = 34;
+const LANE = 34;
 
-/** Along the hour meter: one lane a system, a dot a fault; dots of one cause that came back are joined. */
+/** Along the hour meter: one lane a system, a dot a fault; dots of one cause that came back are joined. As wide as there is room. */
 export function AlongTheMeter({ entries, hoursNow, systems }: Props) {
   const placed = entries.filter((e) => e.engineHours !== null && e.cause !== null && e.outcome !== null);
   if (placed.length === 0) return <p className="text-sm text-ink-2">Faults with engine hours are drawn here, system by system.</p>;
   const lanes = lanesOf(placed, systems);
   const { from, to, ticks } = scale(placed, hoursNow);
-  const x = (h: number) => LEFT + ((h - from) / (to - from)) * (WIDTH - LEFT - 24);
-  const height = lanes.length * ROW + 44;
+  // In shares of the width, with room at both ends for half a figure.
+  const x = (h: number) => `${6 + ((h - from) / (to - from)) * 88}%`;
+  const row = "sm:grid sm:grid-cols-[10rem_minmax(0,1fr)] sm:items-center sm:gap-3";
   return (
-    <div className="overflow-x-auto" tabIndex={0} role="region" aria-label="Faults by system, drawn along the hour meter">
-      <svg viewBox={`0 0 ${WIDTH} ${height}`} className="min-w-[60rem]" role="img" aria-label={inWords(lanes)}>
-        {ticks.map((t) => (
-          <g key={t}>
-            <path d={`M${x(t)} 8V${height - 28}`} stroke="var(--rule)" />
-            <text x={x(t)} y={height - 8} textAnchor="middle" fontSize={16} className="dial" fill="var(--ink-2)">
+    <div role="img" aria-label={inWords(lanes)}>
+      {lanes.map((lane) => (
+        <div key={lane.title} className={`${row} mb-2 sm:mb-0`}>
+          <span className="block text-sm">{lane.title}</span>
+          <svg width="100%" height={LANE} aria-hidden>
+            {ticks.map((t) => (
+              <line key={t} x1={x(t)} x2={x(t)} y1={0} y2={LANE} stroke="var(--rule)" />
+            ))}
+            <Lane lane={lane} x={x} from={from} to={hoursNow ?? to} />
+          </svg>
+        </div>
+      ))}
+      <div className={row}>
+        <span />
+        <svg width="100%" height={24} aria-hidden>
+          {ticks.map((t) => (
+            <text key={t} x={x(t)} y={18} textAnchor="middle" fontSize={16} className="dial" fill="var(--ink-2)">
               {t}
             </text>
-          </g>
-        ))}
-        {lanes.map((lane, i) => (
-          <Lane key={lane.title} lane={lane} y={24 + i * ROW} x={x} to={hoursNow ?? to} from={from} />
-        ))}
-      </svg>
+          ))}
+        </svg>
+      </div>
     </div>
   );
 }
 
 type LaneOf = { title: string; faults: readonly LogEntry[] };
 
-function Lane({ lane, y, x, from, to }: { lane: LaneOf; y: number; x: (h: number) => number; from: number; to: number }) {
+function Lane({ lane, x, from, to }: { lane: LaneOf; x: (h: number) => string; from: number; to: number }) {
+  const y = LANE / 2;
   return (
-    <g>
-      <text x={0} y={y + 5} fontSize={16} fill="var(--ink)">
-        {lane.title}
-      </text>
-      <path d={`M${x(from)} ${y}H${x(to)}`} stroke="var(--shoal)" strokeWidth={10} strokeLinecap="round" />
+    <>
+      <line x1={x(from)} x2={x(to)} y1={y} y2={y} stroke="var(--shoal)" strokeWidth={10} strokeLinecap="round" />
       {runsOf(lane.faults).map(([first, last]) => (
-        <path key={`${first}-${last}`} d={`M${x(first)} ${y}H${x(last)}`} stroke="var(--lead)" strokeWidth={1.5} strokeDasharray="2 4" />
+        <line
+          key={`${first}-${last}`}
+          x1={x(first)}
+          x2={x(last)}
+          y1={y}
+          y2={y}
+          stroke="var(--lead)"
+          strokeWidth={1.5}
+          strokeDasharray="2 4"
+        />
       ))}
       {lane.faults.map((e) => (
         <circle
@@ -57,7 +71,7 @@ function Lane({ lane, y, x, from, to }: { lane: LaneOf; y: number; x: (h: number
           <title>{`${e.cause!.title} at ${Math.round(e.engineHours!)} h`}</title>
         </circle>
       ))}
-    </g>
+    </>
   );
 }
 
@@ -86,7 +100,7 @@ function runsOf(faults: readonly LogEntry[]): [number, number][] {
 function scale(entries: readonly LogEntry[], hoursNow: number | null): { from: number; to: number; ticks: number[] } {
   const all = [...entries.map((e) => e.engineHours!), ...(hoursNow === null ? [] : [hoursNow])];
   const span = Math.max(...all) - Math.min(...all) || 50;
-  const step = [10, 20, 50, 100, 200, 500, 1000, 2000, 5000].find((s) => span / s <= 6) ?? 10_000;
+  const step = [10, 20, 50, 100, 200, 500, 1000, 2000, 5000].find((s) => span / s <= 5) ?? 10_000;
   const from = Math.floor((Math.min(...all) - step * 0.2) / step) * step;
   const to = Math.ceil((Math.max(...all) + step * 0.2) / step) * step;
   const start = Math.max(0, from);

@@ -4,6 +4,7 @@ import { zodResolver } from "@hookform/resolvers/zod";
 import { useRouter } from "next/navigation";
 import { useForm, useWatch } from "react-hook-form";
 import { FormEnd } from "@/components/form/form-end";
+import { Form } from "@/components/ui/form";
 import { StaleNotice } from "@/components/form/stale-notice";
 import { useChange } from "@/components/form/use-change";
 import { sendJson } from "@/lib/client/exchange/request";
@@ -33,7 +34,7 @@ export function EngineForm({ fleetId, engine, features }: Props) {
   });
   const { errors, isDirty } = form.formState;
   return (
-    <form className="grid max-w-4xl gap-7" onSubmit={submit} noValidate>
+    <Form className="grid max-w-4xl gap-7" onSubmit={submit}>
       <div className="grid max-w-xl gap-5">
         <ClockFields register={form.register} errors={errors} meter={meter} />
       </div>
@@ -55,6 +56,6 @@ export function EngineForm({ fleetId, engine, features }: Props) {
         wrong={Object.keys(errors).length > 0}
         done={saved && !isDirty && "Saved. Diagnoses that are under way keep the profile they began with."}
       />
-    </form>
+    </Form>
   );
 }

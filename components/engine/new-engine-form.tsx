@@ -9,7 +9,9 @@ import * as z from "zod";
 import { FormEnd } from "@/components/form/form-end";
 import { typedNumber } from "@/components/form/typed-number";
 import { useSave } from "@/components/form/use-save";
+import { Button } from "@/components/ui/button";
 import { Fold } from "@/components/ui/fold";
+import { Form } from "@/components/ui/form";
 import { TextField } from "@/components/ui/text-field";
 import { sendJson } from "@/lib/client/exchange/request";
 import type { Feature } from "@/lib/core/tree/schema";
@@ -17,13 +19,20 @@ import { ClockFields } from "./clock-fields";
 import { EngineValues, engineValues, NOTHING_KNOWN } from "./engine-values";
 import { ProfileFields } from "./profile-fields";
 
-type Props = { fleetId: string; boatId: string; suggestedName: string; features: readonly Feature[] };
+type Props = {
+  fleetId: string;
+  boatId: string;
+  suggestedName: string;
+  /** The boat has none yet: it may be one of twins. */ first: boolean;
+  features: readonly Feature[];
+};
 
+const ANOTHER = "another";
 const Reading = z.object({ reading: typedNumber({ from: 0, to: 200_000 }) });
 const FormValues = z.intersection(EngineValues, Reading);
 
 /** A new engine. Its name is enough to begin; the profile can wait. */
-export function NewEngineForm({ fleetId, boatId, suggestedName, features }: Props) {
+export function NewEngineForm({ fleetId, boatId, suggestedName, first, features }: Props) {
   const router = useRouter();
   // Made once: sent twice, it is one engine with one reading.
   const [{ id, readingId }] = useState(() => ({ id: uuidv7(), readingId: uuidv7() }));
@@ -34,7 +43,7 @@ export function NewEngineForm({ fleetId, boatId, suggestedName, features }: Prop
   });
   const meter = useWatch({ control: form.control, name: "meter" });
   const { errors } = form.formState;
-  const submit = form.handleSubmit(async ({ name, hasHourMeter, estimatedHoursPerYear, profile, reading }) => {
+  const submit = form.handleSubmit(async ({ name, hasHourMeter, estimatedHoursPerYear, profile, reading }, event) => {
     const engines = `/api/v1/fleets/${fleetId}/engines`;
     const outcome = await save(async () => {
       const hoursAYear = estimatedHoursPerYear === null ? {} : { estimatedHoursPerYear };
@@ -43,14 +52,18 @@ export function NewEngineForm({ fleetId, boatId, suggestedName, features }: Prop
         await sendJson(`${engines}/${id}/hours`, { id: readingId, engineId: id, reading, readAt: new Date().toISOString() });
       }
     });
-    if ("answer" in outcome) return router.push(`/f/${fleetId}/engines/${id}`);
+    if ("answer" in outcome) {
+      const pressed = (event?.nativeEvent as SubmitEvent | undefined)?.submitter?.getAttribute("name");
+      router.push(pressed === ANOTHER ? `/f/${fleetId}/boats/${boatId}/engines/new` : `/f/${fleetId}/engines/${id}`);
+      return router.refresh();
+    }
     const named = outcome.refusal.errors.find(({ path }) => path === "name");
     if (named) form.setError("name", { message: named.says }, { shouldFocus: true });
   });
   // The shared fields know the engine's part of the form; the reading is this form's own.
   const register = form.register as unknown as Parameters<typeof ClockFields>[0]["register"];
   return (
-    <form className="grid max-w-4xl gap-6" onSubmit={submit} noValidate>
+    <Form className="grid max-w-4xl gap-6" onSubmit={submit}>
       <div className="grid max-w-xl gap-5">
         <ClockFields register={register} errors={errors} meter={meter} />
         {meter === "yes" && (
@@ -73,7 +86,19 @@ export function NewEngineForm({ fleetId, boatId, suggestedName, features }: Prop
           <ProfileFields features={features} register={register} errors={errors} />
         </div>
       </Fold>
-      <FormEnd submit="Add the engine" saving={saving} refusal={errors.name ? null : refusal} wrong={Object.keys(errors).length > 0} />
-    </form>
+      <FormEnd
+        submit="Add the engine"
+        saving={saving}
+        refusal={errors.name ? null : refusal}
+        wrong={Object.keys(errors).length > 0}
+        also={
+          first && (
+            <Button type="submit" name={ANOTHER} disabled={saving}>
+              Add it, then the other one
+            </Button>
+          )
+        }
+      />
+    </Form>
   );
 }

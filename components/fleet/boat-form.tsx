@@ -4,6 +4,7 @@ import { zodResolver } from "@hookform/resolvers/zod";
 import { useRouter } from "next/navigation";
 import { useForm } from "react-hook-form";
 import { FormEnd } from "@/components/form/form-end";
+import { Form } from "@/components/ui/form";
 import { StaleNotice } from "@/components/form/stale-notice";
 import { useChange } from "@/components/form/use-change";
 import { sendJson } from "@/lib/client/exchange/request";
@@ -26,7 +27,7 @@ export function BoatForm({ fleetId, boat }: { fleetId: string; boat: Boat }) {
     onSaved: () => router.refresh(),
   });
   return (
-    <form className="grid gap-5" onSubmit={submit} noValidate>
+    <Form className="grid gap-5" onSubmit={submit}>
       <BoatFields register={form.register} errors={form.formState.errors} />
       {theirs && (
         <StaleNotice
@@ -39,6 +40,6 @@ export function BoatForm({ fleetId, boat }: { fleetId: string; boat: Boat }) {
         />
       )}
       <FormEnd submit="Save" saving={saving} refusal={refusal} done={saved && !form.formState.isDirty && "Saved."} />
-    </form>
+    </Form>
   );
 }

@@ -6,6 +6,7 @@ import { useState } from "react";
 import { useForm } from "react-hook-form";
 import { uuidv7 } from "uuidv7";
 import { FormEnd } from "@/components/form/form-end";
+import { Form } from "@/components/ui/form";
 import { useSave } from "@/components/form/use-save";
 import { sendJson } from "@/lib/client/exchange/request";
 import { BoatFields } from "./boat-fields";
@@ -23,9 +24,9 @@ export function NewBoatForm({ fleetId }: { fleetId: string }) {
     if ("answer" in outcome) router.push(`/f/${fleetId}/boats/${id}/engines/new`);
   });
   return (
-    <form className="grid max-w-2xl gap-5" onSubmit={submit} noValidate>
+    <Form className="grid max-w-2xl gap-5" onSubmit={submit}>
       <BoatFields register={form.register} errors={form.formState.errors} />
       <FormEnd submit="Add the boat" saving={saving} refusal={refusal} wrong={!form.formState.isValid && form.formState.isSubmitted} />
-    </form>
+    </Form>
   );
 }

@@ -1,5 +1,5 @@
 import type { FaultTree } from "@/lib/core/tree/schema";
-import type { Pick } from "./pick-or-say";
+import type { Pick } from "@/components/form/pick-or-say";
 
 export type RepairChoices = {
   causes: (Pick & { curedBy: string[] })[];

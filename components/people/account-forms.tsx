@@ -1,7 +1,7 @@
 "use client";
 
 import { ActionForm } from "./action-form";
-import { EmailField, NameField, NewPasswordField, PasswordField } from "./fields";
+import { EmailField, FleetNameField, NameField, NewPasswordField, PasswordField } from "./fields";
 import type { FormAction } from "./form-action";
 
 export function ChangeNameForm({ action, name }: { action: FormAction; name: string }) {
@@ -34,6 +34,14 @@ export function ChangePasswordForm({ action }: { action: FormAction }) {
           <NewPasswordField wrong={wrong} label="New password" />
         </>
       )}
+    </ActionForm>
+  );
+}
+
+export function StartFleetForm({ action }: { action: FormAction }) {
+  return (
+    <ActionForm action={action} submit="Start a fleet">
+      {(wrong) => <FleetNameField wrong={wrong} />}
     </ActionForm>
   );
 }

@@ -1,8 +1,11 @@
 import { TextField } from "@/components/ui/text-field";
+import { SecretField } from "./secret-field";
 
 type Wrong = (name: string) => string | undefined;
 
-export function EmailField({ wrong, label = "E-mail", hint, id = "email" }: { wrong: Wrong; label?: string; hint?: string; id?: string }) {
+type EmailProps = { wrong: Wrong; label?: string; hint?: string; id?: string; value?: string | undefined };
+
+export function EmailField({ wrong, label = "E-mail", hint, id = "email", value }: EmailProps) {
   return (
     <TextField
       id={id}
@@ -12,6 +15,7 @@ export function EmailField({ wrong, label = "E-mail", hint, id = "email" }: { wr
       inputMode="email"
       spellCheck={false}
       required
+      defaultValue={value}
       label={label}
       hint={hint}
       error={wrong("email")}
@@ -30,18 +34,15 @@ export function PasswordField({
   name?: string;
   id?: string;
 }) {
-  return <TextField id={id} name={name} type="password" autoComplete="current-password" required label={label} error={wrong(name)} />;
+  return <SecretField id={id} name={name} autoComplete="current-password" label={label} error={wrong(name)} />;
 }
 
 export function NewPasswordField({ wrong, label = "Password" }: { wrong: Wrong; label?: string }) {
   return (
-    <TextField
+    <SecretField
       id="password"
       name="password"
-      type="password"
       autoComplete="new-password"
-      required
-      minLength={10}
       label={label}
       hint="At least 10 characters; a few words do well."
       error={wrong("password")}
@@ -61,6 +62,20 @@ export function NameField({ wrong, value }: { wrong: Wrong; value?: string }) {
       label="Your name"
       hint="It stands in the log beside what you did."
       error={wrong("name")}
+    />
+  );
+}
+
+export function FleetNameField({ wrong }: { wrong: Wrong }) {
+  return (
+    <TextField
+      id="fleetName"
+      name="fleetName"
+      required
+      maxLength={80}
+      label="What shall the fleet be called?"
+      hint="A fleet is one boat or many. Only its own people see what is in it."
+      error={wrong("fleetName")}
     />
   );
 }

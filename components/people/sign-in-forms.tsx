@@ -1,18 +1,26 @@
 "use client";
 
 import Link from "next/link";
+import { Button } from "@/components/ui/button";
 import { Notice } from "@/components/ui/notice";
 import type { FormState } from "@/lib/core/contract/form-state";
 import { ActionForm } from "./action-form";
-import { EmailField, NameField, NewPasswordField, PasswordField } from "./fields";
-import { TextField } from "@/components/ui/text-field";
+import { EmailField, FleetNameField, NameField, NewPasswordField, PasswordField } from "./fields";
 
 type Action = (before: FormState, form: FormData) => Promise<FormState>;
 const carried = (values: Record<string, string | undefined>): Record<string, string> =>
   Object.fromEntries(Object.entries(values).filter((pair): pair is [string, string] => pair[1] !== undefined));
-const inTheMail = (says: string) => (
+/** A mail is on its way: where to, and what to do if it does not come. */
+const inTheMail = (says: string, given: FormData, again: () => void) => (
   <Notice tone="good" title="Look in your mail" live>
-    {says}
+    <p>{says}</p>
+    <p className="mt-1">
+      It goes to <b className="break-all">{String(given.get("email"))}</b>. Nothing there after some minutes? Look where unwanted mail is
+      put.
+    </p>
+    <Button className="mt-3" onClick={again}>
+      Send it again, or to another address
+    </Button>
   </Notice>
 );
 
@@ -35,7 +43,7 @@ export function SignInForms({ withPassword, withLink, next }: { withPassword: Ac
       <section className="border-t border-rule pt-6">
         <h2 className="mb-3">Or by a link in your mail</h2>
         <ActionForm action={withLink} hidden={carried({ next })} submit="Send me a link" tone="plain" onceDone={inTheMail}>
-          {(wrong) => <EmailField wrong={wrong} id="link-email" />}
+          {(wrong, before) => <EmailField wrong={wrong} id="link-email" value={before("email")} />}
         </ActionForm>
       </section>
     </div>
@@ -45,7 +53,7 @@ export function SignInForms({ withPassword, withLink, next }: { withPassword: Ac
 export function AddressForm({ action, submit }: { action: Action; submit: string }) {
   return (
     <ActionForm action={action} submit={submit} onceDone={inTheMail}>
-      {(wrong) => <EmailField wrong={wrong} />}
+      {(wrong, before) => <EmailField wrong={wrong} value={before("email")} />}
     </ActionForm>
   );
 }
@@ -56,15 +64,7 @@ export function FinishSignUpForm({ action, token }: { action: Action; token: str
       {(wrong) => (
         <>
           <NameField wrong={wrong} />
-          <TextField
-            id="fleetName"
-            name="fleetName"
-            required
-            maxLength={80}
-            label="What shall the fleet be called?"
-            hint="A fleet is one boat or many. Only its own people see what is in it."
-            error={wrong("fleetName")}
-          />
+          <FleetNameField wrong={wrong} />
           <NewPasswordField wrong={wrong} />
         </>
       )}

@@ -1,5 +1,5 @@
 import type { Cause, Check, Remedy, Symptom } from "@/lib/core/tree/schema";
-import { linkInWords } from "./in-words";
+import { findingInWords, linkInWords } from "./in-words";
 import { Facts, Pair, Sources } from "./node-facts";
 import { StepFacts } from "./step-facts";
 import type { TreePart } from "./tree-part";
@@ -52,10 +52,18 @@ export function CausePanel({ node, part }: Of<Cause>) {
       />
       <Facts title="Shows itself as" items={links(node.shows, "symptom")} />
       <Facts
-        title="What the checks then find"
+        title="What the checks then find (×6: 6 times as often as in a sound engine)"
         items={Object.entries(node.gives).flatMap(([check, findings]) =>
-          Object.entries(findings).map(([spec, link]) => (
-            <Pair key={check + spec} what={`${title("check", check)}: ${found(check, spec)}`} how={linkInWords(link)} />
+          Object.keys(findings).map((spec) => (
+            <Pair
+              key={check + spec}
+              what={`${title("check", check)}: ${found(check, spec)}`}
+              how={findingInWords(
+                part.graph.checks.find(({ key }) => key === check),
+                findings,
+                spec,
+              )}
+            />
           )),
         )}
       />

@@ -2,6 +2,7 @@
 
 import { useState, type ReactElement } from "react";
 import { Dialog } from "@/components/ui/dialog";
+import { ratioInFigures } from "./in-words";
 import { NodeBody, nodeOf } from "./selected-node";
 import type { TreePart } from "./tree-part";
 
@@ -37,7 +38,7 @@ export function TreeOutline({ part }: { part: TreePart }) {
                     .map((t) => (
                       <span key={t.check + t.finding}>
                         {named(`check:${t.check}`, titleOf("check", t.check))}: {findingOf(t.check, t.finding)}{" "}
-                        <span className="dial whitespace-nowrap">×{Math.round(t.ratio)}</span>
+                        <span className="dial whitespace-nowrap">×{ratioInFigures(t.ratio)}</span>
                       </span>
                     ))}
                 />

@@ -1,9 +1,13 @@
 import type { ComponentProps, ReactNode } from "react";
 
 /** A box to tick, with its words. Drawn by us: the browser's own shines grey and white at night. */
-export function Checkbox({ children, ...rest }: Omit<ComponentProps<"input">, "type" | "className"> & { children: ReactNode }) {
+export function Checkbox({
+  children,
+  hint,
+  ...rest
+}: Omit<ComponentProps<"input">, "type" | "className"> & { children: ReactNode; /** What the tick does. */ hint?: ReactNode }) {
   return (
-    <label className="flex min-h-12 items-center gap-3">
+    <label className={hint ? "flex min-h-12 items-start gap-3 py-2.5" : "flex min-h-12 items-center gap-3"}>
       <span className="relative grid size-6 flex-none place-items-center">
         <input
           type="checkbox"
@@ -14,7 +18,10 @@ export function Checkbox({ children, ...rest }: Omit<ComponentProps<"input">, "t
           <path d="M4 12l5 5L18 6" fill="none" stroke="var(--fill)" strokeWidth={3.4} />
         </svg>
       </span>
-      <span>{children}</span>
+      <span>
+        {children}
+        {hint && <span className="block text-sm text-ink-2">{hint}</span>}
+      </span>
     </label>
   );
 }

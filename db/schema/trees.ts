@@ -48,8 +48,19 @@ export const treeVersions = pgTable(
     revision: integer().notNull().default(1),
     document: jsonb().$type<FaultTree>().notNull(),
     hash: text().notNull(),
+    /** The version it was begun from, shipped or own; what it is compared with and proved against. */
+    begunFrom: uuid().notNull(),
+    /** The shipped version whose content it has taken up: what a newer one is joined against. */
+    takenUp: uuid()
+      .notNull()
+      .references(() => shippedTreeVersions.id),
+    /** What the mechanic says of it when it is published. */
+    note: text(),
+    /** What changed from the version it was begun from, in words; written when it is published. */
+    differences: jsonb().$type<string[]>().notNull().default([]),
     by: uuid().notNull(),
     createdAt: createdAt(),
+    savedAt: createdAt(),
     publishedAt: moment(),
   },
   (t) => [

@@ -3,6 +3,7 @@ import type { Engine } from "@/lib/core/contract/engine";
 import type { Phone } from "@/lib/core/contract/phone";
 import { CORE_VERSION } from "@/lib/core/diagnosis/core-version";
 import type { FaultTree, Situation, Who } from "@/lib/core/tree/schema";
+import { answerOfOther, otherEngineCheck, profileAtStart } from "./other-engine";
 import type { Draft } from "./store/draft";
 import type { PhoneStore } from "./store/phone-store";
 
@@ -21,11 +22,12 @@ type Start = {
 export async function begin({ store, phone, engine, tree, draft, symptoms }: Start): Promise<string> {
   const d = uuidv7();
   const callMinutes = phone.boats.find(({ id }) => id === engine.boatId)?.callMinutes[CALLS[draft.situation]];
+  const profile = profileAtStart(engine, phone.engines, tree);
   const inTree = new Set(tree.causes.map(({ key }) => key));
   await store.record(d, "begun", {
     engineId: engine.id,
     treeVersionId: phone.treeVersion.id,
-    profile: engine.profile,
+    profile,
     situation: draft.situation,
     person: whoIs(draft),
     symptoms: symptoms.slice(0, 12),
@@ -34,10 +36,9 @@ export async function begin({ store, phone, engine, tree, draft, symptoms }: Sta
     ...(callMinutes === undefined ? {} : { callMinutes }),
     coreVersion: CORE_VERSION,
   });
-  if (draft.otherEngine) {
-    const note = draft.otherEngine === "does" ? "The other engine does it too." : "The other engine does not do it.";
-    await store.record(d, "noted", { note, photos: [] });
-  }
+  const other = otherEngineCheck(tree, profile, draft.situation);
+  const answer = other && answerOfOther(other, draft.otherEngine);
+  if (other && answer) await store.record(d, "answered", { check: other.key, answer, photos: [] });
   await store.dropDraft(engine.id);
   return d;
 }

@@ -2,6 +2,7 @@ import { eq, sql } from "drizzle-orm";
 import { beforeAll, beforeEach, describe, expect, test } from "vitest";
 import { identityDatabase, type Database } from "@/db/client";
 import { oneTimeTokens } from "@/db/schema/sessions";
+import { memberships } from "@/db/schema/memberships";
 import { users } from "@/db/schema/users";
 import { FleetName, PersonName } from "@/lib/core/contract/account";
 import { askAddressChange, changeName, changePassword, confirmAddress } from "@/lib/server/account/commands";
@@ -13,6 +14,7 @@ import { findPerson, type Person } from "@/lib/server/auth/person";
 import { endSession, endSessionsOf, listSessions, openSession } from "@/lib/server/auth/sessions";
 import { withScope } from "@/lib/server/auth/scope";
 import { fleetsOf, listPeople } from "@/lib/server/people/queries";
+import { startFleetAfresh } from "@/lib/server/people/start-fleet";
 import { testDatabase } from "../support/database";
 import { testMailbox } from "../support/mailbox";
 
@@ -216,5 +218,16 @@ describe("sessions", () => {
     const { person } = await signUp();
     await owner.execute(sql`update sessions set expires_at = now() - interval '1 second' where id = ${person.sessionId}`);
     expect(await findPerson(person.sessionId)).toBeNull();
+  });
+});
+
+describe("a fleet of one's own for somebody in none", () => {
+  test("is started with them as its owner; who is in a fleet gets no second", async () => {
+    const { person, fleetId } = await signUp();
+    expect(await startFleetAfresh(person, "Another")).toBeNull();
+    await owner.delete(memberships).where(eq(memberships.fleetId, fleetId));
+    const own = await startFleetAfresh(person, "Begun again");
+    expect(await fleetsOf(person)).toEqual([{ id: own, name: "Begun again", roles: ["skipper", "mechanic", "owner"] }]);
+    expect(await withScope(person, own!, "people:read", listPeople)).toMatchObject([{ userId: person.userId, name: "Ada" }]);
   });
 });

@@ -45,6 +45,7 @@ const ENGINE: Readonly<Record<string, string>> = {
   turbo: "none",
   governor: "mechanical",
   voltage: "v12",
+  "second-engine": "not-fitted",
 };
 
 /** So often does a remedy have to cure a cause to be called its cure. */

@@ -1,12 +1,13 @@
 "use server";
 
 import * as z from "zod";
-import { ChangeAddress, ChangeName, ChangePassword } from "@/lib/core/contract/account";
+import { ChangeAddress, ChangeName, ChangePassword, StartFleet } from "@/lib/core/contract/account";
 import { Id } from "@/lib/core/contract/id";
 import { askAddressChange, changeName as writeName, changePassword as setPassword } from "@/lib/server/account/commands";
 import type { PasswordOutcome } from "@/lib/server/auth/check-password";
 import { signOut as endThisSession } from "@/lib/server/auth/next-auth";
 import { endSession as end, endSessionsOf } from "@/lib/server/auth/sessions";
+import { startFleetAfresh } from "@/lib/server/people/start-fleet";
 import { done, personalAction, publicAction, refused, wait, type Outcome } from "@/lib/server/web/action";
 
 const told = (outcome: PasswordOutcome, says: string): Outcome => {
@@ -32,6 +33,14 @@ export const changeAddress = personalAction({
   input: ChangeAddress,
   run: async (person, input) =>
     told(await askAddressChange(person, input), "A link is on its way to the new address. Until you open it, you sign in as before."),
+});
+
+export const startFleet = personalAction({
+  input: StartFleet,
+  async run(person, { fleetName }) {
+    const fleetId = await startFleetAfresh(person, fleetName);
+    return fleetId ? { goTo: `/f/${fleetId}/boats/new` } : refused("You are in a fleet already. It stands on this page.");
+  },
 });
 
 export const endSession = personalAction({

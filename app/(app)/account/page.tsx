@@ -1,6 +1,6 @@
 import type { Metadata } from "next";
 import Link from "next/link";
-import { ChangeAddressForm, ChangeNameForm, ChangePasswordForm } from "@/components/people/account-forms";
+import { ChangeAddressForm, ChangeNameForm, ChangePasswordForm, StartFleetForm } from "@/components/people/account-forms";
 import { DeviceList } from "@/components/people/device-list";
 import { SignOut } from "@/components/people/sign-out";
 import { FleetShell } from "@/components/shell/fleet-shell";
@@ -10,7 +10,7 @@ import { PageHead } from "@/components/ui/page-head";
 import { listSessions } from "@/lib/server/auth/sessions";
 import { fleetsOf } from "@/lib/server/people/queries";
 import { signedInPerson } from "@/lib/server/web/page-scope";
-import { changeAddress, changeName, changePassword, endOtherSessions, endSession, signOut, signOutEverywhere } from "./actions";
+import { changeAddress, changeName, changePassword, endOtherSessions, endSession, signOut, signOutEverywhere, startFleet } from "./actions";
 
 export const metadata: Metadata = { title: "Your account" };
 
@@ -27,7 +27,10 @@ export default async function AccountPage() {
             <h2 id="fleets">Your fleets</h2>
             {fleets.length === 0 ? (
               <div className="mt-2">
-                <EmptyState title="You are in no fleet">Somebody who owns one can invite you; the invitation comes by mail.</EmptyState>
+                <EmptyState title="You are in no fleet">Somebody who owns one can invite you by mail. Or start one of your own.</EmptyState>
+                <div className="mt-4">
+                  <StartFleetForm action={startFleet} />
+                </div>
               </div>
             ) : (
               <ul className="divide-y divide-rule">

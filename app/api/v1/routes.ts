@@ -5,8 +5,10 @@ import * as events from "./fleets/[fleetId]/diagnoses/[diagnosisId]/events/route
 import * as diagnosis from "./fleets/[fleetId]/diagnoses/[diagnosisId]/route";
 import * as story from "./fleets/[fleetId]/diagnoses/[diagnosisId]/story/route";
 import * as diagnoses from "./fleets/[fleetId]/diagnoses/route";
+import * as reading from "./fleets/[fleetId]/engines/[engineId]/hours/[readingId]/route";
 import * as hours from "./fleets/[fleetId]/engines/[engineId]/hours/route";
 import * as engineLog from "./fleets/[fleetId]/engines/[engineId]/log/route";
+import * as repair from "./fleets/[fleetId]/engines/[engineId]/repairs/[repairId]/route";
 import * as repairs from "./fleets/[fleetId]/engines/[engineId]/repairs/route";
 import * as engineRepeats from "./fleets/[fleetId]/engines/[engineId]/repeats/route";
 import * as engine from "./fleets/[fleetId]/engines/[engineId]/route";
@@ -21,6 +23,12 @@ import * as phone from "./fleets/[fleetId]/phone/route";
 import * as repeats from "./fleets/[fleetId]/repeats/route";
 import * as fleet from "./fleets/[fleetId]/route";
 import * as trees from "./fleets/[fleetId]/trees/route";
+import * as treeDraft from "./fleets/[fleetId]/trees/draft/route";
+import * as publication from "./fleets/[fleetId]/trees/draft/publication/route";
+import * as treeDraftFile from "./fleets/[fleetId]/trees/draft/file/route";
+import * as loggedCases from "./fleets/[fleetId]/trees/logged-cases/route";
+import * as treeReading from "./fleets/[fleetId]/trees/reading/route";
+import * as treeVersionFile from "./fleets/[fleetId]/trees/versions/[versionId]/file/route";
 import * as treeVersion from "./fleets/[fleetId]/trees/versions/[versionId]/route";
 import * as me from "./me/route";
 
@@ -33,7 +41,9 @@ export const routes: Routes = {
   "/fleets/{fleetId}/engines": engines,
   "/fleets/{fleetId}/engines/{engineId}": engine,
   "/fleets/{fleetId}/engines/{engineId}/hours": hours,
+  "/fleets/{fleetId}/engines/{engineId}/hours/{readingId}": reading,
   "/fleets/{fleetId}/engines/{engineId}/repairs": repairs,
+  "/fleets/{fleetId}/engines/{engineId}/repairs/{repairId}": repair,
   "/fleets/{fleetId}/engines/{engineId}/log": engineLog,
   "/fleets/{fleetId}/engines/{engineId}/repeats": engineRepeats,
   "/fleets/{fleetId}/log": log,
@@ -44,7 +54,13 @@ export const routes: Routes = {
   "/fleets/{fleetId}/diagnoses/{diagnosisId}/story": story,
   "/fleets/{fleetId}/files/{fileId}": file,
   "/fleets/{fleetId}/trees": trees,
+  "/fleets/{fleetId}/trees/draft": treeDraft,
+  "/fleets/{fleetId}/trees/draft/file": treeDraftFile,
+  "/fleets/{fleetId}/trees/draft/publication": publication,
+  "/fleets/{fleetId}/trees/logged-cases": loggedCases,
+  "/fleets/{fleetId}/trees/reading": treeReading,
   "/fleets/{fleetId}/trees/versions/{versionId}": treeVersion,
+  "/fleets/{fleetId}/trees/versions/{versionId}/file": treeVersionFile,
   "/fleets/{fleetId}/phone": phone,
   "/fleets/{fleetId}/people": people,
   "/fleets/{fleetId}/people/{userId}": person,

@@ -3,11 +3,13 @@ import { Observable } from "../observable";
 import type { PhoneStore } from "../store/phone-store";
 import { backoffSeconds } from "./backoff";
 import { pull } from "./pull";
-import { push } from "./push";
+import { hasNoRoom, push } from "./push";
 import { NoAnswer, request } from "./request";
 import { NOTHING_YET, type Standing } from "./standing";
 
 const FRESH_MS = 60_000;
+/** A store that is full is not emptied by the minute, and a picture costs a weak signal dear. */
+const FULL_MS = 60 * 60_000;
 
 /**
  * Moves the outbox ashore and brings what is new, whenever there is a chance of
@@ -26,6 +28,10 @@ export class Exchange {
   #pulledAt = 0;
   /** When the server last said that the person of this store is the one signed in. */
   #knownAt = 0;
+  /** Until when pictures are not carried to a store that is full. */
+  #fullUntil = 0;
+  /** Tree versions that this page cannot read. */
+  readonly #tooNew = new Set<string>();
   #ended = false;
 
   constructor(store: PhoneStore, userId: string, fleetId: string) {
@@ -62,6 +68,12 @@ export class Exchange {
     if (!this.#running) void this.#run();
   }
 
+  /** Someone asks for it: whatever was put off is tried again too. */
+  sendNow(): void {
+    this.#fullUntil = 0;
+    this.nudge(true);
+  }
+
   async #run(): Promise<void> {
     this.#running = true;
     if (this.#timer) clearTimeout(this.#timer);
@@ -72,7 +84,7 @@ export class Exchange {
       try {
         await oneTabAtATime(`gudgeon.exchange.${this.#fleetId}`, () => this.#exchange());
         this.#failures = 0;
-        this.#say({ sending: false, trouble: null, ashoreAt: new Date().toISOString() });
+        this.#say({ sending: false, trouble: this.#standingTrouble(), ashoreAt: new Date().toISOString() });
       } catch (failure) {
         this.#failures += 1;
         this.#knownAt = 0;
@@ -86,12 +98,19 @@ export class Exchange {
 
   async #exchange(): Promise<void> {
     await this.#samePerson();
-    const held = await push(this.#store, this.#fleetId);
+    const held = await push(this.#store, this.#fleetId, Date.now() >= this.#fullUntil);
+    if (hasNoRoom(held)) this.#fullUntil = Date.now() + FULL_MS;
     if (Date.now() - this.#pulledAt >= FRESH_MS) {
-      await pull(this.#store, this.#fleetId);
+      await pull(this.#store, this.#fleetId, this.#tooNew);
       this.#pulledAt = Date.now();
     }
-    if (held) throw held;
+    if (held && !hasNoRoom(held)) throw held;
+  }
+
+  /** What another try in a moment would not mend. */
+  #standingTrouble(): Standing["trouble"] {
+    if (Date.now() < this.#fullUntil) return "full";
+    return this.#tooNew.size > 0 ? "too-new" : null;
   }
 
   /** Someone else may have signed in on this phone since, in another tab: nothing of this person's goes ashore in their name. */

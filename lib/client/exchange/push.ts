@@ -14,9 +14,10 @@ const PHOTO_PATIENCE_MS = 180_000;
  * Sending twice is harmless. What the server will not take now is kept, holds up
  * nothing else, and is given back for the next try; null: all has gone ashore.
  *
+ * @param withPhotos false: pictures are left for another time
  * @throws NoAnswer where nothing can be sent at all: no signal, signed out, too many requests
  */
-export async function push(store: PhoneStore, fleetId: string): Promise<Error | null> {
+export async function push(store: PhoneStore, fleetId: string, withPhotos = true): Promise<Error | null> {
   let held: Error | null = null;
   const hold = (failure: unknown): void => {
     if (!(failure instanceof Error) || stopsAll(failure)) throw failure;
@@ -35,11 +36,13 @@ export async function push(store: PhoneStore, fleetId: string): Promise<Error | 
       hold(failure);
     }
   }
-  for (const photo of await store.unsentPhotos()) {
+  for (const photo of withPhotos ? await store.unsentPhotos() : []) {
     try {
       await pushPhoto(store, fleetId, photo);
     } catch (failure) {
       hold(failure);
+      // Where one picture finds no room, the next would be carried there for nothing.
+      if (hasNoRoom(failure)) break;
     }
   }
   return held;
@@ -97,3 +100,6 @@ function isForGood(failure: unknown): failure is NoAnswer {
 /** Nothing else would get through either. */
 const stopsAll = (failure: Error): boolean =>
   failure instanceof NoAnswer && (failure.isNoSignal || [401, 429, 503].includes(failure.status));
+
+/** The store ashore is full: words still get there, pictures do not. */
+export const hasNoRoom = (failure: unknown): boolean => failure instanceof NoAnswer && failure.status === 507;

@@ -3,7 +3,7 @@ export type Standing = {
   /** Events and photos that the server does not have. */
   waiting: number;
   sending: boolean;
-  trouble: "no-signal" | "sign-in" | "not-in-fleet" | "server" | null;
+  trouble: "no-signal" | "sign-in" | "not-in-fleet" | "server" | "full" | "too-new" | null;
   /** When the server last had everything; null: not since this phone was opened. */
   ashoreAt: string | null;
 };
@@ -15,10 +15,11 @@ export function standingInShort(standing: Standing, unsaved: boolean): string {
   if (unsaved) return "Not saved on this phone";
   if (standing.sending && standing.waiting > 0) return `Sending ${standing.waiting}`;
   if (standing.trouble === "no-signal") return "No signal: kept here";
+  if (standing.trouble === "full") return "Photos kept here";
   if (standing.waiting > 0) return `Kept here: ${standing.waiting} to send`;
   if (standing.trouble === "sign-in") return "Signed out: kept here";
   if (standing.trouble !== null) return "Kept here";
-  return standing.ashoreAt ? `All ashore ${clock(standing.ashoreAt)}` : "Kept on this phone";
+  return standing.ashoreAt ? `Kept ashore ${clock(standing.ashoreAt)}` : "Kept on this phone";
 }
 
 /** The whole sentence, for the line under the screen. */
@@ -37,6 +38,10 @@ export function standingInWords(standing: Standing, unsaved: boolean): string {
       return "The server says you do not belong to this fleet now. All is kept on this phone.";
     case "server":
       return `The server did not take it this time. All is kept on this phone${standing.waiting > 0 ? `; ${waiting} to be sent` : ""}.`;
+    case "full":
+      return "The answers are kept ashore. There is no room left there for photos: they are kept on this phone and tried again in an hour. Tell the fleet\u2019s owner.";
+    case "too-new":
+      return "The fault tree ashore is newer than this page can read. The one on this phone is used. Load the page again while there is a signal.";
     case null:
       if (standing.waiting > 0) return `Kept on this phone; ${waiting} to be sent.`;
       return standing.ashoreAt ? `Everything is kept ashore, last at ${clock(standing.ashoreAt)}.` : "Kept on this phone.";

@@ -1,3 +1,4 @@
+import { saidTogether } from "../said-together";
 import { SITUATIONS, type HandOverFacts } from "./facts";
 import { positionForMessage } from "./position";
 
@@ -49,7 +50,7 @@ export function handOverMessage(facts: HandOverFacts): string {
   const [likeliest] = facts.possible;
   const more = [
     ...facts.tried.map(({ title, says }) => `Tried ${title}: ${says}.`),
-    ...facts.checked.map(({ title, says }) => `${title}: ${says}.`),
+    ...facts.checked.map(({ title, says }) => `${saidTogether(title, says)}.`),
   ];
   // The first finding, then what it points to, then the rest.
   const parts = [...more.slice(0, 1), ...(likeliest ? [`Maybe ${likeliest.title}, ${likeliest.of100} of 100.`] : []), ...more.slice(1)];

@@ -10,6 +10,7 @@ export const SCREENS = [
   "step",
   "said",
   "change",
+  "answered",
   "looked",
   "tried",
   "more",

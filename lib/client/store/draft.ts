@@ -9,7 +9,8 @@ export type Draft = {
   /** Ticked or unticked by hand; the rest follows the complaint. */
   chosen: Record<string, boolean>;
   mechanic: boolean;
-  otherEngine: "does" | "does-not" | null;
+  /** What was found at the other engine: the key of a finding, or that nobody can tell; null: not said. */
+  otherEngine: string | null;
   boatIsSafe: boolean;
   /** When it was last changed; absent in what was kept before this was noted. */
   keptAt?: string;

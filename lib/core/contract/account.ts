@@ -39,6 +39,7 @@ export const AddressGiven = z.object({ email: Email, next: Next });
 export const LinkOpened = z.object({ token: Token, next: Next });
 export const FinishSignUp = z.object({ token: Token, name: PersonName, fleetName: FleetName, password: NewPassword });
 export type FinishSignUp = z.infer<typeof FinishSignUp>;
+export const StartFleet = z.object({ fleetName: FleetName });
 export const ResetPassword = z.object({ token: Token, password: NewPassword });
 export const AcceptAsNew = z.object({ token: Token, name: PersonName, password: NewPassword });
 export type AcceptAsNew = z.infer<typeof AcceptAsNew>;

@@ -70,7 +70,8 @@ function proveCase(tree: FaultTree, known: KnownCase, person: Who): CaseProof {
   };
 }
 
-function placeOf(tree: FaultTree, known: KnownCase, told: Told): { place: number | null; believed: string | null } {
+/** Where the right cause stands among the causes, from 1, on so much of a known case; null where the tree does not have it for this engine. */
+export function placeOf(tree: FaultTree, known: KnownCase, told: Told): { place: number | null; believed: string | null } {
   const model = compile(tree, settingFor(known, "mechanic"));
   const { shares } = believe(model, evidenceFor(tree, known, told));
   const ofCauses = shares.subarray(0, model.unknownAt);

@@ -11,9 +11,10 @@ import type { Model } from "./model";
 import { nextStep } from "./next-step";
 import { possible } from "./possible";
 import { settingOf } from "./setting-of";
+import { putRightShown } from "./show-put-right";
 import { answerSaid, said } from "./show-said";
 import { showStep } from "./show-step";
-import { rulesInForce, rulesToAsk, standingRules } from "./stop-rules";
+import { mayRunOn, rulesInForce, rulesToAsk, standingRules } from "./stop-rules";
 import type { DiagnosisView, RuleShown, StepShown } from "./view";
 import { RESULTS_SAID } from "./words";
 
@@ -29,10 +30,11 @@ export function view(tree: FaultTree, log: readonly DiagnosisEvent[], models: Co
   const setting = settingOf(tree, state);
   const model = models(tree, setting);
   const evidence = evidenceOf(tree, state);
-  const { shares } = believe(model, evidence);
+  const belief = believe(model, evidence);
   const toAsk = state.begun && !state.ended ? rulesToAsk(tree, state) : [];
   const inForce = rulesInForce(tree, state);
-  const cured = curedCause(model, state, shares);
+  const shown = (rule: StopRule): RuleShown => ruleShown(rule, mayRunOn(rule, tree, state));
+  const cured = curedCause(model, state, belief.shares);
   const goesOn = state.begun !== null && state.ended === null && toAsk.length === 0 && cured === null;
   return {
     begun: state.begun !== null,
@@ -43,14 +45,15 @@ export function view(tree: FaultTree, log: readonly DiagnosisEvent[], models: Co
     symptoms: state.symptoms.map(({ symptom, present }) => ({ key: symptom, title: titleOf(tree.symptoms, symptom), present })),
     said: said(tree, state),
     conflicts: conflictsShown(tree, state),
-    rulesToAsk: toAsk.map(ruleShown),
-    rules: standingRules(tree, state).map(({ rule, ...standing }) => ({ ...ruleShown(rule), ...standing })),
-    rulesInForce: inForce.map(ruleShown),
+    rulesToAsk: toAsk.map(shown),
+    rules: standingRules(tree, state).map(({ rule, ...standing }) => ({ ...shown(rule), ...standing })),
+    rulesInForce: inForce.map(shown),
     step: goesOn ? stepShown(model, evidence, inForce) : null,
-    possible: possible(model, evidence, shares),
+    possible: possible(model, evidence, belief),
     crankSeconds: crankSeconds(tree, state),
     outcome: state.ended ? { ...state.ended.payload, event: state.ended.id, at: state.ended.madeAt } : null,
     curedCause: cured,
+    putRight: putRightShown(model, state, belief),
     runsAgain: state.runsAgain,
   };
 }
@@ -64,14 +67,14 @@ function stepShown(model: Model, evidence: Evidence, inForce: readonly StopRule[
   return showStep(model, evidence, step, clears);
 }
 
-const ruleShown = (rule: StopRule): RuleShown => ({
+const ruleShown = (rule: StopRule, runOn: boolean): RuleShown => ({
   key: rule.key,
   title: rule.title,
   kind: rule.kind,
   ask: rule.ask ?? null,
   because: rule.because,
   says: rule.says,
-  runOn: rule.runOnIfStoppingEndangers,
+  runOn,
   clearedWhen: rule.clearedWhen ?? null,
 });
 
@@ -90,7 +93,7 @@ function conflictsShown(tree: FaultTree, state: DiagnosisState): DiagnosisView["
 
 /** The likeliest cause that the remedy which cured has a link to. Rule [X7]. */
 function curedCause(model: Model, state: DiagnosisState, shares: Float64Array): DiagnosisView["curedCause"] {
-  const event = [...state.remedies.values()].findLast((tried) => tried.payload.result === "cured");
+  const event = [...state.remedies.values()].findLast((tried) => tried.payload.result === "cured" && tried !== state.partCure?.event);
   if (!event) return null;
   const key = event.payload.remedy;
   const remedy = model.tree.remedies.find((one) => one.key === key);

@@ -35,11 +35,15 @@ export function rulesToAsk(tree: FaultTree, state: DiagnosisState): readonly Sto
   );
 }
 
-/** How a rule stands. `answer`: a rule in force is a "yes", however it came into force. `event`: the answer that another takes the place of; null where none does. */
+/**
+ * How a rule stands. `answer`: a rule in force is a "yes", however it came into force. `found`: in force by a finding or
+ * by cranking, with nobody's yes standing. `event`: the answer that another takes the place of; null where none does.
+ */
 export type RuleStanding = {
   readonly rule: StopRule;
   readonly due: boolean;
   readonly answer: "yes" | "no" | null;
+  readonly found: boolean;
   readonly event: string | null;
 };
 
@@ -56,7 +60,8 @@ export function standingRules(tree: FaultTree, state: DiagnosisState): readonly 
       );
       // A rule that was lifted comes into force again by a new answer, not by one in the place of the lifting.
       const replaced = last && last.payload.answer !== "cleared" ? last.id : null;
-      return { rule, due: due.has(rule), answer: inForce.has(rule) ? "yes" : last ? "no" : null, event: replaced };
+      const found = inForce.has(rule) && last?.payload.answer !== "yes";
+      return { rule, due: due.has(rule), answer: inForce.has(rule) ? "yes" : last ? "no" : null, found, event: replaced };
     });
 }
 
@@ -105,4 +110,14 @@ function isCleared(tree: FaultTree, rule: StopRule, trigger: DiagnosisEvent, sta
     ({ check, finding, settled }) => settled && rule.clearedBy.some((ref) => ref.check === check && ref.finding === finding),
   );
   return [...byHand, ...byFinding.map(({ event }) => event)].some((event) => state.order.before(trigger, event));
+}
+
+/**
+ * Is "run on to safety" worth saying? Not beside a rule against cranking while
+ * the engine is said not to run at all: there is nothing to run on with.
+ */
+export function mayRunOn(rule: StopRule, tree: FaultTree, state: Pick<DiagnosisState, "symptoms">): boolean {
+  if (!rule.runOnIfStoppingEndangers || rule.kind !== "no-crank") return rule.runOnIfStoppingEndangers;
+  const told = new Set(state.symptoms.filter(({ present }) => present).map(({ symptom }) => symptom));
+  return !tree.symptoms.some(({ key, rulesOut }) => told.has(key) && rulesOut?.includes("idling"));
 }

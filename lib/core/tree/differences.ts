@@ -1,4 +1,5 @@
 import { LIST_KINDS, type Flaw, type ListName } from "./flaw";
+import { isMap, sameValue } from "./same-value";
 import type { FaultTree } from "./schema";
 
 /** One thing that changed between two trees, in words that need no reading of the document. */
@@ -97,24 +98,11 @@ function namesOf(...trees: FaultTree[]): Names {
   return names;
 }
 
-const isMap = (value: unknown): value is Record<string, unknown> => typeof value === "object" && value !== null && !Array.isArray(value);
 const isKeyed = (value: unknown): value is Named[] =>
   Array.isArray(value) && value.length > 0 && value.every((item) => isMap(item) && typeof item.key === "string");
-const same = (a: unknown, b: unknown): boolean => JSON.stringify(ordered(a)) === JSON.stringify(ordered(b));
-
-/** With the fields of every map in one order. */
-function ordered(value: unknown): unknown {
-  if (Array.isArray(value)) return value.map(ordered);
-  if (!isMap(value)) return value;
-  return Object.fromEntries(
-    Object.keys(value)
-      .sort()
-      .map((key) => [key, ordered(value[key])]),
-  );
-}
 
 function fieldChanges(before: unknown, after: unknown, path: string, names: Names): string[] {
-  if (same(before, after)) return [];
+  if (sameValue(before, after)) return [];
   if (isMap(before) && isMap(after)) {
     const fields = [...new Set([...Object.keys(before), ...Object.keys(after)])];
     return fields.flatMap((field) =>

@@ -6,6 +6,8 @@ import { fleets, people } from "@/db/schema/fleets";
 import { memberships } from "@/db/schema/memberships";
 import { ROLES, type Role } from "@/lib/core/access/roles";
 import { inFleet } from "../auth/fleet-transaction";
+import type { Person } from "../auth/person";
+import { fleetsOf } from "./queries";
 
 type Newcomer = { userId: string; name: string };
 
@@ -26,6 +28,12 @@ export async function startFleet(name: string, first: Newcomer, join: (fleetId: 
     throw error;
   }
   return fleetId;
+}
+
+/** A fleet for somebody who has an account and is in none: removed from their last one, or never in any. null where they are in one. */
+export async function startFleetAfresh(person: Person, name: string): Promise<string | null> {
+  if ((await fleetsOf(person)).length > 0) return null;
+  return startFleet(name, person, (fleetId) => joinAsFirst(identityDatabase(), fleetId, person.userId));
 }
 
 /** The membership that makes somebody owner, skipper and mechanic of a fleet just started. */

@@ -1,5 +1,5 @@
 import "server-only";
-import { and, desc, eq, isNotNull } from "drizzle-orm";
+import { and, desc, eq, isNotNull, sql } from "drizzle-orm";
 import { shippedTreeVersions, trees, treeVersions } from "@/db/schema/trees";
 import { Problem } from "@/lib/core/contract/problem";
 import type { TreeVersionDocument, TreeVersionInfo } from "@/lib/core/contract/tree";
@@ -14,6 +14,7 @@ const shipped = {
   number: shippedTreeVersions.number,
   hash: shippedTreeVersions.hash,
   publishedAt: shippedTreeVersions.publishedAt,
+  note: sql<string | null>`null`,
 };
 const own = {
   id: treeVersions.id,
@@ -22,8 +23,9 @@ const own = {
   number: treeVersions.number,
   hash: treeVersions.hash,
   publishedAt: treeVersions.publishedAt,
+  note: treeVersions.note,
 };
-type Row = { id: string; key: string; title: string; number: number | null; hash: string; publishedAt: Date | null };
+type Row = { id: string; key: string; title: string; number: number | null; hash: string; publishedAt: Date | null; note: string | null };
 
 /** All published versions that this fleet can see: its own and the shipped ones, newest first; never a document. */
 export async function listTreeVersions(scope: FleetScope): Promise<TreeVersionInfo[]> {
@@ -66,7 +68,16 @@ export async function findTreeVersion(scope: FleetScope, id: string): Promise<Tr
 export async function getTreeVersion(scope: FleetScope, id: string): Promise<TreeVersionDocument> {
   const info = await findTreeVersion(scope, id);
   if (!info) throw Problem.notFound();
-  return { ...info, document: await documentOf(scope, info) };
+  return { ...info, document: await documentOf(scope, info), differences: await differencesOf(scope, id) };
+}
+
+/** What changed when this version was published, in words; nothing is kept of shipped versions. */
+async function differencesOf(scope: FleetScope, id: string): Promise<string[]> {
+  const [own] = await scope.tx
+    .select({ differences: treeVersions.differences })
+    .from(treeVersions)
+    .where(and(eq(treeVersions.fleetId, scope.fleetId), eq(treeVersions.id, id)));
+  return own?.differences ?? [];
 }
 
 /** The document of a version that this scope has been shown. Published documents never change, so the process keeps the last few. */
@@ -105,5 +116,6 @@ function infoOf(row: Row, from: TreeVersionInfo["from"]): TreeVersionInfo {
     hash: row.hash,
     publishedAt: (row.publishedAt ?? new Date(0)).toISOString(),
     from,
+    note: row.note,
   };
 }

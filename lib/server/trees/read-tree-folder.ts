@@ -35,16 +35,17 @@ export async function readTreeFolder(folder: string): Promise<TreeFolder | { fau
     return {
       faults: [{ file: ".", line: 1, says: `There are no YAML files in ${folder}.`, mend: "Name the folder that holds tree.yaml." }],
     };
-  const sources: Source[] = [];
-  for (const file of files) {
-    const lines = new LineCounter();
-    sources.push({
-      file,
-      lines,
-      yaml: parseDocument(await readFile(path.join(folder, file), "utf8"), { lineCounter: lines, prettyErrors: false }),
-    });
-  }
-  return joinSources(sources);
+  return readTreeFiles(await Promise.all(files.map(async (file) => ({ file, text: await readFile(path.join(folder, file), "utf8") }))));
+}
+
+/** As readTreeFolder, of files that have been read; a tree may stand in one. JSON is YAML too. */
+export function readTreeFiles(files: readonly { file: string; text: string }[]): TreeFolder | { faults: FileFault[] } {
+  return joinSources(
+    files.map(({ file, text }) => {
+      const lines = new LineCounter();
+      return { file, lines, yaml: parseDocument(text, { lineCounter: lines, prettyErrors: false }) };
+    }),
+  );
 }
 
 async function yamlFiles(folder: string): Promise<string[]> {

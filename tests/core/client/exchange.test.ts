@@ -5,7 +5,9 @@ import { Exchange } from "@/lib/client/exchange/exchange";
 import { pull } from "@/lib/client/exchange/pull";
 import { push } from "@/lib/client/exchange/push";
 import { NoAnswer } from "@/lib/client/exchange/request";
+import { standingInShort, standingInWords } from "@/lib/client/exchange/standing";
 import { PhoneStore } from "@/lib/client/store/phone-store";
+import { smallTree } from "@/tests/support/small-tree";
 import { BEGUN, idOf } from "./make-event";
 
 const FLEET = idOf(6001);
@@ -31,6 +33,19 @@ function serverSays(say: (sent: Sent) => Answer): Sent[] {
   return sent;
 }
 
+const moment = "2026-06-01T08:00:00Z";
+const boat = { id: idOf(11), name: "Tern", callMinutes: {}, version: 1, createdAt: moment };
+const fresh = (more: object) => ({
+  fleet: { id: FLEET, name: "F" },
+  roles: ["skipper"],
+  boats: [boat],
+  engines: [],
+  openDiagnoses: [],
+  recentLog: [],
+  treeVersion: { id: idOf(2), hash: "h", number: 1, publishedAt: moment },
+  multipliers: {},
+  ...more,
+});
 const stored = ({ ids }: Sent): Answer => ({ status: 200, body: { receipts: ids.map((id) => ({ id, result: "stored" })) } });
 const problem = (status: number, detail = "no"): Answer => ({ status, body: { type: "urn:x", title: "No", status, detail } });
 const begin = (diagnosis: string) => store.record(diagnosis, "begun", BEGUN);
@@ -125,6 +140,42 @@ describe("emptying the outbox", () => {
   });
 });
 
+describe("a store ashore that is full", () => {
+  it("takes the answers; pictures wait for an hour or until someone asks, and that is said", async () => {
+    vi.stubGlobal("navigator", {});
+    await begin(ONE);
+    await store.addPhoto(new Blob(["a"]));
+    await store.addPhoto(new Blob(["b"]));
+    let full = true;
+    const sent = serverSays((one) => {
+      if (one.path === "/api/v1/me") return { status: 200, body: { user: { id: PERSON, name: "A", email: "a@example.org" }, fleets: [] } };
+      if (one.method === "PUT") return full ? problem(507, "no room") : { status: 200, body: { id: one.path.split("/").at(-1) } };
+      if (one.path.endsWith("/phone")) return { status: 200, body: fresh({}) };
+      if (one.path.includes("/trees/")) return { status: 200, body: { document: smallTree() } };
+      return one.method === "GET" ? { status: 200, body: { events: [] } } : stored(one);
+    });
+    const pictures = () => sent.filter(({ method }) => method === "PUT").length;
+    const exchange = new Exchange(store, PERSON, FLEET);
+    exchange.nudge(true);
+    await vi.waitFor(() => expect(pictures()).toBe(1));
+    await vi.waitFor(() => expect(exchange.standing.get().sending).toBe(false));
+    expect(await waiting()).toEqual([]);
+    await note(ONE);
+    exchange.nudge(true);
+    await vi.waitFor(async () => expect(await waiting()).toEqual([]));
+    expect(pictures()).toBe(1);
+    full = false;
+    exchange.sendNow();
+    await vi.waitFor(async () => expect(await store.unsentPhotos()).toEqual([]));
+  });
+
+  it("is told in words, with what becomes of the photos", () => {
+    const full = { waiting: 2, sending: false, trouble: "full", ashoreAt: null } as const;
+    expect(standingInShort(full, false)).toBe("Photos kept here");
+    expect(standingInWords(full, false)).toContain("no room left there for photos");
+  });
+});
+
 describe("another person signed in on this phone", () => {
   it("sends nothing of the first person's, and it stays here", async () => {
     vi.stubGlobal("navigator", {});
@@ -139,19 +190,6 @@ describe("another person signed in on this phone", () => {
 });
 
 describe("reading the fleet with an older phone's shapes", () => {
-  const moment = "2026-06-01T08:00:00Z";
-  const boat = { id: idOf(11), name: "Tern", callMinutes: {}, version: 1, createdAt: moment };
-  const fresh = (more: object) => ({
-    fleet: { id: FLEET, name: "F" },
-    roles: ["skipper"],
-    boats: [boat],
-    engines: [],
-    openDiagnoses: [],
-    recentLog: [],
-    treeVersion: { id: idOf(2), hash: "h", number: 1, publishedAt: moment },
-    multipliers: {},
-    ...more,
-  });
   const pulled = async (answer: unknown) => {
     serverSays(({ path }) =>
       path.endsWith("/phone") ? { status: 200, body: answer } : { status: 200, body: { document: { causes: [] } } },
@@ -180,5 +218,31 @@ describe("reading the fleet with an older phone's shapes", () => {
   it("does not pretend to have read what is missing at its root", async () => {
     await expect(pulled(fresh({ treeVersion: undefined }))).rejects.toThrow();
     expect(await store.phone()).toBeUndefined();
+  });
+
+  it("goes on with the tree it has where the fleet's is too new to read, and asks for that one once", async () => {
+    const newer = { ...fresh({}), treeVersion: { id: idOf(3), hash: "h3", number: 2, publishedAt: moment } };
+    let phone: unknown = fresh({});
+    const sent = serverSays(({ path }) => {
+      if (path.endsWith("/phone")) return { status: 200, body: phone };
+      return { status: 200, body: { document: path.endsWith(idOf(2)) ? smallTree() : { ...smallTree(), format: 2 } } };
+    });
+    const tooNew = new Set<string>();
+    await pull(store, FLEET, tooNew);
+    phone = newer;
+    for (let again = 0; again < 3; again++) await pull(store, FLEET, tooNew);
+    expect(tooNew).toEqual(new Set([idOf(3)]));
+    expect((await store.phone())?.phone.treeVersion.id).toBe(idOf(2));
+    expect(await store.tree(idOf(2))).toEqual(smallTree());
+    expect(await store.tree(idOf(3))).toBeUndefined();
+    expect(sent.filter(({ path }) => path.endsWith(idOf(3)))).toHaveLength(1);
+  });
+
+  it("keeps no tree of which it cannot read every part", async () => {
+    const [rule, ...rules] = smallTree().stopRules;
+    const odd = { ...smallTree(), stopRules: [{ ...rule, sounds: "a horn" }, ...rules] };
+    serverSays(({ path }) => (path.endsWith("/phone") ? { status: 200, body: fresh({}) } : { status: 200, body: { document: odd } }));
+    await pull(store, FLEET);
+    expect(await store.tree(idOf(2))).toBeUndefined();
   });
 });

@@ -264,4 +264,32 @@ describe("an engine that does not turn", () => {
     // Nor is a repair offered, since none could be tried out: what is left is to call.
     expect(stepAfter("yes")).toMatchObject({ kind: "call" });
   });
+
+  it("[T2] what was found or cranked into force says so: it is no answer that could be changed to a no", () => {
+    const phone = new Device(1);
+    const log = [phone.begin({ symptoms: ["overheat"] }), phone.tell("rule-answered", { rule: "hot", answer: "no" })];
+    const standing = (events: readonly DiagnosisEvent[], rule: string) => view(small, events).rules.find(({ key }) => key === rule);
+    expect(standing(log, "hot")).toMatchObject({ answer: "no", found: false });
+    expect(standing([...log, phone.answer("gauge", "red")], "hot")).toMatchObject({ answer: "yes", found: true });
+    expect(standing([...log, phone.tell("cranked", { seconds: 31, ran: false })], "flood")).toMatchObject({ answer: "yes", found: true });
+    expect(standing([...log, phone.tell("rule-answered", { rule: "fire", answer: "yes" })], "fire")).toMatchObject({ found: false });
+  });
+
+  it("[T8] offer no running on where nothing runs, and leave every other exception as it is", () => {
+    const dead = {
+      ...small,
+      symptoms: [...small.symptoms, { ...symptom("dead"), rulesOut: ["idling", "under-load"] as const }],
+    } as typeof small;
+    const phone = new Device(1);
+    const runsOn = (symptoms: string[]) => {
+      const log = [
+        phone.begin({ symptoms }),
+        phone.tell("cranked", { seconds: 31, ran: false }),
+        phone.tell("rule-answered", { rule: "hot", answer: "yes" }),
+      ];
+      return Object.fromEntries(view(dead, log).rulesInForce.map(({ key, runOn }) => [key, runOn]));
+    };
+    expect(runsOn(["dead"])).toEqual({ hot: true, flood: false });
+    expect(runsOn(["overheat"])).toEqual({ hot: true, flood: true });
+  });
 });

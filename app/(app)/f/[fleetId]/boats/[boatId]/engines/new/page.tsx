@@ -24,7 +24,15 @@ export default async function NewEnginePage({ params }: PageProps<"/f/[fleetId]/
         under="A name is enough to begin."
         back={<BackTo href={`/f/${fleetId}/boats/${boat.id}`} title={boat.name} />}
       />
-      <NewEngineForm fleetId={fleetId} boatId={boat.id} suggestedName={others.length === 0 ? "Main engine" : ""} features={tree.features} />
+      {/* A key of its own for each engine: the form begins afresh for the second of twins. */}
+      <NewEngineForm
+        key={others.length}
+        fleetId={fleetId}
+        boatId={boat.id}
+        suggestedName={others.length === 0 ? "Main engine" : ""}
+        first={others.length === 0}
+        features={tree.features}
+      />
     </>
   );
 }

@@ -29,9 +29,9 @@ export function PickOrSay({ id, label, hint, options, suggested = [], value, onC
     return (
       <div className="grid gap-1">
         <p className="font-semibold">{label}</p>
-        <div className="flex flex-wrap items-center justify-between gap-2 rounded-lg border-[1.5px] border-edge bg-shoal px-3 py-1">
+        <div className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-2 rounded-lg border-[1.5px] border-edge bg-shoal px-3 py-1">
           <span>
-            {chosen.title} <span className="text-sm text-ink-2">{chosen.under}</span>
+            {chosen.title} <span className="block text-sm text-ink-2">{chosen.under}</span>
           </span>
           <Button
             aria-label={`Change: ${chosen.title}`}
@@ -47,7 +47,7 @@ export function PickOrSay({ id, label, hint, options, suggested = [], value, onC
     );
   }
   const typed = value.words.trim();
-  const hits = typed.length > 1 ? find(typed) : options.filter(({ key }) => suggested.includes(key));
+  const hits = typed.length > 1 ? find(typed) : suggested.flatMap((key) => options.filter((option) => option.key === key));
   return (
     <div className="grid gap-2">
       <TextField
