@@ -36,7 +36,7 @@ export function modelOf(plain: PlainModel): Model {
       ),
       remedies: plain.remedies.map((_, place) => remedy(numbered("mend", place))),
     }),
-    { ...setting, callMinutes: plain.callMinutes },
+    { ...setting, callMinutes: plain.callMinutes, faults: "one" },
   );
   const prior = Float64Array.from(plain.prior);
   return {
@@ -45,6 +45,7 @@ export function modelOf(plain: PlainModel): Model {
     logPriorOfCauses: Math.log1p(-prior[prior.length - 1]!),
     checks: skeleton.checks.map((one, place) => checkOf(one, plain.checks[place]!)),
     remedies: skeleton.remedies.map((one, place) => remedyOf(one, plain.remedies[place]!, prior.length)),
+    pairs: null,
     helpersMinutes: new Float64Array(prior.length),
     helperFinds: 0,
     tells: { told: 1e9, asked: 1e9 },

@@ -39,6 +39,8 @@ export class ExpectedCost {
   readonly #scratch: Float64Array;
   readonly #score: Float64Array;
   readonly #order: Int32Array;
+  /** So many of the order were worth a place. */
+  #count = 0;
   readonly #left: Float64Array;
   readonly #calls: Float64Array;
 
@@ -72,6 +74,11 @@ export class ExpectedCost {
     this.#calls = new Float64Array(count + 1);
   }
 
+  /** The first so many of the order that the last reckoning came to. */
+  ranked(most: number): readonly number[] {
+    return Array.from(this.#order.subarray(0, Math.min(most, this.#count)));
+  }
+
   /** The same as {@link reckon}, as a value. */
   from(weights: Float64Array): BestTry {
     this.reckon(weights, 0, null);
@@ -99,8 +106,9 @@ export class ExpectedCost {
     }
     this.minutes = 0;
     this.option = this.first = -1;
+    this.#count = 0;
     if (total <= 0) return;
-    const count = this.#rank(weights, at, total, tried);
+    const count = (this.#count = this.#rank(weights, at, total, tried));
     let left = total;
     for (let place = 0; place < count; place++) {
       this.#left[place] = left;

@@ -16,17 +16,24 @@ import { PlanChecks } from "./plan-checks";
 const LOOKED_AT = 12;
 /** Of these, so many are thought through further, beside the most telling. */
 const THOUGHT_THROUGH = 2;
+/** And so many remedies, those with the best cure chance per minute. */
+const TRIED = 2;
 /** Beliefs followed for each act that is thought through: as many as this pays for, in checks times hypotheses, within these limits. */
 const WORK = 8000;
-const BELIEFS = { least: 10, most: 40 };
-/** Checks that a plan may use later: so many of the most telling now, and for each of so many of the likeliest causes the one that shows it soonest. */
-const LATER = 16;
+const BELIEFS = { least: 10, farEnough: 40, most: 150 };
+/**
+ * Checks that a plan may use later: so many of the most telling now, more where there are few hypotheses; and for each of so many of the
+ * likeliest causes the one that shows it soonest.
+ */
+const LATER = { least: 16, most: 64, work: 500 };
 const SHOWN_SOONEST = 8;
+/** A remedy less likely than this to cure is a long shot: nothing is put off for it. */
+const LONG_SHOT = 0.3;
+/** So many minutes a look has to spare whoever is called, over its own: being asked is a burden too. */
+const SPARES_LEAST = 2;
 /** A cause under this share is left out of the reckoning, and at most so many are in it. */
 const KEPT_FROM = 0.002;
 const KEPT_MOST = 32;
-/** A remedy less likely than this to cure is a long shot: nothing is put off for it. */
-const LONG_SHOT = 0.3;
 
 type Chosen = { readonly act: Act; readonly value: number };
 
@@ -52,7 +59,7 @@ export type NextStep = {
  * The step that makes the expected cost to a cured engine least: a check, a
  * remedy, or a call for help. One-step look-ahead over the dozen checks that
  * tell most for their minutes picks a few; these, the best remedy and a call
- * are then thought through. Rules [G1]-[G5], [N1]-[N11].
+ * are then thought through. Rules [G1]-[G5], [N1]-[N12], [C8].
  */
 export function nextStep(model: Model, evidence: Evidence): NextStep {
   const standing = evidence.standing ?? AT_REST;
@@ -87,18 +94,19 @@ function reckoned(model: Model, evidence: Evidence, gates: Gates, shares: Float6
   const weights = weightsOf(kept, shares);
   const cost = new ExpectedCost(options, model, kept);
   const trying = cost.from(weights);
+  const ranked = cost.ranked(TRIED);
   const later = usable(candidates, weights, kept);
   const beliefs = Math.round(Math.min(BELIEFS.most, Math.max(BELIEFS.least, WORK / (kept.length * Math.max(1, later.length)))));
   const plan = new PlanAhead(new PlanChecks(later, kept), cost, weights, beliefs);
   const looks = later.slice(0, LOOKED_AT).map((_, place) => ({ place, value: plan.worthOf({ kind: "check", place }, 0) }));
-  const thought = thoughtThrough(looks, trying);
+  const thought = thoughtThrough(looks, ranked);
   const keyOf = ({ kind, place }: Act): string => (kind === "check" ? later[place]!.check.key : cost.options[place]!.remedy.key);
   let best: Chosen | null = null;
   for (const act of thought) {
     const value = plan.worthOf(act, beliefs);
     if (!best || value < best.value - SAME || (value < best.value + SAME && keyOf(act) < keyOf(best.act))) best = { act, value };
   }
-  best = putOff(best, plan, cost, weights, trying) ?? best;
+  if (beliefs < BELIEFS.farEnough) best = putOff(best, plan, cost, weights, trying) ?? best;
   const actOf = ({ act, value }: Chosen): NextStep => {
     if (act.kind === "check") {
       const telling = looks[act.place]!.value < trying.minutes - SAME;
@@ -110,9 +118,21 @@ function reckoned(model: Model, evidence: Evidence, gates: Gates, shares: Float6
   const helpersMinutes = Float64Array.from(kept, (index) => model.helpersMinutes[index]!);
   const calling = callingMinutes({ callMinutes: model.callMinutes, helpersMinutes, helperFinds: model.helperFinds }, weights);
   if (best && best.value < calling - SAME) return actOf(best);
+  const spares = mostSparing(model, candidates);
+  if (spares) return asking(spares.candidate, "cheaper-than-trying", calling - spares.minutes);
   const [act] = thought;
   const goOn = act ? actOf({ act, value: plan.worthOf(act, 0) }) : null;
   return { ...CALL, because: "nothing-better", minutes: model.callMinutes, expected: calling, shares, goOn };
+}
+
+/** The check that spares whoever is called the most, over what it costs now: all hypotheses count, not only those thought through. Rule [C8]. */
+function mostSparing(model: Model, candidates: readonly Candidate[]): { candidate: Candidate; minutes: number } | null {
+  let best: { candidate: Candidate; minutes: number } | null = null;
+  for (const candidate of candidates) {
+    const minutes = model.helperFinds * candidate.information - candidate.minutes;
+    if (minutes > (best?.minutes ?? SPARES_LEAST)) best = { candidate, minutes };
+  }
+  return best;
 }
 
 function gateBefore(gates: Gates, remedy: RemedyModel): StepRef | null {
@@ -125,11 +145,11 @@ function minutesOf(model: Model, standing: Standing, ref: StepRef): number {
   return step ? step.minutes + standingMinutes("check" in step ? step.check : step.remedy, standing) : 0;
 }
 
-/** The most telling check first, then those that do best one step ahead, then the remedy with the best cure chance per minute. */
-function thoughtThrough(looks: readonly { readonly place: number; readonly value: number }[], trying: BestTry): readonly Act[] {
+/** The most telling check first, then those that do best one step ahead, then the remedies with the best cure chance per minute. */
+function thoughtThrough(looks: readonly { readonly place: number; readonly value: number }[], remedies: readonly number[]): readonly Act[] {
   const best = [...looks].sort((a, b) => a.value - b.value).slice(0, THOUGHT_THROUGH);
   const checks = [...new Set([...looks.slice(0, 1), ...best])].map(({ place }): Act => ({ kind: "check", place }));
-  return trying.first === null ? checks : [...checks, { kind: "remedy", place: trying.first }];
+  return [...checks, ...remedies.map((place): Act => ({ kind: "remedy", place }))];
 }
 
 /** The shares of the hypotheses that are kept, made to sum to 1. */
@@ -142,7 +162,8 @@ function weightsOf(kept: readonly number[], shares: Float64Array): Float64Array 
 /**
  * A check that would not change what is tried next is put off until the try has
  * failed: asked first it costs its minutes always, asked after only then. Both
- * ways are followed to the same depth. Rule [N5].
+ * ways are followed to the same depth. Where few beliefs can be followed the
+ * plan does not see this by itself. Rule [N5].
  */
 function putOff(best: Chosen | null, plan: PlanAhead, cost: ExpectedCost, weights: Float64Array, trying: BestTry): Chosen | null {
   const option = trying.option;
@@ -176,7 +197,10 @@ function usable(candidates: readonly Candidate[], weights: Float64Array, kept: r
     for (const row of outcomes.predict) {
       let chance = 0;
       for (let place = 0; place < kept.length; place++) chance += weights[place]! * row[kept[place]!]!;
-      for (let place = 0; place < count; place++) tells[place] = tells[place]! + row[kept[place]!]! * Math.log(row[kept[place]!]! / chance);
+      for (let place = 0; place < count; place++) {
+        const share = row[kept[place]!]!;
+        if (share > 0) tells[place] = tells[place]! + share * Math.log(share / chance);
+      }
     }
     for (let place = 0; place < count; place++) {
       const rate = (tells[place]! * learns) / minutes;
@@ -185,5 +209,6 @@ function usable(candidates: readonly Candidate[], weights: Float64Array, kept: r
       soonest[place] = candidate;
     }
   });
-  return candidates.filter((_, place) => place < LATER || soonest.includes(place));
+  const later = Math.min(LATER.most, Math.max(LATER.least, LATER.work / kept.length));
+  return candidates.filter((_, place) => place < later || soonest.includes(place));
 }
