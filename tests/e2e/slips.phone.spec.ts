@@ -140,6 +140,6 @@ test("an outcome that lacks something brings the field that lacks it to the eye"
   await page.goto(`/diagnose?d=${d}&at=outcome`);
   await page.getByRole("radio", { name: /^Cured/ }).check();
   await page.getByRole("button", { name: "Log it" }).click();
-  await expect(page.getByLabel("What was it?")).toBeFocused();
-  await expect(page.getByLabel("What was it?")).toBeInViewport();
+  await expect(page.getByRole("textbox", { name: "What was it?" })).toBeFocused();
+  await expect(page.getByRole("textbox", { name: "What was it?" })).toBeInViewport();
 });
