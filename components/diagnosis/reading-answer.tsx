@@ -3,11 +3,11 @@
 import { useState } from "react";
 import { figure, readGauge } from "@/lib/client/read-gauge";
 import type { StepShown } from "@/lib/core/diagnosis/view";
+import { unitSign } from "@/lib/core/units/unit-sign";
 import { unitsOf } from "@/lib/core/units/units";
 import { Button } from "@/components/ui/button";
 import { Form } from "@/components/ui/form";
 import { inputLook } from "@/components/ui/field";
-import { unitSign } from "./unit-sign";
 
 /** A reading as it is typed; an empty unit is the scale's own. */
 export type Typed = { typed: string; unit: string };

@@ -1,5 +1,6 @@
 import type { StepShown } from "@/lib/core/diagnosis/view";
 import { readNumber } from "@/lib/core/units/read-number";
+import { unitSign } from "@/lib/core/units/unit-sign";
 import { convert } from "@/lib/core/units/units";
 
 type Scale = NonNullable<StepShown["reading"]>;
@@ -14,9 +15,9 @@ export function readGauge(typed: string, unit: string, scale: Scale): GaugeRead 
   if (value === null) return { wrong: "This is not a number. Figures with a comma or a point will do." };
   const inUnit = convert(value, unit, scale.unit);
   if (inUnit < scale.from || inUnit > scale.to) {
-    const said = unit === scale.unit ? "" : ` That is ${figure(inUnit)} ${scale.unit}.`;
+    const said = unit === scale.unit ? "" : ` That is ${figure(inUnit)} ${unitSign(scale.unit)}.`;
     return {
-      wrong: `This is outside the scale of ${figure(scale.from)} to ${figure(scale.to)} ${scale.unit}.${said} Read it again, or pick another unit.`,
+      wrong: `This is outside the scale of ${figure(scale.from)} to ${figure(scale.to)} ${unitSign(scale.unit)}.${said} Read it again, or pick another unit.`,
     };
   }
   const band = scale.bands.find(({ from, to }) => inUnit >= from && inUnit < to) ?? scale.bands.at(-1);

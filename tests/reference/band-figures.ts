@@ -83,6 +83,12 @@ export const BAND_FIGURES: readonly BandFigure[] = [
   practice("thermostat-pot: right | late-or-never times", [1.03, 1.06], "times", { note: "2 to 3 °C over a stamp of 50 to 82 °C" }),
   practice("coolant-strength: weak | right", 30, "%"),
 
+  practice("hx-drop: little | normal", 4, "C-diff", { note: "4 to 8 across the exchanger at cruise" }),
+  practice("hx-drop: normal | large", 8, "C-diff"),
+  practice("hx-rise: small | normal", 4, "C-diff", { note: "under 4 with the coolant hot speaks for a fouled exchanger" }),
+  practice("hx-rise: normal | raised", 15, "C-diff", { note: "5 to 15 is normal" }),
+  practice("hx-rise: raised | large", 20, "C-diff", { note: "over 20 speaks for too little water" }),
+
   // Cranking
   practice("battery-rest-volts: low | part [v12]", 12.2, "V", { note: "under 12.2 V speaks for a flat battery" }),
   practice("battery-rest-volts: part | full [v12]", 12.5, "V", { note: "over 12.5 V speaks against it" }),
@@ -253,7 +259,11 @@ export const BAND_FIGURES: readonly BandFigure[] = [
   practice("leakoff-compare: one-raised | one-double", 200, "%", { note: "more than double the rest" }),
   practice("rail-pressure: low | in-order", 200, "bar", { note: "200 to 300 bar permits injection" }),
 
+  practice("exhaust-port-temp: one-colder | even", -50, "C-diff", { note: "50 °C colder at 1 200 rpm, on a dry manifold" }),
+
   // Instruments
+  practice("ir-vs-gauge: reads-low | agrees", [-10, -8], "C-diff", { note: "8 to 10 apart" }),
+  practice("ir-vs-gauge: agrees | reads-high", [8, 10], "C-diff", { note: "8 to 10 apart" }),
   practice("panel-ground: small | over", 0.2, "V"),
 
   // Mechanical
@@ -331,6 +341,9 @@ export const BAND_FIGURES: readonly BandFigure[] = [
 
 /** Edges that rest on no figure: judgement, said so, to be put right by the log of proved cures. */
 export const WITHOUT_FIGURE: Readonly<Record<string, string>> = {
+  "hx-inlet: follows | inlet-cool":
+    "a gauge's error of 8 to 10 °C, and a few degrees lost on the way; that it is told there is common practice",
+  "exhaust-port-temp: even | one-hotter": "as far over the others as the trade calls dead under them",
   "raw-flow: short | good": "a bucket and a watch err by a tenth, a pump's wear takes the other tenth",
   "cap-test: weak | holds": "a tester's gauge errs by a tenth; the stamped figure is what it should hold",
   "coolant-strength: right | strong": "beyond it antifreeze carries heat worse and protects no better; no figure was looked up",
@@ -406,6 +419,24 @@ export const WITHOUT_FIGURE: Readonly<Record<string, string>> = {
 export type LiesIn = { check: string; value: number; unit: string; finding: string; kind?: string; source: string };
 
 export const LIES_IN: readonly LiesIn[] = [
+  {
+    check: "hx-rise",
+    value: 16 / (4 * (20 / 60)),
+    unit: "K",
+    finding: "normal",
+    source: "arithmetic: 16 kW into 20 L of sea water a minute, 4.0 kJ to a litre and degree",
+  },
+  { check: "hx-rise", value: 16 / (4 * (10 / 60)), unit: "K", finding: "large", source: "the same heat into half the water" },
+  {
+    check: "hx-rise",
+    value: 27,
+    unit: "F-diff",
+    finding: "raised",
+    source: "common practice, 15 °C in the other unit: the lower edge is in",
+  },
+  { check: "hx-drop", value: 10.8, unit: "F-diff", finding: "normal", source: "common practice, 6 °C, the middle of 4 to 8" },
+  { check: "ir-vs-gauge", value: 5, unit: "C-diff", finding: "agrees", source: "common practice, inside 8 to 10" },
+  { check: "exhaust-port-temp", value: -108, unit: "F-diff", finding: "one-colder", source: "common practice, 60 °C colder" },
   { check: "intake-vacuum", value: 25, unit: "inH2O", finding: "high", source: "tm260 p. 135, the limit" },
   { check: "back-pressure", value: 1.5, unit: "psi", kind: "none", finding: "over", source: "m-bp pp. 11-12, as the page has it in psi" },
   {

@@ -19,6 +19,8 @@ const toBase = (value: number, unit: string): { value: number; base: string } =>
   const pascals = PASCALS[unit];
   if (pascals !== undefined) return { value: value * pascals, base: "Pa" };
   if (unit === "in") return { value: value * INCH_M * 1000, base: "mm" };
+  if (unit === "K" || unit === "C-diff") return { value, base: "degrees of difference" };
+  if (unit === "F-diff") return { value: (value * 5) / 9, base: "degrees of difference" };
   if (unit === "F") return { value: ((value - 32) * 5) / 9, base: "°C" };
   return { value, base: unit };
 };

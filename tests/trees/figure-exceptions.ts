@@ -1,6 +1,5 @@
 const HOW_LONG = "the figure is how long to do it or to wait; what is seen then is a look, not a number";
 const HOW_TO = "the figure is how to set the engine or the tool, or a limit at which to stop; what is seen is a look";
-const DIFFERENCE = "a difference of two temperatures, which does not convert as a temperature does; bands in words, both scales given";
 
 /** Checks that name a figure and are no reading, each with the reason. */
 export const FIGURE_EXCEPTIONS: Readonly<Record<string, string>> = {
@@ -31,10 +30,6 @@ export const FIGURE_EXCEPTIONS: Readonly<Record<string, string>> = {
   leakdown: "the figure is the air let in; the finding is where it is heard to come out",
   "pressure-test": "the figure is the pressure pumped up, which differs by the cap; the finding is whether it holds, and where it goes",
   "thermostat-warm": HOW_TO,
-  "exhaust-port-temp": DIFFERENCE,
-  "hx-drop": DIFFERENCE,
-  "hx-rise": DIFFERENCE,
-  "ir-vs-gauge": DIFFERENCE,
   "compression-pattern": "compares readings that the check before it has taken, cylinder against cylinder",
   "electric-pump": "the figure tells why a good pump may fall silent; the finding is whether it runs",
   "oil-service": "what the manual asks differs by engine; the finding is whether it was kept",

@@ -4,7 +4,7 @@ import { STRENGTHS } from "../tree/strength";
 import { scaledToOne } from "./sound-row";
 
 /** No finding is impossible: one slip must never kill a cause for good. Rule [L6]. */
-const LEAST = 0.001;
+export const LEAST = 0.001;
 
 /** A strength as a probability. */
 export const probabilityOf = (strength: keyof typeof STRENGTHS | number): number =>

@@ -4,16 +4,19 @@ import { BASE_RATES } from "../tree/strength";
 import { treatedAsRail } from "../tree/treated-as-rail";
 import { probabilityOf } from "./cause-row";
 import { compileCheck } from "./compile-check";
+import { compilePairs } from "./compile-pairs";
 import { COSTS, fixedMinutes } from "./costs";
 import type { Model, RemedyModel, Setting, StepModel } from "./model";
 import { symptomShares } from "./symptom-shares";
 import { whoMay } from "./who-may";
 
 /** Prior share of "something not in this tree". */
-const UNKNOWN = 0.05;
+export const UNKNOWN = 0.05;
+/** Prior share of all pairs together. */
+const PAIRS = 0.1;
 /** A remedy cures a cause that it has no link to 1 time in 100. */
 const UNLINKED_CURE = 0.01;
-/** "Better, not cured" is as likely as a fifth of a cure while only single causes are weighed. */
+/** "Better, not cured" is as likely as a fifth of a cure where there is one cause only. */
 const BETTER = 0.2;
 /** Even what is not in the tree can get a little better by chance. */
 const BETTER_LEAST = 0.002;
@@ -21,14 +24,15 @@ const BETTER_LEAST = 0.002;
 /**
  * Makes a tree ready for arithmetic: what does not apply to this engine here is
  * left out, words become numbers, and "something not in this tree" joins as the
- * last hypothesis. Rules [B1]-[B4], [K1], [M1], [W1]-[W5]; rows [L1]-[L6]; symptoms [S1]-[S3].
+ * last single hypothesis; pairs of causes stand beside. Rules [B1]-[B4], [K1], [M1], [W1]-[W5]; rows [L1]-[L6]; symptoms [S1]-[S3].
  */
 export function compile(tree: FaultTree, setting: Setting): Model {
   const shareFor = (node: { appliesTo?: Cause["appliesTo"] }): number =>
     shareOfEngines(node.appliesTo, setting.profile, setting.situation, tree.features);
   const causes = tree.causes.filter((cause) => weightOf(cause, shareFor(cause), setting) > 0);
   const weights = Float64Array.from(causes, (cause) => weightOf(cause, shareFor(cause), setting));
-  const prior = withUnknown(weights);
+  const pairs = setting.faults === "one" ? null : compilePairs(tree, causes, weights, setting, PAIRS);
+  const prior = withUnknown(weights, pairs ? PAIRS : 0);
   const stepOf = (step: Check | Remedy): StepModel => stepModel(step, shareFor(step), setting);
   const checks = tree.checks
     .map((check) => ({ check, step: stepOf(check) }))
@@ -44,6 +48,7 @@ export function compile(tree: FaultTree, setting: Setting): Model {
     causeAt: placesOf(causes),
     unknownAt: causes.length,
     logPrior: prior.map(Math.log),
+    pairs,
     logPriorOfCauses: Math.log1p(-(prior[causes.length] ?? 0)),
     symptoms,
     logSymptoms: new Map(
@@ -68,10 +73,11 @@ function weightOf(cause: Cause, share: number, setting: Setting): number {
   return baseOf(cause.base) * share * moved;
 }
 
-function withUnknown(weights: Float64Array): Float64Array {
+/** Shares of the single causes and, last, the unknown; `pairs` is kept for the pairs. */
+function withUnknown(weights: Float64Array, pairs: number): Float64Array {
   const total = weights.reduce((sum, weight) => sum + weight, 0);
   const prior = new Float64Array(weights.length + 1);
-  weights.forEach((weight, index) => (prior[index] = (weight / total) * (1 - UNKNOWN)));
+  weights.forEach((weight, index) => (prior[index] = (weight / total) * (1 - UNKNOWN - pairs)));
   // A tree with nothing that applies still has its unknown.
   prior[weights.length] = weights.length > 0 ? UNKNOWN : 1;
   return prior;

@@ -39,27 +39,38 @@ export function restating(check: CheckModel, reported: ReadonlySet<string>): rea
   return again;
 }
 
-/** Symptoms reported as present. */
+/** Symptoms that are present, as things stand now. */
 export const reportedIn = (evidence: Pick<Evidence, "symptoms">): ReadonlySet<string> =>
   new Set(evidence.symptoms.filter((one) => one.present).map((one) => one.symptom));
 
-/**
- * ln of what a finding weighs for each hypothesis, added to `into`. A finding
- * that restates a reported symptom weighs nothing; where several do, only the
- * choice between them counts. Rule [E4].
- */
-export function addFinding(one: Heard, reported: ReadonlySet<string>, into: Float64Array): void {
-  const row = one.check.logRows[one.finding];
-  if (!row) return;
+/** Symptoms that were reported before anything was put right. */
+export const reportedAtFirst = (evidence: Pick<Evidence, "symptoms">): ReadonlySet<string> =>
+  new Set(evidence.symptoms.filter((one) => (one.left ? one.left.before : one.present)).map((one) => one.symptom));
+
+/** A finding that weighs something; `again`: the findings that say again what was reported, where it is one of several of its check. */
+export type Spoken = Heard & { readonly again: readonly number[] };
+
+/** A finding that restates a reported symptom weighs nothing (null); where several do, the choice between them counts. Rule [E4]. */
+export function spoken(one: Heard, reported: ReadonlySet<string>): Spoken | null {
   const again = restating(one.check, reported);
-  if (!again.includes(one.finding)) {
-    for (let index = 0; index < into.length; index++) into[index] = into[index]! + row[index]!;
-    return;
-  }
-  if (again.length === 1) return;
+  if (!again.includes(one.finding)) return { ...one, again: [] };
+  return again.length === 1 ? null : { ...one, again };
+}
+
+/** ln of what a finding weighs for each single cause and the unknown, added to `into`. */
+export function addSpoken({ check, finding, again }: Spoken, into: Float64Array): void {
+  const row = check.logRows[finding]!;
+  for (let index = 0; index < into.length; index++) into[index] = into[index]! + row[index]!;
+  if (again.length === 0) return;
   for (let index = 0; index < into.length; index++) {
     let among = 0;
-    for (const finding of again) among += one.check.rows[finding]?.[index] ?? 0;
-    into[index] = (into[index] ?? 0) + (row[index] ?? 0) - Math.log(among);
+    for (const one of again) among += check.rows[one]?.[index] ?? 0;
+    into[index] = into[index]! - Math.log(among);
   }
+}
+
+/** addSpoken, unless the finding weighs nothing. */
+export function addFinding(one: Heard, reported: ReadonlySet<string>, into: Float64Array): void {
+  const said = spoken(one, reported);
+  if (said) addSpoken(said, into);
 }

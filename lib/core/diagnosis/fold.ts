@@ -25,7 +25,7 @@ export type DiagnosisState = {
 
 /**
  * Folds a log into a state. Sent twice, late, out of order or from several
- * devices, the same events give the same state. Rules [F1]-[F7].
+ * devices, the same events give the same state. Rules [F1]-[F9].
  */
 export function fold(log: readonly DiagnosisEvent[]): DiagnosisState {
   const order = causalOrder(log);

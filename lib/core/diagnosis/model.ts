@@ -1,6 +1,7 @@
 import type { EngineProfile } from "../contract/engine";
 import type { Multiplier, RemedyResult } from "../contract/event";
 import type { Cause, Check, FaultTree, Remedy, Situation, Who } from "../tree/schema";
+import type { PairTable } from "./pair-table";
 
 /** What a tree is compiled for: this engine, here, with these hands. */
 export type Setting = {
@@ -12,7 +13,12 @@ export type Setting = {
   readonly callMinutes?: number;
   /** Tools and parts that are not aboard, as the tree names them. */
   readonly notAboard?: readonly string[];
+  /** "one": pairs of causes are left out, to set a planner beside one that knows of none. Absent: "two". */
+  readonly faults?: "one" | "two";
 };
+
+/** All pairs of causes, in the order of pairAt(), before anything is told. */
+export type PairsModel = { readonly count: number; readonly prior: PairTable };
 
 /** What a compiled check and a compiled remedy have in common. */
 export type StepModel = {
@@ -52,8 +58,8 @@ export type RemedyModel = StepModel & {
 };
 
 /**
- * A tree ready for arithmetic. Hypotheses are sets of causes: single ones now,
- * the last one empty for "something not in this tree". Pairs may join them.
+ * A tree ready for arithmetic. Hypotheses are sets of causes: single ones, the
+ * last one empty for "something not in this tree", and beside them all pairs.
  */
 export type Model = {
   readonly tree: FaultTree;
@@ -64,7 +70,9 @@ export type Model = {
   /** Index of "something not in this tree". */
   readonly unknownAt: number;
   readonly logPrior: Float64Array;
-  /** ln of the prior share of all causes together. */
+  /** null: no pairs are reckoned with. */
+  readonly pairs: PairsModel | null;
+  /** ln of the prior share of all causes together, pairs included. */
   readonly logPriorOfCauses: number;
   /** P(symptom given hypothesis); the unknown's place is not used, see believe(). */
   readonly symptoms: ReadonlyMap<string, Float64Array>;

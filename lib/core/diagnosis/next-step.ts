@@ -142,10 +142,12 @@ function putOff(best: Chosen | null, plan: PlanAhead, cost: ExpectedCost, weight
 /** The hypotheses that are reckoned with, likeliest first; the unknown always. */
 function keptOf(model: Model, shares: Float64Array): readonly number[] {
   const keyOf = (index: number): string => model.causes[index]?.key ?? "";
+  // Equal shares may differ in their last bits, which must not choose among them.
+  const roundedOf = (index: number): number => Math.round(shares[index]! * 1e12);
   const kept = model.causes
     .map((_, index) => index)
     .filter((index) => shares[index]! >= KEPT_FROM)
-    .sort((a, b) => shares[b]! - shares[a]! || (keyOf(a) < keyOf(b) ? -1 : 1));
+    .sort((a, b) => roundedOf(b) - roundedOf(a) || (keyOf(a) < keyOf(b) ? -1 : 1));
   return [...kept.slice(0, KEPT_MOST), model.unknownAt];
 }
 

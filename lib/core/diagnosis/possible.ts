@@ -1,6 +1,8 @@
 import { probabilityOf } from "./cause-row";
+import type { Belief } from "./believe";
 import type { Evidence } from "./evidence";
 import type { Model } from "./model";
+import { likeliestPairs } from "./pairs";
 import { ofHundred } from "./of-hundred";
 import { speaksOf, type Speaks } from "./speaks";
 import type { Possible, PossibleCause } from "./view";
@@ -9,9 +11,12 @@ import type { Possible, PossibleCause } from "./view";
 const NAMED_FROM = 0.01;
 const NAMED_MOST = 12;
 const NOT_CHECKED_MOST = 4;
+/** Two faults are said to be possible from over this share. */
+const TWO_FROM = 0.3;
 
-/** What is still possible, as counts out of 100, with what speaks for and against each. Rules [X1]-[X3]. */
-export function possible(model: Model, evidence: Evidence, shares: Float64Array): Possible {
+/** What is still possible, as counts out of 100, with what speaks for and against each. Rules [X1]-[X3], [X8]. */
+export function possible(model: Model, evidence: Evidence, belief: Belief): Possible {
+  const { shares } = belief;
   const ranked = model.causes
     .map((cause, index) => ({ cause, index, share: shares[index] ?? 0 }))
     .sort((a, b) => b.share - a.share || (a.cause.key < b.cause.key ? -1 : 1));
@@ -19,12 +24,21 @@ export function possible(model: Model, evidence: Evidence, shares: Float64Array)
   const folded = ranked.slice(named.length);
   const unknown = shares[model.unknownAt] ?? 0;
   const counts = ofHundred([...named.map(({ share }) => share), folded.reduce((sum, { share }) => sum + share, 0), unknown]);
-  const speaks = speaksOf(model, evidence, shares);
+  const speaks = speaksOf(model, evidence, belief.marginals);
   return {
     causes: named.map(({ index, share }, place) => causeShown(model, evidence, index, share, counts[place] ?? 0, speaks(index))),
     others: { count: folded.length, of100: counts[named.length] ?? 0 },
     unknown: { share: unknown, of100: counts[named.length + 1] ?? 0 },
+    two: twoShown(model, belief),
   };
+}
+
+/** "Perhaps two faults", and which: said only when the numbers do. Rule [X8]. */
+function twoShown(model: Model, { two, pairs }: Belief): Possible["two"] {
+  if (!(two > TWO_FROM)) return null;
+  const [likeliest] = likeliestPairs(pairs, model.causes.length, 0, 1);
+  const titled = (index: number): { key: string; title: string } => ({ key: model.causes[index]!.key, title: model.causes[index]!.title });
+  return likeliest ? { share: two, of100: Math.round(two * 100), likeliest: [titled(likeliest.a), titled(likeliest.b)] } : null;
 }
 
 function causeShown(model: Model, evidence: Evidence, index: number, share: number, of100: number, speaks: Speaks): PossibleCause {

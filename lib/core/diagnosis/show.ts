@@ -29,11 +29,11 @@ export function view(tree: FaultTree, log: readonly DiagnosisEvent[], models: Co
   const setting = settingOf(tree, state);
   const model = models(tree, setting);
   const evidence = evidenceOf(tree, state);
-  const { shares } = believe(model, evidence);
+  const belief = believe(model, evidence);
   const toAsk = state.begun && !state.ended ? rulesToAsk(tree, state) : [];
   const inForce = rulesInForce(tree, state);
   const shown = (rule: StopRule): RuleShown => ruleShown(rule, mayRunOn(rule, tree, state));
-  const cured = curedCause(model, state, shares);
+  const cured = curedCause(model, state, belief.shares);
   const goesOn = state.begun !== null && state.ended === null && toAsk.length === 0 && cured === null;
   return {
     begun: state.begun !== null,
@@ -48,7 +48,7 @@ export function view(tree: FaultTree, log: readonly DiagnosisEvent[], models: Co
     rules: standingRules(tree, state).map(({ rule, ...standing }) => ({ ...shown(rule), ...standing })),
     rulesInForce: inForce.map(shown),
     step: goesOn ? stepShown(model, evidence, inForce) : null,
-    possible: possible(model, evidence, shares),
+    possible: possible(model, evidence, belief),
     crankSeconds: crankSeconds(tree, state),
     outcome: state.ended ? { ...state.ended.payload, event: state.ended.id, at: state.ended.madeAt } : null,
     curedCause: cured,

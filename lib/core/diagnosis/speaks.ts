@@ -12,18 +12,19 @@ type Piece = { readonly title: string; readonly says: string; readonly without: 
 export type Speaks = { readonly for: readonly EvidenceShown[]; readonly against: readonly EvidenceShown[] };
 
 /**
- * What speaks for and against each hypothesis: by how much its odds would
+ * What speaks for and against each cause, alone or beside another: by how much its odds would
  * change if this one piece had not been told, all else as it is. Rule [X2].
  *
- * @returns a function from the index of a hypothesis; strongest first.
+ * @param marginals as believed with all of the evidence.
+ * @returns a function from the index of a cause; strongest first.
  */
-export function speaksOf(model: Model, evidence: Evidence, shares: Float64Array): (hypothesis: number) => Speaks {
-  const pieces = piecesOf(model, evidence).map((piece) => ({ ...piece, shares: believe(model, piece.without).shares }));
+export function speaksOf(model: Model, evidence: Evidence, marginals: Float64Array): (hypothesis: number) => Speaks {
+  const pieces = piecesOf(model, evidence).map((piece) => ({ ...piece, marginals: believe(model, piece.without).marginals }));
   return (hypothesis) => {
-    const moved = pieces.map(({ title, says, shares: without }) => ({
+    const moved = pieces.map(({ title, says, marginals: without }) => ({
       title,
       says,
-      factor: odds(shares[hypothesis] ?? 0) / odds(without[hypothesis] ?? 0),
+      factor: odds(marginals[hypothesis] ?? 0) / odds(without[hypothesis] ?? 0),
     }));
     return {
       for: moved.filter(({ factor }) => factor > WORTH_SAYING).sort((a, b) => b.factor - a.factor),

@@ -100,12 +100,16 @@ export type StepShown = {
 };
 
 export type Possible = {
-  /** Likeliest first; `of100` adds up to 100 over causes, others and unknown. */
+  /** Likeliest first; `of100` adds up to 100 over causes, others and unknown: an engine with two faults counts half for each. */
   causes: readonly PossibleCause[];
   /** How many causes are folded into "others", and their share. */
   others: { count: number; of100: number };
   unknown: { share: number; of100: number };
+  /** "Perhaps two faults", with the likeliest two; null while the numbers do not say so, and once one of two was put right. */
+  two: { share: number; of100: number; likeliest: readonly [CauseNamed, CauseNamed] } | null;
 };
+
+export type CauseNamed = { key: string; title: string };
 
 export type PossibleCause = {
   key: string;

@@ -71,6 +71,7 @@ export type Edge = z.infer<typeof Edge>;
 export const Quantity = z.enum([
   "pressure",
   "temperature",
+  "temperature-difference",
   "voltage",
   "current",
   "resistance",

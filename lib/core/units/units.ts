@@ -45,6 +45,10 @@ const UNITS: readonly Unit[] = [
   unit("pressure", "inH2O", "inch of water", INH2O_KPA),
   unit("temperature", "C", "degree Celsius", 1),
   unit("temperature", "F", "degree Fahrenheit", 5 / 9, -160 / 9),
+  // A drop or a rise: the size of the degree alone, no offset.
+  unit("temperature-difference", "K", "kelvin", 1),
+  unit("temperature-difference", "C-diff", "degree Celsius of difference", 1),
+  unit("temperature-difference", "F-diff", "degree Fahrenheit of difference", 5 / 9),
   unit("voltage", "V", "volt", 1),
   unit("voltage", "mV", "millivolt", 0.001),
   unit("current", "A", "ampere", 1),

@@ -3,6 +3,7 @@ import { describe, expect, it } from "vitest";
 import { believe } from "../../../lib/core/diagnosis/believe";
 import { compile } from "../../../lib/core/diagnosis/compile";
 import { NO_EVIDENCE, type Evidence } from "../../../lib/core/diagnosis/evidence";
+import { likeliestPairs, pairAt } from "../../../lib/core/diagnosis/pairs";
 import type { FaultTree } from "../../../lib/core/tree/schema";
 import { anyCase, anyTree, setting } from "./random-trees";
 import { cause, check, finding, remedy, symptom, tree } from "./small-trees";
@@ -114,7 +115,7 @@ describe("something not in this tree", () => {
 });
 
 describe("symptoms", () => {
-  it("[S2] hold down all causes without a link together to 5 %", () => {
+  it("[S2] hold down all causes without a link together to 5 %, and all pairs without one", () => {
     const many = tree({
       causes: [
         cause("linked", { base: "rare", shows: { weak: "seldom" } }),
@@ -122,16 +123,50 @@ describe("symptoms", () => {
       ],
     });
     const symptoms = [{ symptom: "weak", present: true }];
-    expect(share(many, { symptoms }, "linked")).toBeCloseTo(0.95 * 0.95, 6);
+    const model = compile(many, setting);
+    const { alone, pairs, two } = believe(model, { ...NO_EVIDENCE, symptoms });
+    expect(alone[0]! / (0.95 - two)).toBeCloseTo(0.95, 6);
+    const withLinked = Array.from({ length: 150 }, (_, index) => pairs[pairAt(0, index + 1, 151)]!).reduce((sum, one) => sum + one, 0);
+    expect(1 - withLinked / two).toBeLessThanOrEqual(0.05);
   });
 
-  it("[R1] a root that runs through a nearer cause stands behind it", () => {
+  it("[S4] are shown by a pair unless neither cause shows them", () => {
+    const shown = tree({
+      symptoms: [symptom("weak"), symptom("smoke")],
+      causes: [
+        cause("a", { shows: { weak: "always" } }),
+        cause("b", { shows: { smoke: "always" } }),
+        cause("c", { shows: { weak: "usually" } }),
+      ],
+    });
+    const told = (...keys: string[]) =>
+      believe(compile(shown, setting), { ...NO_EVIDENCE, symptoms: keys.map((key) => ({ symptom: key, present: true })) });
+    expect(told("weak").two).toBeLessThan(0.2);
+    const { two, pairs } = told("weak", "smoke");
+    expect(two).toBeGreaterThan(0.9);
+    expect(likeliestPairs(pairs, 3, 0)[0]).toMatchObject({ a: 0, b: 1 });
+  });
+
+  it("[R1] a root that runs through a nearer cause stands behind it, and beside it [B4] five times as often as chance would have it", () => {
     const base = { base: "common" as const, shows: { weak: "usually" as const }, curedBy: { mend: "always" as const } };
     const causes = (root: Partial<ReturnType<typeof cause>>) =>
       tree({ remedies: [remedy("mend")], causes: [cause("filter", { ...base, ...root }), cause("growth", base)] });
     const symptoms = [{ symptom: "weak", present: true }];
-    expect(share(causes({}), { symptoms }, "growth")).toBeCloseTo(0.475, 6);
-    expect(share(causes({ broughtOnBy: { growth: 0.66 } }), { symptoms }, "growth")).toBeCloseTo((0.95 * 0.34) / 1.34, 6);
+    const ofAlone = (over: Parameters<typeof causes>[0]) => {
+      const { alone } = believe(compile(causes(over), setting), { ...NO_EVIDENCE, symptoms });
+      return alone[1]! / (alone[0]! + alone[1]!);
+    };
+    expect(ofAlone({})).toBeCloseTo(0.5, 12);
+    expect(ofAlone({ broughtOnBy: { growth: 0.66 } })).toBeCloseTo(0.34 / 1.34, 12);
+    const third = (over: Parameters<typeof causes>[0]) => {
+      const { pairs } = believe(
+        compile(tree({ ...causes(over), causes: [...causes(over).causes, cause("other", { base: "common" })] }), setting),
+        NO_EVIDENCE,
+      );
+      return pairs[pairAt(0, 1, 3)]! / pairs[pairAt(0, 2, 3)]!;
+    };
+    expect(third({})).toBeCloseTo(1, 12);
+    expect(third({ broughtOnBy: { growth: 0.66 } })).toBeCloseTo(5, 12);
   });
 });
 

@@ -2,7 +2,7 @@ import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import type { DiagnosisEvent } from "../../../lib/core/contract/event";
 import { fold, type DiagnosisState } from "../../../lib/core/diagnosis/fold";
-import { Device } from "./logs";
+import { Device, deviceId } from "./logs";
 
 /** What of a state must be alike, whatever way the log came. */
 const gist = (state: DiagnosisState) => ({
@@ -136,5 +136,47 @@ describe("the fold of a log", () => {
     ]);
     expect(state.profile.features).toEqual({ turbo: "turbo", voltage: "v12" });
     expect(state.profile.figures.ratedRpm).toBe(3000);
+  });
+
+  describe("[F9] heads that the log does not have", () => {
+    /** A log in which some events claim to have seen far more than was ever said. */
+    const boastfulLog = fc
+      .tuple(anyLog, fc.array(fc.tuple(fc.nat(99), fc.integer({ min: 1, max: 4 }), fc.constantFrom(1, 7, 40, 2 ** 31 - 1))))
+      .map(([log, boasts]) => {
+        const boasting = structuredClone(log);
+        for (const [place, device, head] of boasts) boasting[place % boasting.length]!.seen[deviceId(device)] = head;
+        return boasting;
+      });
+
+    it("fold to one state in any order of arrival and with any repeats", () => {
+      fc.assert(
+        fc.property(boastfulLog, fc.infiniteStream(fc.nat()), (log, dice) => {
+          const twice = [...log, ...log.filter(() => dice.next().value % 2)];
+          const shuffled = twice.map((event) => ({ event, at: dice.next().value })).sort((a, b) => a.at - b.at);
+          expect(gist(fold(shuffled.map(({ event }) => structuredClone(event))))).toEqual(gist(fold(log)));
+        }),
+        { seed: 18, numRuns: 300 },
+      );
+    });
+
+    it("count as the newest there is, so a huge one is worth no more than the true one", () => {
+      const [one, two] = [new Device(1), new Device(2)];
+      const older = one.answer("bowl", "bright");
+      const said = (head: number) => ({ ...new Device(2).answer("bowl", "slime", { seen: { [one.id]: head } }) });
+      expect(gist(fold([older, said(1_000_000)]))).toEqual(gist(fold([older, said(1)])));
+      const stranger = two.answer("bowl", "slime", { seen: { [deviceId(7)]: 1_000_000 } });
+      expect(fold([older, stranger]).conflicts).toHaveLength(1);
+      expect(fold([older, stranger]).order.events.map(({ id }) => id)).toEqual([older.id, stranger.id]);
+    });
+
+    it("do not outrank what was answered to them", () => {
+      const [one, two] = [new Device(1), new Device(2)];
+      const first = one.answer("bowl", "bright");
+      const boast = two.answer("bowl", "slime", { seen: { [one.id]: 1_000_000 } });
+      const reply = one.answer("bowl", "grit", { seen: { [two.id]: 1 } });
+      const state = fold([boast, reply, first]);
+      expect(answered(state, "bowl")).toBe("grit");
+      expect(state.order.before(reply, boast)).toBe(false);
+    });
   });
 });

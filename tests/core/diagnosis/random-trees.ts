@@ -39,6 +39,7 @@ export const anyTree: fc.Arbitrary<FaultTree> = fc
             checks.flatMap((findings, one) => (roll(2) > 0 ? [[`check-${one}`, { [`finding-${roll(findings)}`]: pick(LINKS) }]] : [])),
           ),
           curedBy: { [`remedy-${roll(remedies)}`]: pick(STRENGTHS) },
+          broughtOnBy: roll(4) === 0 && index > 0 ? { [`cause-${roll(index)}`]: pick(STRENGTHS) } : {},
         }),
       ),
     });
@@ -75,3 +76,23 @@ export const anyCase: fc.Arbitrary<{ tree: FaultTree; evidence: Evidence }> = an
 );
 
 export const setting = { profile: { features: {}, figures: {}, healthy: {} }, situation: "alongside", person: "mechanic" } as const;
+
+/** As anyCase, where a remedy has put right one of two: some of what was told was told before, some since. */
+export const anyPartCure: fc.Arbitrary<{ tree: FaultTree; evidence: Evidence }> = anyCase
+  .filter(({ tree }) => tree.remedies.length > 1)
+  .chain(({ tree, evidence }) => {
+    const [first] = tree.remedies;
+    const since = fc.constantFrom(undefined, true as const);
+    const before = fc.constantFrom(undefined, null, true, false);
+    const remedies = evidence.remedies.filter(({ remedy }) => remedy !== first!.key);
+    return fc
+      .record({
+        symptoms: fc.tuple(...evidence.symptoms.map((one) => before.map((b) => (b === undefined ? one : { ...one, left: { before: b } })))),
+        findings: fc.tuple(...evidence.findings.map((one) => since.map((left) => (left ? { ...one, left } : one)))),
+        remedies: fc.tuple(...remedies.map((one) => since.map((left) => (left ? { ...one, left } : one)))),
+      })
+      .map((marked) => ({
+        tree,
+        evidence: { ...marked, remedies: [...marked.remedies, { remedy: first!.key, result: "better" as const }], curedOne: first!.key },
+      }));
+  });

@@ -21,6 +21,15 @@ describe("units", () => {
     close(convert(1.5, "in", "mm"), 38.1, 1e-15);
   });
 
+  it("[U1] turns a difference of temperatures over without the offset of the scales, and never as a temperature", () => {
+    close(convert(9, "F-diff", "C-diff"), 5, 1e-14);
+    close(convert(20, "C-diff", "F-diff"), 36, 1e-14);
+    close(convert(-50, "K", "F-diff"), -90, 1e-14);
+    expect(convert(0, "F-diff", "C-diff")).toBe(0);
+    expect(() => convert(9, "F-diff", "C")).toThrow(/measures temperature-difference/);
+    expect(() => convert(9, "F", "K")).toThrow(UnitRefused);
+  });
+
   it("[U1] agrees with a general unit library to the digits that it keeps", () => {
     const pairs: [string, string, string, string][] = [
       ["psi", "psi", "kPa", "kPa"],

@@ -5,6 +5,8 @@ import { Chip } from "@/components/ui/chip";
 import { Card } from "@/components/ui/card";
 import { EmptyState } from "@/components/ui/empty-state";
 import { PageHead } from "@/components/ui/page-head";
+import { can } from "@/lib/core/access/permissions";
+import { LinkButton } from "@/components/ui/link-button";
 import { getCurrentTreeVersion, listTreeVersions } from "@/lib/server/trees/queries";
 import { pageScope } from "@/lib/server/web/page-scope";
 
@@ -12,9 +14,10 @@ export const metadata: Metadata = { title: "Fault trees" };
 
 export default async function TreesPage({ params }: PageProps<"/f/[fleetId]/trees">) {
   const { fleetId } = await params;
-  const { versions, current } = await pageScope("tree:read", fleetId, async (scope) => ({
+  const { versions, current, mayEdit } = await pageScope("tree:read", fleetId, async (scope) => ({
     versions: await listTreeVersions(scope),
     current: await getCurrentTreeVersion(scope),
+    mayEdit: can(scope.actor.roles, "tree:write"),
   }));
   return (
     <>
@@ -22,6 +25,13 @@ export default async function TreesPage({ params }: PageProps<"/f/[fleetId]/tree
         title="Fault trees"
         under="What the questions come from: symptoms, checks, causes, remedies and the links between them. New diagnoses use the version in use; those begun before keep theirs."
       />
+      {mayEdit && (
+        <p className="mb-4">
+          <LinkButton tone="strong" href={`/workshop/${fleetId}`} prefetch={false}>
+            Open the workshop
+          </LinkButton>
+        </p>
+      )}
       <Card aria-label="Published versions">
         {versions.length === 0 ? (
           <EmptyState title="No tree is published yet">Without one nothing can be diagnosed.</EmptyState>
@@ -40,6 +50,7 @@ export default async function TreesPage({ params }: PageProps<"/f/[fleetId]/tree
                 <span className="text-sm text-ink-2 sm:ml-auto">
                   {version.from === "own" ? "This fleet’s own" : "Shipped with Gudgeon"}, published <Day at={version.publishedAt} />
                 </span>
+                {version.note && <p className="w-full pb-2 text-sm">{version.note}</p>}
               </li>
             ))}
           </ul>

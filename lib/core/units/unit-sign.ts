@@ -1,6 +1,8 @@
 const SIGNS: Readonly<Record<string, string>> = {
   C: "\u00b0C",
   F: "\u00b0F",
+  "C-diff": "\u00b0C",
+  "F-diff": "\u00b0F",
   ohm: "\u03a9",
   mohm: "m\u03a9",
   count: "how many",
