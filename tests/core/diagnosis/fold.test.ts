@@ -12,6 +12,7 @@ const gist = (state: DiagnosisState) => ({
   situation: state.situation,
   answers: [...state.answers].map(([step, event]) => [step, event.id]),
   remedies: [...state.remedies].map(([step, event]) => [step, event.id]),
+  partCure: state.partCure && [state.partCure.event.id, state.order.events.filter(state.partCure.isLeft).map(({ id }) => id)],
   conflicts: state.conflicts.map((events) => events.map(({ id }) => id)),
   ended: state.ended?.id,
   runsAgain: state.runsAgain,
@@ -125,6 +126,50 @@ describe("the fold of a log", () => {
     expect(fold([end, unaware]).ended?.id).toBe(end.id);
     const aware = two.tell("taken-up-again", {}, { seen: { [one.id]: 1 } });
     expect(fold([end, unaware, aware]).ended).toBeNull();
+  });
+
+  it("[F8] a remedy that made it better parts what was told before from what is told of what is left", () => {
+    const phone = new Device(1);
+    const before = phone.answer("bowl", "slime");
+    const better = phone.tried("element", "better");
+    const after = phone.answer("smoke", "black");
+    const log = [phone.begin({ symptoms: ["weak", "smoky"] }), before, better, after];
+    const { partCure } = fold(log);
+    expect(partCure?.event.id).toBe(better.id);
+    expect([before, after].map((event) => partCure?.isLeft(event))).toEqual([false, true]);
+    const gone = phone.tell("symptom-told", { symptom: "weak", present: false });
+    expect(fold([...log, gone]).symptoms).toEqual([
+      { symptom: "weak", present: false, left: { before: true } },
+      { symptom: "smoky", present: true },
+    ]);
+  });
+
+  it("[F8] a cure counts as one of two as soon as a symptom is told after it; a corrected answer keeps its place", () => {
+    const phone = new Device(1);
+    const begun = phone.begin({ symptoms: ["weak", "smoky"] });
+    const cured = phone.tried("element", "cured");
+    expect(fold([begun, cured]).partCure).toBeNull();
+    const still = phone.tell("symptom-told", { symptom: "smoky", present: true });
+    expect(fold([begun, cured, still]).partCure?.event.id).toBe(cured.id);
+    expect(fold([begun, cured, still]).symptoms[1]).toEqual({ symptom: "smoky", present: true, left: { before: true } });
+    const tried = phone.tried("vent", "no-change");
+    const later = phone.answer("smoke", "black");
+    const corrected = phone.tried("vent", "better", { supersedes: tried.id });
+    const { partCure } = fold([begun, tried, later, corrected]);
+    expect(partCure?.event.id).toBe(corrected.id);
+    expect(partCure?.isLeft(later)).toBe(true);
+    expect(fold([begun, corrected, phone.tell("taken-back", { event: corrected.id })]).partCure).toBeNull();
+  });
+
+  it("[F8] the first of two such remedies counts; a device that did not know of it speaks of both faults", () => {
+    const [one, two] = [new Device(1), new Device(2)];
+    const first = one.tried("element", "better");
+    const second = one.tried("vent", "better");
+    const unaware = two.answer("bowl", "slime");
+    const aware = two.answer("smoke", "black", { seen: { [one.id]: 1 } });
+    const { partCure } = fold([second, aware, first, unaware]);
+    expect(partCure?.event.id).toBe(first.id);
+    expect([second, unaware, aware].map((event) => partCure?.isLeft(event))).toEqual([true, false, true]);
   });
 
   it("[F6] what is told of the engine stands over what the diagnosis began with", () => {
