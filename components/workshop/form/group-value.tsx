@@ -1,7 +1,6 @@
-import type { Editing } from "./editing";
+import type { Editing, FieldEditor } from "./editing";
 import { hintOf, labelOf } from "./field-words";
 import type { Field } from "./shape";
-import { ShapeValue } from "./shape-value";
 
 /** Fields that belong together. A group that may be left out is left out when its last field is emptied. */
 export function GroupValue({
@@ -20,7 +19,7 @@ export function GroupValue({
     onChange(said.length === 0 && !must ? undefined : Object.fromEntries(said));
   };
   const body = fields.map((field) => (
-    <ShapeValue
+    <Editor
       key={field.name}
       name={field.name}
       path={`${path}-${field.name}`}

@@ -66,6 +66,8 @@ export type RuleShown = {
   /** The one exception holds: run on to safety where stopping now endangers people or boat. */
   runOn: boolean;
   clearedWhen: string | null;
+  /** As of a step. */
+  drawing: string | null;
 };
 
 /** `due`: to be asked now. `found`: in force by what was found or cranked, not by a yes. `event`: the answer that a change takes the place of. */

@@ -3,6 +3,7 @@ const SIGNS: Readonly<Record<string, string>> = {
   F: "\u00b0F",
   "C-diff": "\u00b0C",
   "F-diff": "\u00b0F",
+  "%-weight": "%",
   ohm: "\u03a9",
   mohm: "m\u03a9",
   count: "how many",

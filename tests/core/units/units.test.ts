@@ -18,6 +18,8 @@ describe("units", () => {
     close(convert(212, "F", "C"), 100, 1e-14);
     close(convert(-40, "C", "F"), -40, 1e-14);
     close(convert(2.5, "bar", "kPa"), 250, 1e-15);
+    close(convert(0.02, "%-weight", "mg/kg"), 200, 1e-14);
+    close(convert(35, "ppm", "%-weight"), 0.0035, 1e-14);
     close(convert(1.5, "in", "mm"), 38.1, 1e-15);
   });
 
