@@ -278,6 +278,10 @@ export const KnownCase = z.strictObject({
       confirms: z.literal(true).optional(),
     }),
   ),
+  /** Remedies that had been tried, or were tried on the way, and did not cure it. */
+  tried: z
+    .array(z.strictObject({ remedy: Key, result: z.enum(["no-change", "better"]), when: z.enum(["start", "after"]).default("after") }))
+    .optional(),
   causes: z.array(Key).min(1),
   alsoAccept: z.array(z.strictObject({ cause: Key, reason: Line })).default([]),
   source: Line,
