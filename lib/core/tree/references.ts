@@ -118,6 +118,7 @@ function knownCaseRefs(known: FaultTree["knownCases"][number]): Out[] {
     ...known.findings.flatMap((seen): Out[] =>
       seen.finding === undefined ? [{ to: "check", key: seen.check, field: "findings" }] : finding(seen.check, seen.finding, "findings"),
     ),
+    ...(known.tried ?? []).map(({ remedy }): Out => ({ to: "remedy", key: remedy, field: "tried" })),
     ...[...known.causes, ...known.alsoAccept.map(({ cause }) => cause)].map((key): Out => ({ to: "cause", key, field: "causes" })),
   ];
 }

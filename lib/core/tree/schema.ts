@@ -81,6 +81,7 @@ export const Quantity = z.enum([
   "flow",
   "length",
   "ratio",
+  "concentration",
   "density",
   "count",
 ]);
@@ -203,6 +204,8 @@ export const Symptom = z.strictObject({
   system: Key,
   /** What people really say, misspelt too. */
   phrases: z.array(Line).min(5),
+  /** Why few engines show it, where few do: causes that have no link to it would weigh too much otherwise (soundness rule strays-heavy). */
+  rare: Text.optional(),
   /** Engine states that cannot be had while it lasts: an engine that does not start shows nothing under load. */
   rulesOut: z.array(EngineState).optional(),
   sources: Citations,
@@ -241,6 +244,8 @@ export const StopRule = z.strictObject({
   clearedBy: z.array(FindingRef).default([]),
   /** What one has to say to clear it by hand, where no check does: "The exhaust has been drained". */
   clearedWhen: Line.optional(),
+  /** One of the drawings of drawings.ts, where words are too slow to read. */
+  drawing: Key.optional(),
   appliesTo: AppliesTo.optional(),
   sources: Citations,
 });
@@ -273,6 +278,10 @@ export const KnownCase = z.strictObject({
       confirms: z.literal(true).optional(),
     }),
   ),
+  /** Remedies that had been tried, or were tried on the way, and did not cure it. */
+  tried: z
+    .array(z.strictObject({ remedy: Key, result: z.enum(["no-change", "better"]), when: z.enum(["start", "after"]).default("after") }))
+    .optional(),
   causes: z.array(Key).min(1),
   alsoAccept: z.array(z.strictObject({ cause: Key, reason: Line })).default([]),
   source: Line,

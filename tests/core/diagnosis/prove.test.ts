@@ -56,6 +56,18 @@ describe("the proof of a tree by known cases", () => {
     expect(prove(small, [accepted]).cases[0]?.place.start).toBe(1);
   });
 
+  it("[V1] takes a remedy that was tried and did not cure as evidence, at the start where it had been tried before", () => {
+    const tried = (when: "start" | "after"): KnownCase["tried"] => [{ remedy: "mend-b", result: "no-change", when }];
+    expect(prove(small, [known({})]).cases[0]?.place).toMatchObject({ start: 2, "but-confirming": 2 });
+    expect(prove(small, [known({ tried: tried("after") })]).cases[0]?.place).toMatchObject({ start: 2, "but-confirming": 1 });
+    expect(prove(small, [known({ tried: tried("start") })]).cases[0]?.place).toMatchObject({ start: 1, "but-confirming": 1 });
+  });
+
+  it("[V2] does not try again what had been tried before", () => {
+    const steps = prove(small, [known({ tried: [{ remedy: "mend-b", result: "no-change", when: "start" }] })]).cases[0]?.played.steps;
+    expect(steps?.map(({ key }) => key)).not.toContain("mend-b");
+  });
+
   it("[V1] says when the tree does not have the cause", () => {
     expect(prove(small, [known({ causes: ["elsewhere"] })]).cases[0]?.place.all).toBeNull();
   });

@@ -72,6 +72,7 @@ const UNLINKED: Readonly<Partial<Record<ListName, (tree: FaultTree, key: string)
   }),
   remedies: (tree, key) => ({
     ...tree,
+    knownCases: tree.knownCases.map((known): KnownCase => ({ ...known, tried: known.tried?.filter(({ remedy }) => remedy !== key) })),
     causes: tree.causes.map((cause): Cause => ({ ...cause, curedBy: without(cause.curedBy, key) })),
     checks: tree.checks.map((check): Check => ({
       ...check,
