@@ -4,7 +4,7 @@ import { sessionIdOf, siteIsSecure } from "@/lib/server/auth/session-cookie";
 import { contentSecurityPolicy, scriptHash, securityHeaders } from "@/lib/server/web/content-security";
 import { builtScriptHashes } from "@/lib/server/web/script-hashes";
 
-const needsSignIn = (pathname: string) => /^\/(account|f)(\/|$)/.test(pathname);
+const needsSignIn = (pathname: string) => /^\/(account|f|workshop)(\/|$)/.test(pathname);
 
 const development = process.env.NODE_ENV === "development";
 const lightScript = scriptHash(LIGHT_SCRIPT);

@@ -4,6 +4,7 @@ import { claimCheckout } from "./lib/checkout.mjs";
 import { ensureNodeModules } from "./lib/npm.mjs";
 import { startPostgres } from "./lib/postgres.mjs";
 import { bin, daemon, freePort, log, root, stop, UserError } from "./lib/proc.mjs";
+import { SOCKET_ADDRESS } from "./lib/serve.mjs";
 import { stopping } from "./lib/stopping.mjs";
 
 const { add, end } = stopping();
@@ -26,7 +27,7 @@ try {
   add(() => mail.stop());
   const port = await freePort(Number(process.env.PORT ?? 3000));
   const url = `http://localhost:${port}`;
-  const child = daemon(process.execPath, [bin("next"), "dev", "-p", String(port)], {
+  const child = daemon(process.execPath, [...SOCKET_ADDRESS, bin("next"), "dev", "-p", String(port)], {
     stdio: ["ignore", "inherit", "inherit"],
     env: {
       ...process.env,

@@ -23,6 +23,9 @@ export function CuredStep() {
         <Button tone="strong" size="large" wide onClick={() => go("outcome")}>
           Log the outcome
         </Button>
+        <Button size="large" wide onClick={() => go("symptoms")}>
+          Cured, but it still does something else
+        </Button>
         {said && (
           <Button size="large" wide onClick={() => go("change", said.event)}>
             It is not cured after all

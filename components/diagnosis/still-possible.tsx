@@ -5,6 +5,7 @@ import { CauseRow } from "./cause-row";
 import { useHere } from "./here";
 import { Swatch, type Pattern } from "./swatch";
 import { Ticks } from "./ticks";
+import { TwoFaults } from "./two-faults";
 
 /** How many causes stand in the open; the rest is folded. */
 const IN_THE_OPEN = 3;
@@ -37,6 +38,7 @@ export function StillPossible() {
           { pattern: "empty", count: unknown.of100 },
         ]}
       />
+      <TwoFaults />
       {open.map((cause, index) => (
         <CauseRow key={cause.key} cause={cause} pattern={pattern(index)} />
       ))}

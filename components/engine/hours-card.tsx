@@ -28,6 +28,9 @@ export function HoursCard({ fleetId, engine }: { fleetId: string; engine: Engine
       {engine.hasHourMeter ? (
         <div className="no-print">
           <HourEntry fleetId={fleetId} engineId={engine.id} />
+          <Link className="link mt-2 inline-flex min-h-12 items-center" prefetch={false} href={`/f/${fleetId}/engines/${engine.id}/hours`}>
+            All readings, and correcting one
+          </Link>
         </div>
       ) : (
         <p className="text-sm text-ink-2">

@@ -1,6 +1,9 @@
 /** Today as a date field has it, in the zone of whoever types. */
-export function today(): string {
-  const now = new Date();
+export const today = (): string => dayOf(new Date());
+
+/** The day of a moment as a date field has it, in the zone of whoever looks. */
+export function dayOf(moment: string | Date): string {
+  const now = new Date(moment);
   return `${now.getFullYear()}-${two(now.getMonth() + 1)}-${two(now.getDate())}`;
 }
 

@@ -71,10 +71,14 @@ export function LogTable({ fleetId, entries, caption, namesEngine = false, empty
 
 function LogLink({ fleetId, entry }: { fleetId: string; entry: LogEntry }) {
   const day = <Day at={entry.at} />;
-  if (entry.diagnosisId === null) return day;
+  const home = `/f/${fleetId}`;
+  const href = entry.diagnosisId === null ? `${home}/engines/${entry.engineId}/repairs/${entry.id}` : `${home}/log/${entry.diagnosisId}`;
   return (
-    <Link className="link inline-flex min-h-12 items-center md:min-h-0" prefetch={false} href={`/f/${fleetId}/log/${entry.diagnosisId}`}>
-      {day}
-    </Link>
+    <>
+      <Link className="link inline-flex min-h-12 items-center md:min-h-0" prefetch={false} href={href}>
+        {day}
+      </Link>
+      {(entry.version ?? 1) > 1 && <span className="block text-sm text-ink-2">corrected</span>}
+    </>
   );
 }

@@ -5,6 +5,7 @@ import { useRouter } from "next/navigation";
 import { useState } from "react";
 import { useForm, useWatch } from "react-hook-form";
 import { uuidv7 } from "uuidv7";
+import { CorrectedMeanwhile } from "@/components/form/corrected-meanwhile";
 import { FormEnd } from "@/components/form/form-end";
 import { useSave } from "@/components/form/use-save";
 import { Choice } from "@/components/ui/choice";
@@ -14,25 +15,32 @@ import { Select } from "@/components/ui/select";
 import { TextArea } from "@/components/ui/text-area";
 import { TextField } from "@/components/ui/text-field";
 import { sendJson } from "@/lib/client/exchange/request";
+import type { Repair } from "@/lib/core/contract/log";
 import { PartFields } from "./part-fields";
 import { PickOrSay, type Said } from "@/components/form/pick-or-say";
 import type { RepairChoices } from "./repair-choices";
-import { newRepair, NO_REPAIR, RepairValues } from "./repair-values";
+import { newRepair, NO_REPAIR, repairChange, RepairValues, valuesOf } from "./repair-values";
 
-type Props = { fleetId: string; engineId: string; hasHourMeter: boolean; choices: RepairChoices };
+type Props = {
+  fleetId: string;
+  engineId: string;
+  hasHourMeter: boolean;
+  choices: RepairChoices;
+  /** A repair that stands in the log already, to be corrected. */ standing?: Repair;
+};
 
 const OUTCOMES = [
   { value: "cured", title: "Cured" },
   { value: "held", title: "Held for now" },
 ] as const;
 
-/** A repair that was done without a diagnosis, or a line of an old notebook. */
-export function RepairForm({ fleetId, engineId, hasHourMeter, choices }: Props) {
+/** A repair that was done without a diagnosis, or a line of an old notebook; or the correction of one. */
+export function RepairForm({ fleetId, engineId, hasHourMeter, choices, standing }: Props) {
   const router = useRouter();
   // Made once: sent twice, it is one line of the log.
   const [id] = useState(() => uuidv7());
   const { saving, refusal, save } = useSave();
-  const form = useForm({ resolver: zodResolver(RepairValues), defaultValues: NO_REPAIR });
+  const form = useForm({ resolver: zodResolver(RepairValues), defaultValues: standing ? valuesOf(standing) : NO_REPAIR });
   const { register, control, setValue } = form;
   const { errors } = form.formState;
   const [cause, remedy, outcome] = useWatch({ control, name: ["cause", "remedy", "outcome"] });
@@ -51,7 +59,11 @@ export function RepairForm({ fleetId, engineId, hasHourMeter, choices }: Props) 
   };
   const submit = form.handleSubmit(async (given) => {
     const engine = `/api/v1/fleets/${fleetId}/engines/${engineId}`;
-    const result = await save(() => sendJson(`${engine}/repairs`, newRepair(id, engineId, given)));
+    const result = await save(() =>
+      standing
+        ? sendJson(`${engine}/repairs/${standing.entry.id}`, repairChange(standing, given), { method: "PUT", version: standing.version })
+        : sendJson(`${engine}/repairs`, newRepair(id, engineId, given)),
+    );
     if (!("answer" in result)) return;
     router.push(`/f/${fleetId}/engines/${engineId}`);
     router.refresh();
@@ -128,7 +140,13 @@ export function RepairForm({ fleetId, engineId, hasHourMeter, choices }: Props) 
       />
       <PartFields control={control} register={register} wrong={(i) => errors.parts?.[i]?.quantity?.message} />
       <TextArea id="note" label="Note" optional maxLength={4000} error={errors.note?.message} {...register("note")} />
-      <FormEnd submit="Write it into the log" saving={saving} refusal={hoursSay ? null : refusal} wrong={Object.keys(errors).length > 0} />
+      <CorrectedMeanwhile refusal={refusal} />
+      <FormEnd
+        submit={standing ? "Correct it" : "Write it into the log"}
+        saving={saving}
+        refusal={hoursSay ? null : refusal}
+        wrong={Object.keys(errors).length > 0}
+      />
     </Form>
   );
 }

@@ -1,7 +1,7 @@
 import * as z from "zod";
-import { isAhead, momentOf } from "@/components/form/day-typed";
-import { typedNumber } from "@/components/form/typed-number";
-import type { NewRepair } from "@/lib/core/contract/log";
+import { dayOf, isAhead, momentOf } from "@/components/form/day-typed";
+import { asTyped, typedNumber } from "@/components/form/typed-number";
+import type { NewRepair, Repair, RepairChange } from "@/lib/core/contract/log";
 
 const Said = z.object({ key: z.string(), words: z.string().trim().max(500) });
 const isSaid = ({ key, words }: { key: string; words: string }) => key !== "" || words !== "";
@@ -52,11 +52,11 @@ export const NO_REPAIR: RepairValues = {
 };
 
 /** As the server takes it: what was not said is left out. */
-export function newRepair(id: string, engineId: string, given: RepairGiven): NewRepair {
+export const newRepair = (id: string, engineId: string, given: RepairGiven): NewRepair => ({ id, engineId, ...repairSaid(given) });
+
+function repairSaid(given: RepairGiven): RepairChange {
   const { cause, remedy, proof, note, hours, minutes, symptom, parts } = given;
   return {
-    id,
-    engineId,
     doneAt: momentOf(given.day),
     outcome: given.outcome,
     symptoms: symptom ? [symptom] : [],
@@ -70,5 +70,37 @@ export function newRepair(id: string, engineId: string, given: RepairGiven): New
       .filter((part) => part.title !== "")
       .map((part) => ({ ...(part.key ? { key: part.key } : {}), title: part.title, quantity: part.quantity ?? 1 })),
     ...(note.trim() ? { note } : {}),
+  };
+}
+
+/** A repair that stands in the log, as its form holds it. */
+export function valuesOf({ entry, meterShowed, meterReset }: Repair): RepairValues {
+  const said = (thing: { key: string | null; title: string } | null) => ({
+    key: thing?.key ?? "",
+    words: thing?.key ? "" : (thing?.title ?? ""),
+  });
+  return {
+    day: dayOf(entry.at),
+    hours: asTyped(meterShowed),
+    meterReset,
+    symptom: entry.symptoms[0]?.key ?? "",
+    cause: said(entry.cause),
+    remedy: said(entry.remedy),
+    outcome: entry.outcome === "cured" ? "cured" : "held",
+    proof: entry.proof ?? "",
+    minutes: asTyped(entry.minutes),
+    parts: entry.parts.map(({ key, title, quantity }) => ({ key: key ?? "", title, quantity: asTyped(quantity) })),
+    note: entry.note ?? "",
+  };
+}
+
+/** A repair as it should have been written. A day that was left as it was keeps its hour, and further symptoms stay. */
+export function repairChange(was: Repair, given: RepairGiven): RepairChange {
+  const change = repairSaid(given);
+  const more = was.entry.symptoms.slice(1).map(({ key }) => key);
+  return {
+    ...change,
+    doneAt: given.day === dayOf(was.entry.at) ? was.entry.at : change.doneAt,
+    symptoms: [...new Set([...change.symptoms, ...more])],
   };
 }

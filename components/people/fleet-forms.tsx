@@ -40,6 +40,10 @@ export function WithdrawForm({ action, hidden }: { action: FormAction; hidden: R
   return <ActionForm action={action} hidden={hidden} submit="Withdraw" tone="plain" changesPage />;
 }
 
+export function SendAgainForm({ action, hidden }: { action: FormAction; hidden: Readonly<Record<string, string>> }) {
+  return <ActionForm action={action} hidden={hidden} submit="Send again" tone="plain" changesPage />;
+}
+
 export function RenameFleetForm({ action, fleet }: { action: FormAction; fleet: Fleet }) {
   return (
     <ActionForm action={action} hidden={{ fleetId: fleet.id, version: String(fleet.version) }} submit="Rename" tone="plain" changesPage>

@@ -1,12 +1,12 @@
 import { Day } from "@/components/log/day";
 import type { Invitation } from "@/lib/core/contract/people";
-import { WithdrawForm } from "./fleet-forms";
+import { SendAgainForm, WithdrawForm } from "./fleet-forms";
 import type { FormAction } from "./form-action";
 
-type Props = { fleetId: string; invitations: readonly Invitation[]; withdraw: FormAction };
+type Props = { fleetId: string; invitations: readonly Invitation[]; withdraw: FormAction; sendAgain: FormAction };
 
 /** Invitations that wait to be accepted. */
-export function InvitationList({ fleetId, invitations, withdraw }: Props) {
+export function InvitationList({ fleetId, invitations, withdraw, sendAgain }: Props) {
   if (invitations.length === 0) return <p className="text-sm text-ink-2">No invitation is waiting.</p>;
   return (
     <ul className="divide-y divide-rule">
@@ -15,9 +15,11 @@ export function InvitationList({ fleetId, invitations, withdraw }: Props) {
           <span>
             <span className="break-all">{invitation.email}</span>, as {invitation.roles.join(", ")}.{" "}
             <span className="text-sm text-ink-2">
-              Sent by {invitation.invitedByName}, good until <Day at={invitation.expiresAt} />
+              Invited by {invitation.invitedByName}, good until <Day at={invitation.expiresAt} />
             </span>
+            {invitation.sentAt === null && <span className="block font-semibold">Its mail has not gone out. Send it again.</span>}
           </span>
+          <SendAgainForm action={sendAgain} hidden={{ fleetId, invitationId: invitation.id }} />
           <WithdrawForm action={withdraw} hidden={{ fleetId, invitationId: invitation.id }} />
         </li>
       ))}

@@ -4,19 +4,18 @@ import "@xyflow/react/dist/style.css";
 import "./tree-map.css";
 import {
   Controls,
-  Position,
   type OnSelectionChangeFunc,
   type ReactFlowInstance,
   type Viewport,
   ReactFlow,
   ReactFlowProvider,
-  ViewportPortal,
-  type Edge,
   type Node,
 } from "@xyflow/react";
 import { useCallback, useMemo, useRef, useState } from "react";
-import { drawnPart, type DrawnPart } from "./drawn-part";
-import { heightOf, LANES, placesOf, type Places } from "./tree-layout";
+import { drawnPart } from "./drawn-part";
+import { edgesOf, nodesOf } from "./flow-parts";
+import { Lanes } from "./lanes";
+import { placesOf } from "./tree-layout";
 import { nodeTypes } from "./tree-nodes";
 import type { TreeGraph } from "./tree-graph";
 
@@ -74,84 +73,4 @@ export function TreeMap({ graph, onSelect, panelWidth }: Props) {
 function clearOfPanel(node: Node, { x, y, zoom }: Viewport, freeWidth: number): Viewport {
   const rightEdge = (node.position.x + (node.width ?? 0)) * zoom + x;
   return { x: x - Math.max(0, rightEdge + 16 - freeWidth), y, zoom };
-}
-
-const LANE_TITLES = [
-  ["symptom", "Symptom"],
-  ["check", "Checks and their findings"],
-  ["cause", "Likely causes"],
-  ["remedy", "Remedies"],
-] as const;
-
-function Lanes({ places }: { places: Places }) {
-  const bottom = Math.max(...[...places.values()].map((p) => p.y + p.height)) + 40;
-  return (
-    <ViewportPortal>
-      {LANE_TITLES.map(([lane, title]) => (
-        <div key={lane} className="absolute text-ink-2" style={{ left: LANES[lane].x, top: 8 }}>
-          {title}
-        </div>
-      ))}
-      {(["check", "cause", "remedy"] as const).map((lane) => (
-        <div key={lane} className="absolute w-px bg-rule" style={{ left: LANES[lane].x - 24, top: 0, height: bottom }} />
-      ))}
-    </ViewportPortal>
-  );
-}
-
-type Handles = NonNullable<Node["handles"]>;
-
-/** Sizes and handles are given, so that nothing is measured and links to nodes outside the view are drawn. */
-function nodesOf(graph: DrawnPart, places: Places): Node[] {
-  const node = (id: string, type: keyof typeof LANES, data: Record<string, unknown>, handles: Handles): Node => {
-    const { x, y, height } = places.get(id)!;
-    const { width } = LANES[type];
-    return { id, type, data, position: { x, y }, width, height, measured: { width, height }, handles, draggable: false };
-  };
-  const left = (height: number): Handles[number] => ({ type: "target", position: Position.Left, x: 0, y: height / 2, width: 1, height: 1 });
-  const right = (width: number, y: number, id?: string): Handles[number] => ({
-    id,
-    type: "source",
-    position: Position.Right,
-    x: width,
-    y,
-    width: 1,
-    height: 1,
-  });
-  return [
-    node("symptom", "symptom", { symptom: graph.symptom }, []),
-    ...graph.checks.map((drawn) => {
-      let y = heightOf.checkHead(drawn.check.title);
-      const handles = drawn.findings.map((f) => {
-        const h = heightOf.findingRow(f.title);
-        y += h;
-        return right(LANES.check.width, y - h / 2, f.key);
-      });
-      return node(`check:${drawn.check.key}`, "check", { drawn }, handles);
-    }),
-    ...graph.causes.map((cause) => {
-      const height = heightOf.cause(cause.title);
-      const base = typeof cause.base === "number" ? `weight ${cause.base}` : cause.base;
-      return node(`cause:${cause.key}`, "cause", { cause, base }, [left(height), right(LANES.cause.width, height / 2)]);
-    }),
-    ...graph.remedies.map((remedy) => node(`remedy:${remedy.key}`, "remedy", { remedy }, [left(heightOf.remedy(remedy.title))])),
-  ];
-}
-
-function edgesOf(graph: DrawnPart): Edge[] {
-  return [
-    ...graph.tells.map((t) => ({
-      id: `${t.check}/${t.finding}/${t.cause}`,
-      source: `check:${t.check}`,
-      sourceHandle: t.finding,
-      target: `cause:${t.cause}`,
-      style: { stroke: "var(--fill)", strokeWidth: Math.min(5, 1 + Math.log2(t.ratio) / 1.4) },
-    })),
-    ...graph.cures.map((c) => ({
-      id: `${c.cause}/${c.remedy}`,
-      source: `cause:${c.cause}`,
-      target: `remedy:${c.remedy}`,
-      style: { stroke: "var(--sound)", strokeWidth: 1 + 2 * c.strength },
-    })),
-  ];
 }

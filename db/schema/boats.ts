@@ -52,7 +52,10 @@ export const hourReadings = pgTable(
     /** The meter was replaced or set back; hours go on from `reading`. */
     reset: boolean().notNull().default(false),
     by: uuid().notNull(),
+    version: version(),
     createdAt: createdAt(),
+    /** Written down by mistake: counts for nothing, and stays readable. */
+    takenBackAt: moment(),
   },
   (t) => [
     primaryKey({ columns: [t.fleetId, t.id] }),

@@ -37,6 +37,8 @@ export const invitations = pgTable(
     invitedByName: text().notNull(),
     createdAt: createdAt(),
     expiresAt: moment().notNull(),
+    /** When its mail was handed over; null while it has not been: it can then be sent again. */
+    sentAt: moment(),
   },
   (t) => [primaryKey({ columns: [t.fleetId, t.id] }), index().on(t.fleetId, t.email)],
 );

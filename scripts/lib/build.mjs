@@ -3,7 +3,7 @@ import { createHash } from "node:crypto";
 import { cpSync, existsSync, mkdirSync, readdirSync, readFileSync, renameSync, rmSync, statSync, writeFileSync } from "node:fs";
 import path from "node:path";
 import { withLock } from "./lock-file.mjs";
-import { bin, log, root, run } from "./proc.mjs";
+import { bin, log, root, runOrSay } from "./proc.mjs";
 
 const SOURCES = [
   "app",
@@ -20,6 +20,16 @@ const SOURCES = [
 ];
 const KEPT_BUILDS = 3;
 
+const BUILD = {
+  failed: "The site could not be built",
+  whatToDo: [
+    "Nothing was started, and earlier builds are as they were. What to do:",
+    "  - Where it names a file, that file is at fault: mend it (git status shows what was changed here), then run npm start again.",
+    "  - Where it speaks of memory or space, make room: a build takes about 2 GB of memory and 1 GB of disk.",
+    "  - Where it names no file: delete .next and node_modules, then run npm start again.",
+  ].join("\n"),
+};
+
 /**
  * Builds into a folder of its own, .data/builds/<hash of the sources>: a server that runs from one is not disturbed
  * by the next build, and the same sources are not built twice. Returns the folder.
@@ -33,7 +43,8 @@ export async function build() {
       return dir;
     }
     log("building (half a minute or so)");
-    await run(process.execPath, [bin("next"), "build"], { env: { ...process.env, NEXT_TELEMETRY_DISABLED: "1", NODE_ENV: "production" } });
+    const env = { ...process.env, NEXT_TELEMETRY_DISABLED: "1", NODE_ENV: "production" };
+    await runOrSay(process.execPath, [bin("next"), "build"], BUILD, { env });
     const standalone = path.join(root, ".next/standalone");
     // The standalone folder leaves these two out.
     cpSync(path.join(root, ".next/static"), path.join(standalone, ".next/static"), { recursive: true });

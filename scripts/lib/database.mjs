@@ -32,3 +32,11 @@ export async function prepareDatabase(ownerUrl, { demo }) {
     rmSync(reports, { recursive: true, force: true });
   }
 }
+
+/** Works out every fleet's log anew from its events, on a database that is brought up to date first. */
+export async function rebuildLog(ownerUrl) {
+  await migrate(ownerUrl);
+  const { appUrl, identityUrl } = await ensureRoles(ownerUrl);
+  const env = { ...process.env, DATABASE_URL: ownerUrl, DATABASE_APP_URL: appUrl, DATABASE_IDENTITY_URL: identityUrl };
+  await runTypeScript("db/rebuild-log.ts", [], { env });
+}

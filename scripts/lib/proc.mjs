@@ -3,6 +3,7 @@ import { spawn } from "node:child_process";
 import { accessSync, constants, existsSync, readFileSync } from "node:fs";
 import net from "node:net";
 import path from "node:path";
+import { stripVTControlCharacters } from "node:util";
 
 export const root = path.resolve(import.meta.dirname, "../..");
 export const isRoot = process.getuid?.() === 0;
@@ -47,6 +48,26 @@ export function run(cmd, args, { check = true, mayOutlive = false, ...opts } = {
       else resolve({ code, signal, out });
     });
   });
+}
+
+const LAST_LINES = 25;
+
+/**
+ * Runs to the end with what it prints kept back; where it fails, that is a UserError that says what failed, the last
+ * lines of what it printed itself, and what to do.
+ *
+ * @param {{ failed: string, whatToDo: string }} says in plain words
+ */
+export async function runOrSay(cmd, args, { failed, whatToDo }, options = {}) {
+  const told = (why, out) => {
+    const lines = stripVTControlCharacters(out).trimEnd().split("\n").slice(-LAST_LINES);
+    const said = out.trim() ? ["The last lines of what it said:", "", ...lines.map((line) => `  ${line}`.trimEnd())] : ["It said nothing."];
+    return new UserError([`${failed} (${why}).`, "", ...said, "", whatToDo].join("\n"));
+  };
+  const { code, signal, out } = await run(cmd, args, { stdio: ["ignore", "pipe", "pipe"], ...options, check: false }).catch((error) => {
+    throw told("it could not be started", error.message);
+  });
+  if (code !== 0) throw told(signal ? `it was ended by ${signal}` : `exit code ${code}`, out);
 }
 
 /**

@@ -13,7 +13,7 @@ export const IDENTITY_TABLES = ["users", "credentials", "sessions", "one_time_to
 /** The same for every fleet; the app role only reads them. */
 export const SHARED_TABLES = ["shipped_tree_versions"];
 /** The app role may add to them and read them. A trigger refuses the rest to the owner as well. */
-export const APPEND_ONLY_TABLES = ["diagnosis_events"];
+export const APPEND_ONLY_TABLES = ["diagnosis_events", "corrections"];
 /** Seen by neither. */
 export const OWNER_TABLES = ["applied_migrations"];
 

@@ -1,11 +1,15 @@
 // Serves a build and waits until it answers.
 import { existsSync, readFileSync } from "node:fs";
 import path from "node:path";
+import { pathToFileURL } from "node:url";
 import { daemon, root, UserError } from "./proc.mjs";
 import { secrets } from "./secrets.mjs";
 
 /** The site's name: "localhost", never 127.0.0.1. Next.js writes every loopback host as localhost in request URLs, and a cookie set under the other name would stay behind. */
 export const addressOf = (port) => process.env.APP_URL ?? `http://localhost:${port}`;
+
+/** What a Node process is begun with so that nobody can choose where they come from. */
+export const SOCKET_ADDRESS = ["--import", pathToFileURL(path.join(import.meta.dirname, "socket-address.mjs")).href];
 
 /** @param {{ dir: string, port: number, host?: string, env?: Record<string, string>, stdio?: "inherit" | "ignore" }} options */
 export async function serve({ dir, port, host = "127.0.0.1", env = {}, stdio = "inherit" }) {
@@ -13,7 +17,7 @@ export async function serve({ dir, port, host = "127.0.0.1", env = {}, stdio = "
   const hashes = path.join(dir, "script-hashes.json");
   // The owner's address may do anything; what serves people never sees it.
   const inherited = { ...process.env, DATABASE_URL: undefined };
-  const child = daemon(process.execPath, [path.join(dir, "server.js")], {
+  const child = daemon(process.execPath, [...SOCKET_ADDRESS, path.join(dir, "server.js")], {
     cwd: root,
     stdio: ["ignore", stdio, stdio],
     env: {

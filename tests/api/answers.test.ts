@@ -94,6 +94,38 @@ describe("events over the wire", () => {
     });
   });
 
+  test("a character that no database can keep is left out of what somebody wrote, and elsewhere is that event's own fault", async () => {
+    const id = uuidv7();
+    const phone = phoneOf(id);
+    const events = [
+      phone.begin(ines.engineId, treeId, { complaint: "wont\0 rev" }),
+      phone.write("noted", { note: "thumbs \ud83d", photos: [] }),
+      phone.write("answered", { check: "filter-vacuum", answer: { value: 5, unit: "in\0Hg" }, photos: [] }),
+      phone.write("noted", { note: "after it", photos: [] }, { seen: { "\ud800": 1 } }),
+      phone.write("runs-again", {}),
+    ];
+    const post = async () => (await call("POST", at(`/diagnoses/${id}/events`), { as: ines.person, body: { events } })).json();
+    const results = async () => ((await post()) as { receipts: { result: string }[] }).receipts.map(({ result }) => result);
+    expect(await results()).toEqual(["stored", "stored", "rejected", "rejected", "stored"]);
+    expect(await results()).toEqual(["duplicate", "duplicate", "rejected", "rejected", "duplicate"]);
+    expect(await get(`/diagnoses/${id}/events`)).toMatchObject({
+      events: [{ payload: { complaint: "wont rev" } }, { payload: { note: "thumbs \ufffd" } }, { kind: "runs-again" }],
+    });
+  });
+
+  test("a beginning that cannot be read takes what follows with it, in one answer, so that the outbox empties", async () => {
+    const id = uuidv7();
+    const phone = phoneOf(id);
+    const begun = { ...phone.begin(ines.engineId, treeId), madeAt: "yesterday" };
+    const events = [begun, phone.write("runs-again", {})];
+    const answer = await call("POST", at(`/diagnoses/${id}/events`), { as: ines.person, body: { events } });
+    expect(answer.status).toBe(200);
+    expect(await answer.json()).toMatchObject({
+      receipts: [{ result: "rejected" }, { result: "rejected", because: expect.stringMatching(/not begun/) }],
+    });
+    await problem(await call("POST", at(`/diagnoses/${id}/events`), { as: ines.person, body: { events: [events[1]] } }), 404);
+  });
+
   test("an empty batch, one without ids and one too long are refused whole", async () => {
     const id = uuidv7();
     for (const events of [[], [{ kind: "begun" }], Array.from({ length: 501 }, () => ({ id: uuidv7() }))]) {

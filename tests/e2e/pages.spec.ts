@@ -20,6 +20,7 @@ const PAGES: [name: string, of: (ids: { fleet: string; engine: string; boat: str
   ["new engine", ({ fleet, boat }) => `/f/${fleet}/boats/${boat}/engines/new`],
   ["engine", ({ fleet, engine }) => `/f/${fleet}/engines/${engine}`],
   ["engine profile", ({ fleet, engine }) => `/f/${fleet}/engines/${engine}/edit`],
+  ["hour readings", ({ fleet, engine }) => `/f/${fleet}/engines/${engine}/hours`],
   ["new repair", ({ fleet, engine }) => `/f/${fleet}/engines/${engine}/repairs/new`],
   ["log", ({ fleet }) => `/f/${fleet}/log`],
   ["a diagnosis", ({ fleet, diagnosis }) => `/f/${fleet}/log/${diagnosis}`],

@@ -6,7 +6,8 @@ import { users } from "@/db/schema/users";
 import { checkPassword } from "@/lib/server/auth/check-password";
 import { withScope } from "@/lib/server/auth/scope";
 import { readStory } from "@/lib/server/diagnoses/story";
-import { listEngines, listHourReadings } from "@/lib/server/engines/queries";
+import { listEngines } from "@/lib/server/engines/queries";
+import { listHourReadings } from "@/lib/server/engines/readings";
 import { listLog, listRepeats } from "@/lib/server/log/queries";
 import { listBoats } from "@/lib/server/boats/queries";
 import { loadShippedTree } from "@/lib/server/trees/load-shipped-tree";
@@ -62,7 +63,7 @@ describe("the demo fleet", () => {
 
   test("has hours that fit together", async () => {
     for (const engine of await asOwner(listEngines)) {
-      const readings = await asOwner((scope) => listHourReadings(scope, engine.id));
+      const readings = await asOwner(async (scope) => (await listHourReadings(scope, engine.id)).items);
       expect(readings.filter((reading) => reading.doubtful)).toEqual([]);
     }
   });

@@ -1,4 +1,4 @@
-import { eq } from "drizzle-orm";
+import { eq, isNotNull } from "drizzle-orm";
 import fc from "fast-check";
 import { uuidv7 } from "uuidv7";
 import { beforeAll, describe, expect, test } from "vitest";
@@ -10,8 +10,8 @@ import { withScope } from "@/lib/server/auth/scope";
 import { recordEvents, type PostedEvent } from "@/lib/server/diagnoses/commands";
 import { getDiagnosis, getEvents, listDiagnoses } from "@/lib/server/diagnoses/queries";
 import { readStory } from "@/lib/server/diagnoses/story";
-import { listHourReadings } from "@/lib/server/engines/queries";
-import { rebuildLog } from "@/lib/server/log/commands";
+import { listHourReadings } from "@/lib/server/engines/readings";
+import { rebuildLog, rebuildLogs } from "@/lib/server/log/rebuild-logs";
 import { getLogEntry } from "@/lib/server/log/queries";
 import { afloat, phoneOf, shipTree, type Afloat } from "../support/afloat";
 import { testDatabase } from "../support/database";
@@ -75,7 +75,12 @@ describe("events from an outbox", () => {
       minutes: 40,
       by: "Ines",
     });
-    const readings = await withScope(ines.person, ines.fleetId, "fleet:read", (scope) => listHourReadings(scope, ines.engineId));
+    const readings = await withScope(
+      ines.person,
+      ines.fleetId,
+      "fleet:read",
+      async (scope) => (await listHourReadings(scope, ines.engineId)).items,
+    );
     expect(readings.map((r) => [r.id, r.reading])).toContainEqual([events[5]?.id, 100]);
   });
 
@@ -210,7 +215,8 @@ describe("two phones on one diagnosis", () => {
     await post(id, [phone.write("taken-up-again", {})]);
     expect(await diagnosis(id)).toMatchObject({ outcome: null, endedAt: null });
     expect(await entry(id)).toMatchObject({ outcome: null, cause: null });
-    const readings = () => withScope(ines.person, ines.fleetId, "fleet:read", (scope) => listHourReadings(scope, ines.engineId));
+    const readings = () =>
+      withScope(ines.person, ines.fleetId, "fleet:read", async (scope) => (await listHourReadings(scope, ines.engineId)).items);
     expect((await readings()).map((r) => r.id)).not.toContain(events[5]?.id);
     const again = phone.write("ended", { outcome: "held", causeInWords: "  Rag in the tank outlet ", engineHours: 151, parts: [] });
     await post(id, [again]);
@@ -241,6 +247,21 @@ describe("what is worked out from events", () => {
     expect(await withScope(who.person, who.fleetId, "log:write", rebuildLog)).toBe(3);
     expect(await read()).toEqual(before);
     expect(await lines()).toEqual(entries);
+  });
+
+  test("comes back for every fleet at once, and repairs written in by hand stay", async () => {
+    const fleets = [await afloat("Sina"), await afloat("Tore")];
+    for (const who of fleets) {
+      const { id, events } = wholeRun(who, 12);
+      await post(id, events, who);
+    }
+    const lines = () => owner.select().from(logEntries).orderBy(logEntries.fleetId, logEntries.id);
+    const before = await lines();
+    await owner.update(logEntries).set({ causeTitle: "nonsense" }).where(isNotNull(logEntries.diagnosisId));
+    const done = await rebuildLogs();
+    expect(done.fleets).toBeGreaterThanOrEqual(2);
+    expect(done.diagnoses).toBe(before.filter((line) => line.diagnosisId !== null).length);
+    expect(await lines()).toEqual(before);
   });
 
   test("the story tells what was asked, why, and what was believed then", async () => {

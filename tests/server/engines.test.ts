@@ -4,7 +4,8 @@ import { withScope } from "@/lib/server/auth/scope";
 import { addBoat, changeBoat, removeBoat } from "@/lib/server/boats/commands";
 import { getBoat, listBoats } from "@/lib/server/boats/queries";
 import { addEngine, addHourReading, changeEngine } from "@/lib/server/engines/commands";
-import { getEngine, listEngines, listHourReadings } from "@/lib/server/engines/queries";
+import { getEngine, listEngines } from "@/lib/server/engines/queries";
+import { listHourReadings } from "@/lib/server/engines/readings";
 import { addEngineTo, afloat, type Afloat } from "../support/afloat";
 import { testDatabase } from "../support/database";
 
@@ -128,7 +129,7 @@ describe("the hour meter", () => {
 
   test("an older reading may be written in later", async () => {
     await read(ines.engineId, 110, 5);
-    const readings = await inFleet(ines, "fleet:read", (scope) => listHourReadings(scope, ines.engineId));
+    const readings = await inFleet(ines, "fleet:read", async (scope) => (await listHourReadings(scope, ines.engineId)).items);
     expect(readings.map((r) => [r.reading, r.hours, r.doubtful])).toEqual([
       [25, 135, false],
       [20, 130, false],

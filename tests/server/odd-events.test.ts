@@ -6,7 +6,7 @@ import { recordEvents, type PostedEvent } from "@/lib/server/diagnoses/commands"
 import { getDiagnosis, getEvents, listDiagnoses } from "@/lib/server/diagnoses/queries";
 import { readStory } from "@/lib/server/diagnoses/story";
 import { addHourReading } from "@/lib/server/engines/commands";
-import { listHourReadings } from "@/lib/server/engines/queries";
+import { listHourReadings } from "@/lib/server/engines/readings";
 import { logRepair } from "@/lib/server/log/commands";
 import { getLogEntry } from "@/lib/server/log/queries";
 import { addEngineTo, afloat, phoneOf, shipTree, type Afloat } from "../support/afloat";
@@ -27,7 +27,7 @@ beforeAll(async () => {
 const post = (diagnosisId: string, events: readonly object[]) =>
   withScope(ines.person, ines.fleetId, "diagnosis:write", (scope) => recordEvents(scope, diagnosisId, events as PostedEvent[]));
 const read = <T>(run: Parameters<typeof withScope<"diagnosis:read", T>>[3]) => withScope(ines.person, ines.fleetId, "diagnosis:read", run);
-const readings = () => read((scope) => listHourReadings(scope, ines.engineId));
+const readings = () => read(async (scope) => (await listHourReadings(scope, ines.engineId)).items);
 const write = (id: string, reading: number) =>
   withScope(ines.person, ines.fleetId, "engine:write", (scope) =>
     addHourReading(scope, { id, engineId: ines.engineId, reading, readAt: "2026-05-01T00:00:00.000Z", reset: false }),
@@ -121,7 +121,7 @@ describe("an outcome", () => {
     };
     await end("2026-05-01T00:00:00.000Z", 900);
     await end("2026-05-02T00:00:00.000Z", 5, { meterReset: true });
-    const found = await withScope(cora.person, cora.fleetId, "fleet:read", (s) => listHourReadings(s, cora.engineId));
+    const found = await withScope(cora.person, cora.fleetId, "fleet:read", async (s) => (await listHourReadings(s, cora.engineId)).items);
     expect(found).toMatchObject([
       { reading: 5, reset: true, hours: 900, doubtful: false },
       { reading: 900, reset: false },
@@ -153,7 +153,8 @@ describe("a diagnosis", () => {
     const other = uuidv7();
     const features = Object.fromEntries(many.map((i) => [`feature-${i}`, "yes"]));
     const begun = phoneOf(other).begin(ines.engineId, treeId, { profile: { features, figures: {}, healthy: {} } });
-    await expect(post(other, [begun])).rejects.toMatchObject({ status: 404 });
+    expect(await post(other, [begun])).toMatchObject([{ result: "rejected", because: expect.stringMatching(/more than an engine has/) }]);
+    await expect(read((scope) => getDiagnosis(scope, other))).rejects.toMatchObject({ status: 404 });
   });
 });
 

@@ -1,12 +1,13 @@
+import net from "node:net";
 import { sql } from "drizzle-orm";
-import { beforeAll, beforeEach, describe, expect, test } from "vitest";
+import { beforeAll, beforeEach, describe, expect, test, vi } from "vitest";
 import { identityDatabase, type Database } from "@/db/client";
 import type { Role } from "@/lib/core/access/roles";
 import { findPerson, type Person } from "@/lib/server/auth/person";
 import { withScope } from "@/lib/server/auth/scope";
 import { acceptAsNew, acceptInvitation } from "@/lib/server/people/accept-invitation";
 import { changeRoles, leaveFleet, removePerson, renameFleet } from "@/lib/server/people/commands";
-import { invite, withdrawInvitation } from "@/lib/server/people/invite";
+import { invite, sendAgain, withdrawInvitation } from "@/lib/server/people/invite";
 import { fleetsOf, getFleet, listInvitations, listPeople, peekInvitation } from "@/lib/server/people/queries";
 import { testDatabase } from "../support/database";
 import { testMailbox } from "../support/mailbox";
@@ -125,15 +126,53 @@ describe("invitations", () => {
     expect(left.map((invitation) => invitation.email)).toEqual(["wanted@example.test"]);
   });
 
-  test("whose mail could not be sent are not kept, so that asking again sends it", async () => {
+  test("whose mail could not be sent stand and say so; asking again sends them, with a new link", async () => {
     const { owner, fleetId } = await crew();
     const id = crypto.randomUUID();
     const reachable = process.env.SMTP_URL;
     process.env.SMTP_URL = "smtp://127.0.0.1:1";
-    await expect(as(owner, fleetId).invite("unsent@example.test", ["skipper"], id)).rejects.toThrow();
+    const told = vi.spyOn(console, "error").mockImplementation(() => undefined);
+    expect(await as(owner, fleetId).invite("unsent@example.test", ["skipper"], id)).toMatchObject({ sentAt: null });
+    expect(told).toHaveBeenCalledOnce();
+    told.mockRestore();
     process.env.SMTP_URL = reachable;
-    await as(owner, fleetId).invite("unsent@example.test", ["skipper"], id);
+    const waiting = () => withScope(owner, fleetId, "people:write", listInvitations);
+    expect(await waiting()).toMatchObject([{ id, sentAt: null }]);
+    expect(await as(owner, fleetId).invite("unsent@example.test", ["skipper"], id)).toMatchObject({ sentAt: expect.any(String) });
     expect(box.mails.map((mail) => mail.to)).toEqual(["unsent@example.test"]);
+    expect(await waiting()).toMatchObject([{ id, sentAt: expect.any(String) }]);
+    const first = box.tokenFor("unsent@example.test", "invitation");
+    await withScope(owner, fleetId, "people:write", (s) => sendAgain(s, id));
+    expect(await peekInvitation(first)).toBeNull();
+    expect(await peekInvitation(box.tokenFor("unsent@example.test", "invitation"))).toMatchObject({ email: "unsent@example.test" });
+  });
+
+  test("hold no transaction open while a mail server takes its time, and send nothing for what was rolled back", async () => {
+    const { owner, fleetId } = await crew();
+    let answer = () => {};
+    const silent = net.createServer((socket) => void (answer = () => socket.destroy()));
+    await new Promise<void>((resolve) => silent.listen(0, "127.0.0.1", resolve));
+    const reachable = process.env.SMTP_URL;
+    process.env.SMTP_URL = `smtp://127.0.0.1:${(silent.address() as net.AddressInfo).port}`;
+    const told = vi.spyOn(console, "error").mockImplementation(() => undefined);
+    const connected = new Promise((resolve) => silent.once("connection", resolve));
+    const sending = as(owner, fleetId).invite("slow@example.test", ["skipper"]);
+    await connected;
+    const { rows } = await db.execute(
+      sql`select state from pg_stat_activity where datname = current_database() and state like 'idle in transaction%'`,
+    );
+    expect(rows).toEqual([]);
+    answer();
+    await sending;
+    silent.close();
+    told.mockRestore();
+    process.env.SMTP_URL = reachable;
+    const failing = withScope(owner, fleetId, "people:write", async (s) => {
+      await invite(s, { id: crypto.randomUUID(), email: "rolled-back@example.test", roles: ["skipper"] });
+      throw new Error("after it");
+    });
+    await expect(failing).rejects.toThrow("after it");
+    expect(box.mails.filter((mail) => mail.to === "rolled-back@example.test")).toEqual([]);
   });
 
   test("an owner of one fleet cannot withdraw another's", async () => {

@@ -87,15 +87,27 @@ describe("with a password", () => {
     expect(await browser.person()).toBeNull();
   });
 
-  test("each sign-in is a session of its own", async () => {
+  test("each sign-in is a session of its own, and ends the one that this browser had, whoever's it was", async () => {
+    const [browser, phone] = [new Browser(), new Browser()];
+    await phone.signIn("password", { email, password: PASSWORD });
+    await browser.signIn("password", { email, password: PASSWORD });
+    const first = (await browser.person())?.sessionId ?? "";
+    expect(await findPerson(first)).not.toBeNull();
+    await browser.signIn("password", { email, password: PASSWORD });
+    const second = (await browser.person())?.sessionId ?? "";
+    expect(second).not.toBe(first);
+    expect(await findPerson(first)).toBeNull();
+    await browser.signIn("link", { token: await issueToken("sign-in", email, userId) });
+    expect(await browser.person()).toMatchObject({ userId });
+    expect(await findPerson(second)).toBeNull();
+    expect(await phone.person()).not.toBeNull();
+  });
+
+  test("a refused one leaves the session that was there", async () => {
     const browser = new Browser();
     await browser.signIn("password", { email, password: PASSWORD });
-    const first = (await browser.person())?.sessionId;
-    await browser.signIn("password", { email, password: PASSWORD });
-    const second = (await browser.person())?.sessionId;
-    expect(first).toBeTruthy();
-    expect(second).toBeTruthy();
-    expect(second).not.toBe(first);
+    await browser.signIn("password", { email, password: "not this one" });
+    expect(await browser.person()).not.toBeNull();
   });
 });
 

@@ -5,8 +5,10 @@ import * as events from "./fleets/[fleetId]/diagnoses/[diagnosisId]/events/route
 import * as diagnosis from "./fleets/[fleetId]/diagnoses/[diagnosisId]/route";
 import * as story from "./fleets/[fleetId]/diagnoses/[diagnosisId]/story/route";
 import * as diagnoses from "./fleets/[fleetId]/diagnoses/route";
+import * as reading from "./fleets/[fleetId]/engines/[engineId]/hours/[readingId]/route";
 import * as hours from "./fleets/[fleetId]/engines/[engineId]/hours/route";
 import * as engineLog from "./fleets/[fleetId]/engines/[engineId]/log/route";
+import * as repair from "./fleets/[fleetId]/engines/[engineId]/repairs/[repairId]/route";
 import * as repairs from "./fleets/[fleetId]/engines/[engineId]/repairs/route";
 import * as engineRepeats from "./fleets/[fleetId]/engines/[engineId]/repeats/route";
 import * as engine from "./fleets/[fleetId]/engines/[engineId]/route";
@@ -39,7 +41,9 @@ export const routes: Routes = {
   "/fleets/{fleetId}/engines": engines,
   "/fleets/{fleetId}/engines/{engineId}": engine,
   "/fleets/{fleetId}/engines/{engineId}/hours": hours,
+  "/fleets/{fleetId}/engines/{engineId}/hours/{readingId}": reading,
   "/fleets/{fleetId}/engines/{engineId}/repairs": repairs,
+  "/fleets/{fleetId}/engines/{engineId}/repairs/{repairId}": repair,
   "/fleets/{fleetId}/engines/{engineId}/log": engineLog,
   "/fleets/{fleetId}/engines/{engineId}/repeats": engineRepeats,
   "/fleets/{fleetId}/log": log,

@@ -5,7 +5,13 @@ import { sameValue } from "@/lib/core/tree/same-value";
 import type { FaultTree } from "@/lib/core/tree/schema";
 
 /** What the server last said of the draft. */
-export type SavedDraft = { id: string; version: number; document: FaultTree };
+export type SavedDraft = {
+  id: string;
+  version: number;
+  document: FaultTree;
+  /** The shipped version whose content it has taken up. */
+  takenUp: string;
+};
 
 /**
  * One person's work on the fleet's draft: a value, so that it can be kept on
@@ -96,4 +102,10 @@ export function tookUp(session: DraftSession, base: FaultTree, newer: { id: stri
     collisions: [...session.collisions, ...collisions],
     takesUp: newer.id,
   };
+}
+
+/** Takes in what an earlier draft still had to save when it was closed. */
+export function broughtOver(session: DraftSession, earlier: DraftSession): DraftSession {
+  const { tree, collisions } = mergeTrees(earlier.saved.document, earlier.tree, session.tree);
+  return { ...edited(session, tree, "Brought over from the draft before"), collisions: [...session.collisions, ...collisions] };
 }

@@ -8,6 +8,7 @@ import { Observable } from "../observable";
 import {
   afterSave,
   beginSession,
+  broughtOver,
   chosen,
   edited,
   joined,
@@ -97,6 +98,12 @@ export class Workbench {
     if (unsaved(this.session.get())) this.#later(0);
   }
 
+  /** Published or given up: what this device kept of it has done its work. */
+  async forget(): Promise<void> {
+    this.close();
+    await this.#keeper.forget(this.session.get().saved.id).catch((failure: unknown) => console.error(failure));
+  }
+
   /** Stops trying; what waits stays on this device. */
   close(): void {
     if (this.#timer) clearTimeout(this.#timer);
@@ -160,7 +167,7 @@ export class Workbench {
   }
 }
 
-const savedOf = ({ id, version, document }: TreeDraft): SavedDraft => ({ id, version, document });
+const savedOf = ({ id, version, document, takenUp }: TreeDraft): SavedDraft => ({ id, version, document, takenUp });
 
 /**
  * Opens the fleet's draft, or begins it from `versionId` where there is none,
@@ -179,9 +186,21 @@ export async function openWorkbench(fleetId: string, keeper: SessionKeeper, vers
   return resumeWorkbench(fleetId, keeper, answer);
 }
 
-/** As openWorkbench, with the draft at hand. */
+/**
+ * As openWorkbench, with the draft at hand. Work on an earlier draft that the
+ * server never got, since that one was published or given up, is brought into
+ * this one as an edit that can be undone.
+ */
 export async function resumeWorkbench(fleetId: string, keeper: SessionKeeper, draft: TreeDraft): Promise<Workbench> {
   const kept = await keeper.read(draft.id).catch(() => null);
-  const session = kept === null ? beginSession(savedOf(draft)) : kept.saved.version === draft.version ? kept : joined(kept, savedOf(draft));
+  let session = kept === null ? beginSession(savedOf(draft)) : kept.saved.version === draft.version ? kept : joined(kept, savedOf(draft));
+  for (const id of await keeper.draftIds().catch(() => [])) {
+    const earlier = id === draft.id ? null : await keeper.read(id);
+    if (earlier && unsaved(earlier)) session = broughtOver(session, earlier);
+    if (earlier) {
+      await keeper.keep(session);
+      await keeper.forget(id);
+    }
+  }
   return new Workbench(fleetId, keeper, session, draft.savedAt);
 }

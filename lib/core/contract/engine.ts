@@ -1,6 +1,7 @@
 import * as z from "zod";
 import { EngineFigure, HealthyReading, Key } from "../tree/schema";
 import { FIGURE_LIMITS, HEALTHY_LIMITS, type FigureLimits } from "./figure-limits";
+import { Correction } from "./correction";
 import { Id, Moment } from "./id";
 
 /** As many features as any tree will ask of. */
@@ -102,6 +103,32 @@ export const HourReading = z.strictObject({
 });
 export type HourReading = z.infer<typeof HourReading>;
 
+/** A reading as it should have been written. */
+export const ReadingChange = HourReading.omit({ id: true, engineId: true });
+export type ReadingChange = z.infer<typeof ReadingChange>;
+
 /** A reading in a list. `hours`: hours since new then. `doubtful`: it does not fit the others, so it is not counted. */
-export const ListedReading = HourReading.extend({ hours: z.number().nullable(), doubtful: z.boolean() });
+export const ListedReading = HourReading.extend({
+  hours: z.number().nullable(),
+  doubtful: z.boolean(),
+  /** More than 1: it has been corrected. What If-Match names. */
+  version: z.number().int(),
+  /** The line of the log that it was written down with, and that it is corrected with: a repair, or a diagnosis' outcome. */
+  partOf: z.enum(["repair", "diagnosis"]).nullable(),
+});
 export type ListedReading = z.infer<typeof ListedReading>;
+
+/** A reading with all that was ever written of it. */
+export const Reading = z.strictObject({
+  id: Id,
+  engineId: Id,
+  reading: z.number(),
+  readAt: Moment,
+  reset: z.boolean(),
+  by: z.string(),
+  version: z.number().int(),
+  takenBackAt: Moment.nullable(),
+  /** Oldest first. */
+  corrections: z.array(Correction(ReadingChange)),
+});
+export type Reading = z.infer<typeof Reading>;

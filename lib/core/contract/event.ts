@@ -2,6 +2,7 @@ import * as z from "zod";
 import { EngineFigure, Key, Situation, Who } from "../tree/schema";
 import { EngineProfile } from "./engine";
 import { Id, Moment } from "./id";
+import { KeptText } from "./kept-text";
 
 /**
  * What happens in a diagnosis, as the devices write it down: answers, never
@@ -10,7 +11,7 @@ import { Id, Moment } from "./id";
  */
 
 /** Why a cause's weight was moved for this engine before the first question. */
-export const Multiplier = z.strictObject({ cause: Key, times: z.number().min(0.2).max(5), reason: z.string().max(200) });
+export const Multiplier = z.strictObject({ cause: Key, times: z.number().min(0.2).max(5), reason: KeptText.max(200) });
 export type Multiplier = z.infer<typeof Multiplier>;
 
 export const Answer = z.union([
@@ -34,20 +35,20 @@ export const OutcomePayload = z.strictObject({
   outcome: OutcomeKind,
   cause: Key.optional(),
   /** In the person's words, where the tree does not have the cause. */
-  causeInWords: z.string().trim().max(500).optional(),
+  causeInWords: KeptText.trim().max(500).optional(),
   remedy: Key.optional(),
-  remedyInWords: z.string().trim().max(500).optional(),
+  remedyInWords: KeptText.trim().max(500).optional(),
   /** How the cure was proved; absent: it was not. */
-  proof: z.string().trim().max(500).optional(),
+  proof: KeptText.trim().max(500).optional(),
   engineHours: z.number().nonnegative().max(200_000).optional(),
   /** The meter was replaced or set back since the last reading: a lower figure is meant. */
   meterReset: z.literal(true).optional(),
   minutes: z.number().nonnegative().max(100_000).optional(),
   parts: z
-    .array(z.strictObject({ key: Key.optional(), title: z.string().trim().min(1).max(200), quantity: z.number().positive().max(1000) }))
+    .array(z.strictObject({ key: Key.optional(), title: KeptText.trim().min(1).max(200), quantity: z.number().positive().max(1000) }))
     .max(100)
     .default([]),
-  note: z.string().max(4000).optional(),
+  note: KeptText.max(4000).optional(),
 });
 export type OutcomePayload = z.infer<typeof OutcomePayload>;
 
@@ -60,20 +61,20 @@ const kinds = {
     person: Who,
     symptoms: z.array(Key).max(12),
     /** The complaint as typed. */
-    complaint: z.string().max(1000).optional(),
+    complaint: KeptText.max(1000).optional(),
     multipliers: z.array(Multiplier).max(500).default([]),
     callMinutes: z.number().positive().optional(),
     coreVersion: z.number().int(),
   }),
   "symptom-told": z.strictObject({ symptom: Key, present: z.boolean() }),
   "situation-changed": z.strictObject({ situation: Situation }),
-  answered: z.strictObject({ check: Key, answer: Answer, note: z.string().max(4000).optional(), photos: z.array(Id).max(12).default([]) }),
+  answered: z.strictObject({ check: Key, answer: Answer, note: KeptText.max(4000).optional(), photos: z.array(Id).max(12).default([]) }),
   "rule-answered": z.strictObject({ rule: Key, answer: z.enum(["yes", "no", "cleared"]) }),
   "remedy-tried": z.strictObject({
     remedy: Key,
     result: RemedyResult,
-    proof: z.string().max(500).optional(),
-    note: z.string().max(4000).optional(),
+    proof: KeptText.max(500).optional(),
+    note: KeptText.max(4000).optional(),
     photos: z.array(Id).max(12).default([]),
   }),
   /** The starter turned for so long; `ran`: the engine then ran, which clears the exhaust of water. */
@@ -81,9 +82,9 @@ const kinds = {
   "feature-told": z.strictObject({ feature: Key, option: Key }),
   "figure-told": z.strictObject({ figure: EngineFigure, value: z.number().positive() }),
   /** A tool or part that is not aboard. */
-  "not-aboard": z.strictObject({ item: z.string().min(1).max(200) }),
-  "runs-again": z.strictObject({ note: z.string().max(4000).optional() }),
-  noted: z.strictObject({ note: z.string().max(4000), photos: z.array(Id).max(12).default([]) }),
+  "not-aboard": z.strictObject({ item: KeptText.min(1).max(200) }),
+  "runs-again": z.strictObject({ note: KeptText.max(4000).optional() }),
+  noted: z.strictObject({ note: KeptText.max(4000), photos: z.array(Id).max(12).default([]) }),
   /** Takes back an event: an answer, a tried remedy, a rule. */
   "taken-back": z.strictObject({ event: Id }),
   /** Two devices answered one step at once; this one is right. */

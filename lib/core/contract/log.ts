@@ -1,5 +1,6 @@
 import * as z from "zod";
 import { Key } from "../tree/schema";
+import { Correction } from "./correction";
 import { Id, Moment } from "./id";
 import { OutcomeKind, OutcomePayload } from "./event";
 import { PageQuery } from "./page";
@@ -13,6 +14,10 @@ export const NewRepair = OutcomePayload.omit({ outcome: true }).extend({
   symptoms: z.array(Key).max(12).default([]),
 });
 export type NewRepair = z.infer<typeof NewRepair>;
+
+/** A repair as it should have been written: it takes the place of all that was said. */
+export const RepairChange = NewRepair.omit({ id: true, engineId: true });
+export type RepairChange = z.infer<typeof RepairChange>;
 
 /** One line of an engine's log: the outcome of a diagnosis, or a repair. A projection that can be rebuilt. */
 export const LogEntry = z.strictObject({
@@ -42,8 +47,40 @@ export const LogEntry = z.strictObject({
   heldHours: z.number().nullable(),
   /** Was this cause here before on this engine? How many times, this one counted. */
   timesHere: z.number().int().min(0),
+  /** Of a repair: counts up with each correction; what If-Match names. Absent on a diagnosis' line. */
+  version: z.number().int().optional(),
 });
 export type LogEntry = z.infer<typeof LogEntry>;
+
+/** What a repair said before it was corrected. */
+const RepairThen = z.strictObject({
+  doneAt: Moment,
+  outcome: OutcomeKind.nullable(),
+  symptoms: LogEntry.shape.symptoms,
+  cause: LogEntry.shape.cause,
+  remedy: LogEntry.shape.remedy,
+  proof: z.string().nullable(),
+  /** What the meter showed, where it was written down. */
+  meterShowed: z.number().nullable(),
+  meterReset: z.boolean(),
+  minutes: z.number().nullable(),
+  parts: LogEntry.shape.parts,
+  note: z.string().nullable(),
+});
+export type RepairThen = z.infer<typeof RepairThen>;
+
+/** A repair with all that was ever written of it. */
+export const Repair = z.strictObject({
+  entry: LogEntry,
+  /** As it was typed in; hours since new stand in `entry`. */
+  meterShowed: z.number().nullable(),
+  meterReset: z.boolean(),
+  version: z.number().int(),
+  takenBackAt: Moment.nullable(),
+  /** Oldest first. */
+  corrections: z.array(Correction(RepairThen)),
+});
+export type Repair = z.infer<typeof Repair>;
 
 /** The same cause again on the same engine after a cure: a fact, said from the second case. */
 export const RepeatFault = z.strictObject({

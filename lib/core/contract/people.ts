@@ -30,6 +30,8 @@ export const Invitation = z.strictObject({
   invitedByName: z.string(),
   createdAt: Moment,
   expiresAt: Moment,
+  /** When its mail was handed over; null while it is on its way, or where it could not be sent: send the invitation again. */
+  sentAt: Moment.nullable(),
 });
 export type Invitation = z.infer<typeof Invitation>;
 

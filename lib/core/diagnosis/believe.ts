@@ -23,6 +23,8 @@ export type Belief = {
   readonly two: number;
   /** Both causes of each pair, in the order of pairAt(): there now, or until one of them was put right. Empty where no pairs are reckoned with. */
   readonly pairs: Float64Array;
+  /** Once one of two was put right: that it was this cause. */
+  readonly putRight?: Float64Array;
 };
 
 /**

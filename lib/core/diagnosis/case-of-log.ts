@@ -33,6 +33,9 @@ export function caseOfLog(log: readonly DiagnosisEvent[], titles: Pick<FaultTree
       if ("finding" in answer) return [{ check, finding: answer.finding, when: "after" }];
       return "value" in answer ? [{ check, value: answer.value, unit: answer.unit, when: "after" }] : [];
     }),
+    tried: [...state.remedies.values()].flatMap(({ payload: { remedy, result } }) =>
+      result === "no-change" || result === "better" ? [{ remedy, result, when: "after" as const }] : [],
+    ),
     causes: [cause],
     alsoAccept: [],
     source: `Logged and proved, ${ended.madeAt.slice(0, 10)}`,

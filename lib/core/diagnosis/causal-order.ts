@@ -13,7 +13,7 @@ export type CausalOrder = {
 
 /**
  * Orders a log by who knew what: device and sequence, and the heads each event
- * says it had seen. The same for any order of arrival and any repeats. Rules [F1], [F2].
+ * says it had seen. The same for any order of arrival and any repeats. Rules [F1], [F2], [F9].
  */
 export function causalOrder(log: readonly DiagnosisEvent[]): CausalOrder {
   const events = distinct(log);
@@ -59,10 +59,12 @@ function clocksOf(events: readonly DiagnosisEvent[]): ReadonlyMap<string, Clock>
       if (from) for (const [device, sequence] of clockOf(from)) raise(device, sequence);
     };
     learn(lastUpTo(event.device, event.sequence - 1));
-    for (const [device, sequence] of Object.entries(event.seen).sort((a, b) => compare(a[0], b[0]))) {
+    for (const [device, claimed] of Object.entries(event.seen).sort((a, b) => compare(a[0], b[0]))) {
       if (device === event.device) continue;
-      raise(device, sequence);
-      learn(lastUpTo(device, sequence));
+      const head = believedHead(event, byDevice.get(device) ?? [], claimed);
+      if (!head) continue;
+      raise(device, head.sequence);
+      learn(head);
     }
     clock.set(event.device, event.sequence);
     busy.delete(event.id);
@@ -71,6 +73,19 @@ function clocksOf(events: readonly DiagnosisEvent[]): ReadonlyMap<string, Clock>
   };
   for (const event of [...events].sort((a, b) => a.sequence - b.sequence || byPlace(a, b))) clockOf(event);
   return done;
+}
+
+/**
+ * The newest event of another device that this one is believed to have seen. A
+ * head that the log does not have counts up to what there is, and never to an
+ * event whose device says it saw this one before: a phone cannot claim what is
+ * still to be said. Rule [F9].
+ */
+function believedHead(event: DiagnosisEvent, theirs: readonly DiagnosisEvent[], claimed: number): DiagnosisEvent | undefined {
+  const upTo = theirs.filter(({ sequence }) => sequence <= claimed);
+  if (upTo.at(-1)?.sequence === claimed) return upTo.at(-1);
+  const answer = upTo.findIndex(({ seen }) => (seen[event.device] ?? 0) >= event.sequence);
+  return answer < 0 ? upTo.at(-1) : upTo[answer - 1];
 }
 
 const sum = (clock: Clock | undefined): number => [...(clock?.values() ?? [])].reduce((total, sequence) => total + sequence, 0);

@@ -3,6 +3,8 @@ import type { EngineProfile } from "../contract/engine";
 import type { Situation } from "../tree/schema";
 import { causalOrder, type CausalOrder } from "./causal-order";
 import { liveEvents } from "./live-events";
+import type { SymptomTold } from "./evidence";
+import { partCureOf, type PartCure } from "./part-cure";
 import { settle, stepOf, type StepEvent } from "./settle";
 
 /** Where a diagnosis stands, as its log tells it: no tree is needed to know. */
@@ -13,11 +15,13 @@ export type DiagnosisState = {
   readonly situation: Situation;
   /** Features and figures told since it began stand over those it began with. */
   readonly profile: EngineProfile;
-  /** In the order first told. */
-  readonly symptoms: readonly { readonly symptom: string; readonly present: boolean }[];
+  /** In the order first told; `present` as things stand now. */
+  readonly symptoms: readonly SymptomTold[];
   readonly answers: ReadonlyMap<string, EventOf<"answered">>;
   readonly remedies: ReadonlyMap<string, EventOf<"remedy-tried">>;
   readonly conflicts: readonly (readonly StepEvent[])[];
+  /** The remedy that put right one of two faults; null while none did. */
+  readonly partCure: PartCure | null;
   readonly notAboard: readonly string[];
   readonly ended: EventOf<"ended"> | null;
   readonly runsAgain: boolean;
@@ -25,7 +29,7 @@ export type DiagnosisState = {
 
 /**
  * Folds a log into a state. Sent twice, late, out of order or from several
- * devices, the same events give the same state. Rules [F1]-[F7].
+ * devices, the same events give the same state. Rules [F1]-[F9].
  */
 export function fold(log: readonly DiagnosisEvent[]): DiagnosisState {
   const order = causalOrder(log);
@@ -35,13 +39,15 @@ export function fold(log: readonly DiagnosisEvent[]): DiagnosisState {
   const begun = of("begun")[0] ?? null;
   const answers = settled(of("answered"), of("picked"), order);
   const remedies = settled(of("remedy-tried"), of("picked"), order);
+  const partCure = partCureOf([...remedies.stands.values()], of("symptom-told"), order);
   return {
     order,
     live,
     begun,
     situation: of("situation-changed").at(-1)?.payload.situation ?? begun?.payload.situation ?? "alongside",
     profile: profileOf(begun, of("feature-told"), of("figure-told")),
-    symptoms: symptomsOf(begun, of("symptom-told")),
+    symptoms: symptomsOf(begun, of("symptom-told"), partCure),
+    partCure,
     answers: answers.stands,
     remedies: remedies.stands,
     conflicts: [...answers.conflicts, ...remedies.conflicts],
@@ -77,10 +83,19 @@ function profileOf(
   };
 }
 
-function symptomsOf(begun: EventOf<"begun"> | null, told: readonly EventOf<"symptom-told">[]) {
-  const present = new Map<string, boolean>((begun?.payload.symptoms ?? []).map((symptom) => [symptom, true]));
-  for (const { payload } of told) present.set(payload.symptom, payload.present);
-  return [...present].map(([symptom, is]) => ({ symptom, present: is }));
+function symptomsOf(
+  begun: EventOf<"begun"> | null,
+  told: readonly EventOf<"symptom-told">[],
+  partCure: PartCure | null,
+): readonly SymptomTold[] {
+  const before = new Map<string, boolean>((begun?.payload.symptoms ?? []).map((symptom) => [symptom, true]));
+  const left = new Map<string, boolean>();
+  for (const event of told) (partCure?.isLeft(event) ? left : before).set(event.payload.symptom, event.payload.present);
+  return [...new Set([...before.keys(), ...left.keys()])].map((symptom) => {
+    const now = left.get(symptom);
+    const first = before.get(symptom) ?? null;
+    return now === undefined ? { symptom, present: first === true } : { symptom, present: now, left: { before: first } };
+  });
 }
 
 /** The last end that nobody who knew of it has taken up again. */

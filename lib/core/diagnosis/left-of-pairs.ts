@@ -18,6 +18,7 @@ export function leftOfPairs(model: Model, told: Told, alone: Float64Array, pairs
   const { gone, shows, stays, unknownStays } = eachOf(model, told);
   const left = Float64Array.from(alone);
   const both = new Float64Array(pairs.length);
+  const putRight = new Float64Array(causes);
   let unknown = 0;
   let two = 0;
   for (let a = 0, at = 0; a < causes; a++)
@@ -28,6 +29,8 @@ export function leftOfPairs(model: Model, told: Told, alone: Float64Array, pairs
       left[a] = left[a]! + leavesA;
       left[b] = left[b]! + leavesB;
       both[at] = leavesA + leavesB;
+      putRight[a] = putRight[a]! + leavesB;
+      putRight[b] = putRight[b]! + leavesA;
       two += both[at]!;
       unknown += weight * (gone[b]! * shows[a]! + gone[a]! * shows[b]!);
     }
@@ -38,7 +41,7 @@ export function leftOfPairs(model: Model, told: Told, alone: Float64Array, pairs
   for (const one of left) total += one;
   const share = (weight: number): number => weight / total;
   const shares = left.map(share);
-  return { shares, alone: alone.map(share), marginals: shares, two: two / total, pairs: both.map(share) };
+  return { shares, alone: alone.map(share), marginals: shares, two: two / total, pairs: both.map(share), putRight: putRight.map(share) };
 }
 
 /** For each cause the chance of what was told, if it was put right, and if it is what is left: `shows` of symptoms alone, `stays` of everything. */

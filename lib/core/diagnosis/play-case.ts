@@ -38,7 +38,8 @@ export function playCase(tree: FaultTree, known: KnownCase, person: Who): Played
     steps.push({ kind: step.kind, key: step.key, minutes: step.minutes });
     if (step.kind === "call") return { minutes: minutes(), end: "called", steps };
     if (step.kind === "check") {
-      log.push({ kind: "answered", payload: { check: step.key, answer: answerOf(known, step.key) ?? { cannotTell: true }, photos: [] } });
+      const answer = ofWhatIsLeft(tree, known, open, step.key) ? answerOf(known, step.key) : null;
+      log.push({ kind: "answered", payload: { check: step.key, answer: answer ?? { cannotTell: true }, photos: [] } });
       continue;
     }
     const cured = curedBy(tree, open, step.key);
@@ -48,6 +49,12 @@ export function playCase(tree: FaultTree, known: KnownCase, person: Who): Played
     log.push({ kind: "remedy-tried", payload: { remedy: step.key, result: cured.length > 0 ? "better" : "no-change", photos: [] } });
   }
   throw new Error(`the case "${known.key}" did not end`);
+}
+
+/** A case was told of all its causes at once: what only those already put right would show is not seen again. */
+function ofWhatIsLeft(tree: FaultTree, known: KnownCase, open: ReadonlySet<string>, check: string): boolean {
+  const links = (keys: Iterable<string>): boolean => [...keys].some((key) => tree.causes.find((one) => one.key === key)?.gives[check]);
+  return open.size === known.causes.length || links(open) || !links(known.causes);
 }
 
 /** Causes still open that the remedy rather cures than not. */
@@ -78,5 +85,8 @@ function startOf(known: KnownCase, person: Who): Payload[] {
       kind: "answered",
       payload: { check, answer: answerOf(known, check) ?? { cannotTell: true }, photos: [] },
     })),
+    ...(known.tried ?? [])
+      .filter(({ when }) => when === "start")
+      .map(({ remedy, result }): Payload => ({ kind: "remedy-tried", payload: { remedy, result, photos: [] } })),
   ];
 }

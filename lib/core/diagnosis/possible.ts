@@ -26,23 +26,29 @@ export function possible(model: Model, evidence: Evidence, belief: Belief): Poss
   const counts = ofHundred([...named.map(({ share }) => share), folded.reduce((sum, { share }) => sum + share, 0), unknown]);
   const speaks = speaksOf(model, evidence, belief.marginals);
   return {
-    causes: named.map(({ index, share }, place) => causeShown(model, evidence, index, share, counts[place] ?? 0, speaks(index))),
+    causes: named.map(({ index, share }, place) => ({
+      ...causeShown(model, evidence, index, speaks(index)),
+      share,
+      of100: counts[place] ?? 0,
+      inAll: Math.round((belief.marginals[index] ?? 0) * 100),
+    })),
     others: { count: folded.length, of100: counts[named.length] ?? 0 },
     unknown: { share: unknown, of100: counts[named.length + 1] ?? 0 },
     two: twoShown(model, belief),
   };
 }
 
-/** "Perhaps two faults", and which: said only when the numbers do. Rule [X8]. */
-function twoShown(model: Model, { two, pairs }: Belief): Possible["two"] {
-  if (!(two > TWO_FROM)) return null;
+/** "Perhaps two faults", and which: said only when the numbers do, and no more once one of them was put right. Rule [X8]. */
+function twoShown(model: Model, { two, pairs, putRight }: Belief): Possible["two"] {
+  if (putRight || !(two > TWO_FROM)) return null;
   const [likeliest] = likeliestPairs(pairs, model.causes.length, 0, 1);
   const titled = (index: number): { key: string; title: string } => ({ key: model.causes[index]!.key, title: model.causes[index]!.title });
   return likeliest ? { share: two, of100: Math.round(two * 100), likeliest: [titled(likeliest.a), titled(likeliest.b)] } : null;
 }
 
-function causeShown(model: Model, evidence: Evidence, index: number, share: number, of100: number, speaks: Speaks): PossibleCause {
+function causeShown(model: Model, evidence: Evidence, index: number, speaks: Speaks): Omit<PossibleCause, "share" | "of100" | "inAll"> {
   const cause = model.causes[index]!;
+  const moved = model.setting.multipliers?.find((one) => one.cause === cause.key);
   const asked = new Set(evidence.findings.map(({ check }) => check));
   const notChecked = model.checks
     .filter((check) => cause.gives[check.key] !== undefined && check.offered && !asked.has(check.key))
@@ -55,8 +61,7 @@ function causeShown(model: Model, evidence: Evidence, index: number, share: numb
     key: cause.key,
     title: cause.title,
     is: cause.is,
-    share,
-    of100,
+    ofThisEngine: moved ? { times: moved.times, reason: moved.reason } : null,
     speaksFor: speaks.for,
     speaksAgainst: speaks.against,
     notChecked: notChecked.map(({ check }) => ({ check: check.key, title: check.title })),

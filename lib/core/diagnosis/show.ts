@@ -11,6 +11,7 @@ import type { Model } from "./model";
 import { nextStep } from "./next-step";
 import { possible } from "./possible";
 import { settingOf } from "./setting-of";
+import { putRightShown } from "./show-put-right";
 import { answerSaid, said } from "./show-said";
 import { showStep } from "./show-step";
 import { mayRunOn, rulesInForce, rulesToAsk, standingRules } from "./stop-rules";
@@ -52,6 +53,7 @@ export function view(tree: FaultTree, log: readonly DiagnosisEvent[], models: Co
     crankSeconds: crankSeconds(tree, state),
     outcome: state.ended ? { ...state.ended.payload, event: state.ended.id, at: state.ended.madeAt } : null,
     curedCause: cured,
+    putRight: putRightShown(model, state, belief),
     runsAgain: state.runsAgain,
   };
 }
@@ -74,6 +76,7 @@ const ruleShown = (rule: StopRule, runOn: boolean): RuleShown => ({
   says: rule.says,
   runOn,
   clearedWhen: rule.clearedWhen ?? null,
+  drawing: rule.drawing ?? null,
 });
 
 function conflictsShown(tree: FaultTree, state: DiagnosisState): DiagnosisView["conflicts"] {
@@ -91,7 +94,7 @@ function conflictsShown(tree: FaultTree, state: DiagnosisState): DiagnosisView["
 
 /** The likeliest cause that the remedy which cured has a link to. Rule [X7]. */
 function curedCause(model: Model, state: DiagnosisState, shares: Float64Array): DiagnosisView["curedCause"] {
-  const event = [...state.remedies.values()].findLast((tried) => tried.payload.result === "cured");
+  const event = [...state.remedies.values()].findLast((tried) => tried.payload.result === "cured" && tried !== state.partCure?.event);
   if (!event) return null;
   const key = event.payload.remedy;
   const remedy = model.tree.remedies.find((one) => one.key === key);

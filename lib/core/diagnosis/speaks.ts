@@ -55,9 +55,9 @@ function piecesOf(model: Model, evidence: Evidence): readonly Piece[] {
   });
   const remedies = evidence.remedies.flatMap((one) => {
     const remedy = model.remedies[model.remedyAt.get(one.remedy) ?? -1]?.remedy;
-    return remedy
-      ? [{ title: remedy.title, says: RESULTS_SAID[one.result], without: { ...evidence, remedies: without(evidence.remedies, one) } }]
-      : [];
+    const { curedOne, ...rest } = evidence;
+    const others = { ...(one.remedy === curedOne ? rest : evidence), remedies: without(evidence.remedies, one) };
+    return remedy ? [{ title: remedy.title, says: RESULTS_SAID[one.result], without: others }] : [];
   });
   return [...symptoms, ...findings, ...remedies];
 }

@@ -31,6 +31,13 @@ export type DiagnosisView = {
   outcome: (OutcomePayload & { event: string; at: string }) | null;
   /** The cause that a tried remedy cured, for the outcome form. */
   curedCause: { cause: string; remedy: string; temporary: boolean; proof: string | null } | null;
+  /** One of two faults was put right: by what, what it most likely was, and which of the symptoms told before are gone or not. null while none was. */
+  putRight: {
+    remedy: Named;
+    cause: Named | null;
+    gone: readonly string[];
+    still: readonly string[];
+  } | null;
   runsAgain: boolean;
 };
 
@@ -59,6 +66,8 @@ export type RuleShown = {
   /** The one exception holds: run on to safety where stopping now endangers people or boat. */
   runOn: boolean;
   clearedWhen: string | null;
+  /** As of a step. */
+  drawing: string | null;
 };
 
 /** `due`: to be asked now. `found`: in force by what was found or cranked, not by a yes. `event`: the answer that a change takes the place of. */
@@ -106,10 +115,10 @@ export type Possible = {
   others: { count: number; of100: number };
   unknown: { share: number; of100: number };
   /** "Perhaps two faults", with the likeliest two; null while the numbers do not say so, and once one of two was put right. */
-  two: { share: number; of100: number; likeliest: readonly [CauseNamed, CauseNamed] } | null;
+  two: { share: number; of100: number; likeliest: readonly [Named, Named] } | null;
 };
 
-export type CauseNamed = { key: string; title: string };
+export type Named = { key: string; title: string };
 
 export type PossibleCause = {
   key: string;
@@ -117,6 +126,10 @@ export type PossibleCause = {
   is: string;
   share: number;
   of100: number;
+  /** Of 100 engines like this, how many have it at all, alone or beside another fault. */
+  inAll: number;
+  /** What this engine's log says of it, and by how much that moved its weight; null where it says nothing. */
+  ofThisEngine: { times: number; reason: string } | null;
   speaksFor: readonly EvidenceShown[];
   speaksAgainst: readonly EvidenceShown[];
   notChecked: readonly { check: string; title: string }[];

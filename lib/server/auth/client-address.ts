@@ -3,8 +3,8 @@ import { isIPv6 } from "node:net";
 
 /**
  * The network address a request came from, as far as it can be known, for counting tries. Behind proxies that add to
- * X-Forwarded-For, TRUSTED_PROXIES says how many: what stands before theirs may be made up. With none set the first
- * entry is taken, which a caller can choose; the limits by account hold without it.
+ * X-Forwarded-For, TRUSTED_PROXIES says how many: what stands before theirs may be made up. With none, the header
+ * holds what the socket says and nothing else: scripts/lib/socket-address.mjs puts it there.
  */
 export function clientAddress(headers: Headers): string {
   const hops = (headers.get("x-forwarded-for") ?? "")

@@ -6,7 +6,7 @@ import { checkPassword } from "./check-password";
 import { clientAddress } from "./client-address";
 import { deviceName } from "./device-name";
 import { takeToken } from "./one-time-token";
-import { SESSION_SECONDS, siteIsSecure } from "./session-cookie";
+import { SESSION_SECONDS, sessionIdOf, siteIsSecure } from "./session-cookie";
 import { endSessionById, openSession, sessionLives } from "./sessions";
 
 /** Too many tries: `code` says from when it works again. Told the same for addresses nobody has. */
@@ -20,7 +20,13 @@ class TooManyTries extends CredentialsSignin {
 /** The moment in a refused sign-in, where there were too many tries. */
 export const waitUntil = (code: string | undefined): string | undefined => /^wait-until-(.+)$/.exec(code ?? "")?.[1];
 
-const signedIn = async (userId: string, headers: Headers) => ({ id: userId, sid: await openSession(userId, deviceName(headers)) });
+/** A browser holds one session: the one it had before, whoever's it was, ends with the new one. */
+async function signedIn(userId: string, headers: Headers) {
+  const before = await sessionIdOf(headers);
+  const sid = await openSession(userId, deviceName(headers));
+  if (before) await endSessionById(before);
+  return { id: userId, sid };
+}
 
 const nextAuth = NextAuth({
   session: { strategy: "jwt", maxAge: SESSION_SECONDS }, // the credentials provider works with no other

@@ -4,6 +4,7 @@ import { engines } from "@/db/schema/boats";
 import { diagnoses, diagnosisEvents } from "@/db/schema/diagnoses";
 import { logEntries } from "@/db/schema/log-entries";
 import { DiagnosisEvent, type EventOf, type EventReceipt } from "@/lib/core/contract/event";
+import { allKeepable } from "@/lib/core/contract/kept-text";
 import { Problem } from "@/lib/core/contract/problem";
 import type { FleetScope } from "@/lib/server/auth/scope";
 import { projectDiagnosis } from "@/lib/server/log/project-diagnosis";
@@ -43,6 +44,7 @@ export async function recordEvents(
           .slice(0, 3)
           .join("; ")}`,
       );
+    else if (!allKeepable(parsed.data)) reject(one.id, "There is a character in it that cannot be kept.");
     else if (parsed.data.diagnosisId !== diagnosisId) reject(one.id, "It belongs to another diagnosis.");
     else events.push(parsed.data);
   }
@@ -55,7 +57,8 @@ export async function recordEvents(
     .where(and(eq(diagnoses.fleetId, scope.fleetId), eq(diagnoses.id, diagnosisId)))
     .for("update"); // two phones at once: the second projects both
   if (!diagnosis) {
-    const because = begun[0] && (await beginRefusal(scope, begun[0]));
+    const unread = posted.find((one) => one.kind === "begun" && receipts.has(one.id));
+    const because = begun[0] ? await beginRefusal(scope, begun[0]) : unread && `It was not begun. ${receipts.get(unread.id)?.because}`;
     if (!because) throw Problem.notFound();
     for (const event of events) reject(event.id, because);
     return posted.map((one) => receipts.get(one.id) as EventReceipt);

@@ -8,7 +8,7 @@ import type { Diagnosis, DiagnosisQuery } from "@/lib/core/contract/diagnosis";
 import type { StoredEvent } from "@/lib/core/contract/event";
 import { Problem } from "@/lib/core/contract/problem";
 import type { FleetScope } from "@/lib/server/auth/scope";
-import { pageKey, readPageKey } from "@/lib/server/log/page-key";
+import { pageKey, readPageKey } from "@/lib/server/web/page-key";
 import { readEvents } from "./stored-events";
 
 /** A page of the fleet's diagnoses, the newest begun first. */
@@ -17,8 +17,7 @@ export async function listDiagnoses(
   query: Partial<DiagnosisQuery> = {},
 ): Promise<{ items: Diagnosis[]; next: string | null }> {
   const { limit = 50, after } = query;
-  const from = after === undefined ? undefined : readPageKey(after);
-  if (from === null) throw Problem.invalid([{ path: "after", says: "This is not the next of a page." }]);
+  const from = readPageKey(after);
   const rows = await selectDiagnoses(scope)
     .where(
       and(

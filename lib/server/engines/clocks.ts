@@ -1,5 +1,5 @@
 import "server-only";
-import { and, asc, eq, inArray, min } from "drizzle-orm";
+import { and, asc, eq, inArray, isNull, min } from "drizzle-orm";
 import { type engines, hourReadings } from "@/db/schema/boats";
 import { logEntries } from "@/db/schema/log-entries";
 import { engineClock, type EngineClock, type MeterReading } from "@/lib/core/recurrence/engine-clock";
@@ -14,28 +14,31 @@ export async function clocksOf(scope: FleetScope, rows: readonly EngineRow[]): P
   const found = await scope.tx
     .select()
     .from(hourReadings)
-    .where(and(eq(hourReadings.fleetId, scope.fleetId), inArray(hourReadings.engineId, ids)))
+    .where(and(eq(hourReadings.fleetId, scope.fleetId), inArray(hourReadings.engineId, ids), isNull(hourReadings.takenBackAt)))
     .orderBy(asc(hourReadings.readAt));
   const firsts = await scope.tx
     .select({ engineId: logEntries.engineId, at: min(logEntries.at) })
     .from(logEntries)
-    .where(and(eq(logEntries.fleetId, scope.fleetId), inArray(logEntries.engineId, ids)))
+    .where(and(eq(logEntries.fleetId, scope.fleetId), inArray(logEntries.engineId, ids), isNull(logEntries.takenBackAt)))
     .groupBy(logEntries.engineId);
   const firstEntry = new Map(firsts.map((first) => [first.engineId, first.at]));
+  const readings = new Map<string, MeterReading[]>(ids.map((id) => [id, []]));
+  for (const row of found) readings.get(row.engineId)?.push(meterReading(row));
   return new Map(
     rows.map((row) => [
       row.id,
       engineClock({
         hasHourMeter: row.hasHourMeter,
         estimatedHoursPerYear: row.estimatedHoursPerYear ?? undefined,
-        readings: found.filter((reading) => reading.engineId === row.id).map(meterReading),
+        readings: readings.get(row.id) ?? [],
         since: earlier(row.createdAt, firstEntry.get(row.id) ?? null).toISOString(),
       }),
     ]),
   );
 }
 
-function meterReading(row: typeof hourReadings.$inferSelect): MeterReading {
+/** A row as the clock reads it. */
+export function meterReading(row: typeof hourReadings.$inferSelect): MeterReading {
   return { id: row.id, reading: row.reading, readAt: row.readAt.toISOString(), reset: row.reset };
 }
 

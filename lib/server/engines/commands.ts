@@ -8,7 +8,8 @@ import { getBoat } from "@/lib/server/boats/queries";
 import { refuseEventId } from "@/lib/server/diagnoses/event-ids";
 import { canonical } from "@/lib/server/trees/content-hash";
 import { notAhead } from "@/lib/server/web/not-ahead";
-import { getEngine, listEngines, listHourReadings } from "./queries";
+import { getEngine, listEngines } from "./queries";
+import { refuseRunningBack } from "./running-back";
 
 /** Adds an engine to a boat. Sent twice it is one engine; another engine under the same id is refused. */
 export async function addEngine(scope: FleetScope<"engine:write">, engine: NewEngine): Promise<Engine> {
@@ -30,9 +31,6 @@ const contentOf = ({ name, hasHourMeter, estimatedHoursPerYear, profile }: NewEn
   estimatedHoursPerYear,
   profile,
 });
-
-const dayInWords = (moment: string): string =>
-  new Date(moment).toLocaleDateString("en-GB", { day: "numeric", month: "short", year: "numeric", timeZone: "UTC" });
 
 /** Two engines of one name on a boat: nobody could tell which one a diagnosis is of. */
 async function refuseSameName(scope: FleetScope, { id, boatId, name }: Pick<NewEngine, "id" | "boatId" | "name">): Promise<void> {
@@ -77,6 +75,8 @@ export async function addHourReading(scope: FleetScope<"engine:write">, reading:
     .from(hourReadings)
     .where(and(eq(hourReadings.fleetId, scope.fleetId), eq(hourReadings.id, reading.id)));
   if (there) {
+    // What was corrected since then is not undone by its first form coming once more.
+    if (there.version > 1 && there.engineId === reading.engineId) return reading;
     const same =
       there.engineId === reading.engineId &&
       there.reading === reading.reading &&
@@ -86,13 +86,7 @@ export async function addHourReading(scope: FleetScope<"engine:write">, reading:
     return reading;
   }
   await refuseEventId(scope, reading.id);
-  if (!reading.reset) {
-    const newest = (await listHourReadings(scope, reading.engineId)).find((r) => !r.doubtful && new Date(r.readAt) <= readAt);
-    if (newest && newest.reading > reading.reading) {
-      const says = `The meter showed ${newest.reading} h on ${dayInWords(newest.readAt)} and does not run back. Look again, or say that it was replaced.`;
-      throw Problem.invalid([{ path: "reading", says }]);
-    }
-  }
+  await refuseRunningBack(scope, reading, readAt);
   await scope.tx.insert(hourReadings).values({ ...reading, readAt, fleetId: scope.fleetId, by: scope.actor.userId });
   return reading;
 }

@@ -1,7 +1,7 @@
 import "server-only";
-import { and, asc, desc, eq, isNull } from "drizzle-orm";
-import { boats, engines, hourReadings } from "@/db/schema/boats";
-import type { Engine, ListedReading } from "@/lib/core/contract/engine";
+import { and, asc, eq, isNull } from "drizzle-orm";
+import { boats, engines } from "@/db/schema/boats";
+import type { Engine } from "@/lib/core/contract/engine";
 import { Problem } from "@/lib/core/contract/problem";
 import type { EngineClock } from "@/lib/core/recurrence/engine-clock";
 import type { FleetScope } from "@/lib/server/auth/scope";
@@ -17,35 +17,6 @@ export async function getEngine(scope: FleetScope, id: string): Promise<Engine> 
   const [engine] = await enginesWhere(scope, and(eq(engines.id, id), isNull(engines.removedAt)));
   if (!engine) throw Problem.notFound();
   return engine;
-}
-
-/** The readings of an engine's meter, newest first; `doubtful`: does not fit the others and is not counted. */
-export async function listHourReadings(scope: FleetScope, engineId: string): Promise<ListedReading[]> {
-  const [engine] = await scope.tx
-    .select()
-    .from(engines)
-    .where(and(eq(engines.fleetId, scope.fleetId), eq(engines.id, engineId)));
-  if (!engine) throw Problem.notFound();
-  const clock = (await clocksOf(scope, [engine])).get(engineId);
-  const rows = await scope.tx
-    .select()
-    .from(hourReadings)
-    .where(and(eq(hourReadings.fleetId, scope.fleetId), eq(hourReadings.engineId, engineId)))
-    .orderBy(desc(hourReadings.readAt), desc(hourReadings.id))
-    .limit(1000);
-  return rows.map((row) => {
-    const readAt = row.readAt.toISOString();
-    const doubtful = clock?.doubtful.includes(row.id) ?? false;
-    return {
-      id: row.id,
-      engineId,
-      reading: row.reading,
-      readAt,
-      reset: row.reset,
-      hours: doubtful ? null : (clock?.at(readAt).hours ?? null),
-      doubtful,
-    };
-  });
 }
 
 async function enginesWhere(scope: FleetScope, condition: ReturnType<typeof and>): Promise<Engine[]> {

@@ -1,9 +1,8 @@
 import "server-only";
-import { and, asc, eq } from "drizzle-orm";
-import { diagnoses } from "@/db/schema/diagnoses";
+import { and, eq } from "drizzle-orm";
 import { hourReadings } from "@/db/schema/boats";
 import { logEntries } from "@/db/schema/log-entries";
-import type { LogEntry, NewRepair } from "@/lib/core/contract/log";
+import type { LogEntry, NewRepair, RepairChange } from "@/lib/core/contract/log";
 import { Problem } from "@/lib/core/contract/problem";
 import type { FleetScope } from "@/lib/server/auth/scope";
 import { refuseEventId } from "@/lib/server/diagnoses/event-ids";
@@ -12,28 +11,13 @@ import { canonical } from "@/lib/server/trees/content-hash";
 import { documentOf, getCurrentTreeVersion } from "@/lib/server/trees/queries";
 import { notAhead } from "@/lib/server/web/not-ahead";
 import { namesOf, unknownIn } from "./outcome-names";
-import { projectDiagnosis } from "./project-diagnosis";
 import { getLogEntry } from "./queries";
 
 /** Writes a repair into an engine's log that was done without a diagnosis. Sent twice it is one line. */
 export async function logRepair(scope: FleetScope<"log:write">, repair: NewRepair): Promise<LogEntry> {
   await getEngine(scope, repair.engineId);
-  const tree = await documentOf(scope, await getCurrentTreeVersion(scope));
-  const errors = unknownIn(repair, tree);
-  if (errors.length > 0) throw Problem.invalid(errors);
-  const at = notAhead("doneAt", repair.doneAt);
+  const line = { engineId: repair.engineId, ...(await contentOf(scope, repair)) };
   await refuseEventId(scope, repair.id);
-  const line = {
-    engineId: repair.engineId,
-    at,
-    outcome: repair.outcome,
-    ...namesOf(repair, repair.symptoms, tree),
-    proof: repair.proof ?? null,
-    engineHours: repair.engineHours ?? null,
-    minutes: repair.minutes ?? null,
-    parts: repair.parts,
-    note: repair.note ?? null,
-  };
   const [stored] = await scope.tx
     .insert(logEntries)
     .values({ fleetId: scope.fleetId, id: repair.id, ...line, by: scope.actor.userId })
@@ -44,25 +28,49 @@ export async function logRepair(scope: FleetScope<"log:write">, repair: NewRepai
       .select()
       .from(logEntries)
       .where(and(eq(logEntries.fleetId, scope.fleetId), eq(logEntries.id, repair.id)));
-    if (there?.diagnosisId !== null || canonical(asSent(there)) !== canonical(asSent(line)))
+    // What was corrected since then is not undone by its first form coming once more.
+    const corrected = there?.diagnosisId === null && there.engineId === repair.engineId && there.version > 1 && !there.takenBackAt;
+    if (corrected) return getLogEntry(scope, repair.id);
+    if (there?.diagnosisId !== null || there.takenBackAt || canonical(asSent(there)) !== canonical(asSent(line)))
       throw Problem.conflict("Another line of the log has this id already.");
     return getLogEntry(scope, repair.id);
   }
-  if (repair.engineHours !== undefined) {
-    await scope.tx
-      .insert(hourReadings)
-      .values({
-        fleetId: scope.fleetId,
-        id: repair.id,
-        engineId: repair.engineId,
-        reading: repair.engineHours,
-        readAt: at,
-        reset: repair.meterReset ?? false,
-        by: scope.actor.userId,
-      })
-      .onConflictDoNothing();
-  }
+  await writeReading(scope, repair.id, repair.engineId, repair);
   return getLogEntry(scope, repair.id);
+}
+
+/** What a repair says, as a line of the log keeps it. @throws Problem 422 where it names what the tree does not have */
+export async function contentOf(scope: FleetScope<"log:write">, repair: RepairChange) {
+  const tree = await documentOf(scope, await getCurrentTreeVersion(scope));
+  const errors = unknownIn(repair, tree);
+  if (errors.length > 0) throw Problem.invalid(errors);
+  return {
+    at: notAhead("doneAt", repair.doneAt),
+    outcome: repair.outcome,
+    ...namesOf(repair, repair.symptoms, tree),
+    proof: repair.proof ?? null,
+    engineHours: repair.engineHours ?? null,
+    minutes: repair.minutes ?? null,
+    parts: repair.parts,
+    note: repair.note ?? null,
+  };
+}
+
+/** The hours that a repair names are a reading of the meter under the repair's own id. */
+export async function writeReading(scope: FleetScope<"log:write">, id: string, engineId: string, repair: RepairChange): Promise<void> {
+  if (repair.engineHours === undefined) return;
+  await scope.tx
+    .insert(hourReadings)
+    .values({
+      fleetId: scope.fleetId,
+      id,
+      engineId,
+      reading: repair.engineHours,
+      readAt: new Date(repair.doneAt),
+      reset: repair.meterReset ?? false,
+      by: scope.actor.userId,
+    })
+    .onConflictDoNothing();
 }
 
 type Line = Pick<
@@ -100,14 +108,3 @@ const asSent = ({
   cause: causeKey ?? causeTitle,
   remedy: remedyKey ?? remedyTitle,
 });
-
-/** Works out every diagnosis' line of the log anew from its events, as after a mend of the fold. Gives the number of diagnoses. */
-export async function rebuildLog(scope: FleetScope<"log:write">): Promise<number> {
-  const rows = await scope.tx
-    .select({ id: diagnoses.id })
-    .from(diagnoses)
-    .where(and(eq(diagnoses.fleetId, scope.fleetId)))
-    .orderBy(asc(diagnoses.id));
-  for (const { id } of rows) await projectDiagnosis(scope, id);
-  return rows.length;
-}

@@ -1,5 +1,5 @@
 import "server-only";
-import { and, eq, inArray } from "drizzle-orm";
+import { and, eq, inArray, isNotNull, isNull, or } from "drizzle-orm";
 import { boats, engines } from "@/db/schema/boats";
 import { people } from "@/db/schema/fleets";
 import { logEntries } from "@/db/schema/log-entries";
@@ -25,7 +25,7 @@ export const selectLines = (scope: FleetScope) =>
 
 /** Rows as lines of the log: with hours since new, and what became of each cure. */
 export async function linesOf(scope: FleetScope, rows: readonly LineRow[]): Promise<LogEntry[]> {
-  const history = await readHistory(scope, [...new Set(rows.map((row) => row.entry.engineId))]);
+  const history = await readHistory(scope, { engineIds: distinct(rows.map((row) => row.entry.engineId)), causes: causesOn(rows) });
   const became = standings(history.cases, history.hoursNow);
   return rows.map(({ entry, engineName, boatName, by }) => {
     const { hours, estimated } = hoursOf(entry, history.clocks.get(entry.engineId));
@@ -50,14 +50,34 @@ export async function linesOf(scope: FleetScope, rows: readonly LineRow[]): Prom
       note: entry.note,
       by,
       ...standing,
+      ...(entry.diagnosisId === null ? { version: entry.version } : {}),
     };
   });
 }
 
+const distinct = <T>(list: readonly T[]): T[] => [...new Set(list)];
+
+/** The causes that these lines speak of: what became of each hangs on the other cases of its own cause alone. */
+function causesOn(rows: readonly LineRow[]): Causes {
+  const named = rows.filter(({ entry }) => entry.causeTitle !== null);
+  return {
+    keys: distinct(named.flatMap(({ entry }) => entry.causeKey ?? [])),
+    inWords: named.some(({ entry }) => entry.causeKey === null),
+  };
+}
+
 export type History = { cases: CaseEntry[]; clocks: Map<string, EngineClock>; hoursNow: (engineId: string) => number | null };
 
-/** Everything about these engines that repeat faults hang on; all engines of the fleet when none are named. */
-export async function readHistory(scope: FleetScope, engineIds?: readonly string[]): Promise<History> {
+/** `inWords`: a cause that only words name is among them; which key it stands for, all others may decide. */
+export type Causes = { keys: readonly string[]; inWords: boolean };
+
+type Wanted = { engineIds?: readonly string[] | undefined; causes?: Causes };
+
+/**
+ * The cases that repeat faults hang on, with the engines' clocks: of these engines (of all of the fleet when none are
+ * named) and of these causes (of all when none are named). What names no cause, or is still open, is no case and is not read.
+ */
+export async function readHistory(scope: FleetScope, { engineIds, causes }: Wanted): Promise<History> {
   if (engineIds?.length === 0) return { cases: [], clocks: new Map(), hoursNow: () => null };
   const ofThese = engineIds && inArray(engines.id, [...engineIds]);
   const rows = await scope.tx
@@ -69,7 +89,17 @@ export async function readHistory(scope: FleetScope, engineIds?: readonly string
   const entries = await scope.tx
     .select({ id, engineId, at, outcome, causeKey, causeTitle, causeSystem, proof, temporary, engineHours })
     .from(logEntries)
-    .where(and(eq(logEntries.fleetId, scope.fleetId), engineIds && inArray(logEntries.engineId, [...engineIds])));
+    .where(
+      and(
+        eq(logEntries.fleetId, scope.fleetId),
+        isNull(logEntries.takenBackAt),
+        isNotNull(logEntries.causeTitle),
+        isNotNull(logEntries.outcome),
+        engineIds && inArray(logEntries.engineId, [...engineIds]),
+        // A cause in words may be one of those with a key under its title.
+        causes && !causes.inWords ? or(inArray(logEntries.causeKey, [...causes.keys]), isNull(logEntries.causeKey)) : undefined,
+      ),
+    );
   const byId = new Map<string, EngineRow>(rows.map((row) => [row.id, row]));
   return {
     clocks,
@@ -97,6 +127,7 @@ export async function readHistory(scope: FleetScope, engineIds?: readonly string
 const hoursOf = (entry: Pick<EntryRow, "at">, clock: EngineClock | undefined) =>
   clock?.at(entry.at.toISOString()) ?? { hours: null, estimated: false };
 
-function causeOf(entry: Pick<EntryRow, "causeKey" | "causeTitle" | "causeSystem">): LogEntry["cause"] {
+/** The cause that a line names. */
+export function causeOf(entry: Pick<EntryRow, "causeKey" | "causeTitle" | "causeSystem">): LogEntry["cause"] {
   return entry.causeTitle === null ? null : { key: entry.causeKey, title: entry.causeTitle, system: entry.causeSystem };
 }

@@ -48,6 +48,7 @@ export const invitationOf = (row: typeof invitations.$inferSelect): Invitation =
   invitedByName: row.invitedByName,
   createdAt: row.createdAt.toISOString(),
   expiresAt: row.expiresAt.toISOString(),
+  sentAt: row.sentAt?.toISOString() ?? null,
 });
 
 export type PeekedInvitation = Invitation & { fleetId: string; fleetName: string; hasAccount: boolean };
@@ -77,6 +78,14 @@ export async function fleetsOf({ userId }: { userId: string }): Promise<{ id: st
     named.push({ id: row.id, name: fleet?.name ?? "", roles: row.roles });
   }
   return named;
+}
+
+/** Somebody of every fleet: work that is done for all fleets runs behind each one's wall. */
+export async function memberOfEachFleet(): Promise<{ fleetId: string; userId: string }[]> {
+  return identityDatabase()
+    .selectDistinctOn([memberships.fleetId], { fleetId: memberships.fleetId, userId: memberships.userId })
+    .from(memberships)
+    .orderBy(asc(memberships.fleetId), asc(memberships.userId));
 }
 
 export async function getFleet(scope: FleetScope): Promise<Fleet> {

@@ -1,4 +1,5 @@
 import "server-only";
+import { isKeepable } from "@/lib/core/contract/kept-text";
 import { Problem } from "@/lib/core/contract/problem";
 
 export const mediaType = (request: Request) => (request.headers.get("content-type") ?? "").split(";")[0]?.trim().toLowerCase() ?? "";
@@ -18,20 +19,18 @@ export async function readBytes(request: Request, accepted: readonly string[], m
   return Buffer.concat(chunks);
 }
 
-export async function readJson(request: Request, maxBytes: number): Promise<unknown> {
+/** `asItCame`: text that cannot be kept is left for the shape to judge, item by item; else it refuses the whole. */
+export async function readJson(request: Request, maxBytes: number, asItCame = false): Promise<unknown> {
   const bytes = await readBytes(request, ["application/json"], maxBytes);
   try {
-    return JSON.parse(new TextDecoder("utf-8", { fatal: true }).decode(bytes), storable);
+    return JSON.parse(new TextDecoder("utf-8", { fatal: true }).decode(bytes), asItCame ? undefined : storable);
   } catch (error) {
     throw error instanceof Problem ? error : Problem.malformed("The body is not JSON.");
   }
 }
 
-/** Text that PostgreSQL can keep: without the character NUL, and without halves of characters. */
 function storable(key: string, value: unknown): unknown {
-  for (const text of [key, value]) {
-    if (typeof text === "string" && (text.includes("\0") || !text.isWellFormed()))
-      throw Problem.malformed("There is a character in it that cannot be kept.");
-  }
+  if (!isKeepable(key) || (typeof value === "string" && !isKeepable(value)))
+    throw Problem.malformed("There is a character in it that cannot be kept.");
   return value;
 }

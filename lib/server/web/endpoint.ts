@@ -26,6 +26,8 @@ export type EndpointSpec = {
   /** Takes bytes of these kinds instead of JSON. */
   raw?: Raw;
   maxBytes?: number;
+  /** Takes text that cannot be kept as far as `run`, which answers for each item by itself. */
+  itemByItem?: boolean;
 };
 
 export type Raw = { accepts: readonly string[]; maxBytes: number };
@@ -58,7 +60,7 @@ export type Shaped<
   Output extends z.ZodType,
   Versioned extends boolean,
   R extends Raw | undefined,
-> = Pick<EndpointSpec, "summary" | "status" | "maxBytes"> & {
+> = Pick<EndpointSpec, "summary" | "status" | "maxBytes" | "itemByItem"> & {
   permission: Who;
   params?: Params;
   query?: Query;
@@ -122,7 +124,7 @@ export function handler(spec: EndpointSpec, work: (request: Request, params: Rec
 export async function readCall<C>(request: Request, spec: EndpointSpec, params: unknown): Promise<C> {
   const version = spec.versioned ? ifMatchVersion(request.headers) : undefined;
   const query = spec.query && parse(spec.query, Object.fromEntries(new URL(request.url).searchParams));
-  const input = spec.input && parse(spec.input, await readJson(request, spec.maxBytes ?? DEFAULT_MAX_BYTES));
+  const input = spec.input && parse(spec.input, await readJson(request, spec.maxBytes ?? DEFAULT_MAX_BYTES, spec.itemByItem));
   const bytes = spec.raw && { body: await readBytes(request, spec.raw.accepts, spec.raw.maxBytes), mediaType: mediaType(request) };
   return { params, query, input, version, bytes } as C;
 }

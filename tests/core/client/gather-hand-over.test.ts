@@ -14,7 +14,18 @@ const said = (title: string, says: string, more: Partial<Said> = {}): Said => ({
   ...more,
 });
 const cause = (share: number, factors: Record<string, number>): PossibleCause => ({
-  ...{ key: "a", title: "A", is: "", share, of100: Math.round(share * 100), speaksAgainst: [], notChecked: [], behind: [] },
+  ...{
+    key: "a",
+    title: "A",
+    is: "",
+    share,
+    of100: Math.round(share * 100),
+    inAll: Math.round(share * 100),
+    ofThisEngine: null,
+    speaksAgainst: [],
+    notChecked: [],
+    behind: [],
+  },
   speaksFor: Object.entries(factors).map(([title, factor]) => ({ title, says: "", factor })),
 });
 const engine = { boatName: "Corncrake", name: "port", hours: 51.71333796, hoursAreEstimated: true } as Engine;

@@ -161,4 +161,22 @@ describe("an edit in the workshop", () => {
     expect(mine.saving.get()).toEqual({ state: "gone" });
     expect((await new SessionKeeper(idOf(7001), FLEET).read(server.draft.id))?.tree.causes[0]?.title).toBe("Mine");
   });
+
+  it("that a closed draft never saved is brought into the next one, and can be undone there", async () => {
+    const before = await open();
+    server.gone = true;
+    before.edit(renamed(smallTree(), "Mine"), "Renamed");
+    await before.saveNow();
+    before.close();
+    server.gone = false;
+    server.draft = { ...server.draft, id: idOf(3), version: 1, document: rated(smallTree(), "common") };
+    const after = await open();
+    expect(after.session.get().tree.causes[0]).toMatchObject({ title: "Mine", base: "common" });
+    await after.saveNow();
+    expect(server.draft.document.causes[0]?.title).toBe("Mine");
+    after.undo();
+    await after.saveNow();
+    expect(server.draft.document.causes[0]).toMatchObject({ title: first.title, base: "common" });
+    expect(await new SessionKeeper(idOf(7001), FLEET).draftIds()).toEqual([idOf(3)]);
+  });
 });

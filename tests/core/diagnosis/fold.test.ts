@@ -2,7 +2,7 @@ import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import type { DiagnosisEvent } from "../../../lib/core/contract/event";
 import { fold, type DiagnosisState } from "../../../lib/core/diagnosis/fold";
-import { Device } from "./logs";
+import { Device, deviceId } from "./logs";
 
 /** What of a state must be alike, whatever way the log came. */
 const gist = (state: DiagnosisState) => ({
@@ -12,6 +12,7 @@ const gist = (state: DiagnosisState) => ({
   situation: state.situation,
   answers: [...state.answers].map(([step, event]) => [step, event.id]),
   remedies: [...state.remedies].map(([step, event]) => [step, event.id]),
+  partCure: state.partCure && [state.partCure.event.id, state.order.events.filter(state.partCure.isLeft).map(({ id }) => id)],
   conflicts: state.conflicts.map((events) => events.map(({ id }) => id)),
   ended: state.ended?.id,
   runsAgain: state.runsAgain,
@@ -127,6 +128,50 @@ describe("the fold of a log", () => {
     expect(fold([end, unaware, aware]).ended).toBeNull();
   });
 
+  it("[F8] a remedy that made it better parts what was told before from what is told of what is left", () => {
+    const phone = new Device(1);
+    const before = phone.answer("bowl", "slime");
+    const better = phone.tried("element", "better");
+    const after = phone.answer("smoke", "black");
+    const log = [phone.begin({ symptoms: ["weak", "smoky"] }), before, better, after];
+    const { partCure } = fold(log);
+    expect(partCure?.event.id).toBe(better.id);
+    expect([before, after].map((event) => partCure?.isLeft(event))).toEqual([false, true]);
+    const gone = phone.tell("symptom-told", { symptom: "weak", present: false });
+    expect(fold([...log, gone]).symptoms).toEqual([
+      { symptom: "weak", present: false, left: { before: true } },
+      { symptom: "smoky", present: true },
+    ]);
+  });
+
+  it("[F8] a cure counts as one of two as soon as a symptom is told after it; a corrected answer keeps its place", () => {
+    const phone = new Device(1);
+    const begun = phone.begin({ symptoms: ["weak", "smoky"] });
+    const cured = phone.tried("element", "cured");
+    expect(fold([begun, cured]).partCure).toBeNull();
+    const still = phone.tell("symptom-told", { symptom: "smoky", present: true });
+    expect(fold([begun, cured, still]).partCure?.event.id).toBe(cured.id);
+    expect(fold([begun, cured, still]).symptoms[1]).toEqual({ symptom: "smoky", present: true, left: { before: true } });
+    const tried = phone.tried("vent", "no-change");
+    const later = phone.answer("smoke", "black");
+    const corrected = phone.tried("vent", "better", { supersedes: tried.id });
+    const { partCure } = fold([begun, tried, later, corrected]);
+    expect(partCure?.event.id).toBe(corrected.id);
+    expect(partCure?.isLeft(later)).toBe(true);
+    expect(fold([begun, corrected, phone.tell("taken-back", { event: corrected.id })]).partCure).toBeNull();
+  });
+
+  it("[F8] the first of two such remedies counts; a device that did not know of it speaks of both faults", () => {
+    const [one, two] = [new Device(1), new Device(2)];
+    const first = one.tried("element", "better");
+    const second = one.tried("vent", "better");
+    const unaware = two.answer("bowl", "slime");
+    const aware = two.answer("smoke", "black", { seen: { [one.id]: 1 } });
+    const { partCure } = fold([second, aware, first, unaware]);
+    expect(partCure?.event.id).toBe(first.id);
+    expect([second, unaware, aware].map((event) => partCure?.isLeft(event))).toEqual([true, false, true]);
+  });
+
   it("[F6] what is told of the engine stands over what the diagnosis began with", () => {
     const phone = new Device(1);
     const state = fold([
@@ -136,5 +181,47 @@ describe("the fold of a log", () => {
     ]);
     expect(state.profile.features).toEqual({ turbo: "turbo", voltage: "v12" });
     expect(state.profile.figures.ratedRpm).toBe(3000);
+  });
+
+  describe("[F9] heads that the log does not have", () => {
+    /** A log in which some events claim to have seen far more than was ever said. */
+    const boastfulLog = fc
+      .tuple(anyLog, fc.array(fc.tuple(fc.nat(99), fc.integer({ min: 1, max: 4 }), fc.constantFrom(1, 7, 40, 2 ** 31 - 1))))
+      .map(([log, boasts]) => {
+        const boasting = structuredClone(log);
+        for (const [place, device, head] of boasts) boasting[place % boasting.length]!.seen[deviceId(device)] = head;
+        return boasting;
+      });
+
+    it("fold to one state in any order of arrival and with any repeats", () => {
+      fc.assert(
+        fc.property(boastfulLog, fc.infiniteStream(fc.nat()), (log, dice) => {
+          const twice = [...log, ...log.filter(() => dice.next().value % 2)];
+          const shuffled = twice.map((event) => ({ event, at: dice.next().value })).sort((a, b) => a.at - b.at);
+          expect(gist(fold(shuffled.map(({ event }) => structuredClone(event))))).toEqual(gist(fold(log)));
+        }),
+        { seed: 18, numRuns: 300 },
+      );
+    });
+
+    it("count as the newest there is, so a huge one is worth no more than the true one", () => {
+      const [one, two] = [new Device(1), new Device(2)];
+      const older = one.answer("bowl", "bright");
+      const said = (head: number) => ({ ...new Device(2).answer("bowl", "slime", { seen: { [one.id]: head } }) });
+      expect(gist(fold([older, said(1_000_000)]))).toEqual(gist(fold([older, said(1)])));
+      const stranger = two.answer("bowl", "slime", { seen: { [deviceId(7)]: 1_000_000 } });
+      expect(fold([older, stranger]).conflicts).toHaveLength(1);
+      expect(fold([older, stranger]).order.events.map(({ id }) => id)).toEqual([older.id, stranger.id]);
+    });
+
+    it("do not outrank what was answered to them", () => {
+      const [one, two] = [new Device(1), new Device(2)];
+      const first = one.answer("bowl", "bright");
+      const boast = two.answer("bowl", "slime", { seen: { [one.id]: 1_000_000 } });
+      const reply = one.answer("bowl", "grit", { seen: { [two.id]: 1 } });
+      const state = fold([boast, reply, first]);
+      expect(answered(state, "bowl")).toBe("grit");
+      expect(state.order.before(reply, boast)).toBe(false);
+    });
   });
 });

@@ -6,7 +6,7 @@ import { Email, FleetName } from "@/lib/core/contract/account";
 import { Id } from "@/lib/core/contract/id";
 import { Roles } from "@/lib/core/contract/people";
 import { changeRoles as change, leaveFleet as leave, removePerson as remove, renameFleet as rename } from "@/lib/server/people/commands";
-import { invite as send, withdrawInvitation as withdraw } from "@/lib/server/people/invite";
+import { invite as send, sendAgain as again, withdrawInvitation as withdraw } from "@/lib/server/people/invite";
 import { done, fleetAction, personalAction } from "@/lib/server/web/action";
 
 /** Checkboxes: none is no field at all, one is a text, several are a list. */
@@ -18,7 +18,16 @@ export const invite = fleetAction({
   input: z.object({ fleetId: Id, email: Email, roles: CheckedRoles }),
   async run(scope, { email, roles }) {
     await send(scope, { id: uuidv7(), email, roles });
-    return done(`An invitation is on its way to ${email}. It is good for three days.`);
+    return done(`${email} is invited, for three days. Under "Invitations waiting" it says whether the mail went out.`);
+  },
+});
+
+export const sendInvitationAgain = fleetAction({
+  permission: "people:write",
+  input: z.object({ fleetId: Id, invitationId: Id }),
+  async run(scope, { invitationId }) {
+    const { email } = await again(scope, invitationId);
+    return done(`The invitation goes to ${email} once more, with a new link. The old link no longer works.`);
   },
 });
 

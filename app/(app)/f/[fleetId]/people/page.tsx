@@ -9,7 +9,7 @@ import { can } from "@/lib/core/access/permissions";
 import { demand } from "@/lib/server/auth/scope";
 import { getFleet, listInvitations, listPeople } from "@/lib/server/people/queries";
 import { pageScope } from "@/lib/server/web/page-scope";
-import { changeRoles, invite, leaveFleet, removePerson, renameFleet, withdrawInvitation } from "./actions";
+import { changeRoles, invite, leaveFleet, removePerson, renameFleet, sendInvitationAgain, withdrawInvitation } from "./actions";
 
 export const metadata: Metadata = { title: "People" };
 
@@ -53,7 +53,7 @@ export default async function PeoplePage({ params }: PageProps<"/f/[fleetId]/peo
               </Card>
               <Card aria-labelledby="waiting">
                 <h2 id="waiting">Invitations waiting</h2>
-                <InvitationList fleetId={fleetId} invitations={invitations} withdraw={withdrawInvitation} />
+                <InvitationList fleetId={fleetId} invitations={invitations} withdraw={withdrawInvitation} sendAgain={sendInvitationAgain} />
               </Card>
               <Card aria-labelledby="fleet">
                 <h2 id="fleet" className="mb-3">

@@ -18,7 +18,7 @@ export const GET = endpoint({
 
 export const POST = endpoint({
   permission: "people:write",
-  summary: "Invite somebody by e-mail",
+  summary: "Invite somebody by e-mail; the same once more sends a mail that has not gone out",
   params,
   input: NewInvitation,
   output: Invitation,

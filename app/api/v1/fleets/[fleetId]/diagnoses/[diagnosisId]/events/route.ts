@@ -20,6 +20,7 @@ export const POST = endpoint({
   summary: "Hand in events of a diagnosis; the first begins it, sending again is harmless",
   params,
   input: PostedEvents,
+  itemByItem: true,
   output: EventReceipts,
   run: async (scope, { params, input }) => ({ receipts: await recordEvents(scope, params.diagnosisId, input.events) }),
 });

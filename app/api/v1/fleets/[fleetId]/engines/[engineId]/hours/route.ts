@@ -1,9 +1,9 @@
 import * as z from "zod";
 import { HourReading, ListedReading } from "@/lib/core/contract/engine";
 import { Id } from "@/lib/core/contract/id";
-import { listOf } from "@/lib/core/contract/page";
+import { PageQuery, pageOf } from "@/lib/core/contract/page";
 import { addHourReading } from "@/lib/server/engines/commands";
-import { listHourReadings } from "@/lib/server/engines/queries";
+import { listHourReadings } from "@/lib/server/engines/readings";
 import { endpoint } from "@/lib/server/web/endpoint";
 import { inPlace } from "@/lib/server/web/in-place";
 
@@ -13,8 +13,9 @@ export const GET = endpoint({
   permission: "fleet:read",
   summary: "Readings of the engine's hour meter, newest first",
   params,
-  output: listOf(ListedReading),
-  run: async (scope, { params }) => ({ items: await listHourReadings(scope, params.engineId) }),
+  query: PageQuery,
+  output: pageOf(ListedReading),
+  run: (scope, { params, query }) => listHourReadings(scope, params.engineId, query),
 });
 
 export const POST = endpoint({
