@@ -27,11 +27,13 @@ test.each(KNOWN_READINGS)("$look: read with a unit and bands, or left out with t
 
 test("what people read in more than one unit may be typed in each of them", () => {
   const units = (check: string) => unitsOf(readingOf(check).quantity).map(({ symbol }) => symbol);
-  expect(units("oil-pressure-gauge")).toEqual(expect.arrayContaining(["kPa", "bar", "psi"]));
+  expect(units("oil-pressure-gauge")).toEqual(expect.arrayContaining(["kPa", "bar", "psi", "kgf/cm2"]));
   expect(units("filter-vacuum")).toEqual(expect.arrayContaining(["inHg", "mmHg", "mbar"]));
   expect(units("full-load-temperature")).toEqual(expect.arrayContaining(["C", "F"]));
   expect(units("hx-rise")).toEqual(expect.arrayContaining(["K", "C-diff", "F-diff"]));
   expect(units("water-ppm")).toEqual(expect.arrayContaining(["ppm", "mg/kg", "%-weight"]));
+  expect(units("crank-pressure")).toEqual(expect.arrayContaining(["mmH2O", "inH2O", "kPa"]));
+  expect(units("compression")).toEqual(expect.arrayContaining(["bar", "MPa", "kgf/cm2", "psi"]));
   expect(units("belt-tension")).toEqual(expect.arrayContaining(["mm", "in"]));
 });
 

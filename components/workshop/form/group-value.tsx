@@ -11,7 +11,8 @@ export function GroupValue({
   fields,
   must,
   bare,
-}: Editing<object> & { fields: readonly Field[]; must: boolean }) {
+  editor: Editor,
+}: Editing<object> & { fields: readonly Field[]; must: boolean; editor: FieldEditor }) {
   const hint = hintOf(name);
   const put = (field: string, next: unknown) => {
     const all = { ...value, [field]: next };

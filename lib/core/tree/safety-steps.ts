@@ -107,7 +107,7 @@ const RULES: readonly Rule[] = [
   {
     holds: (f) => f.handsAtShaft,
     first: () =>
-      "Under sail, in tow or in a stream the propeller turns the shaft all the same: sails down, anchored or moored, and the shaft lashed to the engine bed by a rope thrown round it while it stands. Let it go only to turn it by hand.",
+      "Under sail, in tow or in a stream the propeller turns the shaft all the same: sails down, anchored or moored, and the shaft lashed to the engine bed by a rope thrown round it while it stands. Off again before it is turned by hand, and before the engine is started.",
     last: () => "Lashing off. Spanners, rags and hands away from the shaft before the key goes back.",
     caution: {
       key: "shaft-hands",

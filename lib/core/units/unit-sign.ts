@@ -11,6 +11,8 @@ const SIGNS: Readonly<Record<string, string>> = {
   "gal-imp": "imp gal",
   "gal-us/h": "US gal/h",
   inH2O: "inH\u2082O",
+  mmH2O: "mmH\u2082O",
+  "kgf/cm2": "kgf/cm\u00b2",
 };
 
 /** A unit as it is written beside a figure. */

@@ -43,6 +43,9 @@ const UNITS: readonly Unit[] = [
   unit("pressure", "inHg", "inch of mercury", MMHG_KPA * INCH_MM),
   unit("pressure", "mmHg", "millimetre of mercury", MMHG_KPA),
   unit("pressure", "inH2O", "inch of water", INH2O_KPA),
+  unit("pressure", "mmH2O", "millimetre of water", INH2O_KPA / INCH_MM),
+  unit("pressure", "MPa", "megapascal", 1000),
+  unit("pressure", "kgf/cm2", "kilogram-force per square centimetre", 98.0665),
   unit("temperature", "C", "degree Celsius", 1),
   unit("temperature", "F", "degree Fahrenheit", 5 / 9, -160 / 9),
   // A drop or a rise: the size of the degree alone, no offset.
