@@ -24,6 +24,14 @@ export class Reasoner {
     this.#start();
   }
 
+  /** Lets go of the worker and all its trees. Asked again, it starts another; what was asked before is not answered. */
+  close(): void {
+    this.#worker?.terminate();
+    this.#worker = null;
+    this.#kept.clear();
+    this.#waiting.clear();
+  }
+
   async view(version: string, tree: FaultTree, events: readonly DiagnosisEvent[]): Promise<DiagnosisView> {
     try {
       const worker = this.#start();
