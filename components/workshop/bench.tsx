@@ -62,7 +62,7 @@ export function Bench({ fleetId, bench, current, newestShipped, onGone }: Props)
             tree={tree}
             symptom={symptom}
             node={place.node}
-            checked={checked}
+            currentId={current.id}
             onOpen={openNode}
           />
           <SoundBar checked={checked} onOpen={openNode} />

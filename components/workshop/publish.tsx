@@ -1,21 +1,21 @@
 "use client";
 
 import { useRouter } from "next/navigation";
-import { useEffect, useMemo, useState } from "react";
+import { useMemo, useState } from "react";
 import { Button } from "@/components/ui/button";
 import { Choice } from "@/components/ui/choice";
 import { Dialog } from "@/components/ui/dialog";
 import { Notice } from "@/components/ui/notice";
 import { TextArea } from "@/components/ui/text-area";
-import { NoAnswer, request, sendJson } from "@/lib/client/exchange/request";
+import { NoAnswer, sendJson } from "@/lib/client/exchange/request";
 import { useObservable } from "@/lib/client/screen/use-observable";
 import { unsaved } from "@/lib/client/workshop/draft-session";
 import type { Workbench } from "@/lib/client/workshop/workbench";
-import { TreeVersionDocument, type TreeVersionInfo } from "@/lib/core/contract/tree";
+import type { TreeVersionInfo } from "@/lib/core/contract/tree";
 import { compareTrees } from "@/lib/core/tree/differences";
-import type { FaultTree } from "@/lib/core/tree/schema";
 import { onDeep } from "./on-deep";
 import type { Checked } from "./use-checked";
+import { useVersion } from "./use-version";
 
 type Props = { fleetId: string; bench: Workbench; checked: Checked; current: TreeVersionInfo };
 
@@ -174,18 +174,4 @@ function PublishForm({ fleetId, bench, checked, current }: Props) {
       </div>
     </form>
   );
-}
-
-function useVersion(fleetId: string, versionId: string): FaultTree | null {
-  const [document, setDocument] = useState<FaultTree | null>(null);
-  useEffect(() => {
-    let current = true;
-    request(`/api/v1/fleets/${fleetId}/trees/versions/${versionId}`)
-      .then((answer) => current && setDocument(TreeVersionDocument.parse(answer).document))
-      .catch((failure: unknown) => console.error(failure));
-    return () => {
-      current = false;
-    };
-  }, [fleetId, versionId]);
-  return document;
 }

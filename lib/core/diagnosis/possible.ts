@@ -48,6 +48,7 @@ function twoShown(model: Model, { two, pairs, putRight }: Belief): Possible["two
 
 function causeShown(model: Model, evidence: Evidence, index: number, speaks: Speaks): Omit<PossibleCause, "share" | "of100" | "inAll"> {
   const cause = model.causes[index]!;
+  const moved = model.setting.multipliers?.find((one) => one.cause === cause.key);
   const asked = new Set(evidence.findings.map(({ check }) => check));
   const notChecked = model.checks
     .filter((check) => cause.gives[check.key] !== undefined && check.offered && !asked.has(check.key))
@@ -60,6 +61,7 @@ function causeShown(model: Model, evidence: Evidence, index: number, speaks: Spe
     key: cause.key,
     title: cause.title,
     is: cause.is,
+    ofThisEngine: moved ? { times: moved.times, reason: moved.reason } : null,
     speaksFor: speaks.for,
     speaksAgainst: speaks.against,
     notChecked: notChecked.map(({ check }) => ({ check: check.key, title: check.title })),

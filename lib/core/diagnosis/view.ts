@@ -128,6 +128,8 @@ export type PossibleCause = {
   of100: number;
   /** Of 100 engines like this, how many have it at all, alone or beside another fault. */
   inAll: number;
+  /** What this engine's log says of it, and by how much that moved its weight; null where it says nothing. */
+  ofThisEngine: { times: number; reason: string } | null;
   speaksFor: readonly EvidenceShown[];
   speaksAgainst: readonly EvidenceShown[];
   notChecked: readonly { check: string; title: string }[];

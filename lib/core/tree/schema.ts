@@ -162,8 +162,21 @@ export const Check = z.strictObject({
 });
 export type Check = z.infer<typeof Check>;
 
+/** What is renewed by hours or months, whichever comes first, and which causes that keeps away. */
+export const Upkeep = z
+  .strictObject({
+    everyHours: z.number().positive().max(20_000).optional(),
+    everyMonths: z.number().positive().max(240).optional(),
+    guards: z.array(Key).min(1),
+    sources: Citations,
+  })
+  .refine(({ everyHours, everyMonths }) => (everyHours ?? everyMonths) !== undefined, "upkeep is due by hours, by months, or by both");
+export type Upkeep = z.infer<typeof Upkeep>;
+
 export const Remedy = z.strictObject({
   ...step,
+  /** Where the remedy is upkeep too: done by itself from time to time, it keeps causes away. */
+  upkeep: Upkeep.optional(),
   parts: z.array(z.strictObject({ key: Key, title: Line, quantity: z.number().int().positive().default(1) })).default([]),
   /** How the cure is proved. */
   proof: Text,

@@ -22,6 +22,25 @@ const asRivals =
 
 /** Rule -> ways to break it, each by one change to a sound tree. */
 const breaches: Record<string, Breach[]> = {
+  "guarded-is-cured": [
+    {
+      breaks: "upkeep that guards a cause it does not cure",
+      change: (t) => (the(t.remedies, "change-filter").upkeep = { everyHours: 200, guards: ["tank-dirty"], sources: ["judgement"] }),
+      node: "remedy change-filter",
+      says: /guards tank-dirty, which it does not cure/,
+    },
+  ],
+  "guarded-once": [
+    {
+      breaks: "two kinds of upkeep for one cause",
+      change: (t) => {
+        the(t.causes, "tank-dirty").curedBy["change-filter"] = "seldom";
+        for (const key of ["change-filter", "clean-tank"])
+          the(t.remedies, key).upkeep = { everyHours: 200, guards: ["tank-dirty"], sources: ["judgement"] };
+      },
+      node: "remedy clean-tank",
+    },
+  ],
   "key-twice": [
     {
       breaks: "two checks with one key",
