@@ -10,6 +10,7 @@ import * as hours from "./fleets/[fleetId]/engines/[engineId]/hours/route";
 import * as engineLog from "./fleets/[fleetId]/engines/[engineId]/log/route";
 import * as repair from "./fleets/[fleetId]/engines/[engineId]/repairs/[repairId]/route";
 import * as repairs from "./fleets/[fleetId]/engines/[engineId]/repairs/route";
+import * as engineEvidence from "./fleets/[fleetId]/engines/[engineId]/evidence/route";
 import * as engineRepeats from "./fleets/[fleetId]/engines/[engineId]/repeats/route";
 import * as engine from "./fleets/[fleetId]/engines/[engineId]/route";
 import * as engines from "./fleets/[fleetId]/engines/route";
@@ -45,6 +46,7 @@ export const routes: Routes = {
   "/fleets/{fleetId}/engines/{engineId}/repairs": repairs,
   "/fleets/{fleetId}/engines/{engineId}/repairs/{repairId}": repair,
   "/fleets/{fleetId}/engines/{engineId}/log": engineLog,
+  "/fleets/{fleetId}/engines/{engineId}/evidence": engineEvidence,
   "/fleets/{fleetId}/engines/{engineId}/repeats": engineRepeats,
   "/fleets/{fleetId}/log": log,
   "/fleets/{fleetId}/repeats": repeats,

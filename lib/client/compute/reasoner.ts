@@ -25,6 +25,14 @@ export class Reasoner {
     this.#start();
   }
 
+  /** Lets go of the worker and all its trees. Asked again, it starts another; what was asked before is not answered. */
+  close(): void {
+    this.#worker?.terminate();
+    this.#worker = null;
+    this.#kept.clear();
+    this.#waiting.clear();
+  }
+
   async view(version: string, tree: FaultTree, events: readonly DiagnosisEvent[]): Promise<DiagnosisView> {
     const told = await this.#askWorker("view", version, tree, events);
     // Slower, and the screen waits; but there is a next step.

@@ -57,4 +57,16 @@ describe("asking for the next step", () => {
     workerThat((worker, ask) => ask.ask === "view" && worker.onmessage({ data: { id: ask.id, failure: "no such check" } }));
     await expect(new Reasoner().view("1", tree, log)).rejects.toThrow("no such check");
   });
+
+  it("lets go of its worker when it is closed, and starts another when it is asked again", async () => {
+    const ended: unknown[] = [];
+    const started = workerThat((worker, ask) => ask.ask === "view" && worker.onmessage({ data: { id: ask.id, view: view(tree, log) } }));
+    const reasoner = new Reasoner();
+    await reasoner.view("1", tree, log);
+    Object.assign(started[0]!, { terminate: () => ended.push(started[0]) });
+    reasoner.close();
+    expect(ended).toEqual(started);
+    expect(await reasoner.view("1", tree, log)).toEqual(view(tree, log));
+    expect(started).toHaveLength(2);
+  });
 });
