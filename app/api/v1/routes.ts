@@ -1,4 +1,5 @@
 import type { Routes } from "@/lib/server/web/openapi";
+import * as passage from "./fleets/[fleetId]/boats/[boatId]/passage/route";
 import * as boat from "./fleets/[fleetId]/boats/[boatId]/route";
 import * as boats from "./fleets/[fleetId]/boats/route";
 import * as events from "./fleets/[fleetId]/diagnoses/[diagnosisId]/events/route";
@@ -39,6 +40,7 @@ export const routes: Routes = {
   "/fleets/{fleetId}": fleet,
   "/fleets/{fleetId}/boats": boats,
   "/fleets/{fleetId}/boats/{boatId}": boat,
+  "/fleets/{fleetId}/boats/{boatId}/passage": passage,
   "/fleets/{fleetId}/engines": engines,
   "/fleets/{fleetId}/engines/{engineId}": engine,
   "/fleets/{fleetId}/engines/{engineId}/hours": hours,
