@@ -16,8 +16,9 @@ describe("a tree taken along", () => {
   test.each(["yaml", "json"] as const)("and brought back is the identical document, and so is its file: %s", async (format) => {
     for (const tree of [typographicAll(smallTree()) as FaultTree, await shippedTree()]) {
       const file = treeFile(tree, format);
-      expect(readTreeText(file)).toEqual(tree);
-      expect(treeFile(readTreeText(file), format)).toBe(file);
+      const read = readTreeText(file);
+      expect(read).toEqual(tree);
+      expect(treeFile(read, format)).toBe(file);
     }
   });
 
@@ -39,6 +40,25 @@ describe("a tree taken along", () => {
         extras: { errors: expect.arrayContaining([expect.objectContaining({ path: expect.stringMatching(/^line \d/) })]) },
       }),
     );
+  });
+
+  test.each([
+    ["nested too deep", `about: ${"[".repeat(20_000)}${"]".repeat(20_000)}`],
+    [
+      "unfolding without end",
+      `systems: &a [x, x]\n${[..."bcdefghijklmno"].map((name, at) => `${name}: &${name} [${`*${"abcdefghijklmno"[at]}, `.repeat(9)}]`).join("\n")}`,
+    ],
+  ])("is refused in words where it is made to choke on: %s", (_how, file) => {
+    expect(() => readTreeText(file)).toThrowError(expect.objectContaining({ status: 422 }));
+  });
+
+  test("of nothing but faults tells the first hundred", () => {
+    const file = Array.from({ length: 300 }, (_, at) => `wrong-${at}: 1`).join("\n");
+    const refused = expect.objectContaining({
+      status: 422,
+      extras: { errors: expect.toSatisfy((errors: unknown[]) => errors.length === 100) },
+    });
+    expect(() => readTreeText(file)).toThrowError(refused);
   });
 });
 
