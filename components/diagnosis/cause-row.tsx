@@ -15,6 +15,12 @@ export function CauseRow({ cause, pattern }: { cause: PossibleCause; pattern: Pa
       <div className="grid gap-2 border-l-2 border-rule pb-2 pl-3 text-sm">
         <p>{cause.is}</p>
         {cause.inAll > cause.of100 + 1 && <p>Alone or beside another fault it is there in {cause.inAll} of 100.</p>}
+        {cause.ofThisEngine && (
+          <p>
+            <span className="font-semibold">This engine{"\u2019"}s log</span> makes it{" "}
+            {cause.ofThisEngine.times >= 1 ? "likelier" : "less likely"}. {cause.ofThisEngine.reason}
+          </p>
+        )}
         <Evidence title="Speaks for it" list={cause.speaksFor} />
         <Evidence title="Speaks against it" list={cause.speaksAgainst} />
         {cause.speaksFor.length + cause.speaksAgainst.length === 0 && (

@@ -1,5 +1,6 @@
 "use client";
 
+import { clsx } from "clsx";
 import type { ReactNode } from "react";
 import { LightSwitch } from "@/components/ui/light-switch";
 import type { Ready } from "@/lib/client/screen/surface";
@@ -9,10 +10,12 @@ type Props = { ready: Ready | null; who: ReactNode; under?: ReactNode; line?: Re
 
 /** The deep-water band with who and what, then the screen; beside it on a wide screen, beneath it on a phone, what is still possible. */
 export function Frame({ ready, who, under, line, aside, children }: Props) {
+  // One left edge for the band, the screen and the line under it.
+  const column = aside ? "mx-auto w-full max-w-5xl" : "mx-auto w-full max-w-2xl";
   return (
     <div className="flex min-h-dvh flex-col">
-      <header className="no-print bg-deep px-4 pt-3 pb-1 text-on-deep">
-        <div className="mx-auto max-w-5xl">
+      <header className="no-print bg-deep pt-3 pb-1 text-on-deep">
+        <div className={clsx(column, "px-4")}>
           <div className="flex flex-wrap items-center justify-between gap-x-3 gap-y-1">
             <span className="font-semibold">{who}</span>
             {ready && <KeptChip ready={ready} />}
@@ -24,7 +27,7 @@ export function Frame({ ready, who, under, line, aside, children }: Props) {
           </div>
         </div>
       </header>
-      <div className={aside ? "mx-auto flex w-full max-w-5xl flex-1 flex-col lg:flex-row lg:gap-8" : "mx-auto w-full max-w-2xl flex-1"}>
+      <div className={clsx(column, "flex-1", aside && "flex flex-col lg:flex-row lg:gap-8")}>
         <main id="main" className="min-w-0 flex-1 px-4 pt-4 pb-6">
           {children}
         </main>
@@ -33,8 +36,8 @@ export function Frame({ ready, who, under, line, aside, children }: Props) {
         )}
       </div>
       {ready && (
-        <footer className="no-print border-t border-rule px-4 py-2">
-          <div className="mx-auto max-w-5xl">
+        <footer className="no-print border-t border-rule py-2">
+          <div className={clsx(column, "px-4")}>
             <KeptLine ready={ready} />
           </div>
         </footer>

@@ -1,3 +1,4 @@
+import { StepDrawing } from "@/components/drawing/step-drawing";
 import type { RuleShown } from "@/lib/core/diagnosis/view";
 
 /** What to do while a rule is in force, first thing first, and the one exception to it. It can be folded, but its name stays. */
@@ -12,10 +13,11 @@ export function RuleSays({ rule, folded = false }: { rule: RuleShown; folded?: b
           </li>
         ))}
       </ol>
+      {rule.drawing && <StepDrawing drawing={rule.drawing} />}
       {rule.runOn && (
         <p className="mt-2 text-sm">
-          <b>The one exception:</b> {rule.kind === "no-crank" ? "if it is running, and stopping now" : "if stopping now"} endangers people
-          or boat, run on at the lowest useful power to safety, call, then stop.
+          <b>The one exception:</b> if it is running, and stopping now endangers people or boat, run on at the lowest useful power to
+          safety, call, then stop.
         </p>
       )}
     </details>

@@ -102,7 +102,7 @@ export function Say({ ready, phone, engine, go }: Props) {
         <ScreenHeading of={engine.id}>What is the engine doing, or not doing?</ScreenHeading>
       </div>
       <label htmlFor="complaint" className="mt-1 block text-sm text-ink-2">
-        In your own words. Several things in one line will do.
+        In your own words; several at once will do.
       </label>
       <textarea
         id="complaint"

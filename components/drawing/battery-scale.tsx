@@ -11,7 +11,7 @@ const ROW = 46;
 
 export function BatteryScale() {
   return (
-    <Picture of="battery-scale" height={246}>
+    <Picture of="battery-scale" height={252}>
       <Label x={28} y={22} at="middle" bold>
         12 V
       </Label>

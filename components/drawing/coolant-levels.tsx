@@ -4,10 +4,9 @@ export function CoolantLevels() {
   return (
     <Picture of="coolant-levels" height={264}>
       <Box x={16} y={96} w={168} h={104} r={12} />
-      <Liquid x={18} y={112} w={164} h={86} />
+      <path d="M28 98H172Q182 98 182 108V188Q182 198 172 198H28Q18 198 18 188V108Q18 98 28 98Z" fill="var(--shoal)" stroke="none" />
       <Box x={70} y={70} w={52} h={42} r={2} />
       <path d="M72 98H120V116H72Z" fill="var(--shoal)" stroke="none" />
-      <path d="M18 98h164" stroke="none" />
       <Liquid x={71} y={82} w={50} h={32} />
       <path d="M64 36h64v14h-64ZM74 50v6h44v-6" fill="var(--sheet)" />
       <Arrow along="140 60 140 36" tone="ink" />

@@ -12,7 +12,7 @@ export function LogCards({ entries, caption, namesEngine, dayOf }: Props) {
     <ul aria-label={caption} className="divide-y divide-rule">
       {entries.map((entry) => (
         <li key={entry.id} className="grid gap-0.5 py-3">
-          <div className="flex flex-wrap items-center justify-between gap-x-3 gap-y-1">
+          <div className="flex min-h-12 flex-wrap items-center justify-between gap-x-3 gap-y-1">
             {dayOf(entry)}
             <Standing entry={entry} />
           </div>

@@ -16,7 +16,7 @@ type Props = {
 export function LogFilters({ path, filters, boats, engines, systems }: Props) {
   const any = (title: string) => ({ value: "", title });
   return (
-    <form action={path} method="get" className="no-print grid items-end gap-3 sm:grid-cols-2 xl:grid-cols-[repeat(4,1fr)_auto]">
+    <form action={path} method="get" className="no-print grid grid-cols-2 items-end gap-3 xl:grid-cols-[repeat(4,1fr)_auto]">
       <Select
         id="boat"
         name="boat"

@@ -27,11 +27,11 @@ export function PersonCard({ fleetId, person, isSelf, manage }: Props) {
           <Chip key={role}>{role}</Chip>
         ))}
       </div>
-      <p className="text-sm text-ink-2">
+      <p className="mt-1 text-sm text-ink-2">
         {person.email && <span className="break-all">{person.email}, </span>}in the fleet since <Day at={person.joinedAt} />
       </p>
       {manage && (
-        <details className="no-print">
+        <details className="no-print mt-1">
           <summary className="link flex min-h-12 items-center">
             {isSelf ? "Change your roles" : `Change ${person.name}’s roles or remove them`}
           </summary>

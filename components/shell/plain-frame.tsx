@@ -25,8 +25,8 @@ export function PlainFrame({ action, footer, children }: Props) {
         {children}
       </main>
       {footer && (
-        <footer className="border-t border-rule px-4 py-4 text-sm text-ink-2">
-          <p className="mx-auto max-w-6xl">{footer}</p>
+        <footer className="border-t border-rule py-4 text-sm text-ink-2">
+          <p className="mx-auto max-w-6xl px-4">{footer}</p>
         </footer>
       )}
     </div>

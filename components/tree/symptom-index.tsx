@@ -1,5 +1,6 @@
 import Link from "next/link";
 import { clsx } from "clsx";
+import { Fold } from "@/components/ui/fold";
 import type { FaultTree } from "@/lib/core/tree/schema";
 
 type Props = { path: string; tree: Pick<FaultTree, "symptoms" | "causes">; here: string };
@@ -8,8 +9,8 @@ type Props = { path: string; tree: Pick<FaultTree, "symptoms" | "causes">; here:
 export function SymptomIndex({ path, tree, here }: Props) {
   const counts = new Map<string, number>();
   for (const cause of tree.causes) for (const key of Object.keys(cause.shows)) counts.set(key, (counts.get(key) ?? 0) + 1);
-  return (
-    <nav aria-label="Symptoms" className="no-print">
+  const list = (
+    <>
       <p className="px-2 text-sm text-ink-2">Causes that hang on</p>
       <ul>
         {tree.symptoms.map((symptom) => (
@@ -30,6 +31,17 @@ export function SymptomIndex({ path, tree, here }: Props) {
           </li>
         ))}
       </ul>
-    </nav>
+    </>
+  );
+  return (
+    <>
+      {/* Beside the part where there is room; on a phone it would stand before it, three screens long. */}
+      <nav aria-label="Symptoms" className="no-print hidden lg:block">
+        {list}
+      </nav>
+      <nav aria-label="Symptoms" className="no-print lg:hidden">
+        <Fold title={`Another symptom (${tree.symptoms.length})`}>{list}</Fold>
+      </nav>
+    </>
   );
 }

@@ -29,7 +29,7 @@ export function TreeView({ part }: { part: TreePart }) {
         <TreeMap graph={part.graph} onSelect={setSelected} panelWidth={PANEL_WIDTH} />
         {selected && (
           <aside
-            aria-label="What the chosen node says"
+            aria-label="What the chosen one says"
             tabIndex={0}
             className="absolute inset-y-0 right-0 w-96 max-w-full overflow-y-auto rounded-r-xl border border-rule bg-sheet px-4 py-4"
           >
@@ -46,7 +46,7 @@ export function TreeView({ part }: { part: TreePart }) {
         )}
       </div>
       <p className="no-print hidden text-sm text-ink-2 md:block">
-        Choose a node to read what it asks, its steps and its sources. The same as a list:
+        Choose one to read what it asks, its steps and its sources. The same as a list:
       </p>
       <TreeOutline part={part} />
     </div>

@@ -4,7 +4,7 @@ import { usePathname, useSearchParams } from "next/navigation";
 import { useCallback, useMemo } from "react";
 import { isListName, type ListName } from "@/lib/core/tree/flaw";
 
-export const VIEWS = ["graph", "table"] as const;
+export const VIEWS = ["graph", "table", "try", "prove", "learn"] as const;
 export type View = (typeof VIEWS)[number];
 
 /** Where in the workshop one is: in the address, so that back, reload and a link to a colleague work. */

@@ -1,9 +1,10 @@
 "use client";
 
-import { useEffect, useRef, useState } from "react";
-import type { CheckAsk, CheckTold } from "@/lib/client/workshop/check-protocol";
+import { useCallback, useEffect, useState } from "react";
+import type { Told } from "@/lib/client/workshop/protocol";
 import type { Flaw } from "@/lib/core/tree/flaw";
 import type { FaultTree } from "@/lib/core/tree/schema";
+import { useWorker } from "./use-worker";
 
 /** What is wrong with the draft, as far as it has been looked at. `proved` is null while its known cases are replayed. */
 export type Checked = { flaws: readonly Flaw[] | null; proved: { failing: readonly string[]; cases: number } | null };
@@ -13,20 +14,14 @@ const QUIET_MS = 150;
 /** Looks the draft over off the screen's thread, after each change. */
 export function useChecked(tree: FaultTree): Checked {
   const [checked, setChecked] = useState<Checked>({ flaws: null, proved: null });
-  const worker = useRef<Worker | null>(null);
-  const asked = useRef(0);
-  useEffect(() => {
-    const made = new Worker(new URL("../../lib/client/workshop/check-worker.ts", import.meta.url), { type: "module" });
-    made.onmessage = ({ data }: MessageEvent<CheckTold>) => {
-      if (data.id !== asked.current) return;
-      setChecked((now) => ("flaws" in data ? { flaws: data.flaws, proved: null } : { ...now, proved: data }));
-    };
-    worker.current = made;
-    return () => made.terminate();
+  const hear = useCallback((told: Told) => {
+    if (told.told === "flaws") setChecked({ flaws: told.flaws, proved: null });
+    if (told.told === "failing") setChecked((now) => ({ ...now, proved: told }));
   }, []);
+  const ask = useWorker(hear);
   useEffect(() => {
-    const timer = setTimeout(() => worker.current?.postMessage({ id: ++asked.current, tree } satisfies CheckAsk), QUIET_MS);
+    const timer = setTimeout(() => ask({ ask: "check", tree }), QUIET_MS);
     return () => clearTimeout(timer);
-  }, [tree]);
+  }, [tree, ask]);
   return checked;
 }

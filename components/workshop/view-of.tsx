@@ -5,7 +5,9 @@ import type { FaultTree } from "@/lib/core/tree/schema";
 import { GraphView } from "./graph/graph-view";
 import type { Place, View } from "./place";
 import { TableView } from "./table/table-view";
-import type { Checked } from "./use-checked";
+import { LearnView } from "./learn/learn-view";
+import { ProveView } from "./prove/prove-view";
+import { TryView } from "./try/try-view";
 
 export type ViewProps = {
   fleetId: string;
@@ -13,7 +15,7 @@ export type ViewProps = {
   tree: FaultTree;
   symptom: string;
   node: Place["node"];
-  checked: Checked;
+  currentId: string;
   onOpen: (node: Place["node"]) => void;
 };
 
@@ -22,7 +24,13 @@ export function ViewOf({ view, ...props }: ViewProps & { view: View }) {
   switch (view) {
     case "table":
       return <TableView {...props} />;
-    default:
+    case "try":
+      return <TryView key={props.symptom} {...props} />;
+    case "prove":
+      return <ProveView {...props} />;
+    case "learn":
+      return <LearnView {...props} />;
+    case "graph":
       return <GraphView {...props} />;
   }
 }

@@ -4,6 +4,9 @@ import { VIEWS, type View } from "./place";
 const TITLES: Readonly<Record<View, string>> = {
   graph: "Graph",
   table: "Table",
+  try: "Try it",
+  prove: "Prove it",
+  learn: "Learn",
 };
 
 type Props = { here: View; onChoose: (view: View) => void };

@@ -50,7 +50,7 @@ function counts({ tree }: TreeRead): [string, number][] {
     ["cautions", tree.cautions.length],
     ["stopRules", tree.stopRules.length],
     ["knownCases", tree.knownCases.length],
-    ["drawings", new Set([...tree.checks, ...tree.remedies].flatMap(({ drawing }) => drawing ?? [])).size],
+    ["drawings", new Set([...tree.checks, ...tree.remedies, ...tree.stopRules].flatMap(({ drawing }) => drawing ?? [])).size],
   ];
 }
 

@@ -39,6 +39,8 @@ function figuresOf(proof: Proof, bars: Readonly<Record<string, number>>): Figure
     values[`top1.${told}`] = share.first;
     values[`top3.${told}`] = share.inFirstThree;
   }
+  const { cases, inFirstThree, likeliestPair } = proof.twoCauses;
+  Object.assign(values, { twoCauses: cases, "twoCauses.bothInFirstThree": inFirstThree, "twoCauses.likeliestPair": likeliestPair });
   Object.assign(values, proof.ends, {
     "minutes.mean": proof.meanMinutes,
     "minutes.baseRate": proof.meanBaseRateMinutes,

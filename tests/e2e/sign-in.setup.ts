@@ -8,8 +8,8 @@ for (const place of [0, 1, 2, 3]) {
     const person = people[place]!;
     await page.goto("/sign-in");
     await page.getByLabel("E-mail").first().fill(person.email);
-    await page.getByLabel("Password").fill(password);
-    await page.getByRole("button", { name: "Sign in" }).click();
+    await page.getByLabel("Password", { exact: true }).fill(password);
+    await page.getByRole("button", { name: "Sign in", exact: true }).click();
     await expect(page).toHaveURL(/\/f\/[0-9a-f-]+$/);
     await page.context().storageState({ path: stateOf(person.email) });
   });

@@ -86,3 +86,60 @@ test("a burst of cranking is counted though the page was gone meanwhile, and und
   await dialog.getByRole("button", { name: "The boat is safe for now" }).click();
   await expect(dialog).toBeHidden();
 });
+
+test("the phone's own back leads to the answer given last, and a change of it leads on to the step", async ({ page }) => {
+  await slowStart(page);
+  await noneOfThese(page);
+  const first = await question(page).innerText();
+  await page.getByRole("button", { name: /^Can.t tell/ }).click();
+  await expect(question(page)).not.toHaveText(first);
+  await page.goBack();
+  await expect(question(page)).toHaveText(first);
+  await expect(page.getByText("Said before: Can\u2019t tell")).toBeVisible();
+  await page.getByRole("group").getByRole("button").first().click();
+  await expect(question(page)).not.toHaveText(first);
+  await page.getByRole("link", { name: "1 answer given" }).click();
+  await expect(page.getByText("Can\u2019t tell, or can\u2019t get to it")).toBeHidden();
+});
+
+test("all dangers are answered with one button that says how many, and each can be looked at and changed after", async ({ page }) => {
+  await slowStart(page);
+  const asked = await page.getByRole("button", { name: "No", exact: true }).count();
+  await page
+    .getByRole("group", { name: /fire, smoke/ })
+    .getByRole("button", { name: "No" })
+    .click();
+  await page.getByRole("button", { name: /^None of the other (two|three|four|five|six|seven|eight|nine|ten|eleven): go on$/ }).click();
+  await page.getByRole("button", { name: "Look at them" }).click();
+  await expect(page.getByRole("heading", { name: "Anything dangerous?" })).toBeVisible();
+  await expect(page.locator("main").getByRole("button", { name: "No", exact: true, pressed: true })).toHaveCount(asked);
+  await page
+    .getByRole("group", { name: /fire, smoke/ })
+    .getByRole("button", { name: "Yes" })
+    .click();
+  await expect(page.getByText("Fire, or a mist of fuel").first()).toBeVisible();
+});
+
+test("a figure half typed outlives a reload", async ({ page }) => {
+  const fleet = await Fleet.of(page.request);
+  await slowStart(page);
+  await noneOfThese(page);
+  const { document: tree } = await fleet.tree();
+  const check = tree.checks.find(({ key }) => key === "cranking-volts") ?? tree.checks.find(({ reading }) => reading)!;
+  const d = new URL(page.url()).searchParams.get("d");
+  await page.goto(`/diagnose?d=${d}&at=looked&which=${check.key}`);
+  await page.getByLabel("Reading", { exact: true }).fill("9,");
+  await page.reload();
+  await expect(page.getByLabel("Reading", { exact: true })).toHaveValue("9,");
+});
+
+test("an outcome that lacks something brings the field that lacks it to the eye", async ({ page }) => {
+  await slowStart(page);
+  await noneOfThese(page);
+  const d = new URL(page.url()).searchParams.get("d");
+  await page.goto(`/diagnose?d=${d}&at=outcome`);
+  await page.getByRole("radio", { name: /^Cured/ }).check();
+  await page.getByRole("button", { name: "Log it" }).click();
+  await expect(page.getByRole("textbox", { name: "What was it?" })).toBeFocused();
+  await expect(page.getByRole("textbox", { name: "What was it?" })).toBeInViewport();
+});

@@ -144,6 +144,7 @@ export const BAND_FIGURES: readonly BandFigure[] = [
   practice("gland-temperature: warm | hot", 60, "°C", { note: "too hot to hold" }),
 
   // Exhaust
+  practice("co-meter: some | high", [30, 35], "ppm", { note: "above 30 to 35 sustained, or any alarm" }),
   practice("elbow-temp: usual | warm", 60, "°C", { note: "40 to 60 is usual" }),
   practice("elbow-temp: warm | hot", 75, "°C", { note: "beside the published alarm point of 165 degF" }),
   {
@@ -226,8 +227,8 @@ export const BAND_FIGURES: readonly BandFigure[] = [
   // Fuel quality
   {
     edge: "water-ppm: within | over",
-    figure: 200 / 10_000,
-    unit: "%",
+    figure: 200,
+    unit: "mg/kg",
     standing: "published",
     source: "nzf, EN 590 as tabled: water 200 mg/kg at most",
   },
@@ -344,6 +345,7 @@ export const WITHOUT_FIGURE: Readonly<Record<string, string>> = {
   "hx-inlet: follows | inlet-cool":
     "a gauge's error of 8 to 10 °C, and a few degrees lost on the way; that it is told there is common practice",
   "exhaust-port-temp: even | one-hotter": "as far over the others as the trade calls dead under them",
+  "co-meter: quiet | some": "a third of the limit: what a meter at rest never shows",
   "raw-flow: short | good": "a bucket and a watch err by a tenth, a pump's wear takes the other tenth",
   "cap-test: weak | holds": "a tester's gauge errs by a tenth; the stamped figure is what it should hold",
   "coolant-strength: right | strong": "beyond it antifreeze carries heat worse and protects no better; no figure was looked up",
@@ -437,6 +439,8 @@ export const LIES_IN: readonly LiesIn[] = [
   { check: "hx-drop", value: 10.8, unit: "F-diff", finding: "normal", source: "common practice, 6 °C, the middle of 4 to 8" },
   { check: "ir-vs-gauge", value: 5, unit: "C-diff", finding: "agrees", source: "common practice, inside 8 to 10" },
   { check: "exhaust-port-temp", value: -108, unit: "F-diff", finding: "one-colder", source: "common practice, 60 °C colder" },
+  { check: "water-ppm", value: 199, unit: "mg/kg", finding: "within", source: "nzf, under the limit of 200" },
+  { check: "co-meter", value: 35, unit: "ppm", finding: "high", source: "common practice, top of 30 to 35" },
   { check: "intake-vacuum", value: 25, unit: "inH2O", finding: "high", source: "tm260 p. 135, the limit" },
   { check: "back-pressure", value: 1.5, unit: "psi", kind: "none", finding: "over", source: "m-bp pp. 11-12, as the page has it in psi" },
   {

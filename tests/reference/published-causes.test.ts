@@ -28,6 +28,26 @@ test("every list cites a source of the tree that was read", () => {
   }
 });
 
+test("every list that was read stands here, for each symptom it is about", () => {
+  const taken = new Set(PUBLISHED_LISTS.map(({ source, symptom }) => `${source.split(/[ ,]/)[0]} ${symptom}`));
+  const read = {
+    en3: ["smoke-black", "smoke-blue"],
+    cmb: ["smoke-black", "smoke-white", "smoke-blue"],
+    tm383: ["no-crank-silent", "no-crank-click", "runs-cold"],
+    en2: ["misfire-rough", "hunting-surging", "wont-stop", "runaway"],
+    en1c: ["low-oil-pressure", "hard-start-cold", "crankcase-fumes"],
+    tm272: ["low-oil-pressure", "oil-level-rising", "oil-milky"],
+    tr0656: ["knock-combustion"],
+    "tm209-21": ["not-charging"],
+    ase: ["misfire-rough", "cranks-no-start-no-smoke"],
+    ens: ["misfire-rough", "smoke-black"],
+  };
+  const missing = Object.entries(read).flatMap(([source, symptoms]) =>
+    symptoms.map((one) => `${source} ${one}`).filter((one) => !taken.has(one)),
+  );
+  expect(missing).toEqual([]);
+});
+
 test("no item stands twice in a list", () => {
   for (const { key, items } of PUBLISHED_LISTS) expect(new Set(items.map(({ item }) => item)).size, key).toBe(items.length);
 });

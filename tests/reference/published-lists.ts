@@ -1,9 +1,7 @@
 /**
  * Lists of causes as training courses and manuals print them, item by item in
  * our own words, and the causes of the shipped tree that stand for each.
- * Lists about hard starting, lost power, the smoke or misfire that goes with them, an engine
- * that will not crank, charging, oil and a runaway. Lists about other complaints
- * (knock, coolant) stand here as they are taken up.
+ * One list stands once for every symptom that it is about.
  */
 export type PublishedItem = {
   /** In our own words. */
@@ -32,7 +30,12 @@ export type PublishedList = {
     | "oil-level-rising"
     | "oil-milky"
     | "crankcase-fumes"
-    | "runaway";
+    | "runaway"
+    | "misfire-rough"
+    | "knock-combustion"
+    | "hunting-surging"
+    | "wont-stop"
+    | "cranks-no-start-no-smoke";
   about: string;
   items: readonly PublishedItem[];
 };
@@ -241,7 +244,10 @@ export const PUBLISHED_LISTS: readonly PublishedList[] = [
     about: "an engine that will not crank, where nothing is heard",
     items: [
       { item: "low battery", causes: ["battery-discharged"] },
+      { item: "cables and connections", causes: ["positive-connection-bad", "engine-ground-bad", "battery-switch-fault"] },
       { item: "solenoid", causes: ["starter-solenoid-worn"] },
+      { item: "starter", causes: ["starter-motor-worn", "starter-seized"] },
+      { item: "seized inside", leftOut: "the solenoid clunks against it: it is heard, and stands under the click" },
       {
         item: "switch and its circuit",
         causes: ["key-switch-faulty", "start-circuit-volt-drop", "neutral-switch-open", "start-fuse-open"],
@@ -259,6 +265,7 @@ export const PUBLISHED_LISTS: readonly PublishedList[] = [
       { item: "solenoid", causes: ["starter-solenoid-worn"] },
       { item: "starter", causes: ["starter-motor-worn", "starter-seized"] },
       { item: "seized inside", causes: ["piston-seized"] },
+      { item: "switch and its circuit", causes: ["start-circuit-volt-drop", "harness-plug-corroded", "start-relay-failed"] },
     ],
   },
   {
@@ -419,11 +426,34 @@ export const PUBLISHED_LISTS: readonly PublishedList[] = [
     ],
   },
   {
+    key: "coolant in the oil, by the level",
+    source: "tm272 table 4-1, item 8",
+    symptom: "oil-level-rising",
+    about: "coolant that gets into the oil raises its level too",
+    items: [
+      { item: "the head gasket", causes: ["head-gasket-blown"] },
+      { item: "head, liner or block", causes: ["head-or-block-cracked"] },
+      { item: "the oil cooler", causes: ["oil-cooler-internal-leak"] },
+    ],
+  },
+  {
     key: "ring wear, blow-by",
     source: "en1c p. 3-28, fig. 3-18",
     symptom: "crankcase-fumes",
     about: "worn rings let gas into the crankcase",
-    items: [{ item: "rings worn or stuck", causes: ["rings-worn", "rings-stuck"] }],
+    items: [
+      { item: "rings worn or stuck", causes: ["rings-worn", "rings-stuck"] },
+      { item: "a head gasket that leaks", causes: ["head-gasket-blown"] },
+      { item: "an injector's gasket that leaks gas", causes: ["injector-seat-leak"] },
+      {
+        item: "valves that leak",
+        leftOut: "they leak into ports and manifolds, not into the crankcase; listed there as a cause of low compression",
+      },
+      {
+        item: "a choked air filter",
+        leftOut: "costs compression and draws oil from the breather, but makes no gas below; listed as low compression",
+      },
+    ],
   },
   {
     key: "runaway, Navy",
@@ -435,6 +465,99 @@ export const PUBLISHED_LISTS: readonly PublishedList[] = [
       { item: "a control rack that jams", causes: ["injection-rack-stuck"] },
       { item: "oil in the air passages", causes: ["breather-oil-carryover", "oil-overfilled", "turbo-oil-seal-leak"] },
       { item: "an injector that leaks", leftOut: "on these engines it thins the oil first; the runaway is then that of oil-fuel-diluted" },
+    ],
+  },
+  {
+    key: "misfire as the complaint, Navy",
+    source: "en2 p. 3-31",
+    symptom: "misfire-rough",
+    about: "cylinders that do not fire evenly",
+    items: [
+      { item: "the fuel", causes: ["water-in-fuel", "wrong-fuel", "dirt-sediment", "fuel-line-air-leak"] },
+      { item: "an injector that does not deliver", causes: ["injector-nozzle-blocked", "injector-dribble"] },
+      { item: "worn parts of the injection", causes: ["injection-pump-worn", "delivery-valve-leak"] },
+      { item: "the air cleaner", causes: ["air-filter-blocked"] },
+      { item: "compression lost by valves", causes: ["valves-leaking", "valve-sticking"] },
+      { item: "compression lost by pistons, liners and rings", causes: ["rings-worn", "rings-stuck", "piston-or-rod-damaged"] },
+      { item: "compression lost by the gasket", causes: ["head-gasket-blown"] },
+      { item: "a cracked head or block", causes: ["head-or-block-cracked"] },
+      { item: "a cut-out left engaged", causes: ["decompressor-misadjusted"] },
+    ],
+  },
+  {
+    key: "misfire as the complaint, education body",
+    source: "ens, December 2011",
+    symptom: "misfire-rough",
+    about: "a regular miss is a cylinder, worse cold it is compression; an irregular one is fuel, worse with speed",
+    items: [
+      { item: "compression", causes: ["valves-leaking", "rings-worn", "rings-stuck", "valve-clearance-tight"] },
+      { item: "dirt", causes: ["dirt-sediment"] },
+      { item: "water", causes: ["water-in-fuel"] },
+      { item: "a plugged filter", causes: ["primary-filter-blocked"] },
+    ],
+  },
+  {
+    key: "air in the fuel, misfire",
+    source: "ase p. 207",
+    symptom: "misfire-rough",
+    about: "air in the system, and nozzles, make it miss",
+    items: [
+      { item: "loose joints", causes: ["fuel-line-air-leak"] },
+      { item: "air left by the last opening", causes: ["air-after-service", "hp-line-air"] },
+      { item: "a nozzle that does not close", causes: ["injector-dribble"] },
+      { item: "a dirty nozzle", causes: ["injector-nozzle-blocked"] },
+      { item: "the tank run out", leftOut: "these small engines falter and stop within a minute: fades-and-stops, and no start after it" },
+    ],
+  },
+  {
+    key: "air in the fuel, no start",
+    source: "ase p. 207",
+    symptom: "cranks-no-start-no-smoke",
+    about: "air in the system: no fuel is injected until no bubbles come",
+    items: [
+      { item: "loose joints", causes: ["fuel-line-air-leak", "primary-filter-seal-leak"] },
+      { item: "air left by the last opening", causes: ["air-after-service", "hp-line-air"] },
+      { item: "the tank run out", causes: ["tank-empty", "wrong-tank-selected"] },
+      { item: "a nozzle that does not close", leftOut: "it lets air back into one pipe; the others inject, and there is smoke" },
+      { item: "a dirty nozzle", leftOut: "one cylinder of several; it starts, with a miss and black smoke" },
+    ],
+  },
+  {
+    key: "knock, Army course",
+    source: "tr0656 p. 93, item g",
+    symptom: "knock-combustion",
+    about: "a detonation that is heard",
+    items: [
+      { item: "injectors that leak", causes: ["injector-dribble", "injector-low-pressure"] },
+      { item: "fuel connections in the head", causes: ["hp-pipe-leak"] },
+      { item: "the control rack", causes: ["injection-rack-stuck"] },
+      { item: "lash adjusters", causes: ["valve-clearance-wide"] },
+      { item: "air seals of a two-stroke", leftOut: "these engines are four-strokes; there are none" },
+    ],
+  },
+  {
+    key: "control racks, Navy: hunting",
+    source: "en2 p. 3-36",
+    symptom: "hunting-surging",
+    about: "a rack that sticks makes the engine hunt",
+    items: [
+      { item: "a sticking or jammed rack", causes: ["injection-rack-stuck"] },
+      { item: "the governor's linkage", causes: ["governor-linkage-sticking"] },
+      { item: "the governor itself", causes: ["governor-worn"] },
+    ],
+  },
+  {
+    key: "control racks, Navy: will not stop",
+    source: "en2 p. 3-36",
+    symptom: "wont-stop",
+    about: "a rack that jams open keeps the engine running",
+    items: [
+      { item: "a jammed rack", causes: ["injection-rack-stuck"] },
+      {
+        item: "governor and linkage",
+        leftOut:
+          "on these pumps the stop lever moves the rack past the governor; what keeps it from stopping is the rack itself, or the stop",
+      },
     ],
   },
 ];

@@ -70,7 +70,9 @@ describe("tree -- check", () => {
     const shipped = { key: "small-marine-diesel" };
     expect(barred("causes", 201, shipped)).toEqual({ figure: "causes", value: 201, bar: 201, holds: true });
     expect(barred("causes", 200, shipped)).toMatchObject({ holds: false });
-    expect(barred("readings", 79, shipped)).toEqual({ figure: "readings", value: 79 });
+    expect(barred("readings", 20, shipped)).toMatchObject({ holds: false });
+    expect(barred("stopRules", 23, shipped)).toEqual({ figure: "stopRules", value: 23, bar: 23, holds: true });
+    expect(barred("readings", 3, { key: "own" })).toEqual({ figure: "readings", value: 3 });
     expect(barred("errors", 1, { key: "own" })).toEqual({ figure: "errors", value: 1, bar: 0, holds: false });
   });
 
@@ -143,6 +145,9 @@ describe("tree -- prove", () => {
       "top3.butConfirming",
       "top1.all",
       "top3.all",
+      "twoCauses",
+      "twoCauses.bothInFirstThree",
+      "twoCauses.likeliestPair",
       "cured",
       "held",
       "called",

@@ -25,7 +25,20 @@ const AFTER_BAR_OVER = (l: Look, kind: "check" | "remedy", key: string) =>
   l[kind](key).after.some((before) => "check" in before && before.check === "bar-over" && before.finding === "even");
 const NO_RUN_ON = ["fire", "co", "runaway", "fuel-mist"];
 /** Rules about an engine that stands already, or that would race: there is nothing to run on with. */
-const STANDS_ALREADY = ["no-restart-after-runaway", "stopped-with-a-bang", "runaway-oil-in-intake"];
+const STANDS_ALREADY = [
+  "no-restart-after-runaway",
+  "stopped-with-a-bang",
+  "runaway-oil-in-intake",
+  "hydraulic-lock",
+  "crank-floods-exhaust",
+  "starter-limit",
+  "petrol-in-fuel",
+  "salt-in-coolant",
+  "timing-jumped",
+  "water-on-the-pistons",
+  "water-past-separator",
+  "turbo-wheel-touches",
+];
 
 export const REVIEW_ITEMS: readonly ReviewItem[] = [
   {
@@ -209,6 +222,7 @@ export const REVIEW_ITEMS: readonly ReviewItem[] = [
         l.tree.stopRules.every(({ key, runOnIfStoppingEndangers: runOn }) => runOn === ![...NO_RUN_ON, ...STANDS_ALREADY].includes(key)),
       "people before boat before engine in the first rule": (l) =>
         /^People[^]*Boat/.test(l.rule("sea-room").says.join("\n")) && l.rule("sea-room").when.symptoms === "*",
+      "no rule of a standing engine is one that says stop": (l) => STANDS_ALREADY.every((k) => l.rule(k).kind !== "stop"),
       "the keys exist": (l) => [...NO_RUN_ON, ...STANDS_ALREADY].every((k) => l.rule(k) !== undefined),
     },
   },
@@ -792,7 +806,10 @@ export const REVIEW_ITEMS: readonly ReviewItem[] = [
         /key at run, not at pre-heat, three to five minutes without cranking[^]*running back into the tank[^]*One burst of 10 seconds/i.test(
           l.words(l.remedy("bleed-low")),
         ) && /timer stops the pump/.test(l.words(l.remedy("purge-by-pump"))),
-      "bleed-high is not turned off by it": (l) => l.remedy("bleed-high").appliesTo?.features?.["self-bleeding"] === undefined,
+      "it turns nothing off: the pump is offered to every engine, and so are the bleed screws": (l) =>
+        l.remedy("purge-by-pump").appliesTo === undefined &&
+        l.remedy("bleed-low").appliesTo?.features === undefined &&
+        l.tree.features.every(({ key }) => key !== "self-bleeding"),
     },
   },
   {

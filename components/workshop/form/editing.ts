@@ -1,6 +1,7 @@
-import { createContext, useContext } from "react";
+import { createContext, useContext, type ComponentType } from "react";
 import type { TreeNode } from "@/lib/core/tree/edits/edit";
 import type { FaultTree } from "@/lib/core/tree/schema";
+import type { Shape } from "./shape";
 
 /** The node that is edited, as it stands in the form, and the tree round it: what its fields may name. */
 export const Edited = createContext<{ tree: FaultTree; node: Partial<TreeNode> } | null>(null);
@@ -24,3 +25,6 @@ export type Editing<T = unknown> = {
   /** The label is said by what stands round it. */
   bare?: boolean;
 };
+
+/** The editor of a field by its shape: handed to lists and groups, which hold fields in their turn. */
+export type FieldEditor = ComponentType<Editing & { shape: Shape; must: boolean }>;

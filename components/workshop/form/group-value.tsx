@@ -1,7 +1,6 @@
-import type { Editing } from "./editing";
+import type { Editing, FieldEditor } from "./editing";
 import { hintOf, labelOf } from "./field-words";
 import type { Field } from "./shape";
-import { ShapeValue } from "./shape-value";
 
 /** Fields that belong together. A group that may be left out is left out when its last field is emptied. */
 export function GroupValue({
@@ -12,7 +11,8 @@ export function GroupValue({
   fields,
   must,
   bare,
-}: Editing<object> & { fields: readonly Field[]; must: boolean }) {
+  editor: Editor,
+}: Editing<object> & { fields: readonly Field[]; must: boolean; editor: FieldEditor }) {
   const hint = hintOf(name);
   const put = (field: string, next: unknown) => {
     const all = { ...value, [field]: next };
@@ -20,7 +20,7 @@ export function GroupValue({
     onChange(said.length === 0 && !must ? undefined : Object.fromEntries(said));
   };
   const body = fields.map((field) => (
-    <ShapeValue
+    <Editor
       key={field.name}
       name={field.name}
       path={`${path}-${field.name}`}

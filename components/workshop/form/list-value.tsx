@@ -1,12 +1,18 @@
-import type { Editing } from "./editing";
+import type { Editing, FieldEditor } from "./editing";
 import { labelOf } from "./field-words";
 import { AddRow, Rows } from "./rows";
 import type { Shape } from "./shape";
 import { emptyOf } from "./empty-value";
-import { ShapeValue } from "./shape-value";
 
 /** Things in an order: steps, phrases, findings, parts. */
-export function ListValue({ name, path, value = [], onChange, of }: Editing<readonly unknown[]> & { of: Shape }) {
+export function ListValue({
+  name,
+  path,
+  value = [],
+  onChange,
+  of,
+  editor: Editor,
+}: Editing<readonly unknown[]> & { of: Shape; editor: FieldEditor }) {
   const put = (items: readonly unknown[]) => onChange(items);
   const called = (index: number) => `${labelOf(name)} ${index + 1}`;
   return (
@@ -23,7 +29,7 @@ export function ListValue({ name, path, value = [], onChange, of }: Editing<read
         key: String(index),
         called: called(index),
         node: (
-          <ShapeValue
+          <Editor
             bare
             must
             name={name}

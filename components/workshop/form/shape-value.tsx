@@ -51,10 +51,10 @@ export function ShapeValue({ shape, must, ...field }: Props) {
         </Choice>
       );
     case "group":
-      return <GroupValue {...as<object>(field)} fields={shape.fields} must={must} />;
+      return <GroupValue {...as<object>(field)} fields={shape.fields} must={must} editor={ShapeValue} />;
     case "list":
       if (choices && shape.of.is === "text") return <KeysValue {...as<readonly string[]>(field)} choices={choices} />;
-      return <ListValue {...as<readonly unknown[]>(field)} of={shape.of} />;
+      return <ListValue {...as<readonly unknown[]>(field)} of={shape.of} editor={ShapeValue} />;
     case "map":
       return shape.of.is === "text" ? <FeaturesValue {...as<Readonly<Record<string, string | number>>>(field)} /> : null;
     default:

@@ -31,5 +31,8 @@ export function evidenceFor(tree: FaultTree, known: KnownCase, told: Told): Evid
       const answer = answerOf(known, key);
       return { check: key, finding: check && answer ? readAnswer(check, answer, profile, tree.features) : null };
     });
-  return { symptoms: known.symptoms.map((symptom) => ({ symptom, present: true })), findings, remedies: [] };
+  const remedies = (known.tried ?? [])
+    .filter(({ when }) => told !== "start" || when === "start")
+    .map(({ remedy, result }) => ({ remedy, result }));
+  return { symptoms: known.symptoms.map((symptom) => ({ symptom, present: true })), findings, remedies };
 }

@@ -85,5 +85,8 @@ function startOf(known: KnownCase, person: Who): Payload[] {
       kind: "answered",
       payload: { check, answer: answerOf(known, check) ?? { cannotTell: true }, photos: [] },
     })),
+    ...(known.tried ?? [])
+      .filter(({ when }) => when === "start")
+      .map(({ remedy, result }): Payload => ({ kind: "remedy-tried", payload: { remedy, result, photos: [] } })),
   ];
 }

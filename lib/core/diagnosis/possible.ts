@@ -1,6 +1,7 @@
 import { probabilityOf } from "./cause-row";
 import type { Belief } from "./believe";
 import type { Evidence } from "./evidence";
+import { howSure } from "./how-sure";
 import type { Model } from "./model";
 import { likeliestPairs } from "./pairs";
 import { ofHundred } from "./of-hundred";
@@ -34,6 +35,7 @@ export function possible(model: Model, evidence: Evidence, belief: Belief): Poss
     })),
     others: { count: folded.length, of100: counts[named.length] ?? 0 },
     unknown: { share: unknown, of100: counts[named.length + 1] ?? 0 },
+    sure: howSure(belief).says,
     two: twoShown(model, belief),
   };
 }
@@ -48,6 +50,7 @@ function twoShown(model: Model, { two, pairs, putRight }: Belief): Possible["two
 
 function causeShown(model: Model, evidence: Evidence, index: number, speaks: Speaks): Omit<PossibleCause, "share" | "of100" | "inAll"> {
   const cause = model.causes[index]!;
+  const moved = model.setting.multipliers?.find((one) => one.cause === cause.key);
   const asked = new Set(evidence.findings.map(({ check }) => check));
   const notChecked = model.checks
     .filter((check) => cause.gives[check.key] !== undefined && check.offered && !asked.has(check.key))
@@ -60,6 +63,7 @@ function causeShown(model: Model, evidence: Evidence, index: number, speaks: Spe
     key: cause.key,
     title: cause.title,
     is: cause.is,
+    ofThisEngine: moved ? { times: moved.times, reason: moved.reason } : null,
     speaksFor: speaks.for,
     speaksAgainst: speaks.against,
     notChecked: notChecked.map(({ check }) => ({ check: check.key, title: check.title })),

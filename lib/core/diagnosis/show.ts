@@ -76,6 +76,7 @@ const ruleShown = (rule: StopRule, runOn: boolean): RuleShown => ({
   says: rule.says,
   runOn,
   clearedWhen: rule.clearedWhen ?? null,
+  drawing: rule.drawing ?? null,
 });
 
 function conflictsShown(tree: FaultTree, state: DiagnosisState): DiagnosisView["conflicts"] {

@@ -66,6 +66,8 @@ export type RuleShown = {
   /** The one exception holds: run on to safety where stopping now endangers people or boat. */
   runOn: boolean;
   clearedWhen: string | null;
+  /** As of a step. */
+  drawing: string | null;
 };
 
 /** `due`: to be asked now. `found`: in force by what was found or cranked, not by a yes. `event`: the answer that a change takes the place of. */
@@ -112,6 +114,8 @@ export type Possible = {
   /** How many causes are folded into "others", and their share. */
   others: { count: number; of100: number };
   unknown: { share: number; of100: number };
+  /** How sure the first place is, in a sentence. */
+  sure: string;
   /** "Perhaps two faults", with the likeliest two; null while the numbers do not say so, and once one of two was put right. */
   two: { share: number; of100: number; likeliest: readonly [Named, Named] } | null;
 };
@@ -126,6 +130,8 @@ export type PossibleCause = {
   of100: number;
   /** Of 100 engines like this, how many have it at all, alone or beside another fault. */
   inAll: number;
+  /** What this engine's log says of it, and by how much that moved its weight; null where it says nothing. */
+  ofThisEngine: { times: number; reason: string } | null;
   speaksFor: readonly EvidenceShown[];
   speaksAgainst: readonly EvidenceShown[];
   notChecked: readonly { check: string; title: string }[];

@@ -26,6 +26,10 @@ const FIELD_WORDS: Readonly<Record<string, string>> = {
   sound: "on a sound engine",
   clearedBy: "cleared by",
   tryOut: "try-out",
+  upkeep: "upkeep",
+  everyHours: "every so many hours",
+  everyMonths: "every so many months",
+  guards: "keeps away",
 };
 
 /**

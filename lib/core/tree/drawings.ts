@@ -1,7 +1,7 @@
 /** A drawing of our own: what it is called, and what it shows, for those who cannot see it or have not got it. */
 export type DrawingWords = { title: string; describes: string };
 
-/** Every drawing that a check or a remedy may name. Its picture is components/drawing/<key>.tsx. */
+/** Every drawing that a check, a remedy or a stop rule may name. Its picture is components/drawing/<key>.tsx. */
 export const DRAWINGS = {
   "battery-scale": {
     title: "What a rested battery's volts mean",

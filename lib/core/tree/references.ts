@@ -22,7 +22,7 @@ export function referencesOf(tree: FaultTree): Reference[] {
     ...tree.cautions.flatMap((caution) => from("caution", caution.key, sources(caution.sources))),
     ...tree.symptoms.flatMap((symptom) => from("symptom", symptom.key, [system(symptom.system), ...sources(symptom.sources)])),
     ...tree.checks.flatMap((check) => from("check", check.key, [...stepRefs(check), ...checkRefs(check)])),
-    ...tree.remedies.flatMap((remedy) => from("remedy", remedy.key, stepRefs(remedy))),
+    ...tree.remedies.flatMap((remedy) => from("remedy", remedy.key, [...stepRefs(remedy), ...upkeepRefs(remedy)])),
     ...tree.causes.flatMap((cause) => from("cause", cause.key, causeRefs(cause))),
     ...tree.stopRules.flatMap((rule) => from("stop rule", rule.key, stopRuleRefs(rule))),
     ...tree.knownCases.flatMap((known) => from("known case", known.key, knownCaseRefs(known))),
@@ -68,6 +68,11 @@ function stepRefs(step: FaultTree["checks"][number] | FaultTree["remedies"][numb
     ...sources(step.sources),
   ];
 }
+
+const upkeepRefs = ({ upkeep }: FaultTree["remedies"][number]): Out[] => [
+  ...(upkeep?.guards ?? []).map((key): Out => ({ to: "cause", key, field: "upkeep > guards" })),
+  ...sources(upkeep?.sources ?? []),
+];
 
 function checkRefs(check: FaultTree["checks"][number]): Out[] {
   return [
@@ -118,6 +123,7 @@ function knownCaseRefs(known: FaultTree["knownCases"][number]): Out[] {
     ...known.findings.flatMap((seen): Out[] =>
       seen.finding === undefined ? [{ to: "check", key: seen.check, field: "findings" }] : finding(seen.check, seen.finding, "findings"),
     ),
+    ...(known.tried ?? []).map(({ remedy }): Out => ({ to: "remedy", key: remedy, field: "tried" })),
     ...[...known.causes, ...known.alsoAccept.map(({ cause }) => cause)].map((key): Out => ({ to: "cause", key, field: "causes" })),
   ];
 }

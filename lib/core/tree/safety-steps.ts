@@ -103,7 +103,12 @@ const RULES: readonly Rule[] = [
   {
     holds: (f) => f.handsAtShaft,
     first: () => "Stop the engine, gear in neutral, key out and in your pocket. Tell everyone aboard that hands are at the shaft.",
-    last: () => "Spanners, rags and hands away from the shaft before the key goes back.",
+  },
+  {
+    holds: (f) => f.handsAtShaft,
+    first: () =>
+      "Under sail, in tow or in a stream the propeller turns the shaft all the same: sails down, anchored or moored, and the shaft lashed to the engine bed by a rope thrown round it while it stands. Off again before it is turned by hand, and before the engine is started.",
+    last: () => "Lashing off. Spanners, rags and hands away from the shaft before the key goes back.",
     caution: {
       key: "shaft-hands",
       signal: "danger",
@@ -112,12 +117,16 @@ const RULES: readonly Rule[] = [
   },
   {
     holds: (f) => f.beltsExposed && !f.running,
-    first: () => "Stop the engine, key out and in your pocket, before a hand goes near a belt.",
+    first: (f) =>
+      f.cranks
+        ? "Stop the engine. The key is in your pocket while a hand, a spanner or a lead is near a belt; it goes in only for the crank, with everyone clear, and a second person turns it when you say so."
+        : "Stop the engine, key out and in your pocket, before a hand goes near a belt.",
     caution: { key: "belts", signal: "warning", says: "Belts and pulleys take fingers when someone starts the engine." },
   },
   {
     holds: (f) => f.beltsExposed && f.running,
-    first: () => "Moored or in calm, at idle or fast idle only. Tie back hair, hood and cords; a second person stands at the stop control.",
+    first: () =>
+      "While the engine box is open: moored or in calm, at idle or fast idle only. Tie back hair, hood and cords; a second person stands at the stop control.",
     caution: {
       key: "belts-turning",
       signal: "danger",
@@ -190,8 +199,9 @@ const RULES: readonly Rule[] = [
   {
     holds: (f) => f.worksOnBattery,
     first: () =>
-      "Stop charger and engine first, open the locker and let it air. Rings and watch off, eye shield on. If a lead comes off: negative first.",
-    last: () => "Leads clean and tight, the negative on last.",
+      "Stop charger and engine first, open the locker and let it air. Rings and watch off, eye shield on. If a lead comes off: negative first, and see first what goes dead with it; a bilge pump without current pumps nothing.",
+    last: () =>
+      "Leads clean and tight, the negative on last. Then what the battery feeds: a bilge pump back on automatic, and tried, before anyone leaves the boat.",
     caution: {
       key: "battery-gas",
       signal: "danger",

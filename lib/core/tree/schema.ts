@@ -81,6 +81,7 @@ export const Quantity = z.enum([
   "flow",
   "length",
   "ratio",
+  "concentration",
   "density",
   "count",
 ]);
@@ -161,8 +162,21 @@ export const Check = z.strictObject({
 });
 export type Check = z.infer<typeof Check>;
 
+/** What is renewed by hours or months, whichever comes first, and which causes that keeps away. */
+export const Upkeep = z
+  .strictObject({
+    everyHours: z.number().positive().max(20_000).optional(),
+    everyMonths: z.number().positive().max(240).optional(),
+    guards: z.array(Key).min(1),
+    sources: Citations,
+  })
+  .refine(({ everyHours, everyMonths }) => (everyHours ?? everyMonths) !== undefined, "upkeep is due by hours, by months, or by both");
+export type Upkeep = z.infer<typeof Upkeep>;
+
 export const Remedy = z.strictObject({
   ...step,
+  /** Where the remedy is upkeep too: done by itself from time to time, it keeps causes away. */
+  upkeep: Upkeep.optional(),
   parts: z.array(z.strictObject({ key: Key, title: Line, quantity: z.number().int().positive().default(1) })).default([]),
   /** How the cure is proved. */
   proof: Text,
@@ -203,6 +217,8 @@ export const Symptom = z.strictObject({
   system: Key,
   /** What people really say, misspelt too. */
   phrases: z.array(Line).min(5),
+  /** Why few engines show it, where few do: causes that have no link to it would weigh too much otherwise (soundness rule strays-heavy). */
+  rare: Text.optional(),
   /** Engine states that cannot be had while it lasts: an engine that does not start shows nothing under load. */
   rulesOut: z.array(EngineState).optional(),
   sources: Citations,
@@ -241,6 +257,8 @@ export const StopRule = z.strictObject({
   clearedBy: z.array(FindingRef).default([]),
   /** What one has to say to clear it by hand, where no check does: "The exhaust has been drained". */
   clearedWhen: Line.optional(),
+  /** One of the drawings of drawings.ts, where words are too slow to read. */
+  drawing: Key.optional(),
   appliesTo: AppliesTo.optional(),
   sources: Citations,
 });
@@ -273,6 +291,10 @@ export const KnownCase = z.strictObject({
       confirms: z.literal(true).optional(),
     }),
   ),
+  /** Remedies that had been tried, or were tried on the way, and did not cure it. */
+  tried: z
+    .array(z.strictObject({ remedy: Key, result: z.enum(["no-change", "better"]), when: z.enum(["start", "after"]).default("after") }))
+    .optional(),
   causes: z.array(Key).min(1),
   alsoAccept: z.array(z.strictObject({ cause: Key, reason: Line })).default([]),
   source: Line,

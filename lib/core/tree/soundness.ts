@@ -12,6 +12,7 @@ import type { Once, Rule } from "./rules/rule";
 import { safetyRules } from "./rules/safety";
 import { stopRuleRules } from "./rules/stop-rules";
 import { symptomRules } from "./rules/symptoms";
+import { upkeepRules } from "./rules/upkeep";
 import type { FaultTree } from "./schema";
 
 /** All that a sound tree keeps to beyond its shape. */
@@ -27,6 +28,7 @@ export const RULES: readonly Rule[] = [
   ...safetyRules,
   ...drawingRules,
   ...stopRuleRules,
+  ...upkeepRules,
   ...knownCaseRules,
 ];
 

@@ -31,7 +31,15 @@ export async function readPhone(scope: FleetScope): Promise<Phone> {
     openDiagnoses: await readOpenDiagnoses(scope),
     recentLog,
     treeVersion: { id: version.id, hash: version.hash, number: version.number, publishedAt: version.publishedAt },
-    multipliers: Object.fromEntries(engines.map((engine) => [engine.id, multipliersFor(tree, logOf(engine.id))])),
+    multipliers: Object.fromEntries(
+      engines.map((engine) => [
+        engine.id,
+        multipliersFor(tree, logOf(engine.id), {
+          now: { at: new Date().toISOString(), hours: engine.hoursSinceNew },
+          fleet: recentLog.filter((entry) => entry.engineId !== engine.id),
+        }),
+      ]),
+    ),
   };
 }
 

@@ -21,6 +21,7 @@ const cause = (share: number, factors: Record<string, number>): PossibleCause =>
     share,
     of100: Math.round(share * 100),
     inAll: Math.round(share * 100),
+    ofThisEngine: null,
     speaksAgainst: [],
     notChecked: [],
     behind: [],

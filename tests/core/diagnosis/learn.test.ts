@@ -100,6 +100,21 @@ describe("a logged diagnosis as a known case [V4]", () => {
     });
   });
 
+  it("tells what was tried and did not cure, and not what cured", () => {
+    const tried = (remedy: string, result: "no-change" | "cured") => ({
+      kind: "remedy-tried" as const,
+      payload: { remedy, result, photos: [] },
+    });
+    const [one, two] = ["clean", "renew"];
+    const log = logOf([begun, tried(one!, "no-change"), tried(two!, "cured"), ended({})]);
+    expect(caseOfLog(log, tree)?.tried).toEqual([{ remedy: one, result: "no-change", when: "after" }]);
+  });
+
+  it("is none where one of two faults was put right on the way: which finding was whose is not known", () => {
+    const better = { kind: "remedy-tried" as const, payload: { remedy: "clean", result: "better" as const, photos: [] } };
+    expect(caseOfLog(logOf([begun, answered, better, ended({})]), tree)).toBeNull();
+  });
+
   it("keeps a value as it was typed", () => {
     const reading = tree.checks.find((one) => one.reading !== undefined)!;
     const answer = { value: 0.1, unit: reading.reading!.unit };

@@ -56,6 +56,40 @@ describe("the proof of a tree by known cases", () => {
     expect(prove(small, [accepted]).cases[0]?.place.start).toBe(1);
   });
 
+  it("[V1] of two causes either counts as right, and whether both were found is told beside it", () => {
+    const both = known({ symptoms: ["weak", "smoky"], causes: ["a", "d"], findings: findings.slice(0, 1) });
+    const larger = tree({
+      ...small,
+      symptoms: [...small.symptoms, symptom("smoky")],
+      causes: [...small.causes, cause("d", { shows: { smoky: "always" }, curedBy: { "mend-b": "always" } })],
+    });
+    const { cases, right, twoCauses } = prove(larger, [both, known({ findings })]);
+    expect(cases[0]?.place["but-confirming"]).toBe(1);
+    expect(right["but-confirming"].first).toBe(1);
+    expect(cases.map((one) => one.both)).toEqual([{ inFirstThree: true, likeliestPair: true }, null]);
+    expect(twoCauses).toEqual({ cases: 1, inFirstThree: 1, likeliestPair: 1 });
+    // The first cure leaves the other fault, and the play goes on to the second.
+    expect(cases[0]?.played.end).toBe("cured");
+    expect(
+      cases[0]?.played.steps
+        .filter(({ kind }) => kind === "remedy")
+        .map(({ key }) => key)
+        .sort(),
+    ).toEqual(["mend-a", "mend-b"]);
+  });
+
+  it("[V1] takes a remedy that was tried and did not cure as evidence, at the start where it had been tried before", () => {
+    const tried = (when: "start" | "after"): KnownCase["tried"] => [{ remedy: "mend-b", result: "no-change", when }];
+    expect(prove(small, [known({})]).cases[0]?.place).toMatchObject({ start: 2, "but-confirming": 2 });
+    expect(prove(small, [known({ tried: tried("after") })]).cases[0]?.place).toMatchObject({ start: 2, "but-confirming": 1 });
+    expect(prove(small, [known({ tried: tried("start") })]).cases[0]?.place).toMatchObject({ start: 1, "but-confirming": 1 });
+  });
+
+  it("[V2] does not try again what had been tried before", () => {
+    const steps = prove(small, [known({ tried: [{ remedy: "mend-b", result: "no-change", when: "start" }] })]).cases[0]?.played.steps;
+    expect(steps?.map(({ key }) => key)).not.toContain("mend-b");
+  });
+
   it("[V1] says when the tree does not have the cause", () => {
     expect(prove(small, [known({ causes: ["elsewhere"] })]).cases[0]?.place.all).toBeNull();
   });

@@ -91,6 +91,15 @@ describe("what a screen shows", () => {
     expect(said.at(-1)?.says).toBe("0.31 bar: high");
   });
 
+  it("[B3] shows with a cause what this engine's log says of it", () => {
+    const phone = new Device(1);
+    const multipliers = [{ cause: "elbow", times: 3, reason: "Found on this engine once before." }];
+    const { possible } = ask([phone.begin({ symptoms: ["weak"], multipliers })]);
+    const of = (key: string) => possible.causes.find((one) => one.key === key)?.ofThisEngine;
+    expect(of("elbow")).toEqual({ times: 3, reason: "Found on this engine once before." });
+    expect(of("filter")).toBeNull();
+  });
+
   it("[X3] shows what brings a cause on behind it", () => {
     expect(ask([begin(new Device(1))]).possible.causes.find(({ key }) => key === "filter")?.behind).toEqual([
       { cause: "growth", title: "growth", share: 0.66 },

@@ -82,6 +82,14 @@ describe("taking out a node", () => {
     }
   });
 
+  it("takes the cause off the upkeep that guards it, and upkeep that guards nothing else with it", () => {
+    const upkeep = { everyHours: 200, guards: ["filter-blocked"], sources: ["judgement"] };
+    const kept = { ...tree, remedies: tree.remedies.map((one) => (one.key === "change-filter" ? { ...one, upkeep } : one)) };
+    const removed = removeNode(kept, "causes", "filter-blocked");
+    if ("refused" in removed) throw new Error(removed.refused);
+    expect(removed.tree.remedies.every((one) => one.upkeep === undefined)).toBe(true);
+  });
+
   it("is refused for a system in use, and says who uses it", () => {
     expect(removeNode(tree, "systems", "fuel")).toEqual({ refused: expect.stringContaining("symptom") });
   });

@@ -114,6 +114,28 @@ describe("hands and bodies", () => {
     expect(cautions[0]).toMatchObject({ signal: "danger", says: expect.stringMatching(/shore power/) as string });
   });
 
+  test("belts and a crank: the key leaves the pocket for the crank alone, and a second person turns it", () => {
+    const { first } = safetyOf(step({ beltsExposed: true, cranks: 5, fuelOff: true }, "cranking"), wet);
+    expect(all(first)).toMatch(
+      /in your pocket while a hand.*near a belt.*only for the crank, with everyone clear, and a second person turns it/,
+    );
+    expect(all(first)).not.toMatch(/key out and in your pocket, before/);
+  });
+
+  test("belts turning: idle holds while the engine box is open, so full revs with the box shut are no contradiction", () =>
+    expect(all(safetyOf(step({ beltsExposed: true }, "idling"), wet).first)).toMatch(/^While the engine box is open: .*fast idle only/));
+
+  test("a shaft that sail, tow or stream could turn is lashed first, and let go last", () => {
+    const { first, last } = safetyOf(step({ handsAtShaft: true }), wet);
+    expect(all(first)).toMatch(
+      /in neutral.*\nUnder sail, in tow or in a stream.*anchored or moored, and the shaft lashed.*Off again before.*before the engine is started/,
+    );
+    expect(last.at(-1)).toMatch(/^Lashing off/);
+  });
+
+  test("a battery's leads go back with the bilge pump's supply, tried", () =>
+    expect(all(safetyOf(step({ worksOnBattery: true }), wet).last)).toMatch(/negative on last.*bilge pump back on automatic, and tried/));
+
   test("a shaft is touched with the engine stopped and the key in the pocket", () =>
     expect(safetyOf(step({ handsAtShaft: true }), wet).first[0]).toMatch(/gear in neutral, key out/));
 

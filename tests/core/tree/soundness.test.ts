@@ -22,6 +22,25 @@ const asRivals =
 
 /** Rule -> ways to break it, each by one change to a sound tree. */
 const breaches: Record<string, Breach[]> = {
+  "guarded-is-cured": [
+    {
+      breaks: "upkeep that guards a cause it does not cure",
+      change: (t) => (the(t.remedies, "change-filter").upkeep = { everyHours: 200, guards: ["tank-dirty"], sources: ["judgement"] }),
+      node: "remedy change-filter",
+      says: /guards tank-dirty, which it does not cure/,
+    },
+  ],
+  "guarded-once": [
+    {
+      breaks: "two kinds of upkeep for one cause",
+      change: (t) => {
+        the(t.causes, "tank-dirty").curedBy["change-filter"] = "seldom";
+        for (const key of ["change-filter", "clean-tank"])
+          the(t.remedies, key).upkeep = { everyHours: 200, guards: ["tank-dirty"], sources: ["judgement"] };
+      },
+      node: "remedy clean-tank",
+    },
+  ],
   "key-twice": [
     {
       breaks: "two checks with one key",
@@ -51,6 +70,12 @@ const breaches: Record<string, Breach[]> = {
       breaks: "a remedy with the name of a thing that every object has",
       change: (t) => (the(t.remedies, "clean-tank").drawing = "constructor"),
       node: "remedy clean-tank",
+    },
+    {
+      breaks: "a stop rule with a drawing that nobody has drawn",
+      change: (t) => (the(t.stopRules, "overheat").drawing = "runaway-water"),
+      node: "stop rule overheat",
+      says: /no such drawing/,
     },
   ],
   "part-twice": [
@@ -418,6 +443,14 @@ const breaches: Record<string, Breach[]> = {
       says: /%/,
     },
   ],
+  "rare-in-vain": [
+    {
+      breaks: "a symptom called rare that common causes show",
+      change: (t) => (the(t.symptoms, "no-crank").rare = "Few engines are as silent as this."),
+      node: "symptom no-crank",
+      says: /often enough/,
+    },
+  ],
   "state-against-flags": [
     { breaks: "cranking a stopped engine", change: (t) => (the(t.checks, "crank-sound").engine = "stopped"), node: "check crank-sound" },
     {
@@ -556,6 +589,25 @@ const breaches: Record<string, Breach[]> = {
       change: (t) => (the(t.stopRules, "overheat").forbids = ["cranking", "under-load"]),
       node: "stop rule overheat",
       says: /forbid idling/,
+    },
+  ],
+  "stop-rule-runs-on-what-stands": [
+    {
+      breaks: "running on with an engine that was cranked in vain",
+      change: (t) => {
+        const rule = the(t.stopRules, "hydraulic-lock");
+        rule.when = { symptoms: [], findings: [], crankSeconds: 30 };
+        rule.runOnIfStoppingEndangers = true;
+      },
+      node: "stop rule hydraulic-lock",
+    },
+    {
+      breaks: "running on with an engine that does not turn",
+      change: (t) => {
+        the(t.symptoms, "no-crank").rulesOut = ["idling", "under-load"];
+        the(t.stopRules, "hydraulic-lock").runOnIfStoppingEndangers = true;
+      },
+      node: "stop rule hydraulic-lock",
     },
   ],
   "stop-rule-without-exception": [
@@ -704,6 +756,14 @@ test("a pair told apart one way only may be listed too", () => {
   the(tree.causes, "filter-blocked").gives["filter-vacuum"] = { "very-high": 0.5, high: 0.1 };
   tree.inseparable = [{ causes: ["tank-dirty", "filter-blocked"], because: "The same dirt, and the same cure in the end." }];
   expect(findFlaws(tree)).toEqual([]);
+});
+
+test("a symptom that few engines show may stand once it says why", () => {
+  const tree = smallTree();
+  the(tree.causes, "battery-flat").base = 0.01;
+  expect(findFlaws(tree).map(({ rule }) => rule)).toContain("strays-heavy");
+  the(tree.symptoms, "no-crank").rare = "One cause alone, and that a rare one.";
+  expect(findFlaws(tree).map(({ rule }) => rule)).not.toContain("strays-heavy");
 });
 
 test("errors come before what is only to be looked at", () => {

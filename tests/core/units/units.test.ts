@@ -13,11 +13,17 @@ describe("units", () => {
     close(convert(1, "inHg", "kPa"), 3.386388640341, 1e-12);
     close(convert(1, "mmHg", "kPa"), 0.133322387415, 1e-14);
     close(convert(1, "inH2O", "kPa"), 0.24908891, 1e-14);
+    close(convert(100, "mmH2O", "kPa"), 0.980665, 1e-14);
+    close(convert(1, "inH2O", "mmH2O"), 25.4, 1e-14);
+    close(convert(2.6, "MPa", "bar"), 26, 1e-14);
+    close(convert(30, "kgf/cm2", "bar"), 29.41995, 1e-14);
     close(convert(1, "gal-us", "L"), 3.785411784, 1e-14);
     close(convert(1, "gal-imp", "L"), 4.54609, 1e-15);
     close(convert(212, "F", "C"), 100, 1e-14);
     close(convert(-40, "C", "F"), -40, 1e-14);
     close(convert(2.5, "bar", "kPa"), 250, 1e-15);
+    close(convert(0.02, "%-weight", "mg/kg"), 200, 1e-14);
+    close(convert(35, "ppm", "%-weight"), 0.0035, 1e-14);
     close(convert(1.5, "in", "mm"), 38.1, 1e-15);
   });
 

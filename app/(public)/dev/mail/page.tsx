@@ -1,5 +1,6 @@
 import type { Metadata } from "next";
 import { notFound } from "next/navigation";
+import { Moment } from "@/components/log/moment";
 import { EmptyState } from "@/components/ui/empty-state";
 import { PageHead } from "@/components/ui/page-head";
 import { listKeptMail } from "@/lib/server/mail/kept-mail";
@@ -21,7 +22,7 @@ export default async function KeptMailPage() {
             <li key={mail.id} className="rounded-xl border border-rule bg-sheet px-4 py-3">
               <h2 className="text-lg">{mail.subject}</h2>
               <p className="text-sm text-ink-2">
-                To {mail.to}, {mail.at}
+                To <span className="break-all">{mail.to}</span>, <Moment at={mail.at} />
               </p>
               <p className="mt-2 whitespace-pre-wrap">
                 <Linked text={mail.text} />

@@ -33,7 +33,7 @@ export function pasteNodes(tree: FaultTree, fragment: Fragment): { tree: FaultTr
     symptoms: fragment.symptoms,
     checks: fragment.checks.map((check) => pastedCheck(check, named)),
     causes: fragment.causes.map((cause) => pastedCause(cause, named)),
-    remedies: fragment.remedies.map((remedy) => ({ ...remedy, after: pastedAfter(remedy.after, named) })),
+    remedies: fragment.remedies.map((remedy) => pastedRemedy(remedy, named, (key) => names.get(`causes ${key}`))),
   };
   const joined = LISTS.reduce(
     (now, list) =>
@@ -63,6 +63,16 @@ function pastedCause(cause: Cause, named: Named): Cause {
     gives: renamed(cause.gives, (key) => named("checks", key)),
     curedBy: renamed(cause.curedBy, (key) => named("remedies", key)),
     broughtOnBy: renamed(cause.broughtOnBy, (key) => named("causes", key)),
+  };
+}
+
+/** A cause is guarded once: a copy guards the causes that were copied with it, and no other. */
+function pastedRemedy({ upkeep, ...remedy }: Remedy, named: Named, copied: (cause: string) => string | undefined): Remedy {
+  const guards = upkeep?.guards.flatMap((key) => copied(key) ?? []) ?? [];
+  return {
+    ...remedy,
+    after: pastedAfter(remedy.after, named),
+    ...(upkeep === undefined || guards.length === 0 ? {} : { upkeep: { ...upkeep, guards } }),
   };
 }
 

@@ -63,6 +63,7 @@ const UNLINKED: Readonly<Partial<Record<ListName, (tree: FaultTree, key: string)
   causes: (tree, key) => ({
     ...tree,
     causes: tree.causes.map((cause): Cause => ({ ...cause, broughtOnBy: without(cause.broughtOnBy, key) })),
+    remedies: tree.remedies.map((remedy) => notGuarding(remedy, key)),
     knownCases: tree.knownCases.map((known): KnownCase => ({
       ...known,
       causes: known.causes.filter((cause) => cause !== key),
@@ -72,6 +73,7 @@ const UNLINKED: Readonly<Partial<Record<ListName, (tree: FaultTree, key: string)
   }),
   remedies: (tree, key) => ({
     ...tree,
+    knownCases: tree.knownCases.map((known): KnownCase => ({ ...known, tried: known.tried?.filter(({ remedy }) => remedy !== key) })),
     causes: tree.causes.map((cause): Cause => ({ ...cause, curedBy: without(cause.curedBy, key) })),
     checks: tree.checks.map((check): Check => ({
       ...check,
@@ -83,6 +85,12 @@ const UNLINKED: Readonly<Partial<Record<ListName, (tree: FaultTree, key: string)
     })),
   }),
 };
+
+/** Upkeep that guards nothing any more is none. */
+function notGuarding({ upkeep, ...remedy }: Remedy, cause: string): Remedy {
+  const guards = upkeep?.guards.filter((key) => key !== cause) ?? [];
+  return upkeep === undefined || guards.length === 0 ? remedy : { ...remedy, upkeep: { ...upkeep, guards } };
+}
 
 function without<T>(map: Readonly<Record<string, T>>, key: string): Record<string, T> {
   return Object.fromEntries(Object.entries(map).filter(([other]) => other !== key));

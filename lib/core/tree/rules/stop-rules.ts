@@ -68,11 +68,31 @@ const exceptionWhereNone = (tree: FaultTree): Found[] =>
     'Set "runOnIfStoppingEndangers: false".',
   );
 
+/** Engine states in which a check cannot have been made on a running engine. */
+const AT_REST: readonly EngineState[] = ["cold", "stopped", "cranking"];
+
+/** Does all that brings the rule into force mean that the engine stands? */
+function tellsOfOneThatStands({ when }: StopRule, tree: FaultTree): boolean {
+  if (when.symptoms === "*") return false;
+  const dead = when.symptoms.every((key) => tree.symptoms.find((symptom) => symptom.key === key)?.rulesOut?.includes("idling") ?? false);
+  const atRest = when.findings.every((ref) => AT_REST.includes(tree.checks.find(({ key }) => key === ref.check)?.engine ?? "any"));
+  return dead && atRest;
+}
+
+const runsOnWhatStands = (tree: FaultTree): Found[] =>
+  on(
+    tree,
+    (rule) => rule.kind === "no-crank" && rule.runOnIfStoppingEndangers && tellsOfOneThatStands(rule, tree),
+    "it lets people run on, and nothing brings it into force but an engine that stands already.",
+    'Set "runOnIfStoppingEndangers: false".',
+  );
+
 export const stopRuleRules: readonly Rule[] = [
   { name: "stop-rule-without-trigger", severity: "error", find: withoutTrigger },
   { name: "stop-rule-never-asked", severity: "error", find: neverAsked },
   { name: "stop-rule-never-cleared", severity: "error", find: neverCleared },
   { name: "stop-rule-forbids-too-little", severity: "error", find: forbidsTooLittle },
   { name: "stop-rule-without-exception", severity: "look-at", find: withoutException },
+  { name: "stop-rule-runs-on-what-stands", severity: "look-at", find: runsOnWhatStands },
   { name: "stop-rule-runs-on-in-mortal-danger", severity: "error", find: exceptionWhereNone },
 ];

@@ -5,8 +5,6 @@ import { Chip } from "@/components/ui/chip";
 import { Card } from "@/components/ui/card";
 import { EmptyState } from "@/components/ui/empty-state";
 import { PageHead } from "@/components/ui/page-head";
-import { Table, type Column } from "@/components/ui/table";
-import type { TreeVersionInfo } from "@/lib/core/contract/tree";
 import { can } from "@/lib/core/access/permissions";
 import { LinkButton } from "@/components/ui/link-button";
 import { getCurrentTreeVersion, listTreeVersions } from "@/lib/server/trees/queries";
@@ -21,22 +19,6 @@ export default async function TreesPage({ params }: PageProps<"/f/[fleetId]/tree
     current: await getCurrentTreeVersion(scope),
     mayEdit: can(scope.actor.roles, "tree:write"),
   }));
-  const columns: Column<TreeVersionInfo>[] = [
-    {
-      key: "tree",
-      title: "Tree",
-      cell: (v) => (
-        <Link className="link inline-flex min-h-12 items-center" prefetch={false} href={`/f/${fleetId}/trees/${v.id}`}>
-          {v.title}
-        </Link>
-      ),
-    },
-    { key: "number", title: "Version", figure: true, cell: (v) => v.number },
-    { key: "published", title: "Published", cell: (v) => <Day at={v.publishedAt} /> },
-    { key: "from", title: "From", cell: (v) => (v.from === "own" ? "this fleet" : "shipped with Gudgeon") },
-    { key: "note", title: "What changed", cell: (v) => v.note ?? "" },
-    { key: "use", title: "Standing", cell: (v) => (v.id === current.id ? <Chip tone="sound">In use</Chip> : "") },
-  ];
   return (
     <>
       <PageHead
@@ -50,15 +32,29 @@ export default async function TreesPage({ params }: PageProps<"/f/[fleetId]/tree
           </LinkButton>
         </p>
       )}
-      <Card>
-        <Table
-          caption="Published versions"
-          hideCaption
-          columns={columns}
-          rows={versions}
-          rowKey={(v) => v.id}
-          empty={<EmptyState title="No tree is published yet">Without one nothing can be diagnosed.</EmptyState>}
-        />
+      <Card aria-label="Published versions">
+        {versions.length === 0 ? (
+          <EmptyState title="No tree is published yet">Without one nothing can be diagnosed.</EmptyState>
+        ) : (
+          <ul className="divide-y divide-rule">
+            {versions.map((version) => (
+              <li key={version.id} className="flex flex-wrap items-center gap-x-4 gap-y-1 py-1">
+                <Link
+                  className="link inline-flex min-h-12 items-center font-semibold"
+                  prefetch={false}
+                  href={`/f/${fleetId}/trees/${version.id}`}
+                >
+                  {version.title}, version {version.number}
+                </Link>
+                {version.id === current.id && <Chip tone="sound">In use</Chip>}
+                <span className="text-sm text-ink-2 sm:ml-auto">
+                  {version.from === "own" ? "This fleet’s own" : "Shipped with Gudgeon"}, published <Day at={version.publishedAt} />
+                </span>
+                {version.note && <p className="w-full pb-2 text-sm">{version.note}</p>}
+              </li>
+            ))}
+          </ul>
+        )}
       </Card>
     </>
   );
