@@ -72,6 +72,18 @@ describe("the next step", () => {
     expect(step(looking(200), { symptoms: weak }).kind).toBe("call");
   });
 
+  it("[C8] asks, before it calls, what tells apart causes that were not thought through", () => {
+    // Forty alike, mended by a workshop only; 32 are thought through, and the look is about the others.
+    const causes = Array.from({ length: 40 }, (_, index) => {
+      const key = `c-${String(index).padStart(2, "0")}`;
+      return cause(key, { shows: { weak: "usually" }, gives: index < 32 ? {} : { look: { odd: 0.9 } }, curedBy: { mend: "usually" } });
+    });
+    const about = (minutes: number) =>
+      tree({ causes, checks: [check("look", ["fine", "odd"], { minutes })], remedies: [remedy("mend", { who: "workshop" })] });
+    expect(step(about(5), { symptoms: weak })).toMatchObject({ kind: "check", key: "look" });
+    expect(step(about(200), { symptoms: weak }).kind).toBe("call");
+  });
+
   it("[N5] puts off what would not change the next try until that has failed", () => {
     // "look" tells b from c; a is so likely that its mending comes first whatever is seen.
     const three = tree({
