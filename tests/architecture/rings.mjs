@@ -7,8 +7,23 @@ export const rings = [
   {
     name: "core",
     files: ["lib/core/**/*.ts"],
+    ignores: ["lib/core/statistics/**"],
     sees: ["lib/core"],
     packages: ["zod"],
+    bans: ["clock", "dice"],
+  },
+  {
+    // Distributions to 14 figures are not written anew: pure functions of numbers, the same in every browser, and only here.
+    name: "core's statistics",
+    files: ["lib/core/statistics/**/*.ts"],
+    sees: ["lib/core/statistics"],
+    packages: [
+      "@stdlib/math-base-special-betainc",
+      "@stdlib/math-base-special-gammainc",
+      "@stdlib/math-base-special-gammaincinv",
+      "@stdlib/math-base-special-gammaln",
+      "@stdlib/math-base-special-kernel-betaincinv",
+    ],
     bans: ["clock", "dice"],
   },
   {

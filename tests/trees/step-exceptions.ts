@@ -39,6 +39,7 @@ export const STEP_EXCEPTIONS: readonly { rule: string; node: string; words: stri
   { rule: "raw-water", node: "hx-rise", words: "stick matt tape", reason: "measures a surface" },
   { rule: "raw-water", node: "hx-drop", words: "matt tape where coolant", reason: "measures a surface" },
   { rule: "raw-water", node: "hx-inlet", words: "matt tape where coolant", reason: "measures a surface" },
+  { rule: "raw-water", node: "pressure-hose-look", words: "follow the hose", reason: "looks and squeezes from outside" },
   { rule: "raw-water", node: "coolant-look", words: "from tank to block", reason: "feels hoses from outside" },
   { rule: "raw-water", node: "water-trace", words: "inlet and strainer", reason: "feels under the parts, opens none" },
   { rule: "raw-water", node: "water-trace", words: "elbow, hose, lift box", reason: "feels under the parts, opens none" },
