@@ -64,7 +64,7 @@ function PublishForm({ fleetId, bench, checked, current }: Props) {
       const { saved } = bench.session.get();
       await sendJson(
         `/api/v1/fleets/${fleetId}/trees/draft/publication`,
-        { note: note.trim(), accept: [...accepted] },
+        { note: note.trim(), failing, accept: failing.filter((key) => accepted.has(key)) },
         { version: saved.version },
       );
       await bench.forget();
