@@ -13,10 +13,14 @@ const CANNOT = "Can\u2019t tell";
 
 export type Given = { answer: Answer; says: string; withdraws: string | null; note: string; photos: readonly string[] };
 
-type Props = { asked: CheckAsked; onAnswer: (given: Given) => Promise<void> };
+type Props = {
+  asked: CheckAsked;
+  /** Pictures that go with it already. */ photosBefore: number;
+  onAnswer: (given: Given) => Promise<void>;
+};
 
 /** The question and its answers. Each tap is kept at once; there is no send button to forget. */
-export function AnswerForm({ asked, onAnswer }: Props) {
+export function AnswerForm({ asked, photosBefore, onAnswer }: Props) {
   const { key: of, ask, answers, reading, ifFitted } = asked;
   const { note, photos, onNote, onPhotos, drop } = useKeptNote(of);
   const [typed, type, dropTyped] = useKeptWords<Typed>(of, { typed: "", unit: "" });
@@ -68,7 +72,7 @@ export function AnswerForm({ asked, onAnswer }: Props) {
           Can&rsquo;t tell, or can&rsquo;t get to it
         </AnswerButton>
       </div>
-      <NoteAndPhotos of={of} note={note} onNote={onNote} photos={photos} onPhotos={onPhotos} />
+      <NoteAndPhotos of={of} before={photosBefore} note={note} onNote={onNote} photos={photos} onPhotos={onPhotos} />
       <p role="status" className="mt-2 min-h-6 text-sm text-ink-2">
         {given === null ? "" : "Kept. The next step is being worked out."}
       </p>

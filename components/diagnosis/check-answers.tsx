@@ -18,6 +18,7 @@ export function CheckAnswers({ asked, before }: Props) {
       <MissingFigure checkKey={asked.key} />
       <AnswerForm
         asked={asked}
+        photosBefore={before?.payload.photos.length ?? 0}
         onAnswer={async ({ answer, says, withdraws, note, photos }) => {
           const payload = { check: asked.key, answer, ...keptWith(before?.payload, { note, photos }) };
           const event = await record("answered", payload, before?.id);

@@ -4,6 +4,7 @@ import { createContext, useContext } from "react";
 import type { Engine } from "@/lib/core/contract/engine";
 import type { Phone } from "@/lib/core/contract/phone";
 import type { DiagnosisView } from "@/lib/core/diagnosis/view";
+import type { WhatIf } from "@/lib/core/diagnosis/what-if";
 import type { FaultTree } from "@/lib/core/tree/schema";
 import type { Summary } from "@/lib/client/store/summary";
 import type { Address } from "@/lib/client/screen/use-address";
@@ -26,6 +27,8 @@ export type Here = {
   go: (at: Address["at"], which?: string, how?: "push" | "replace") => void;
   toEngines: () => void;
   record: Recorder;
+  /** Looks behind the step that is due; worked out when it is called. */
+  whatIf: () => Promise<WhatIf>;
   /** Goes to the step that is due, and leaves a trail: the phone's own back leads to the answer that was just given. */
   goOnFrom: (event: string) => void;
   /** What was said last, to be undone with one tap; or, where it was many things at once, to be looked at. */

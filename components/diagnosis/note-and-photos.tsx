@@ -8,8 +8,13 @@ import { TextArea } from "@/components/ui/text-area";
 import { useHere } from "./here";
 import { Photo } from "./photo";
 
+/** An event's note holds 4000 letters: how a cure was tried may be added to it. */
+const MOST_NOTE = 3400;
+
 type Props = {
   of: string;
+  /** Pictures that go with the answer already. */
+  before: number;
   note: string;
   onNote: (note: string) => void;
   photos: readonly string[];
@@ -17,13 +22,15 @@ type Props = {
 };
 
 /** A note and pictures, if wanted, folded away: they go with the answer that is given next. */
-export function NoteAndPhotos({ of, note, onNote, photos, onPhotos }: Props) {
+export function NoteAndPhotos({ of, before, note, onNote, photos, onPhotos }: Props) {
   const { ready } = useHere();
   const [wrong, setWrong] = useState<string | null>(null);
   const add = async (files: readonly File[]) => {
     setWrong(null);
     let now = photos;
-    for (const file of files.slice(0, MOST_PHOTOS - photos.length)) {
+    const room = Math.max(0, MOST_PHOTOS - before - photos.length);
+    if (files.length > room) setWrong(`Only ${MOST_PHOTOS} pictures go with one answer. Keep the rest for a note of its own.`);
+    for (const file of files.slice(0, room)) {
       try {
         now = [...now, await ready.store.addPhoto(await shrinkPhoto(file))];
         onPhotos(now);
@@ -43,7 +50,7 @@ export function NoteAndPhotos({ of, note, onNote, photos, onPhotos }: Props) {
           label="Note"
           hint="It is kept with the answer you give next."
           value={note}
-          maxLength={4000}
+          maxLength={MOST_NOTE}
           onChange={(event) => onNote(event.target.value)}
         />
         <label className="relative inline-flex min-h-12 items-center justify-center gap-2 rounded-lg border-[1.5px] border-edge bg-sheet px-4 font-semibold has-focus-visible:outline-3 has-focus-visible:outline-brass">

@@ -12,7 +12,7 @@ export function NoteOnly({ onSaid }: { onSaid: () => void }) {
   const empty = note.trim() === "" && photos.length === 0;
   return (
     <div>
-      <NoteAndPhotos of="note-only" note={note} onNote={onNote} photos={photos} onPhotos={onPhotos} />
+      <NoteAndPhotos of="note-only" before={0} note={note} onNote={onNote} photos={photos} onPhotos={onPhotos} />
       {!empty && (
         <Button
           wide

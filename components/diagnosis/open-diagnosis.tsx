@@ -36,6 +36,14 @@ export function OpenDiagnosis({ id, ready, reasoner, phone, address, go }: Props
   );
   const toEngines = useCallback(() => go({ at: "engines" }), [go]);
   const { summary, tree, view } = state;
+  const { events } = state;
+  const whatIf = useCallback<Here["whatIf"]>(() => {
+    if (!summary || !tree) return Promise.reject(new Error("there is no diagnosis to look into"));
+    const log = events.map(({ event }) => event);
+    return reasoner.whatIf(summary.treeVersionId, tree, log);
+    // The summary is made anew each time from the events.
+    // eslint-disable-next-line react-hooks/exhaustive-deps
+  }, [reasoner, tree, events]);
   const engine = phone.engines.find((one) => one.id === summary?.engineId);
   const here = useMemo<Here | null>(
     () =>
@@ -54,11 +62,28 @@ export function OpenDiagnosis({ id, ready, reasoner, phone, address, go }: Props
             goOnFrom,
             toEngines,
             record: state.record,
+            whatIf,
             undo,
             setUndo,
           }
         : null,
-    [ready, phone, engine, tree, view, summary, state.events, state.thinking, address, goHere, goOnFrom, toEngines, state.record, undo],
+    [
+      ready,
+      phone,
+      engine,
+      tree,
+      view,
+      summary,
+      state.events,
+      state.thinking,
+      address,
+      goHere,
+      goOnFrom,
+      toEngines,
+      state.record,
+      whatIf,
+      undo,
+    ],
   );
   if (here)
     return (

@@ -1,6 +1,7 @@
 "use client";
 
 import { useState } from "react";
+import { provedAs } from "@/lib/client/kept-with";
 import type { RemedyResult } from "@/lib/core/contract/event";
 import { useGuard, useSettling } from "@/lib/client/screen/use-guard";
 import { TextField } from "@/components/ui/text-field";
@@ -17,11 +18,15 @@ const RESULTS: readonly { result: RemedyResult; title: string }[] = [
   { result: "could-not", title: "Could not do it" },
 ];
 
-/** As long as a proof may be. */
-const MOST_PROOF = 500;
+type Props = {
+  of: string;
+  proof: string | null;
+  /** Pictures that go with it already. */ photosBefore: number;
+  onResult: (tried: Tried) => Promise<void>;
+};
 
 /** Did it cure it, and how was that proved? A cure is only believed once it has been tried under load. */
-export function RemedyResultForm({ of, proof, onResult }: { of: string; proof: string | null; onResult: (tried: Tried) => Promise<void> }) {
+export function RemedyResultForm({ of, proof, photosBefore, onResult }: Props) {
   const { note, photos, onNote, onPhotos, drop } = useKeptNote(of);
   const [{ cured, words }, type, dropTyped] = useKeptWords(of, { cured: false, words: "" });
   const [given, setGiven] = useState(false);
@@ -58,11 +63,7 @@ export function RemedyResultForm({ of, proof, onResult }: { of: string; proof: s
             <h2 className="text-lg">How was that proved?</h2>
             {proof && <p className="mt-1 mb-2">{proof}</p>}
             <div className="grid gap-2">
-              {proof && (
-                <AnswerButton onTap={() => give("cured", "Cured, proved", [proof, own].filter(Boolean).join(" ").slice(0, MOST_PROOF))}>
-                  Done, and it held
-                </AnswerButton>
-              )}
+              {proof && <AnswerButton onTap={() => give("cured", "Cured, proved", provedAs(proof, own))}>Done, and it held</AnswerButton>}
               <TextField
                 id={`proof-${of}`}
                 label="Proved another way, or what it showed"
@@ -79,7 +80,7 @@ export function RemedyResultForm({ of, proof, onResult }: { of: string; proof: s
           </section>
         )}
       </div>
-      <NoteAndPhotos of={of} note={note} onNote={onNote} photos={photos} onPhotos={onPhotos} />
+      <NoteAndPhotos of={of} before={photosBefore} note={note} onNote={onNote} photos={photos} onPhotos={onPhotos} />
     </div>
   );
 }

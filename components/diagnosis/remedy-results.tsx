@@ -18,6 +18,7 @@ export function RemedyResults({ remedy, before }: Props) {
     <RemedyResultForm
       of={remedy.key}
       proof={remedy.proof}
+      photosBefore={before?.payload.photos.length ?? 0}
       onResult={async ({ result, proof, note, photos, says }) => {
         const payload = { remedy: remedy.key, result, ...(proof ? { proof } : {}), ...keptWith(before?.payload, { note, photos }) };
         const event = await record("remedy-tried", payload, before?.id);

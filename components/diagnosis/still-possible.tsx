@@ -1,11 +1,11 @@
 "use client";
 
-import { inWords } from "@/lib/client/count-in-words";
 import { CauseRow } from "./cause-row";
 import { useHere } from "./here";
 import { Swatch, type Pattern } from "./swatch";
 import { Ticks } from "./ticks";
 import { TwoFaults } from "./two-faults";
+import { WhatIfFold } from "./what-if-fold";
 
 /** How many causes stand in the open; the rest is folded. */
 const IN_THE_OPEN = 3;
@@ -15,7 +15,6 @@ const PATTERNS: readonly Pattern[] = ["solid", "hatched", "barred"];
 export function StillPossible() {
   const { view } = useHere();
   const { causes, others, unknown } = view.possible;
-  const complaints = view.symptoms.filter(({ present }) => present).length;
   const open = causes.slice(0, IN_THE_OPEN);
   const folded = causes.slice(IN_THE_OPEN);
   const foldedOf100 = folded.reduce((sum, { of100 }) => sum + of100, others.of100);
@@ -70,12 +69,8 @@ export function StillPossible() {
         </span>
         <span className="dial text-right">{unknown.of100}</span>
       </div>
-      {complaints > 1 && (
-        <p className="mt-1 text-sm text-ink-2">
-          Reckoned as one fault behind {complaints === 2 ? "both" : `all ${inWords(complaints)}`} complaints. If they came at different
-          times there may be two: begin a diagnosis for each.
-        </p>
-      )}
+      <p className="mt-1 text-sm text-ink-2">{view.possible.sure}</p>
+      {view.step && <WhatIfFold key={`${view.step.key} ${view.said.length}`} />}
     </section>
   );
 }

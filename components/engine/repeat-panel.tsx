@@ -1,21 +1,29 @@
+import type { RepeatEvidence } from "@/lib/core/contract/repeat-evidence";
 import type { RepeatFault } from "@/lib/core/contract/log";
 import { repeatInWords, wholeNumber } from "./repeat-in-words";
 
 /** A fault that came back: the fact, its gaps as a picture and in words, and what lies upstream. */
-export function RepeatPanel({ repeat }: { repeat: RepeatFault }) {
+export function RepeatPanel({ repeat, evidence }: { repeat: RepeatFault; evidence?: RepeatEvidence | undefined }) {
   const inHours = repeat.gapsHours.length > 0;
   const gaps = inHours ? repeat.gapsHours : repeat.gapsDays;
   const unit = inHours ? "h" : "d";
   return (
     <section className="grid gap-5 rounded-xl border-[1.5px] border-lead bg-linear-to-r from-lead-wash to-sheet px-4 py-4 sm:px-5 md:grid-cols-[1fr_20rem]">
       <div>
-        <p className="text-sm font-bold text-lead">Came back</p>
+        <p className="text-sm font-bold text-lead">{evidence?.trend === "getting-worse" ? "Getting worse" : "Came back"}</p>
         <h2>{repeatInWords(repeat)}</h2>
         <p className="mt-1.5">
           {inHours ? "Running hours" : "Days"} between them: {gaps.map((g) => wholeNumber(g)).join(", ")}.{" "}
           {repeat.unprovedBefore > 0 && `${wholeNumber(repeat.unprovedBefore)} of the cures before had not been proved. `}
-          {gaps.length < 3 ? "Too few to tell whether it is getting worse." : ""}
+          {!evidence && gaps.length < 3 ? "Too few to tell whether it is getting worse." : ""}
         </p>
+        {evidence && (
+          <ul className="mt-1.5 list-disc pl-5">
+            {evidence.words.slice(1).map((words) => (
+              <li key={words}>{words}</li>
+            ))}
+          </ul>
+        )}
         {repeat.upstream.length > 0 && (
           <p className="mt-1.5">
             Putting this right cures the symptom, not what brings it on. Look upstream at{" "}

@@ -5,7 +5,7 @@ import { useCallback, useDeferredValue } from "react";
 import { useObservable } from "@/lib/client/screen/use-observable";
 import type { Workbench } from "@/lib/client/workshop/workbench";
 import type { TreeVersionInfo } from "@/lib/core/contract/tree";
-import type { TreeNode } from "@/lib/core/tree/edits/edit";
+import { findNode, type TreeNode } from "@/lib/core/tree/edits/edit";
 import { putNode } from "@/lib/core/tree/edits/put-node";
 import type { ListName } from "@/lib/core/tree/flaw";
 import { FindNode } from "./find-node";
@@ -44,7 +44,11 @@ export function Bench({ fleetId, bench, current, newestShipped, onGone }: Props)
     [go, bench, symptom],
   );
   const change = useCallback(
-    (list: ListName) => (node: TreeNode, says: string) => bench.edit(putNode(bench.session.get().tree, list, node), says),
+    (list: ListName) => (node: TreeNode, says: string) => {
+      const { tree } = bench.session.get();
+      // A form that closes because its node was taken out does not put it back.
+      if (findNode(tree, list, node.key) !== null) bench.edit(putNode(tree, list, node), says);
+    },
     [bench],
   );
   return (

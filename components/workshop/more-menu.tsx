@@ -17,6 +17,7 @@ type Props = { fleetId: string; bench: Workbench };
 export function MoreMenu({ fleetId, bench }: Props) {
   const router = useRouter();
   const [open, setOpen] = useState(false);
+  const [sure, setSure] = useState(false);
   const [says, setSays] = useState<{ tone: "good" | "bad"; lines: readonly string[] } | null>(null);
   const file = useRef<HTMLInputElement>(null);
   const path = `/api/v1/fleets/${fleetId}/trees`;
@@ -41,20 +42,18 @@ export function MoreMenu({ fleetId, bench }: Props) {
     }
   };
   const giveUp = async () => {
+    setSure(false);
+    const { id, version } = bench.session.get().saved;
     try {
-      await bench.saveNow();
-      await remove(`${path}/draft`, bench.session.get().saved.version);
+      await remove(`${path}/draft?draft=${id}`, version);
       await bench.forget();
       router.push(`/f/${fleetId}/trees`);
       router.refresh();
     } catch (failure) {
+      const isStale = failure instanceof NoAnswer && failure.status === 412 && bench.takeIn(failure.current);
       setSays({
         tone: "bad",
-        lines: [
-          failure instanceof NoAnswer && failure.status === 412
-            ? "Somebody saved the draft just now. Look at it before you give it up."
-            : "It could not be given up now.",
-        ],
+        lines: [isStale ? "Somebody saved the draft just now. Look at it before you give it up." : "It could not be given up now."],
       });
     }
   };
@@ -113,9 +112,18 @@ export function MoreMenu({ fleetId, bench }: Props) {
               Everything changed since the version in use is thrown away, for everybody. Take it along first if you are not sure.
             </p>
             <div>
-              <Button tone="grave" onClick={() => void giveUp()}>
-                Give it up
-              </Button>
+              {sure ? (
+                <div className="flex flex-wrap gap-3">
+                  <Button tone="grave" onClick={() => void giveUp()}>
+                    Throw it away for everybody
+                  </Button>
+                  <Button onClick={() => setSure(false)}>Keep it</Button>
+                </div>
+              ) : (
+                <Button tone="grave" onClick={() => setSure(true)}>
+                  Give it up
+                </Button>
+              )}
             </div>
           </section>
         </div>

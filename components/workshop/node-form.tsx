@@ -1,12 +1,13 @@
 "use client";
 
 import { zodResolver } from "@hookform/resolvers/zod";
-import { useEffect, useMemo, useRef } from "react";
+import { useCallback, useEffect, useMemo, useRef } from "react";
 import { Controller, useForm, useWatch, type FieldErrors, type FieldValues } from "react-hook-form";
 import type * as z from "zod";
 import { LIST_KINDS, type ListName } from "@/lib/core/tree/flaw";
 import { nameOf, type TreeNode } from "@/lib/core/tree/edits/edit";
 import { FaultTree } from "@/lib/core/tree/schema";
+import { mergeValues } from "@/lib/core/tree/merge-values";
 import { sameValue } from "@/lib/core/tree/same-value";
 import { typographicAll } from "@/lib/core/tree/typographic";
 import { Edited } from "./form/editing";
@@ -33,40 +34,55 @@ const NOT_EDITED = new Set(["key"]);
  * is marked, and kept on this device meanwhile.
  */
 export function NodeForm({ tree, list, node, draftId, onChange }: Props) {
-  const schema = listSchema(list);
+  const schema = useMemo(() => listSchema(list), [list]);
   const kept = useMemo(() => unfinished(draftId, list, node.key), [draftId, list, node.key]);
   const form = useForm<FieldValues>({
     resolver: zodResolver(schema as z.ZodType<FieldValues, FieldValues>),
     defaultValues: kept ?? node,
     mode: "onChange",
   });
-  const { control, reset, handleSubmit, getValues } = form;
+  const { control, reset, trigger, getValues } = form;
   const values = useWatch({ control });
   const lastPut = useRef<TreeNode>(node);
 
-  // The node changed under the form: an undo, another mechanic, the table.
+  /** Puts a whole node into the draft; what is not one (yet) stays on this device. */
+  const settle = useCallback((): boolean => {
+    const typed = getValues();
+    const isNew = !sameValue(typed, lastPut.current);
+    const whole = isNew ? schema.safeParse(typed) : null;
+    keepUnfinished(draftId, list, node.key, whole?.success === false ? typed : null);
+    if (!whole?.success) return !isNew;
+    const put = typographicAll(whole.data) as TreeNode;
+    if (sameValue(put, lastPut.current)) return true;
+    lastPut.current = put;
+    onChange(put, `${LIST_KINDS[list]} “${nameOf(put)}” changed`);
+    return true;
+  }, [getValues, schema, draftId, list, node.key, onChange]);
+
+  // The node changed under the form (an undo, another mechanic, the table): what is typed and not in the draft yet stays.
   useEffect(() => {
     if (sameValue(node, lastPut.current)) return;
+    const { value } = mergeValues(lastPut.current, getValues(), node);
     lastPut.current = node;
-    reset(node);
-  }, [node, reset]);
+    reset(value as FieldValues);
+  }, [node, reset, getValues]);
 
   useEffect(() => {
     const timer = setTimeout(() => {
-      if (sameValue(getValues(), lastPut.current)) return keepUnfinished(draftId, list, node.key, null);
-      void handleSubmit(
-        (whole) => {
-          const put = typographicAll(whole) as TreeNode;
-          if (sameValue(put, lastPut.current)) return;
-          lastPut.current = put;
-          keepUnfinished(draftId, list, node.key, null);
-          onChange(put, `${LIST_KINDS[list]} “${nameOf(put)}” changed`);
-        },
-        () => keepUnfinished(draftId, list, node.key, getValues()),
-      )();
+      if (!settle()) void trigger();
     }, QUIET_MS);
     return () => clearTimeout(timer);
-  }, [values, handleSubmit, getValues, onChange, draftId, list, node.key]);
+  }, [values, settle, trigger]);
+
+  // Closed, or the page left, before the quiet was over: nothing typed is lost.
+  useEffect(() => {
+    const leaving = () => void settle();
+    window.addEventListener("pagehide", leaving);
+    return () => {
+      window.removeEventListener("pagehide", leaving);
+      leaving();
+    };
+  }, [settle]);
 
   return (
     <Edited value={{ tree, node: values as Partial<TreeNode> }}>
@@ -105,9 +121,9 @@ export function NodeForm({ tree, list, node, draftId, onChange }: Props) {
   );
 }
 
-const listSchema = (list: ListName) => {
+const listSchema = (list: ListName): z.ZodType => {
   const def = FaultTree.shape[list].def as unknown as { element?: unknown; innerType?: { def: { element: unknown } } };
-  return (def.element ?? def.innerType?.def.element) as Parameters<typeof fieldsOf>[0];
+  return (def.element ?? def.innerType?.def.element) as z.ZodType;
 };
 
 /** The first thing that is wrong in a field, with where in it. */

@@ -8,6 +8,7 @@ import { Dialog } from "@/components/ui/dialog";
 import { Notice } from "@/components/ui/notice";
 import { TextArea } from "@/components/ui/text-area";
 import { NoAnswer, sendJson } from "@/lib/client/exchange/request";
+import { useKeptForm } from "@/lib/client/screen/use-kept-form";
 import { useObservable } from "@/lib/client/screen/use-observable";
 import { unsaved } from "@/lib/client/workshop/draft-session";
 import type { Workbench } from "@/lib/client/workshop/workbench";
@@ -38,13 +39,17 @@ export function Publish({ fleetId, bench, checked, current }: Props) {
   );
 }
 
+const NOT_SAVED = "The last changes are not saved yet. Publish when they are.";
+/** Nobody publishes what they have not seen. */
+const CAME_IN = "Somebody else's changes came in just now. Look at what changed, then publish.";
+
 type Refusal = { says: string; errors: readonly { path: string; says: string }[] };
 
 function PublishForm({ fleetId, bench, checked, current }: Props) {
   const router = useRouter();
   const session = useObservable(bench.session);
   const before = useVersion(fleetId, current.id);
-  const [note, setNote] = useState("");
+  const [{ note }, change, dropNote] = useKeptForm(`gudgeon.publish.${session.saved.id}`, () => ({ note: "" }));
   const [accepted, setAccepted] = useState<ReadonlySet<string>>(new Set());
   const [working, setWorking] = useState(false);
   const [refusal, setRefusal] = useState<Refusal | null>(null);
@@ -56,22 +61,26 @@ function PublishForm({ fleetId, bench, checked, current }: Props) {
     setWorking(true);
     setRefusal(null);
     await bench.saveNow();
-    if (unsaved(bench.session.get())) {
+    const { tree, saved } = bench.session.get();
+    const wait = unsaved(bench.session.get()) ? NOT_SAVED : tree === session.tree ? null : CAME_IN;
+    if (wait) {
       setWorking(false);
-      return setRefusal({ says: "The last changes are not saved yet. Publish when they are.", errors: [] });
+      return setRefusal({ says: wait, errors: [] });
     }
     try {
-      const { saved } = bench.session.get();
       await sendJson(
         `/api/v1/fleets/${fleetId}/trees/draft/publication`,
-        { note: note.trim(), failing, accept: failing.filter((key) => accepted.has(key)) },
+        { draft: saved.id, note: note.trim(), failing, accept: failing.filter((key) => accepted.has(key)) },
         { version: saved.version },
       );
+      dropNote();
       await bench.forget();
       router.push(`/f/${fleetId}/trees`);
       router.refresh();
     } catch (failure) {
       setWorking(false);
+      if (failure instanceof NoAnswer && failure.status === 412 && bench.takeIn(failure.current))
+        return setRefusal({ says: CAME_IN, errors: [] });
       setRefusal(
         failure instanceof NoAnswer
           ? { says: failure.because, errors: failure.errors }
@@ -138,7 +147,7 @@ function PublishForm({ fleetId, bench, checked, current }: Props) {
         hint="What was changed and why, for whoever reads the history."
         maxLength={1000}
         value={note}
-        onChange={(event) => setNote(event.target.value)}
+        onChange={(event) => change({ note: event.target.value })}
       />
       {refusal && (
         <Notice tone="bad" live>

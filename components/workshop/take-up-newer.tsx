@@ -24,14 +24,15 @@ export function TakeUpNewer({ fleetId, bench, newest }: Props) {
       setState({ failed: failure instanceof NoAnswer ? failure.because : "The newer tree could not be read." });
     }
   };
-  if (state === "done")
+  const isTakenUp = (takesUp ?? saved.takenUp) === newest.id;
+  if (state === "done" && isTakenUp)
     return (
       <Notice tone="good" live>
         Version {newest.number} of the shipped tree is in the draft. Your own changes are kept; what collides is listed above. Undo takes it
         back.
       </Notice>
     );
-  if ((takesUp ?? saved.takenUp) === newest.id) return null;
+  if (isTakenUp) return null;
   return (
     <Notice title={`Version ${newest.number} of the shipped tree is newer than what this draft grew from`}>
       {typeof state === "object" && <p>{state.failed}</p>}

@@ -39,7 +39,8 @@ export function Workshop({ fleetId, userId, current, newestShipped }: Props) {
       bench={opened.bench}
       current={current}
       newestShipped={newestShipped}
-      onGone={() => setAttempt(attempt + 1)}
+      // The page knows which version is in use now: the next draft must not begin from one that was in use before.
+      onGone={() => window.location.reload()}
     />
   );
 }

@@ -8,3 +8,12 @@ export function keptWith(before: Kept | undefined, now: { note: string; photos: 
   const note = now.note || before?.note;
   return { ...(note ? { note } : {}), photos: [...(before?.photos ?? []), ...now.photos].slice(0, MOST_PHOTOS) };
 }
+
+/** As long as a proof may be. */
+const MOST_PROOF = 500;
+
+/** How a cure was proved: as the tree says, and what was seen. Where both are too long together, what was seen is kept whole. */
+export function provedAs(proof: string, own: string): string {
+  const both = own === "" ? proof : `${proof} ${own}`;
+  return (both.length <= MOST_PROOF || own === "" ? both : own).slice(0, MOST_PROOF);
+}

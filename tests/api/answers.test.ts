@@ -206,6 +206,9 @@ describe("what the phone keeps", () => {
     expect(await (await call("GET", `/fleets/${who.fleetId}/engines/${who.engineId}/repeats`, { as: who.person })).json()).toMatchObject({
       items: [{ count: 2, gapsHours: [10] }],
     });
+    expect(await (await call("GET", `/fleets/${who.fleetId}/engines/${who.engineId}/evidence`, { as: who.person })).json()).toMatchObject({
+      items: [{ cause: "filter-blocked", trend: "too-few", frequency: "no-fleet" }],
+    });
   });
 
   test("me says who is signed in and where they belong", async () => {

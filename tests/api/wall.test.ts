@@ -5,7 +5,7 @@ import { uuidv7 } from "uuidv7";
 import { beforeAll, describe, expect, test } from "vitest";
 import { routes } from "@/app/api/v1/routes";
 import type { Verb } from "@/lib/server/web/openapi";
-import { withScope } from "@/lib/server/auth/scope";
+import { prove } from "@/lib/server/auth/scope";
 import { keepFile } from "@/lib/server/files/commands";
 import { afloat, phoneOf, shipTree, type Afloat } from "../support/afloat";
 import { call, type Asked } from "../support/call";
@@ -41,7 +41,7 @@ beforeAll(async () => {
   const photo = await sharp({ create: { width: 9, height: 9, channels: 3, background: "#123" } })
     .png()
     .toBuffer();
-  await withScope(ines.person, ines.fleetId, "file:write", (scope) => keepFile(scope, fileId, photo));
+  await keepFile(await prove(ines.person, ines.fleetId, "file:write"), fileId, photo);
   const invited = await call("POST", `/fleets/${ines.fleetId}/invitations`, {
     as: ines.person,
     body: { id: uuidv7(), email: "guest@example.test", roles: ["skipper"] },

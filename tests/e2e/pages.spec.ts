@@ -17,6 +17,7 @@ const PAGES: [name: string, of: (ids: { fleet: string; engine: string; boat: str
   ["fleet", ({ fleet }) => `/f/${fleet}`],
   ["new boat", ({ fleet }) => `/f/${fleet}/boats/new`],
   ["boat", ({ fleet, boat }) => `/f/${fleet}/boats/${boat}`],
+  ["spares for a passage", ({ fleet, boat }) => `/f/${fleet}/boats/${boat}/passage?hours=60&litres=200&dirtyLitres=200`],
   ["new engine", ({ fleet, boat }) => `/f/${fleet}/boats/${boat}/engines/new`],
   ["engine", ({ fleet, engine }) => `/f/${fleet}/engines/${engine}`],
   ["engine profile", ({ fleet, engine }) => `/f/${fleet}/engines/${engine}/edit`],

@@ -115,5 +115,8 @@ describe("where a request comes from", () => {
   test("a household of IPv6 addresses counts as one", () => {
     expect(from("2001:db8:1:2:aaaa::1")).toBe(from("2001:db8:1:2:bbbb::2"));
     expect(from("2001:db8:1:3::1")).not.toBe(from("2001:db8:1:2::1"));
+    // Written short, with its zeros left out.
+    expect(from("2001:db8::aaaa:1:2:3")).toBe(from("2001:db8::bbbb:4:5:6"));
+    expect(from("2001:db8:1::1")).toBe(from("2001:db8:1:0:aaaa:1:2:3"));
   });
 });

@@ -56,6 +56,19 @@ function wholeRun(who = ines, hours = 100) {
 }
 
 describe("events from an outbox", () => {
+  test("a symptom that went with the first of two faults was complained of all the same", async () => {
+    const id = uuidv7();
+    const phone = phoneOf(id);
+    const complaint = ["lost-rpm", "no-crank"];
+    await post(id, [
+      phone.begin(ines.engineId, treeId, { symptoms: complaint }),
+      phone.write("remedy-tried", { remedy: "change-filter", result: "better", photos: [] }),
+      phone.write("symptom-told", { symptom: "lost-rpm", present: false }),
+    ]);
+    expect((await entry(id)).symptoms.map(({ key }) => key)).toEqual(complaint);
+    expect((await diagnosis(id)).symptoms.map(({ key }) => key)).toEqual(complaint);
+  });
+
   test("the first event begins the diagnosis, the outcome is a line of the log and a reading of the meter", async () => {
     const { id, events } = wholeRun();
     expect(await results(id, events)).toEqual(Array(6).fill("stored"));

@@ -1,11 +1,12 @@
 import { uuidv7 } from "uuidv7";
 import { beforeAll, beforeEach, describe, expect, test } from "vitest";
 import type { Database } from "@/db/client";
+import type { Publication } from "@/lib/core/contract/draft";
 import { editBetween } from "@/lib/core/tree/edits/edit";
 import { putNode } from "@/lib/core/tree/edits/put-node";
 import { removeNode } from "@/lib/core/tree/edits/remove-node";
 import type { FaultTree } from "@/lib/core/tree/schema";
-import { withScope, type FleetScope } from "@/lib/server/auth/scope";
+import { prove, withScope, type FleetScope } from "@/lib/server/auth/scope";
 import { beginDraft, changeDraft, discardDraft } from "@/lib/server/trees/draft/commands";
 import { publishDraft } from "@/lib/server/trees/draft/publish";
 import { findDraft, getDraft } from "@/lib/server/trees/draft/queries";
@@ -31,10 +32,16 @@ const asMechanic = <T>(run: (scope: FleetScope<"tree:write">) => Promise<T>): Pr
   withScope(mats.person, mats.fleetId, "tree:write", run);
 const begin = (versionId = shippedId) => asMechanic((scope) => beginDraft(scope, { id: uuidv7(), versionId }));
 const change = (version: number, to: (tree: FaultTree) => FaultTree, from: FaultTree = smallTree()) =>
-  asMechanic((scope) => changeDraft(scope, editBetween(from, to(from), "Changed"), version));
+  asMechanic(async (scope) => {
+    const { id } = await getDraft(scope);
+    return changeDraft(scope, { draft: id, ...editBetween(from, to(from), "Changed") }, version);
+  });
 const renamed = (title: string) => (tree: FaultTree) => putNode(tree, "causes", { ...tree.causes[0]!, title });
-const publish = (version: number, note = "Because") =>
-  asMechanic((scope) => publishDraft(scope, { note, failing: [], accept: [] }, version));
+const publish = async (version: number, said: Partial<Publication> = {}) => {
+  const { id } = await asMechanic(getDraft);
+  const pass = await prove(mats.person, mats.fleetId, "tree:write");
+  return publishDraft(pass, { draft: id, note: "Because", failing: [], accept: [], ...said }, version);
+};
 
 describe("a draft", () => {
   test("begins as the version it is begun from, once: who comes second joins it", async () => {
@@ -54,10 +61,10 @@ describe("a draft", () => {
   test("saved meanwhile by somebody else is shown as it is now, and nothing is written over", async () => {
     const anna = await addPerson({ name: "Anna" });
     await addMember(mats.fleetId, anna, ["mechanic"]);
-    await begin();
+    const { id } = await begin();
     await change(1, renamed("Mats' title"));
     const late = withScope(anna, mats.fleetId, "tree:write", (scope) =>
-      changeDraft(scope, editBetween(smallTree(), renamed("Anna's title")(smallTree()), "Renamed"), 1),
+      changeDraft(scope, { draft: id, ...editBetween(smallTree(), renamed("Anna's title")(smallTree()), "Renamed") }, 1),
     );
     await expect(late).rejects.toMatchObject({ status: 412, extras: { current: { version: 2, by: "Mats" } } });
     expect((await asMechanic(getDraft)).document.causes[0]?.title).toBe("Mats' title");
@@ -75,11 +82,23 @@ describe("a draft", () => {
   });
 
   test("given up is gone, but not from under somebody who has just saved it", async () => {
-    await begin();
+    const { id } = await begin();
     await change(1, renamed("Another title"));
-    await expect(asMechanic((scope) => discardDraft(scope, 1))).rejects.toMatchObject({ status: 412 });
-    await asMechanic((scope) => discardDraft(scope, 2));
+    await expect(asMechanic((scope) => discardDraft(scope, id, 1))).rejects.toMatchObject({ status: 412 });
+    await asMechanic((scope) => discardDraft(scope, id, 2));
     expect(await asMechanic(findDraft)).toBeNull();
+  });
+
+  test("is not taken for the next one, which may have been saved as often", async () => {
+    const { id } = await begin();
+    await asMechanic((scope) => discardDraft(scope, id, 1));
+    const next = await begin();
+    const isOther = { status: 412, extras: { current: { id: next.id, version: 1 } } };
+    const edit = { draft: id, ...editBetween(smallTree(), renamed("Late")(smallTree()), "Renamed") };
+    await expect(asMechanic((scope) => changeDraft(scope, edit, 1))).rejects.toMatchObject(isOther);
+    await expect(publish(1, { draft: id })).rejects.toMatchObject(isOther);
+    await expect(asMechanic((scope) => discardDraft(scope, id, 1))).rejects.toMatchObject(isOther);
+    expect(await asMechanic(getDraft)).toEqual(next);
   });
 
   test("of one fleet is nothing to another", async () => {
@@ -93,7 +112,7 @@ describe("publishing", () => {
   test("makes the draft the version that new diagnoses use, numbered, with note and differences, and never to be changed", async () => {
     await begin();
     await change(1, renamed("Another title"));
-    const one = await publish(2, "A better name");
+    const one = await publish(2, { note: "A better name" });
     expect(one).toMatchObject({ number: 1, from: "own" });
     expect(await asMechanic(getCurrentTreeVersion)).toMatchObject({ id: one.id });
     expect(await asMechanic((scope) => getTreeVersion(scope, one.id))).toMatchObject({
@@ -125,7 +144,7 @@ describe("publishing", () => {
   test("is refused while a known case is said to fail, unless it is accepted by name", async () => {
     await begin();
     await change(1, (tree) => ({ ...renamed("Another title")(tree), knownCases: [{ ...knownCase, causes: [tree.causes[0]!.key] }] }));
-    const publishing = (accept: string[]) => asMechanic((scope) => publishDraft(scope, { note: "Seen", failing: ["not-so"], accept }, 2));
+    const publishing = (accept: string[]) => publish(2, { note: "Seen", failing: ["not-so"], accept });
     await expect(publishing([])).rejects.toMatchObject({ status: 422, extras: { errors: [{ path: "known case not-so" }] } });
     expect(await publishing(["not-so"])).toMatchObject({ number: 1 });
   });

@@ -1,10 +1,11 @@
+import { existsSync } from "node:fs";
 import { mkdtemp, readdir } from "node:fs/promises";
 import os from "node:os";
 import path from "node:path";
 import sharp from "sharp";
 import { afterAll, beforeAll, describe, expect, test } from "vitest";
 import { startFakeS3 } from "../../scripts/lib/fake-s3.mjs";
-import { withScope } from "@/lib/server/auth/scope";
+import { prove, withScope } from "@/lib/server/auth/scope";
 import { keepFile } from "@/lib/server/files/commands";
 import { folderStore } from "@/lib/server/files/folder-store";
 import type { ObjectStore } from "@/lib/server/files/object-store";
@@ -131,8 +132,7 @@ describe("a photo of a fleet", () => {
     process.env.FILES_DIR = await mkdtemp(path.join(os.tmpdir(), "gudgeon-files-"));
     [ines, mats] = [await afloat("Ines"), await afloat("Mats")];
   });
-  const keep = (who: Afloat, id: string, bytes: Buffer) =>
-    withScope(who.person, who.fleetId, "file:write", (scope) => keepFile(scope, id, bytes));
+  const keep = async (who: Afloat, id: string, bytes: Buffer) => keepFile(await prove(who.person, who.fleetId, "file:write"), id, bytes);
   const read = (who: Afloat, id: string) => withScope(who.person, who.fleetId, "file:read", (scope) => readFile(scope, id));
 
   test("is read back under headers that let no browser run it", async () => {
@@ -148,6 +148,25 @@ describe("a photo of a fleet", () => {
     expect(answer.headers.get("content-security-policy")).toContain("sandbox");
     expect(answer.headers.get("vary")).toBe("cookie");
     expect((await sharp(await answer.bytes()).metadata()).format).toBe("jpeg");
+  });
+
+  test("is encoded and put away while no transaction waits for it", async () => {
+    const lena = await afloat("Lena");
+    const pass = await prove(lena.person, lena.fleetId, "file:write");
+    const isPutAway = () => existsSync(path.join(process.env.FILES_DIR!, lena.fleetId));
+    const transactions: { before: boolean; after: boolean }[] = [];
+    const watched: typeof pass = {
+      enter: async (run) => {
+        const before = isPutAway();
+        const result = await pass.enter(run);
+        transactions.push({ before, after: isPutAway() });
+        return result;
+      },
+    };
+    await keepFile(watched, crypto.randomUUID(), await plain().png().toBuffer());
+    expect(transactions.filter(({ before, after }) => before !== after)).toEqual([]);
+    expect(transactions.at(0)).toEqual({ before: false, after: false });
+    expect(transactions.at(-1)).toEqual({ before: true, after: true });
   });
 
   test("sent twice is one photo; another under its id is refused and the first stays", async () => {

@@ -13,13 +13,19 @@ import { shippedTree } from "../support/shipped-tree";
 import { smallTree } from "../support/small-tree";
 
 describe("a tree taken along", () => {
-  test.each(["yaml", "json"] as const)("and brought back is the identical document, and so is its file: %s", async (format) => {
-    for (const tree of [typographicAll(smallTree()) as FaultTree, await shippedTree()]) {
-      const file = treeFile(tree, format);
-      expect(readTreeText(file)).toEqual(tree);
-      expect(treeFile(readTreeText(file), format)).toBe(file);
-    }
-  });
+  test.each(["yaml", "json"] as const)(
+    "and brought back is the identical document, and so is its file: %s",
+    async (format) => {
+      for (const tree of [typographicAll(smallTree()) as FaultTree, await shippedTree()]) {
+        const file = treeFile(tree, format);
+        const read = readTreeText(file);
+        expect(read).toEqual(tree);
+        expect(treeFile(read, format)).toBe(file);
+      }
+      // The whole shipped tree is read twice, which takes its time where much else runs.
+    },
+    60_000,
+  );
 
   test("with a fault in it is refused with line and node", () => {
     const file = treeFile(smallTree(), "yaml").replace(/minutes: \d+/, "minutes: soon");
@@ -39,6 +45,25 @@ describe("a tree taken along", () => {
         extras: { errors: expect.arrayContaining([expect.objectContaining({ path: expect.stringMatching(/^line \d/) })]) },
       }),
     );
+  });
+
+  test.each([
+    ["nested too deep", `about: ${"[".repeat(20_000)}${"]".repeat(20_000)}`],
+    [
+      "unfolding without end",
+      `systems: &a [x, x]\n${[..."bcdefghijklmno"].map((name, at) => `${name}: &${name} [${`*${"abcdefghijklmno"[at]}, `.repeat(9)}]`).join("\n")}`,
+    ],
+  ])("is refused in words where it is made to choke on: %s", (_how, file) => {
+    expect(() => readTreeText(file)).toThrowError(expect.objectContaining({ status: 422 }));
+  });
+
+  test("of nothing but faults tells the first hundred", () => {
+    const file = Array.from({ length: 300 }, (_, at) => `wrong-${at}: 1`).join("\n");
+    const refused = expect.objectContaining({
+      status: 422,
+      extras: { errors: expect.toSatisfy((errors: unknown[]) => errors.length === 100) },
+    });
+    expect(() => readTreeText(file)).toThrowError(refused);
   });
 });
 

@@ -1,4 +1,5 @@
 import type { Routes } from "@/lib/server/web/openapi";
+import * as passage from "./fleets/[fleetId]/boats/[boatId]/passage/route";
 import * as boat from "./fleets/[fleetId]/boats/[boatId]/route";
 import * as boats from "./fleets/[fleetId]/boats/route";
 import * as events from "./fleets/[fleetId]/diagnoses/[diagnosisId]/events/route";
@@ -10,6 +11,7 @@ import * as hours from "./fleets/[fleetId]/engines/[engineId]/hours/route";
 import * as engineLog from "./fleets/[fleetId]/engines/[engineId]/log/route";
 import * as repair from "./fleets/[fleetId]/engines/[engineId]/repairs/[repairId]/route";
 import * as repairs from "./fleets/[fleetId]/engines/[engineId]/repairs/route";
+import * as engineEvidence from "./fleets/[fleetId]/engines/[engineId]/evidence/route";
 import * as engineRepeats from "./fleets/[fleetId]/engines/[engineId]/repeats/route";
 import * as engine from "./fleets/[fleetId]/engines/[engineId]/route";
 import * as engines from "./fleets/[fleetId]/engines/route";
@@ -38,6 +40,7 @@ export const routes: Routes = {
   "/fleets/{fleetId}": fleet,
   "/fleets/{fleetId}/boats": boats,
   "/fleets/{fleetId}/boats/{boatId}": boat,
+  "/fleets/{fleetId}/boats/{boatId}/passage": passage,
   "/fleets/{fleetId}/engines": engines,
   "/fleets/{fleetId}/engines/{engineId}": engine,
   "/fleets/{fleetId}/engines/{engineId}/hours": hours,
@@ -45,6 +48,7 @@ export const routes: Routes = {
   "/fleets/{fleetId}/engines/{engineId}/repairs": repairs,
   "/fleets/{fleetId}/engines/{engineId}/repairs/{repairId}": repair,
   "/fleets/{fleetId}/engines/{engineId}/log": engineLog,
+  "/fleets/{fleetId}/engines/{engineId}/evidence": engineEvidence,
   "/fleets/{fleetId}/engines/{engineId}/repeats": engineRepeats,
   "/fleets/{fleetId}/log": log,
   "/fleets/{fleetId}/repeats": repeats,

@@ -17,7 +17,14 @@ export function CellEditor({ label, begin, onEnd }: Props) {
   const input = useRef<HTMLInputElement>(null);
   const words = useId();
   useEffect(() => input.current?.focus(), []);
-  const end = (then: { row: number; column: number }) => setWrong(!onEnd(text, then));
+  // Ending moves on to a cell, and with that the field loses the focus: that is not a second ending.
+  const ended = useRef(false);
+  const end = (typed: string | null, then: { row: number; column: number }) => {
+    if (ended.current) return;
+    ended.current = true;
+    ended.current = onEnd(typed, then);
+    setWrong(!ended.current);
+  };
   return (
     <>
       <input
@@ -32,14 +39,14 @@ export function CellEditor({ label, begin, onEnd }: Props) {
           setText(event.target.value);
           setWrong(false);
         }}
-        onBlur={() => end({ row: 0, column: 0 })}
+        onBlur={() => end(text, { row: 0, column: 0 })}
         onKeyDown={(event) => {
           event.stopPropagation();
-          if (event.key === "Escape") onEnd(null, { row: 0, column: 0 });
-          else if (event.key === "Enter") end({ row: 1, column: 0 });
+          if (event.key === "Escape") end(null, { row: 0, column: 0 });
+          else if (event.key === "Enter") end(text, { row: 1, column: 0 });
           else if (event.key === "Tab") {
             event.preventDefault();
-            end({ row: 0, column: event.shiftKey ? -1 : 1 });
+            end(text, { row: 0, column: event.shiftKey ? -1 : 1 });
           }
         }}
       />

@@ -10,6 +10,7 @@ import { logOf, type Payload } from "@/lib/core/diagnosis/log-of";
 import type { DiagnosisView, StepShown } from "@/lib/core/diagnosis/view";
 import { Situation, type FaultTree } from "@/lib/core/tree/schema";
 import type { Place } from "../place";
+import { RuleSays } from "@/components/diagnosis/rule-says";
 import { trialBegun } from "./trial";
 
 type Props = { tree: FaultTree; symptom: string; onOpen: (node: Place["node"]) => void };
@@ -43,7 +44,12 @@ export function TryView({ tree, symptom, onOpen }: Props) {
       {!shown && !failed && <p role="status">Working it out…</p>}
       {shown && (
         <div className="grid gap-4 xl:grid-cols-[minmax(0,1fr)_20rem]">
-          <Asked shown={shown} say={say} onOpen={onOpen} />
+          <div className="grid content-start gap-4">
+            {shown.rulesInForce.map((rule) => (
+              <RuleSays key={rule.key} rule={rule} />
+            ))}
+            <Asked shown={shown} say={say} onOpen={onOpen} />
+          </div>
           <StillPossible shown={shown} onOpen={onOpen} />
         </div>
       )}
@@ -56,6 +62,8 @@ function useTrial(tree: FaultTree, symptom: string, situation: Situation, said: 
   const [shown, setShown] = useState<DiagnosisView | null>(null);
   const [failed, setFailed] = useState<string | null>(null);
   const version = useMemo(() => `trial-${nextTrial++}-${tree.key}`, [tree]);
+  // Each edit makes another tree: the worker does not keep them all, nor outlive the view.
+  useEffect(() => () => reasoner.close(), [reasoner, version]);
   useEffect(() => {
     let current = true;
     reasoner

@@ -1,5 +1,6 @@
 import { keepModels } from "@/lib/core/diagnosis/keep-models";
 import { view } from "@/lib/core/diagnosis/show";
+import { whatIf } from "@/lib/core/diagnosis/what-if";
 import type { FaultTree } from "@/lib/core/tree/schema";
 import type { Ask, Told } from "./protocol";
 
@@ -16,7 +17,8 @@ self.onmessage = ({ data }: MessageEvent<Ask>) => {
   const tree = trees.get(data.version);
   if (!tree) return tell({ id: data.id, failure: "the tree is not on this phone" });
   try {
-    tell({ id: data.id, view: view(tree, data.events, models) });
+    if (data.ask === "what-if") tell({ id: data.id, whatIf: whatIf(tree, data.events, models) });
+    else tell({ id: data.id, view: view(tree, data.events, models) });
   } catch (failure) {
     tell({ id: data.id, failure: failure instanceof Error ? failure.message : String(failure) });
   }

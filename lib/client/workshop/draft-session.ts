@@ -13,6 +13,9 @@ export type SavedDraft = {
   takenUp: string;
 };
 
+/** An edit of a session. `took`: with it the content of one shipped version took the place of another's. */
+export type SessionEdit = Edit & { took?: { from: string; to: string } };
+
 /**
  * One person's work on the fleet's draft: a value, so that it can be kept on
  * this device whole and taken up again after a reload, a crash or a dead
@@ -23,8 +26,8 @@ export type DraftSession = {
   readonly tree: FaultTree;
   /** What the server has; whatever of `tree` differs from it waits to be saved. */
   readonly saved: SavedDraft;
-  readonly undo: readonly Edit[];
-  readonly redo: readonly Edit[];
+  readonly undo: readonly SessionEdit[];
+  readonly redo: readonly SessionEdit[];
   /** Fields that another mechanic changed too, each to something else: to be chosen by hand. Until then theirs stands. */
   readonly collisions: readonly Collision[];
   /** The shipped version whose content was taken up since the last save. */
@@ -50,7 +53,7 @@ export function undone(session: DraftSession): { session: DraftSession; refused:
   const undo = session.undo.slice(0, -1);
   const applied = applyEdit(session.tree, undoOf(edit));
   if ("refused" in applied) return { session: { ...session, undo }, refused: applied.refused };
-  return { session: { ...session, tree: applied.tree, undo, redo: [...session.redo, edit] }, refused: null };
+  return { session: { ...session, tree: applied.tree, undo, redo: [...session.redo, edit], ...takingUp(edit.took?.from) }, refused: null };
 }
 
 /** Makes the edit that was last taken back once more. */
@@ -60,8 +63,10 @@ export function redone(session: DraftSession): { session: DraftSession; refused:
   const redo = session.redo.slice(0, -1);
   const applied = applyEdit(session.tree, edit);
   if ("refused" in applied) return { session: { ...session, redo }, refused: applied.refused };
-  return { session: { ...session, tree: applied.tree, redo, undo: [...session.undo, edit] }, refused: null };
+  return { session: { ...session, tree: applied.tree, redo, undo: [...session.undo, edit], ...takingUp(edit.took?.to) }, refused: null };
 }
+
+const takingUp = (version: string | undefined): { takesUp?: string } => (version === undefined ? {} : { takesUp: version });
 
 /** What waits to be saved, as one edit; null where the server has it all. */
 export function unsaved(session: DraftSession): Edit | null {
@@ -69,9 +74,9 @@ export function unsaved(session: DraftSession): Edit | null {
   return waiting.changes.length === 0 ? null : waiting;
 }
 
-/** After a save: the server now has `saved`. What was edited while it was on its way still waits. */
+/** After a save: the server now has `saved`. What was edited or taken up while it was on its way still waits. */
 export function afterSave(session: DraftSession, saved: SavedDraft): DraftSession {
-  return { ...session, saved, takesUp: undefined };
+  return { ...session, saved, takesUp: session.takesUp === saved.takenUp ? undefined : session.takesUp };
 }
 
 /**
@@ -97,15 +102,19 @@ export function chosen(session: DraftSession, collision: Collision, choice: "min
  */
 export function tookUp(session: DraftSession, base: FaultTree, newer: { id: string; document: FaultTree }): DraftSession {
   const { tree, collisions } = mergeTrees(base, session.tree, newer.document);
+  const after = edited(session, tree, "Took up the newer shipped tree");
+  const took = { from: session.takesUp ?? session.saved.takenUp, to: newer.id };
   return {
-    ...edited(session, tree, "Took up the newer shipped tree"),
+    ...after,
+    undo: after === session ? session.undo : after.undo.map((edit, at) => (at === after.undo.length - 1 ? { ...edit, took } : edit)),
     collisions: [...session.collisions, ...collisions],
     takesUp: newer.id,
   };
 }
 
-/** Takes in what an earlier draft still had to save when it was closed. */
+/** Takes in what an earlier draft still had to save when it was closed, and what nobody had chosen yet. */
 export function broughtOver(session: DraftSession, earlier: DraftSession): DraftSession {
   const { tree, collisions } = mergeTrees(earlier.saved.document, earlier.tree, session.tree);
-  return { ...edited(session, tree, "Brought over from the draft before"), collisions: [...session.collisions, ...collisions] };
+  const open = earlier.collisions.filter((old) => !collisions.some(({ path }) => sameValue(path, old.path)));
+  return { ...edited(session, tree, "Brought over from the draft before"), collisions: [...session.collisions, ...open, ...collisions] };
 }

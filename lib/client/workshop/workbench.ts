@@ -51,6 +51,7 @@ export class Workbench {
   #timer: ReturnType<typeof setTimeout> | null = null;
   #failures = 0;
   #running: Promise<void> | null = null;
+  #closed = false;
 
   constructor(fleetId: string, keeper: SessionKeeper, session: DraftSession, savedAt: string) {
     this.#path = `/api/v1/fleets/${fleetId}/trees/draft`;
@@ -89,7 +90,23 @@ export class Workbench {
   async saveNow(): Promise<void> {
     if (this.#timer) clearTimeout(this.#timer);
     await this.#running;
-    await this.#run();
+    await this.#start();
+  }
+
+  /**
+   * An answer told that the draft has been saved elsewhere: `now` is what it says there. It is joined with what stands
+   * here. Not a draft, or one that cannot be read, is left alone.
+   */
+  takeIn(now: unknown): boolean {
+    const theirs = TreeDraft.safeParse(now);
+    if (!theirs.success) return false;
+    // Another draft under the same address: this one was published or given up, and somebody has begun the next.
+    if (theirs.data.id !== this.session.get().saved.id) {
+      this.saving.set({ state: "gone" });
+      return true;
+    }
+    this.#put(joined(this.session.get(), savedOf(theirs.data)));
+    return true;
   }
 
   /** A signal has come back, or somebody looks at the page again. */
@@ -106,6 +123,7 @@ export class Workbench {
 
   /** Stops trying; what waits stays on this device. */
   close(): void {
+    this.#closed = true;
     if (this.#timer) clearTimeout(this.#timer);
   }
 
@@ -121,11 +139,15 @@ export class Workbench {
 
   #later(ms: number): void {
     if (this.#timer) clearTimeout(this.#timer);
-    this.#timer = setTimeout(() => {
-      this.#running ??= this.#run().finally(() => {
-        this.#running = null;
-      });
-    }, ms);
+    if (this.#closed) return;
+    this.#timer = setTimeout(() => void this.#start(), ms);
+  }
+
+  #start(): Promise<void> {
+    this.#running ??= this.#run().finally(() => {
+      this.#running = null;
+    });
+    return this.#running;
   }
 
   async #run(): Promise<void> {
@@ -134,20 +156,18 @@ export class Workbench {
       const { saved, takesUp } = this.session.get();
       try {
         const answer = TreeDraft.parse(
-          await sendJson(this.#path, { ...edit, ...(takesUp ? { takesUp } : {}) }, { method: "PATCH", version: saved.version }),
+          await sendJson(
+            this.#path,
+            { draft: saved.id, ...edit, ...(takesUp ? { takesUp } : {}) },
+            { method: "PATCH", version: saved.version },
+          ),
         );
         this.#put(afterSave(this.session.get(), savedOf(answer)));
         this.#failures = 0;
         this.saving.set({ state: "saved", at: answer.savedAt });
       } catch (failure) {
-        const theirs = failure instanceof NoAnswer && failure.status === 412 ? TreeDraft.safeParse(failure.current) : null;
-        if (theirs?.success) {
-          // Another draft under the same address: this one was published or given up, and somebody has begun the next.
-          if (theirs.data.id !== saved.id) return this.saving.set({ state: "gone" });
-          this.#put(joined(this.session.get(), savedOf(theirs.data)));
-          continue;
-        }
-        return this.#failed(failure);
+        if (!(failure instanceof NoAnswer && failure.status === 412 && this.takeIn(failure.current))) return this.#failed(failure);
+        if (this.saving.get().state === "gone") return;
       }
     }
   }
@@ -196,7 +216,7 @@ export async function resumeWorkbench(fleetId: string, keeper: SessionKeeper, dr
   let session = kept === null ? beginSession(savedOf(draft)) : kept.saved.version === draft.version ? kept : joined(kept, savedOf(draft));
   for (const id of await keeper.draftIds().catch(() => [])) {
     const earlier = id === draft.id ? null : await keeper.read(id);
-    if (earlier && unsaved(earlier)) session = broughtOver(session, earlier);
+    if (earlier && (unsaved(earlier) || earlier.collisions.length > 0)) session = broughtOver(session, earlier);
     if (earlier) {
       await keeper.keep(session);
       await keeper.forget(id);

@@ -12,6 +12,7 @@ const Node = z.looseObject({ key: Key }).nullable();
 /** An edit on its way to a draft. */
 export const TreeEdit = z
   .strictObject({
+    draft: Id.describe("The draft that it is made in"),
     says: z.string().trim().min(1).max(300),
     changes: z
       .array(
@@ -26,7 +27,7 @@ export const TreeEdit = z
     takesUp: Id.optional(),
   })
   .describe("Changes to nodes, each with what stood before and after");
-export type TreeEdit = Edit & { takesUp?: string };
+export type TreeEdit = Edit & { draft: string; takesUp?: string };
 
 export const NewDraft = z.strictObject({ id: Id, versionId: Id.describe("The version to begin from") });
 export type NewDraft = z.infer<typeof NewDraft>;
@@ -49,6 +50,7 @@ export const TreeDraft = DraftInfo.extend({ document: FaultTree });
 export type TreeDraft = z.infer<typeof TreeDraft>;
 
 export const Publication = z.strictObject({
+  draft: Id.describe("The draft that was looked at"),
   note: z.string().trim().min(1).max(1000).describe("What was changed and why, for whoever reads the history"),
   failing: z
     .array(Key)

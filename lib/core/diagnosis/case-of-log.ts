@@ -6,14 +6,15 @@ import { fold } from "./fold";
  * A logged diagnosis as a known case: what was told, and the cause that a
  * proved cure left no doubt about. Rule [V4].
  *
- * Null where the log proves nothing: not ended as cured, without a proof, or
- * with a cause in the person's own words. "Can't tell" and "not fitted" are no
+ * Null where the log proves nothing: not ended as cured, without a proof, with
+ * a cause in the person's own words, or of two faults of which the outcome
+ * names one, so that nobody can say which finding was whose. "Can't tell" and "not fitted" are no
  * findings. What was known at the start is not in the log, and is not guessed.
  */
 export function caseOfLog(log: readonly DiagnosisEvent[], titles: Pick<FaultTree, "causes" | "symptoms">): KnownCase | null {
   const state = fold(log);
-  const { begun, ended } = state;
-  if (begun === null || ended === null) return null;
+  const { begun, ended, partCure } = state;
+  if (begun === null || ended === null || partCure !== null) return null;
   const { outcome, cause, proof } = ended.payload;
   if (outcome !== "cured" || cause === undefined || proof === undefined || proof === "") return null;
   const symptoms = state.symptoms.filter(({ present }) => present).map(({ symptom }) => symptom);

@@ -33,7 +33,9 @@ export function compile(tree: FaultTree, setting: Setting): Model {
   const weights = Float64Array.from(causes, (cause) => weightOf(cause, shareFor(cause), setting));
   const pairs = setting.faults === "one" ? null : compilePairs(tree, causes, weights, setting, PAIRS);
   const prior = withUnknown(weights, pairs ? PAIRS : 0);
-  const stepOf = (step: Check | Remedy): StepModel => stepModel(step, shareFor(step), setting);
+  // What cannot be done in this situation may have been done in another, and told: it is compiled, and not offered. Rule [W4].
+  const stepOf = (step: Check | Remedy): StepModel =>
+    stepModel(step, shareFor({ appliesTo: step.appliesTo && { ...step.appliesTo, situations: undefined } }), setting);
   const checks = tree.checks
     .map((check) => ({ check, step: stepOf(check) }))
     .filter(({ step }) => step.share > 0)
@@ -92,11 +94,14 @@ function withUnknownPlace(shares: Float64Array): Float64Array {
 function stepModel(step: Check | Remedy, share: number, setting: Setting): StepModel {
   const missing = isMissing(step, setting.notAboard ?? []);
   const alongside = setting.situation === "alongside";
+  const here = step.appliesTo?.situations?.includes(setting.situation) ?? true;
   const unionsAllowed = !step.flags.opensHighPressureFuel || !treatedAsRail(setting.profile);
   return {
     key: step.key,
     share,
-    offered: unionsAllowed && fuelAllowed(step, setting) && whoMay(step, setting.person, setting.situation) && (!missing || alongside),
+    here,
+    offered:
+      here && unionsAllowed && fuelAllowed(step, setting) && whoMay(step, setting.person, setting.situation) && (!missing || alongside),
     minutes: fixedMinutes(step, setting.situation) + (missing && alongside ? COSTS.fetchAlongside : 0),
   };
 }

@@ -74,9 +74,11 @@ export class Gates {
   }
 
   #find(ref: StepRef): CheckModel | RemedyModel | undefined {
-    return ref.kind === "check"
-      ? this.#model.checks[this.#model.checkAt.get(ref.key) ?? -1]
-      : this.#model.remedies[this.#model.remedyAt.get(ref.key) ?? -1];
+    const step =
+      ref.kind === "check"
+        ? this.#model.checks[this.#model.checkAt.get(ref.key) ?? -1]
+        : this.#model.remedies[this.#model.remedyAt.get(ref.key) ?? -1];
+    return step?.here ? step : undefined;
   }
 
   #chanceOf(check: CheckModel, finding: string): number {

@@ -25,6 +25,8 @@ export type StepModel = {
   readonly key: string;
   /** Share of engines like this one that have what it works on; under 1 the step says "if fitted". */
   readonly share: number;
+  /** Can it be done in this situation at all? What cannot may still be told. */
+  readonly here: boolean;
   /** May it be asked of this person, here, with what is aboard? What is not offered may still be told. */
   readonly offered: boolean;
   /** fixedMinutes, and the fetching of what is not aboard. */

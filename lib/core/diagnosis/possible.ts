@@ -1,6 +1,7 @@
 import { probabilityOf } from "./cause-row";
 import type { Belief } from "./believe";
 import type { Evidence } from "./evidence";
+import { howSure } from "./how-sure";
 import type { Model } from "./model";
 import { likeliestPairs } from "./pairs";
 import { ofHundred } from "./of-hundred";
@@ -34,6 +35,7 @@ export function possible(model: Model, evidence: Evidence, belief: Belief): Poss
     })),
     others: { count: folded.length, of100: counts[named.length] ?? 0 },
     unknown: { share: unknown, of100: counts[named.length + 1] ?? 0 },
+    sure: howSure(belief).says,
     two: twoShown(model, belief),
   };
 }

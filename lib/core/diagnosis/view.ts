@@ -114,6 +114,8 @@ export type Possible = {
   /** How many causes are folded into "others", and their share. */
   others: { count: number; of100: number };
   unknown: { share: number; of100: number };
+  /** How sure the first place is, in a sentence. */
+  sure: string;
   /** "Perhaps two faults", with the likeliest two; null while the numbers do not say so, and once one of two was put right. */
   two: { share: number; of100: number; likeliest: readonly [Named, Named] } | null;
 };

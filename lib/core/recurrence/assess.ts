@@ -24,7 +24,7 @@ export function assess(entries: readonly CaseEntry[], engines: readonly WatchedE
   const byCause = new Map<string, FaultRecord[]>();
   for (const record of records) byCause.set(record.cause, [...(byCause.get(record.cause) ?? []), record]);
   // Which record comes under watch first hangs on its rate, so here each gets the same, whoever comes first (rule F3).
-  const oftenerLevel = FALSE_ALARM_LEVEL / Math.max(1, engines.length * byCause.size);
+  const oftenerLevel = FALSE_ALARM_LEVEL / Math.max(1, engines.length * causesThatCameBack(records));
   return records.map((record) => {
     const sameCause = new Map((byCause.get(record.cause) ?? []).map((one) => [one.engineId, one]));
     const others = engines.flatMap(({ id }) => {
@@ -39,6 +39,9 @@ export function assess(entries: readonly CaseEntry[], engines: readonly WatchedE
     };
   });
 }
+
+const causesThatCameBack = (records: readonly FaultRecord[]): number =>
+  new Set(records.filter(({ times, beginsWithFault }) => times.length + Number(beginsWithFault) > 1).map(({ cause }) => cause)).size;
 
 /** The fleet's allowance is shared out in the order in which records came under watch: by the moment of their fourth fault (rule G5). */
 function levelsOf(records: readonly FaultRecord[]): Map<FaultRecord, number> {

@@ -18,6 +18,8 @@ export type HoursThen = { hours: number | null; estimated: boolean };
 export type EngineClock = {
   /** Hours since new at a moment (rules H5 to H7). */
   at: (moment: string) => HoursThen;
+  /** The first believed reading; null before it. */
+  first: { hours: number; readAt: string } | null;
   /** The last believed reading with its hours since new; null before the first. */
   latest: { id: string; reading: number; hours: number; readAt: string } | null;
   /** Ids of readings that do not fit the others (rule H4). */
@@ -53,7 +55,12 @@ export function engineClock(meter: EngineMeter): EngineClock {
     return { hours: before.hours + part * (after.hours - before.hours), estimated: true };
   };
 
-  return { at, latest: last ? { id: last.id, reading: last.reading, hours: last.hours, readAt: last.readAt } : null, doubtful };
+  return {
+    at,
+    first: first ? { hours: first.hours, readAt: first.readAt } : null,
+    latest: last ? { id: last.id, reading: last.reading, hours: last.hours, readAt: last.readAt } : null,
+    doubtful,
+  };
 }
 
 function believedReadings(readings: readonly MeterReading[]): { believed: Fixed[]; doubtful: string[] } {

@@ -9,8 +9,14 @@ export type DirtyTank = { readonly litres: number; readonly seen?: { readonly el
 /** Where nobody counted: an element in fifty litres, worth one element of evidence. Judgement. */
 const USUAL = { elements: 1, litres: 50 };
 
-/** How much of what the first filter catches goes on to clog the second, and the third. Judgement. */
-export const PASSED_ON: Readonly<Record<string, number>> = { "primary-element": 1, "secondary-element": 0.25, "third-element": 0.1 };
+/** How much of what the first filter catches goes on to clog the second, and the third; each new element takes its seals. Judgement. */
+export const PASSED_ON: Readonly<Record<string, number>> = {
+  "primary-element": 1,
+  "primary-seals": 1,
+  "secondary-element": 0.25,
+  "secondary-seals": 0.25,
+  "third-element": 0.1,
+};
 
 /** Elements a litre of dirty fuel, as a gamma distribution: what is usual, outweighed by what was seen (rule P4). */
 export const elementsPerLitre = ({ seen }: DirtyTank): GammaRate => ({

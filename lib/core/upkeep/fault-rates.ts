@@ -5,10 +5,11 @@ import { BASE_RATES } from "../tree/strength";
 
 /** Before any log: one fault of any kind in so many engine hours. Judgement, to be outweighed by the fleet's own hours. */
 const HOURS_PER_FAULT = 150;
-/** What that judgement is worth, in faults of the one cause. */
-const WORTH = 0.5;
-/** How unlike engines of a fleet are in their rate of one cause: the gamma shape about the fleet's. */
-const SHAPE = 1;
+/** That guess is worth so many hours of the fleet's running; the fleet's rate so many of the engine's own. Engines differ much: what keeps coming on one soon counts for more than all the others. */
+const GUESS_HOURS = 500;
+const FLEET_HOURS = 200;
+/** Engines of a fleet are never taken to be more alike than this (gamma shape). */
+const MOST_ALIKE = 1;
 
 /** The tree's own guess at a cause's faults an hour: its share of the base weights. */
 export function treeRates(tree: Pick<FaultTree, "causes">): Map<string, number> {
@@ -23,6 +24,7 @@ export function treeRates(tree: Pick<FaultTree, "causes">): Map<string, number> 
  * @param guess faults an hour, above 0
  */
 export function rateOnEngine(guess: number, others: Watched, own: Watched): GammaRate {
-  const fleet = (WORTH + others.faults) / (WORTH / guess + others.time);
-  return { events: SHAPE + own.faults, exposure: SHAPE / fleet + own.time };
+  const fleet = (GUESS_HOURS * guess + others.faults) / (GUESS_HOURS + others.time);
+  const events = Math.min(MOST_ALIKE, FLEET_HOURS * fleet);
+  return { events: events + own.faults, exposure: events / fleet + own.time };
 }

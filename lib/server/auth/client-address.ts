@@ -14,5 +14,11 @@ export function clientAddress(headers: Headers): string {
   const trusted = Number(process.env.TRUSTED_PROXIES ?? 0);
   const address = (trusted > 0 ? hops.at(-trusted) : hops[0]) ?? "unknown";
   // One household has a whole /64.
-  return isIPv6(address) && !address.startsWith("::ffff:") ? address.split(":").slice(0, 4).join(":") : address.slice(0, 64);
+  return isIPv6(address) && !address.startsWith("::ffff:") ? groupsOf(address).slice(0, 4).join(":") : address.slice(0, 64);
+}
+
+/** The eight groups of an address; "::" stands for as many zeros as are missing. */
+function groupsOf(address: string): string[] {
+  const [head = [], tail = []] = address.split("::").map((part) => (part === "" ? [] : part.split(":")));
+  return [...head, ...Array.from({ length: 8 - head.length - tail.length }, () => "0"), ...tail];
 }

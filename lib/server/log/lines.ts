@@ -66,7 +66,12 @@ function causesOn(rows: readonly LineRow[]): Causes {
   };
 }
 
-export type History = { cases: CaseEntry[]; clocks: Map<string, EngineClock>; hoursNow: (engineId: string) => number | null };
+export type History = {
+  engines: readonly EngineRow[];
+  cases: CaseEntry[];
+  clocks: Map<string, EngineClock>;
+  hoursNow: (engineId: string) => number | null;
+};
 
 /** `inWords`: a cause that only words name is among them; which key it stands for, all others may decide. */
 export type Causes = { keys: readonly string[]; inWords: boolean };
@@ -78,7 +83,7 @@ type Wanted = { engineIds?: readonly string[] | undefined; causes?: Causes };
  * named) and of these causes (of all when none are named). What names no cause, or is still open, is no case and is not read.
  */
 export async function readHistory(scope: FleetScope, { engineIds, causes }: Wanted): Promise<History> {
-  if (engineIds?.length === 0) return { cases: [], clocks: new Map(), hoursNow: () => null };
+  if (engineIds?.length === 0) return { engines: [], cases: [], clocks: new Map(), hoursNow: () => null };
   const ofThese = engineIds && inArray(engines.id, [...engineIds]);
   const rows = await scope.tx
     .select()
@@ -102,6 +107,7 @@ export async function readHistory(scope: FleetScope, { engineIds, causes }: Want
     );
   const byId = new Map<string, EngineRow>(rows.map((row) => [row.id, row]));
   return {
+    engines: rows,
     clocks,
     hoursNow: (engineId) => {
       const [engine, clock] = [byId.get(engineId), clocks.get(engineId)];

@@ -23,7 +23,8 @@ export async function projectDiagnosis(scope: FleetScope<"diagnosis:write" | "lo
   if (!diagnosis || stored.length === 0) return;
   const tree = await documentOf(scope, pinnedVersion(diagnosis));
   const { ended, symptoms } = fold(plainEvents(stored));
-  const present = symptoms.filter((one) => one.present).map((one) => one.symptom);
+  // What was there until one of two faults was put right was complained of all the same.
+  const complainedOf = symptoms.filter((one) => one.present || one.left?.before === true).map((one) => one.symptom);
   const outcome = ended?.payload ?? null;
   const end = stored.find((event) => event.id === ended?.id);
   const by = end?.by ?? diagnosis.begunBy;
@@ -32,7 +33,7 @@ export async function projectDiagnosis(scope: FleetScope<"diagnosis:write" | "lo
   await scope.tx
     .update(diagnoses)
     .set({
-      symptoms: present,
+      symptoms: complainedOf,
       endedAt,
       outcome: outcome?.outcome ?? null,
       lastEventAt: new Date(Math.max(...stored.map((event) => saneMoment(event).getTime()))),
@@ -43,7 +44,7 @@ export async function projectDiagnosis(scope: FleetScope<"diagnosis:write" | "lo
     engineId: diagnosis.engineId,
     at: endedAt ?? diagnosis.begunAt,
     outcome: outcome?.outcome ?? null,
-    ...namesOf(outcome ?? {}, present, tree),
+    ...namesOf(outcome ?? {}, complainedOf, tree),
     proof: outcome?.proof || null,
     engineHours: outcome?.engineHours ?? null,
     minutes: outcome?.minutes ?? null,

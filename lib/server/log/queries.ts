@@ -57,7 +57,7 @@ export async function listRepeats(scope: FleetScope, engineId?: string): Promise
 }
 
 /** The causes that have come more than once on an engine: what has come once cannot have come back, and is not read. */
-async function repeatedCauses(scope: FleetScope, engineId: string | undefined): Promise<Causes> {
+export async function repeatedCauses(scope: FleetScope, engineId: string | undefined): Promise<Causes> {
   const { fleetId, causeKey, causeTitle, takenBackAt } = logEntries;
   const cases = and(
     eq(fleetId, scope.fleetId),

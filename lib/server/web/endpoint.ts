@@ -3,7 +3,7 @@ import type * as z from "zod";
 import type { Permission } from "@/lib/core/access/permissions";
 import { Problem } from "@/lib/core/contract/problem";
 import type { Id } from "@/lib/core/contract/id";
-import { prove, type FleetScope } from "../auth/scope";
+import { prove, type FleetScope, type Pass } from "../auth/scope";
 import { sessionIdOf } from "../auth/session-cookie";
 import { mediaType, readBytes, readJson } from "./body";
 import { refuseCrossSite } from "./cross-site";
@@ -75,10 +75,20 @@ export type Handler = ((request: Request, context: Context) => Promise<Response>
 
 const DEFAULT_MAX_BYTES = 1_000_000;
 
+/** A route within a fleet (its address holds {fleetId}), as far as its shapes go. */
+type InFleet<
+  P extends Permission,
+  Params extends z.ZodObject<{ fleetId: typeof Id }>,
+  Query extends z.ZodType,
+  Input extends z.ZodType,
+  Output extends z.ZodType,
+  Versioned extends boolean,
+  R extends Raw | undefined,
+> = Shaped<P, Params, Query, Input, Output, Versioned, R> & { params: Params };
+
 /**
- * A route within a fleet (its address holds {fleetId}). Four things, always: parse, prove, run, translate. `run` may
- * answer with a Response of its own (a file's bytes); anything else is checked against `output`, and its `version`
- * becomes the ETag.
+ * A route within a fleet. Four things, always: parse, prove, run, translate. `run` may answer with a Response of its own
+ * (a file's bytes); anything else is checked against `output`, and its `version` becomes the ETag.
  */
 export function endpoint<
   P extends Permission,
@@ -89,9 +99,32 @@ export function endpoint<
   Versioned extends boolean = false,
   R extends Raw | undefined = undefined,
 >(
-  spec: Shaped<P, Params, Query, Input, Output, Versioned, R> & {
-    params: Params;
+  spec: InFleet<P, Params, Query, Input, Output, Versioned, R> & {
     run: (scope: FleetScope<P>, call: Call<Params, Query, Input, Versioned, R>) => Answer<Output>;
+  },
+): Handler {
+  const { run, ...rest } = spec;
+  return slowEndpoint<P, Params, Query, Input, Output, Versioned, R>({
+    ...(rest as InFleet<P, Params, Query, Input, Output, Versioned, R>),
+    run: (pass, call) => pass.enter((scope) => run(scope, call)),
+  });
+}
+
+/**
+ * As endpoint(), for work that takes longer than a transaction may be held open, such as encoding a picture or proving a
+ * tree: `run` is handed the pass, and enters the fleet for no longer than it reads or writes.
+ */
+export function slowEndpoint<
+  P extends Permission,
+  Params extends z.ZodObject<{ fleetId: typeof Id }>,
+  Query extends z.ZodType = Nothing,
+  Input extends z.ZodType = Nothing,
+  Output extends z.ZodType = Nothing,
+  Versioned extends boolean = false,
+  R extends Raw | undefined = undefined,
+>(
+  spec: InFleet<P, Params, Query, Input, Output, Versioned, R> & {
+    run: (pass: Pass<P>, call: Call<Params, Query, Input, Versioned, R>) => Answer<Output>;
   },
 ): Handler {
   return handler(spec as EndpointSpec, async (request, params) => {
@@ -104,7 +137,7 @@ export function endpoint<
     const { fleetId } = where.data as { fleetId: string };
     const pass = await prove({ sessionId }, fleetId, spec.permission);
     const call = await readCall<Call<Params, Query, Input, Versioned, R>>(request, spec as EndpointSpec, where.data);
-    return reply(await pass.enter((scope) => spec.run(scope, call)), spec as EndpointSpec);
+    return reply(await spec.run(pass, call), spec as EndpointSpec);
   });
 }
 

@@ -2,6 +2,7 @@ import { afterEach, describe, expect, it, vi } from "vitest";
 import { Reasoner } from "@/lib/client/compute/reasoner";
 import type { Ask, Told } from "@/lib/client/compute/protocol";
 import { view } from "@/lib/core/diagnosis/show";
+import { whatIf } from "@/lib/core/diagnosis/what-if";
 import { smallTree } from "../../support/small-tree";
 import { BEGUN, makeEvent } from "./make-event";
 
@@ -20,7 +21,7 @@ function workerThat(answers: (worker: { onmessage: (said: { data: Told }) => voi
         started.push(this);
       }
       postMessage(ask: Ask) {
-        if (ask.ask === "view") queueMicrotask(() => answers(this, ask));
+        if (ask.ask !== "keep-tree") queueMicrotask(() => answers(this, ask));
       }
     },
   );
@@ -44,8 +45,28 @@ describe("asking for the next step", () => {
     expect(started).toHaveLength(2);
   });
 
+  it("looks behind the step in the worker, and here where there is none", async () => {
+    const own = await new Reasoner().whatIf("1", tree, log);
+    expect(own).toEqual(whatIf(tree, log));
+    expect(own.next.length).toBeGreaterThan(1);
+    workerThat((worker, ask) => ask.ask === "what-if" && worker.onmessage({ data: { id: ask.id, whatIf: own } }));
+    expect(await new Reasoner().whatIf("1", tree, log)).toBe(own);
+  });
+
   it("says why where the reckoning itself failed", async () => {
     workerThat((worker, ask) => ask.ask === "view" && worker.onmessage({ data: { id: ask.id, failure: "no such check" } }));
     await expect(new Reasoner().view("1", tree, log)).rejects.toThrow("no such check");
+  });
+
+  it("lets go of its worker when it is closed, and starts another when it is asked again", async () => {
+    const ended: unknown[] = [];
+    const started = workerThat((worker, ask) => ask.ask === "view" && worker.onmessage({ data: { id: ask.id, view: view(tree, log) } }));
+    const reasoner = new Reasoner();
+    await reasoner.view("1", tree, log);
+    Object.assign(started[0]!, { terminate: () => ended.push(started[0]) });
+    reasoner.close();
+    expect(ended).toEqual(started);
+    expect(await reasoner.view("1", tree, log)).toEqual(view(tree, log));
+    expect(started).toHaveLength(2);
   });
 });

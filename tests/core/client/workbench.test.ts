@@ -30,16 +30,19 @@ class Server {
   reachable = true;
   gone = false;
   readonly saves: TreeEdit[] = [];
+  whileOnItsWay = (): void => undefined;
 
   answer = (_path: string, { body, headers }: RequestInit): Response => {
     if (!this.reachable) throw new TypeError("failed to fetch");
     if (this.gone) return problem(404, {});
     const version = Number((headers as Record<string, string>)["if-match"]?.replaceAll('"', ""));
-    if (version !== this.draft.version) return problem(412, { current: this.draft });
     const edit = JSON.parse(body as string) as TreeEdit;
+    if (edit.draft !== this.draft.id || version !== this.draft.version) return problem(412, { current: this.draft });
     const applied = applyEdit(this.draft.document, edit);
     if ("refused" in applied) return problem(409, { detail: applied.refused });
     this.saves.push(edit);
+    this.whileOnItsWay();
+    this.draft = { ...this.draft, takenUp: edit.takesUp ?? this.draft.takenUp };
     this.save(applied.tree);
     return Response.json(this.draft);
   };
@@ -178,5 +181,69 @@ describe("an edit in the workshop", () => {
     await after.saveNow();
     expect(server.draft.document.causes[0]).toMatchObject({ title: first.title, base: "common" });
     expect(await new SessionKeeper(idOf(7001), FLEET).draftIds()).toEqual([idOf(3)]);
+  });
+
+  it("meant for a draft that was published is not made in the next one, even where that was saved as often", async () => {
+    const mine = await open();
+    const next = { ...server.draft, id: idOf(3), document: rated(smallTree(), "common") };
+    server.draft = next;
+    mine.edit(renamed(smallTree(), "Mine"), "Renamed");
+    await mine.saveNow();
+    expect(mine.saving.get()).toEqual({ state: "gone" });
+    expect(server.draft).toEqual(next);
+  });
+
+  it("is not joined with others' unseen: an answer that tells of theirs shows it", async () => {
+    const mine = await open();
+    server.save(renamed(smallTree(), "Theirs"));
+    expect(mine.takeIn(server.draft)).toBe(true);
+    expect(mine.session.get()).toMatchObject({ saved: { version: 2 }, tree: renamed(smallTree(), "Theirs") });
+    expect(mine.takeIn({ nothing: "of a draft" })).toBe(false);
+    await mine.saveNow();
+    expect(server.saves).toEqual([]);
+  });
+
+  it("left to be chosen when its draft was closed is still to be chosen in the next one", async () => {
+    const before = await open();
+    server.save(renamed(smallTree(), "Theirs"));
+    before.edit(renamed(smallTree(), "Mine"), "Renamed");
+    await before.saveNow();
+    before.close();
+    server.draft = { ...server.draft, id: idOf(3), version: 1 };
+    const after = await open();
+    expect(after.session.get().collisions).toMatchObject([{ field: ["title"], mine: "Mine", theirs: "Theirs" }]);
+    const [collision] = after.session.get().collisions;
+    after.choose(collision!, "mine");
+    await after.saveNow();
+    expect(server.draft.document.causes[0]?.title).toBe("Mine");
+  });
+});
+
+describe("a newer shipped tree", () => {
+  const newer = { id: idOf(4), document: rated(smallTree(), "rare") };
+
+  it("taken up and undone counts as not taken up, before and after it was saved", async () => {
+    const bench = await open();
+    bench.takeUp(smallTree(), newer);
+    await bench.saveNow();
+    expect(server.draft).toMatchObject({ takenUp: newer.id, document: newer.document });
+    bench.undo();
+    await bench.saveNow();
+    expect(server.draft).toMatchObject({ takenUp: idOf(2), document: smallTree() });
+    bench.redo();
+    await bench.saveNow();
+    expect(server.draft).toMatchObject({ takenUp: newer.id, document: newer.document });
+  });
+
+  it("taken up while a save is on its way is said with the next", async () => {
+    const bench = await open();
+    server.whileOnItsWay = () => {
+      server.whileOnItsWay = () => undefined;
+      bench.takeUp(smallTree(), newer);
+    };
+    bench.edit(renamed(smallTree(), "Mine"), "Renamed");
+    await bench.saveNow();
+    expect(server.draft.takenUp).toBe(newer.id);
+    expect(server.draft.document.causes[0]).toMatchObject({ title: "Mine", base: "rare" });
   });
 });

@@ -14,7 +14,11 @@ import { Device } from "./logs";
  * What each version of the core made of one tree and one log. Where this fails with the tree as it was, the same log is
  * now read differently: raise CORE_VERSION and write the new digest beside the new number. Never change an old line.
  */
-const READ_AS: Readonly<Record<number, string>> = { 1: "3ccec10028ff30791674268e", 2: "8a3247239685c33cbc852e14" };
+const READ_AS: Readonly<Record<number, string>> = {
+  1: "3ccec10028ff30791674268e",
+  2: "8a3247239685c33cbc852e14",
+  3: "2cdc8a20d3d4d6a9b3a0c6d9",
+};
 const TREE = "f9c4300a6deb15f30d855b23";
 
 const golden = tree({

@@ -110,6 +110,11 @@ describe("a logged diagnosis as a known case [V4]", () => {
     expect(caseOfLog(log, tree)?.tried).toEqual([{ remedy: one, result: "no-change", when: "after" }]);
   });
 
+  it("is none where one of two faults was put right on the way: which finding was whose is not known", () => {
+    const better = { kind: "remedy-tried" as const, payload: { remedy: "clean", result: "better" as const, photos: [] } };
+    expect(caseOfLog(logOf([begun, answered, better, ended({})]), tree)).toBeNull();
+  });
+
   it("keeps a value as it was typed", () => {
     const reading = tree.checks.find((one) => one.reading !== undefined)!;
     const answer = { value: 0.1, unit: reading.reading!.unit };

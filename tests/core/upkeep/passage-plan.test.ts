@@ -119,6 +119,8 @@ describe("faults on passage", () => {
     expect(mean(rateOnEngine(0.001, none, none))).toBeCloseTo(0.001, 12);
     expect(mean(rateOnEngine(0.001, { faults: 50, time: 10_000 }, none))).toBeCloseTo(50.5 / 10_500, 12);
     expect(mean(rateOnEngine(0.001, { faults: 50, time: 10_000 }, { faults: 30, time: 1000 }))).toBeGreaterThan(0.025);
+    // Three in its last 50 h are not explained away by a rare guess: more than one in the next hundred.
+    expect(100 * mean(rateOnEngine(0.0001, { faults: 0, time: 500 }, { faults: 3, time: 50 }))).toBeGreaterThan(1);
   });
   test("P3: a fault that keeps coming puts its part on the list, and says why", () => {
     expect(cause).toBeDefined();

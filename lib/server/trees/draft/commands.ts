@@ -11,7 +11,7 @@ import type { FaultTree } from "@/lib/core/tree/schema";
 import type { FleetScope } from "@/lib/server/auth/scope";
 import { contentHash } from "../content-hash";
 import { documentOf, findTreeVersion } from "../queries";
-import { findDraft, getDraft } from "./queries";
+import { findDraft, getDraft, getDraftAsSeen } from "./queries";
 
 /** Begins the fleet's draft from a published version. Where somebody has begun one already, that one is it. */
 export async function beginDraft(scope: FleetScope<"tree:write">, { id, versionId }: NewDraft): Promise<TreeDraft> {
@@ -62,12 +62,11 @@ async function ownTree(scope: FleetScope, version: TreeVersionInfo, ancestorId: 
 /**
  * Makes an edit in the draft.
  *
- * @throws Problem 412 with the draft as it is now, when somebody saved it since `version`; 409 when the edit does not
+ * @throws Problem 412 with the draft as it is now, when somebody saved it since `version` or it is another; 409 when the edit does not
  *   fit the tree; 422 when the edited tree would not have the shape of one. Nothing is changed then.
  */
 export async function changeDraft(scope: FleetScope<"tree:write">, edit: TreeEdit, version: number): Promise<TreeDraft> {
-  const draft = await getDraft(scope);
-  if (draft.version !== version) throw Problem.stale(draft);
+  const draft = await getDraftAsSeen(scope, edit.draft, version);
   const applied = applyEdit(draft.document, edit);
   if ("refused" in applied) throw Problem.conflict(applied.refused);
   const document = wellFormed(applied.tree);
@@ -103,8 +102,8 @@ async function demandShipped(scope: FleetScope, id: string): Promise<void> {
 }
 
 /** Gives the draft up, as it was seen. @throws Problem 412 when somebody saved it since */
-export async function discardDraft(scope: FleetScope<"tree:write">, version: number): Promise<void> {
-  const draft = await getDraft(scope);
+export async function discardDraft(scope: FleetScope<"tree:write">, id: string, version: number): Promise<void> {
+  const draft = await getDraftAsSeen(scope, id, version);
   const gone = await scope.tx
     .delete(treeVersions)
     .where(itself(scope, draft, version))

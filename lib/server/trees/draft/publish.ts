@@ -7,31 +7,38 @@ import type { TreeVersionInfo } from "@/lib/core/contract/tree";
 import { compareTrees } from "@/lib/core/tree/differences";
 import type { FaultTree } from "@/lib/core/tree/schema";
 import { findFlaws } from "@/lib/core/tree/soundness";
-import type { FleetScope } from "@/lib/server/auth/scope";
-import { documentOf, findTreeVersion, getTreeVersion } from "../queries";
+import type { FleetScope, Pass } from "@/lib/server/auth/scope";
+import { documentOf, findTreeVersion } from "../queries";
 import { itself } from "./commands";
-import { getDraft } from "./queries";
+import { getDraft, getDraftAsSeen } from "./queries";
 
 /**
  * Makes the draft the fleet's newest version, which the next diagnosis is
- * pinned to; diagnoses that have begun stay with theirs.
+ * pinned to; diagnoses that have begun stay with theirs. It is looked over
+ * between two transactions, and holds no connection meanwhile.
  *
- * @throws Problem 412 when somebody saved it since `version`; 422 when the tree is not sound, when a known case fails
- *   that was not accepted, or when nothing was changed
+ * @throws Problem 412 when somebody saved it since `version`, or it is not the draft that was seen; 422 when the tree is
+ *   not sound, when a known case fails that was not accepted, or when nothing was changed
  */
-export async function publishDraft(scope: FleetScope<"tree:write">, publication: Publication, version: number): Promise<TreeVersionInfo> {
-  const draft = await getDraft(scope);
-  if (draft.version !== version) throw Problem.stale(draft);
-  const differences = await differencesOf(scope, draft);
+export async function publishDraft(pass: Pass<"tree:write">, publication: Publication, version: number): Promise<TreeVersionInfo> {
+  const { draft, differences } = await pass.enter(async (scope) => {
+    const draft = await getDraftAsSeen(scope, publication.draft, version);
+    return { draft, differences: await differencesOf(scope, draft) };
+  });
   refuseUnsound(draft.document);
   refuseFailing(draft.document, publication);
-  const published = await scope.tx
-    .update(treeVersions)
-    .set({ number: await nextNumber(scope, draft), note: publication.note, differences, publishedAt: new Date(), by: scope.actor.userId })
-    .where(itself(scope, draft, version))
-    .returning({ treeId: treeVersions.treeId });
-  if (published.length === 0) throw Problem.stale(await getDraft(scope));
-  return getTreeVersion(scope, draft.id);
+  return pass.enter(async (scope) => {
+    const published = await scope.tx
+      .update(treeVersions)
+      .set({ number: await nextNumber(scope, draft), note: publication.note, differences, publishedAt: new Date(), by: scope.actor.userId })
+      .where(itself(scope, draft, version))
+      .returning({ treeId: treeVersions.treeId });
+    if (published.length === 0) throw Problem.stale(await getDraft(scope));
+    // Without its document, which is kept in mind once it is read: not before the commit.
+    const info = await findTreeVersion(scope, draft.id);
+    if (!info) throw new Error("a version just published is not there");
+    return info;
+  });
 }
 
 async function differencesOf(scope: FleetScope, draft: TreeDraft): Promise<string[]> {

@@ -29,6 +29,18 @@ export async function getDraft(scope: FleetScope): Promise<TreeDraft> {
   return draft;
 }
 
+/**
+ * The draft that somebody has before their eyes. An address and a version are not enough to name it: it may have been
+ * published or given up since, and the next one may have been saved as often.
+ *
+ * @throws Problem 404 when there is no draft; 412, with the one that is there now, for any other or a newer one
+ */
+export async function getDraftAsSeen(scope: FleetScope, id: string, version: number): Promise<TreeDraft> {
+  const draft = await getDraft(scope);
+  if (draft.id !== id || draft.version !== version) throw Problem.stale(draft);
+  return draft;
+}
+
 function infoOf({ draft, byName }: Row): DraftInfo {
   return {
     id: draft.id,

@@ -62,6 +62,13 @@ export default async function BoatPage({ params }: Props) {
               ))}
             </ul>
           )}
+          {engines.length > 0 && (
+            <p className="mt-2">
+              <Link className="link inline-flex min-h-12 items-center" prefetch={false} href={`/f/${fleetId}/boats/${boat.id}/passage`}>
+                Spares for a passage
+              </Link>
+            </p>
+          )}
         </Card>
         <Card aria-labelledby="boat-itself">
           <h2 id="boat-itself" className="mb-3">

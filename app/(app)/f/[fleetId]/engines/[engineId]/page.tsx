@@ -11,6 +11,7 @@ import { BackTo } from "@/components/shell/back-to";
 import { Card } from "@/components/ui/card";
 import { PageHead } from "@/components/ui/page-head";
 import { getEngine } from "@/lib/server/engines/queries";
+import { listEvidence } from "@/lib/server/log/evidence";
 import { listLog, listRepeats } from "@/lib/server/log/queries";
 import { documentOf, getCurrentTreeVersion } from "@/lib/server/trees/queries";
 import { pageScope } from "@/lib/server/web/page-scope";
@@ -37,8 +38,9 @@ export default async function EnginePage({ params, searchParams }: Props) {
   const { after: given } = await searchParams;
   const after = typeof given === "string" ? given : undefined;
   const engine = await readEngine(fleetId, engineId);
-  const { repeats, drawn, log, tree } = await pageScope("log:read", fleetId, async (scope) => ({
+  const { repeats, evidence, drawn, log, tree } = await pageScope("log:read", fleetId, async (scope) => ({
     repeats: await listRepeats(scope, engineId),
+    evidence: await listEvidence(scope, engineId),
     drawn: (await listLog(scope, { engineId, limit: MOST_DRAWN })).items,
     log: await listLog(scope, { engineId, limit: LINES_A_PAGE, ...(after ? { after } : {}) }),
     tree: await documentOf(scope, await getCurrentTreeVersion(scope)),
@@ -54,7 +56,7 @@ export default async function EnginePage({ params, searchParams }: Props) {
       />
       <div className="grid grid-cols-1 gap-5">
         {repeats.map((repeat) => (
-          <RepeatPanel key={repeat.cause} repeat={repeat} />
+          <RepeatPanel key={repeat.cause} repeat={repeat} evidence={evidence.find(({ cause }) => cause === repeat.cause)} />
         ))}
         <Card aria-labelledby="along">
           <h2 id="along" className="mb-2">

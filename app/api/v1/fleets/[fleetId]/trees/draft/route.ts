@@ -40,6 +40,7 @@ export const DELETE = endpoint({
   permission: "tree:write",
   summary: "Give the draft up",
   params,
+  query: z.object({ draft: Id.describe("The draft that was looked at") }),
   versioned: true,
-  run: (scope, { version }) => discardDraft(scope, version),
+  run: (scope, { query, version }) => discardDraft(scope, query.draft, version),
 });

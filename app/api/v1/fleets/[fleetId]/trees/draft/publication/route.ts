@@ -3,9 +3,9 @@ import { Publication } from "@/lib/core/contract/draft";
 import { Id } from "@/lib/core/contract/id";
 import { TreeVersionInfo } from "@/lib/core/contract/tree";
 import { publishDraft } from "@/lib/server/trees/draft/publish";
-import { endpoint } from "@/lib/server/web/endpoint";
+import { slowEndpoint } from "@/lib/server/web/endpoint";
 
-export const POST = endpoint({
+export const POST = slowEndpoint({
   permission: "tree:write",
   summary: "Publish the draft: the next diagnosis uses it",
   params: z.object({ fleetId: Id }),
@@ -13,5 +13,5 @@ export const POST = endpoint({
   output: TreeVersionInfo,
   versioned: true,
   status: 201,
-  run: (scope, { input, version }) => publishDraft(scope, input, version),
+  run: (pass, { input, version }) => publishDraft(pass, input, version),
 });
