@@ -1,139 +1,105 @@
-import path from "node:path";
-import { believe } from "@/lib/core/diagnosis/believe";
-import { compile } from "@/lib/core/diagnosis/compile";
-import type { Evidence } from "@/lib/core/diagnosis/evidence";
-import type { Model } from "@/lib/core/diagnosis/model";
-import { nextStep } from "@/lib/core/diagnosis/next-step";
-import { parseTree } from "@/lib/core/tree/parse-tree";
-import type { FaultTree } from "@/lib/core/tree/schema";
-import { readTreeFolder } from "@/lib/server/trees/read-tree-folder";
+import { parseArgs } from "node:util";
+import { OTHERS, scenarioFigures, sizeFigures } from "./diagnosis/cost-figures";
+import type { ExactTask } from "./diagnosis/exact-regrets";
+import { atMost, print, type Figure } from "./diagnosis/figures";
+import type { MadeTask } from "./diagnosis/made-runs";
+import { addRuns, mean, noRuns, ratioOf, type Runs } from "./diagnosis/runs";
+import type { ShippedTask } from "./diagnosis/shipped-runs";
+import { timeFigures } from "./diagnosis/times";
+import { twoFaultFigures } from "./diagnosis/two-fault-figures";
+import type { TwoFaultRun, TwoFaultTask } from "./diagnosis/two-fault-runs";
+import { heapFigure } from "./diagnosis/heap";
+import { inStep, workThrough } from "./diagnosis/work-through";
 
 /**
- * How long the core takes on the shipped tree: one next step, one belief update.
- * Runs of a diagnosis are simulated from a fixed seed, so that steps are timed
- * at all depths, on what they would really be asked with.
+ * What the planner's next steps cost beside other ways of going on, beside the
+ * exact optimum on small models, and how long it thinks.
  *
- *   npm run bench -- diagnosis [--json]
+ *   npm run bench -- diagnosis [--quick] [--json] [--seed N]
  */
-const RUNS = 60;
-const STEPS = 12;
-const REPEATS = 50;
-
-type Figure = { figure: string; value: number; bar: number | null; holds: boolean | null };
-
-/** Mulberry32: small, seeded, good enough to roll findings with. */
-function dice(seed: number): () => number {
-  let state = seed;
-  return () => {
-    state = (state + 0x6d2b79f5) | 0;
-    let mixed = Math.imul(state ^ (state >>> 15), 1 | state);
-    mixed = (mixed + Math.imul(mixed ^ (mixed >>> 7), 61 | mixed)) ^ mixed;
-    return ((mixed ^ (mixed >>> 14)) >>> 0) / 2 ** 32;
-  };
+const { values } = parseArgs({
+  options: { quick: { type: "boolean" }, json: { type: "boolean" }, seed: { type: "string", default: "1" } },
+});
+const quick = values.quick === true;
+const seed = Number(values.seed);
+if (!Number.isInteger(seed)) {
+  console.error(`--seed is "${values.seed}"; it has to be a whole number.`);
+  process.exit(2);
 }
+const MINUTES = quick ? 0.4 : 8;
+/** Runs wanted, and as many as are handed out at once; fewer where the time is up. */
+const SIZES = [
+  { size: 10, runs: 4000, at: 100 },
+  { size: 30, runs: 4000, at: 80 },
+  { size: 110, runs: 2000, at: 40 },
+  { size: 200, runs: 1000, at: 20 },
+  { size: 300, runs: 600, at: 12 },
+  { size: 1000, runs: 200, at: 4 },
+] as const;
+const SHARE = quick ? 0.05 : 1;
+const SPOILT = [
+  { name: "oneInTenWrong", wrong: 0.1, refused: 0 },
+  { name: "oneInFiveRefused", wrong: 0, refused: 0.2 },
+] as const;
 
-function pickFrom(weights: Float64Array, roll: number): number {
-  let left = roll * weights.reduce((sum, one) => sum + one, 0);
-  return Math.max(
-    0,
-    weights.findIndex((one) => (left -= one) < 0),
-  );
-}
+type Named<T> = T & { readonly name: string };
+const chunks = <T extends object>(count: number, at: number, task: T): (T & { from: number; to: number })[] =>
+  Array.from({ length: Math.ceil(count / at) }, (_, place) => ({ ...task, from: place * at, to: Math.min(count, (place + 1) * at) }));
+const wanted = (count: number): number => Math.max(8, Math.round(count * SHARE));
 
-/** The best of three: what else the machine does in between is not ours. */
-function timed<T>(work: () => T): [T, number] {
-  let best = Infinity;
-  let result = work();
-  for (let turn = 0; turn < 3; turn++) {
-    const start = performance.now();
-    result = work();
-    best = Math.min(best, performance.now() - start);
+const made = (size: number, name: string, wrong = 0, refused = 0) => ({ kind: "made" as const, name, size, seed, wrong, refused });
+const shipped = (name: string, bareCall: boolean, wrong = 0, refused = 0) => ({
+  kind: "shipped" as const,
+  name,
+  seed,
+  wrong,
+  refused,
+  bareCall,
+});
+const lists: Named<MadeTask | ShippedTask | ExactTask | TwoFaultTask>[][] = [
+  ...SIZES.map(({ size, runs, at }) => chunks(wanted(runs), quick ? Math.ceil(at / 5) : at, made(size, String(size)))),
+  chunks(wanted(1000), 20, { kind: "exact" as const, name: "exact", seed }),
+  chunks(wanted(360), 12, shipped("shipped", false)),
+  chunks(wanted(180), 12, shipped("shipped.bareCall", true)),
+  ...SPOILT.flatMap(({ name, wrong, refused }) => [
+    chunks(wanted(400), 20, made(110, `110.${name}`, wrong, refused)),
+    chunks(wanted(180), 12, shipped(`shipped.${name}`, false, wrong, refused)),
+  ]),
+  chunks(wanted(240), 12, { kind: "two-faults" as const, name: "two-faults", seed }),
+];
+
+const runsOf = new Map<string, Runs>();
+const regrets: number[] = [];
+const twoFaults: TwoFaultRun[] = [];
+await workThrough(inStep(lists), performance.now() + MINUTES * 60_000, ({ name }, done) => {
+  if ("regrets" in done) regrets.push(...done.regrets);
+  else if ("twoFaults" in done) twoFaults.push(...done.twoFaults);
+  else {
+    const runs = runsOf.get(name) ?? noRuns();
+    addRuns(runs, done.runs);
+    runsOf.set(name, runs);
   }
-  return [result, best];
-}
+});
 
-/** One run: a cause drawn by its weight, findings drawn from its rows; times of every next step, and the evidence it met. */
-function play(model: Model, symptom: string, roll: () => number, times: number[]): Evidence[] {
-  const row = model.symptoms.get(symptom);
-  const truth = pickFrom(
-    model.logPrior.map((log, index) => Math.exp(log) * (row?.[index] ?? 0)),
-    roll(),
-  );
-  let evidence: Evidence = { symptoms: [{ symptom, present: true }], findings: [], remedies: [] };
-  const met = [evidence];
-  for (let turn = 0; turn < STEPS; turn++) {
-    const [step, took] = timed(() => nextStep(model, evidence));
-    times.push(took);
-    if (step.kind === "call") break;
-    if (step.kind === "remedy") evidence = { ...evidence, remedies: [...evidence.remedies, { remedy: step.key, result: "no-change" }] };
-    else {
-      const check = model.checks[model.checkAt.get(step.key) ?? -1];
-      const finding = check
-        ? pickFrom(
-            Float64Array.from(check.rows, (one) => one[truth] ?? 0),
-            roll(),
-          )
-        : 0;
-      evidence = {
-        ...evidence,
-        findings: [...evidence.findings, { check: step.key, finding: check?.check.findings[finding]?.key ?? null }],
-      };
-    }
-    met.push(evidence);
-  }
-  return met;
-}
-
-const quantile = (times: readonly number[], share: number): number =>
-  [...times].sort((a, b) => a - b)[Math.min(times.length - 1, Math.floor(share * times.length))] ?? NaN;
-
-function measure(tree: FaultTree): Figure[] {
-  const begun = performance.now();
-  const model = compile(tree, { profile: { features: {}, figures: {}, healthy: {} }, situation: "alongside", person: "mechanic" });
-  const compiled = performance.now() - begun;
-  const roll = dice(20_250_601);
-  const run = (times: number[]): Evidence[] =>
-    play(model, tree.symptoms[Math.floor(roll() * tree.symptoms.length)]?.key ?? "", roll, times);
-  // The first runs only warm the machine.
-  for (let warm = 0; warm < 10; warm++) run([]);
-  const times: number[] = [];
-  const met = Array.from({ length: RUNS }, () => run(times)).flat();
-  const updates: number[] = [];
-  for (const evidence of met) {
-    const [, took] = timed(() => {
-      for (let repeat = 0; repeat < REPEATS; repeat++) believe(model, evidence);
-    });
-    updates.push((took / REPEATS) * 1000);
-  }
-  const figure = (name: string, value: number, bar: number | null): Figure => ({
-    figure: name,
-    value: Number(value.toPrecision(4)),
-    bar,
-    holds: bar === null ? null : value <= bar,
-  });
-  return [
-    figure("tree.causes", tree.causes.length, null),
-    figure("tree.checks", tree.checks.length, null),
-    figure("compileMs", compiled, null),
-    figure("nextStep.calls", times.length, null),
-    figure("nextStep.p50Ms", quantile(times, 0.5), null),
-    figure("nextStep.p99Ms", quantile(times, 0.99), 10),
-    figure("belief.updateUs", quantile(updates, 0.5), 50),
-    figure("belief.updateP99Us", quantile(updates, 0.99), null),
-  ];
-}
-
-const folder = path.resolve(import.meta.dirname, "../../trees/small-marine-diesel");
-const read = await readTreeFolder(folder);
-const parsed = "faults" in read ? null : parseTree(read.document);
-if (!parsed || !("tree" in parsed)) {
-  console.error(`The tree in ${folder} cannot be read: npm run tree -- check trees/small-marine-diesel says why.`);
-  process.exit(1);
-}
-const figures = measure(parsed.tree);
-if (process.argv.includes("--json")) for (const one of figures) console.log(JSON.stringify(one));
-else
-  console.table(
-    Object.fromEntries(figures.map(({ figure, value, bar, holds }) => [figure, { value, bar: bar ?? "", holds: holds ?? "" }])),
-  );
+regrets.sort((a, b) => a - b);
+const sizes = SIZES.map(({ size }) => ({ size, runs: runsOf.get(String(size)) ?? noRuns() }));
+const figures: Figure[] = [
+  atMost("regret.mean", mean(regrets), 0.01, `${regrets.length} models of 7 causes, 5 checks, 7 remedies`),
+  atMost("regret.p99", regrets[Math.floor(0.99 * regrets.length)] ?? NaN, 0.05),
+  atMost("regret.worst", regrets.at(-1) ?? NaN),
+  ...sizes.flatMap(({ size, runs }) => sizeFigures(size, runs)),
+  atMost(
+    "cost.ratioToInformation.mean",
+    mean(sizes.filter(({ runs }) => runs.group.length > 0).map(({ runs }) => ratioOf(runs, "planner", "informationPerCost").ratio)),
+    0.95,
+  ),
+  ...[...runsOf]
+    .filter(([name]) => !/^\d+$/.test(name))
+    .flatMap(([name, runs]) => scenarioFigures(name, runs, name === "shipped" ? 1.03 : null)),
+  ...twoFaultFigures(twoFaults),
+  ...(await timeFigures(seed, quick ? 2 : 25)),
+  heapFigure(seed),
+];
+if (!values.json) console.log(`Mean minutes; the other ways are ${OTHERS.join(", ")}. Seed ${seed}.`);
+print(figures, values.json === true);
 process.exitCode = figures.some(({ holds }) => holds === false) ? 1 : 0;

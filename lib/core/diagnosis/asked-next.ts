@@ -32,10 +32,11 @@ export function askedNext(
   step: Pick<NextStep, "kind" | "key">,
   models: Compile = compile,
 ): readonly AskedNext[] {
-  const before = new Set(rulesInForce(tree, fold(log)).map(({ key }) => key));
+  const now = fold(log);
+  const before = new Set([...rulesInForce(tree, now), ...rulesToAsk(tree, now)].map(({ key }) => key));
   return answersTo(tree, step).map(({ says, payload }) => {
     const state = fold([...log, toldNext(log, payload)]);
-    const rule = rulesInForce(tree, state).find(({ key }) => !before.has(key)) ?? rulesToAsk(tree, state)[0];
+    const rule = [...rulesInForce(tree, state), ...rulesToAsk(tree, state)].find(({ key }) => !before.has(key));
     if (rule) return { says, then: { kind: "rule", key: rule.key, title: rule.title } };
     if (payload.kind === "remedy-tried" && payload.payload.result === "cured") return { says, then: END };
     const next = nextStep(models(tree, settingOf(tree, state)), evidenceOf(tree, state));

@@ -1,8 +1,7 @@
-import { COSTS } from "./costs";
 import { entropyOf } from "./outcomes";
 
-/** What a call costs: its own price, and for each hypothesis the work of whoever comes, in minutes. */
-export type CallPrice = { readonly callMinutes: number; readonly helpersMinutes: Float64Array };
+/** What a call costs in minutes: its own price, the work of whoever comes for each hypothesis, and what each nat costs them. */
+export type CallPrice = { readonly callMinutes: number; readonly helpersMinutes: Float64Array; readonly helperFinds: number };
 
 /**
  * What a call costs in the end: its price, and what whoever comes still has to
@@ -12,7 +11,7 @@ export type CallPrice = { readonly callMinutes: number; readonly helpersMinutes:
  * @param shares of the hypotheses; they sum to 1.
  * @returns expected minutes.
  */
-export function callingMinutes({ callMinutes, helpersMinutes }: CallPrice, shares: Float64Array): number {
+export function callingMinutes({ callMinutes, helpersMinutes, helperFinds }: CallPrice, shares: Float64Array): number {
   const mending = shares.reduce((sum, share, index) => sum + share * (helpersMinutes[index] ?? 0), 0);
-  return callMinutes + mending + COSTS.helperFinds * entropyOf(shares);
+  return callMinutes + mending + helperFinds * entropyOf(shares);
 }

@@ -49,12 +49,9 @@ export function candidatesOf(model: Model, evidence: Evidence, gates: Gates, sha
   return all.sort((a, b) => (Math.abs(rate(a) - rate(b)) > SAME ? rate(b) - rate(a) : a.check.key < b.check.key ? -1 : 1));
 }
 
-/** A person is taken to tell nine answers of ten; that weighs as much as five questions asked. */
-const TELLS = { told: 4.5, asked: 5 };
-
 /** How often this person, here, can tell what is asked: what was told so far moves it (a beta prior's mean). Rule [N10]. */
 function chanceToTell(model: Model, evidence: Evidence): number {
   const asked = evidence.findings.filter(({ check }) => model.checkAt.has(check));
   const told = asked.filter(({ finding }) => finding !== null);
-  return (TELLS.told + told.length) / (TELLS.asked + asked.length);
+  return (model.tells.told + told.length) / (model.tells.asked + asked.length);
 }

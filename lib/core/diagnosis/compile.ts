@@ -18,6 +18,8 @@ const PAIRS = 0.1;
 const UNLINKED_CURE = 0.01;
 /** "Better, not cured" is as likely as a fifth of a cure where there is one cause only. */
 const BETTER = 0.2;
+/** A person is taken to tell nine answers of ten; that weighs as much as five questions asked. Rule [N10]. */
+const TELLS = { told: 4.5, asked: 5 } as const;
 /** Even what is not in the tree can get a little better by chance. */
 const BETTER_LEAST = 0.002;
 
@@ -62,6 +64,8 @@ export function compile(tree: FaultTree, setting: Setting): Model {
     remedyAt: placesOf(remedies),
     callMinutes: setting.callMinutes ?? COSTS.call[setting.situation],
     helpersMinutes: helpersMinutes(remedies, prior, setting.situation),
+    helperFinds: COSTS.helperFinds,
+    tells: TELLS,
   };
 }
 

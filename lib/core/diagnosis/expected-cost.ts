@@ -1,23 +1,8 @@
-import { COSTS, standingMinutes } from "./costs";
-import type { Standing } from "./evidence";
-import type { Gates } from "./gates";
-import type { Model, RemedyModel } from "./model";
+import type { CallPrice } from "./calling-minutes";
+import type { Option } from "./options";
 
 /** Below this share of the whole a remedy is not worth a place in the order. */
 const NEGLIGIBLE = 1e-3;
-
-/** A remedy as it could be tried now, over the hypotheses that are reckoned with. */
-export type Option = {
-  /** The remedy's index in the model. */
-  readonly at: number;
-  /** With its try-out and what has to be done before it. */
-  readonly minutes: number;
-  /** Minutes still owed where it works. */
-  readonly held: number;
-  /** Places of the hypotheses that it has a link to, and the chance that it cures each. */
-  readonly linkedAt: Int32Array;
-  readonly cure: Float64Array;
-};
 
 /**
  * What is best to do when no more is asked: an option's place, or null to call;
@@ -32,102 +17,180 @@ export type BestTry = { readonly minutes: number; readonly option: number | null
  * order, with overlapping and imperfect remedies (expected cost of repair after
  * Heckerman, Breese and Rommelse 1995; the call as in Lin 2015). Rules [N3], [N4], [C7].
  *
- * Holds scratch space, since it is called once for each belief that is thought of.
+ * It is called once for each belief that is thought of: everything lies in
+ * arrays made once, and what a reckoning finds is left in `minutes`, `option`
+ * and `first` (-1: none).
  */
 export class ExpectedCost {
+  /** Those that can cure one of the hypotheses reckoned with. */
   readonly options: readonly Option[];
+  minutes = 0;
+  option = -1;
+  first = -1;
   /** What a call costs in the end, for each hypothesis. */
   readonly #call: Float64Array;
+  readonly #helperFinds: number;
+  readonly #minutes: Float64Array;
+  readonly #held: Float64Array;
+  /** Links of option n: from linkFrom[n] to under linkFrom[n + 1]. */
+  readonly #linkFrom: Int32Array;
+  readonly #linkAt: Int32Array;
+  readonly #linkCure: Float64Array;
   readonly #scratch: Float64Array;
-  readonly #chance: Float64Array;
   readonly #score: Float64Array;
   readonly #order: Int32Array;
+  /** So many of the order were worth a place. */
+  #count = 0;
   readonly #left: Float64Array;
   readonly #calls: Float64Array;
 
   /** @param kept the hypotheses reckoned with, by their index in the model; weights are given in this order. */
-  constructor(model: Model, gates: Gates, standing: Standing, kept: readonly number[]) {
-    this.options = optionsOf(model, gates, standing, kept);
-    this.#call = Float64Array.from(kept, (index) => model.callMinutes + (model.helpersMinutes[index] ?? 0));
-    this.#scratch = new Float64Array(kept.length);
+  constructor(all: readonly Option[], { callMinutes, helpersMinutes, helperFinds }: CallPrice, kept: readonly number[]) {
+    const placeOf = new Int32Array(helpersMinutes.length).fill(-1);
+    kept.forEach((index, place) => (placeOf[index] = place));
+    this.options = all.filter(({ remedy }) => remedy.linkedAt.some((index) => placeOf[index]! >= 0));
     const count = this.options.length;
-    this.#chance = new Float64Array(count);
+    this.#linkFrom = new Int32Array(count + 1);
+    const links: number[] = [];
+    const cures: number[] = [];
+    this.options.forEach(({ remedy, comesOff }, place) => {
+      remedy.linkedAt.forEach((index, link) => {
+        if (placeOf[index]! < 0) return;
+        links.push(placeOf[index]!);
+        cures.push(remedy.linkedCure[link]! * comesOff);
+      });
+      this.#linkFrom[place + 1] = links.length;
+    });
+    this.#linkAt = Int32Array.from(links);
+    this.#linkCure = Float64Array.from(cures);
+    this.#minutes = Float64Array.from(this.options, ({ minutes }) => minutes);
+    this.#held = Float64Array.from(this.options, ({ held }) => held);
+    this.#call = Float64Array.from(kept, (index) => callMinutes + helpersMinutes[index]!);
+    this.#helperFinds = helperFinds;
+    this.#scratch = new Float64Array(kept.length);
     this.#score = new Float64Array(count);
-    this.#order = Int32Array.from({ length: count }, (_, index) => index);
+    this.#order = new Int32Array(count);
     this.#left = new Float64Array(count + 1);
     this.#calls = new Float64Array(count + 1);
+  }
+
+  /** The first so many of the order that the last reckoning came to. */
+  ranked(most: number): readonly number[] {
+    return Array.from(this.#order.subarray(0, Math.min(most, this.#count)));
+  }
+
+  /** The same as {@link reckon}, as a value. */
+  from(weights: Float64Array): BestTry {
+    this.reckon(weights, 0, null);
+    return { minutes: this.minutes, option: this.option < 0 ? null : this.option, first: this.first < 0 ? null : this.first };
   }
 
   /**
    * Expected minutes under weights that need not sum to 1, and the first thing to do.
    *
-   * @param tried places of options that are used up.
+   * @param at where in `weights` they begin.
+   * @param tried 1 for the options that are used up.
    */
-  from(weights: Float64Array, tried: readonly number[] = []): BestTry {
+  reckon(weights: Float64Array, at: number, tried: Uint8Array | null): void {
+    const finds = this.#helperFinds;
+    const scratch = this.#scratch;
     let total = 0;
     let calls = 0;
     let logs = 0;
-    for (let index = 0; index < weights.length; index++) {
-      const weight = weights[index]!;
+    for (let index = 0; index < scratch.length; index++) {
+      const weight = weights[at + index]!;
+      scratch[index] = weight;
       total += weight;
       calls += weight * this.#call[index]!;
-      logs += xLogX(weight);
+      if (finds > 0) logs += xLogX(weight);
     }
-    if (total <= 0) return { minutes: 0, option: null, first: null };
-    const count = this.#rank(weights, total, tried);
-    this.#scratch.set(weights);
+    this.minutes = 0;
+    this.option = this.first = -1;
+    this.#count = 0;
+    if (total <= 0) return;
+    const count = (this.#count = this.#rank(weights, at, total, tried));
     let left = total;
     for (let place = 0; place < count; place++) {
       this.#left[place] = left;
-      this.#calls[place] = calls + finding(left, logs);
-      const { linkedAt, cure } = this.options[this.#order[place]!]!;
-      for (let link = 0; link < linkedAt.length; link++) {
-        const at = linkedAt[link]!;
-        const before = this.#scratch[at]!;
-        const after = before * (1 - cure[link]!);
-        this.#scratch[at] = after;
+      this.#calls[place] = calls + this.#finding(left, logs);
+      const option = this.#order[place]!;
+      for (let link = this.#linkFrom[option]!; link < this.#linkFrom[option + 1]!; link++) {
+        const index = this.#linkAt[link]!;
+        const before = scratch[index]!;
+        const after = before * (1 - this.#linkCure[link]!);
+        scratch[index] = after;
         left -= before - after;
-        calls -= (before - after) * this.#call[at]!;
-        logs += xLogX(after) - xLogX(before);
+        calls -= (before - after) * this.#call[index]!;
+        if (finds > 0) logs += xLogX(after) - xLogX(before);
       }
     }
-    let remaining = calls + finding(left, logs);
+    let remaining = calls + this.#finding(left, logs);
     let tries = false;
     for (let place = count - 1; place >= 0; place--) {
-      const option = this.options[this.#order[place]!]!;
+      const option = this.#order[place]!;
       const before = this.#left[place]!;
       const after = place + 1 < count ? this.#left[place + 1]! : left;
-      const going = option.minutes * before + option.held * (before - after) + remaining;
+      const going = this.#minutes[option]! * before + this.#held[option]! * (before - after) + remaining;
       const calling = this.#calls[place]!;
       tries = going < calling;
-      remaining = Math.min(going, calling);
+      remaining = tries ? going : calling;
     }
-    const first = count > 0 ? this.#order[0]! : null;
-    return { minutes: remaining / total, option: tries ? first : null, first };
+    this.first = count > 0 ? this.#order[0]! : -1;
+    this.option = tries ? this.first : -1;
+    this.minutes = remaining / total;
   }
 
-  /** The chance that an option cures, under weights that sum to 1. */
-  chanceOf(option: number, weights: Float64Array): number {
-    const { linkedAt, cure } = this.options[option]!;
+  /** What it costs whoever comes to find the cause: so much for each nat that weights with this sum, and this sum of w ln w, leave open. */
+  #finding(total: number, logs: number): number {
+    if (this.#helperFinds === 0 || total <= 0) return 0;
+    return this.#helperFinds * Math.max(0, total * Math.log(total) - logs);
+  }
+
+  /** The chance that an option cures, under weights that sum to 1 and begin at `at`. */
+  chanceOf(option: number, weights: Float64Array, at = 0): number {
     let chance = 0;
-    for (let link = 0; link < linkedAt.length; link++) chance += weights[linkedAt[link]!]! * cure[link]!;
+    for (let link = this.#linkFrom[option]!; link < this.#linkFrom[option + 1]!; link++)
+      chance += weights[at + this.#linkAt[link]!]! * this.#linkCure[link]!;
     return chance;
   }
 
+  /** Weights beginning at `at` once an option has failed. */
+  fail(option: number, weights: Float64Array, at: number): void {
+    for (let link = this.#linkFrom[option]!; link < this.#linkFrom[option + 1]!; link++) {
+      const index = at + this.#linkAt[link]!;
+      weights[index] = weights[index]! * (1 - this.#linkCure[link]!);
+    }
+  }
+
+  /** What each hypothesis would cost, were it known: its remedies by minutes per chance, or a call where that is cheaper. Nothing can cost less. */
+  ifKnown(): Float64Array {
+    const curing: [minutes: number, cure: number][][] = Array.from(this.#call, () => []);
+    for (let option = 0; option < this.options.length; option++)
+      for (let link = this.#linkFrom[option]!; link < this.#linkFrom[option + 1]!; link++) {
+        const cure = this.#linkCure[link]!;
+        if (cure > 0) curing[this.#linkAt[link]!]!.push([this.#minutes[option]! + this.#held[option]! * cure, cure]);
+      }
+    return this.#call.map((call, index) =>
+      curing[index]!.sort((a, b) => b[0] / b[1] - a[0] / a[1]).reduce(
+        (left, [minutes, cure]) => Math.min(left, minutes + (1 - cure) * left),
+        call,
+      ),
+    );
+  }
+
   /** Puts the options worth trying first, best cure chance per minute first; ties by place, which is by key. Returns how many. */
-  #rank(weights: Float64Array, total: number, tried: readonly number[]): number {
+  #rank(weights: Float64Array, at: number, total: number, tried: Uint8Array | null): number {
     const order = this.#order;
+    const score = this.#score;
     let count = 0;
-    for (let option = 0; option < this.options.length; option++) {
-      const { minutes, held, linkedAt, cure } = this.options[option]!;
-      let chance = 0;
-      for (let link = 0; link < linkedAt.length; link++) chance += weights[linkedAt[link]!]! * cure[link]!;
-      if (chance < NEGLIGIBLE * total || tried.includes(option)) continue;
-      this.#chance[option] = chance;
-      const score = chance / (minutes + (held * chance) / total);
-      this.#score[option] = score;
+    for (let option = 0; option < order.length; option++) {
+      if (tried !== null && tried[option] === 1) continue;
+      const chance = this.chanceOf(option, weights, at);
+      if (chance < NEGLIGIBLE * total) continue;
+      const own = chance / (this.#minutes[option]! + (this.#held[option]! * chance) / total);
+      score[option] = own;
       let place = count++;
-      while (place > 0 && this.#score[order[place - 1]!]! < score) {
+      while (place > 0 && score[order[place - 1]!]! < own) {
         order[place] = order[place - 1]!;
         place--;
       }
@@ -138,32 +201,3 @@ export class ExpectedCost {
 }
 
 const xLogX = (weight: number): number => (weight > 0 ? weight * Math.log(weight) : 0);
-
-/** What it costs whoever comes to find the cause: so much for each nat that weights with this sum, and this sum of w ln w, leave open. */
-const finding = (total: number, logs: number): number => (total > 0 ? COSTS.helperFinds * Math.max(0, total * Math.log(total) - logs) : 0);
-
-function optionsOf(model: Model, gates: Gates, standing: Standing, kept: readonly number[]): readonly Option[] {
-  const placeOf = new Map(kept.map((index, place) => [index, place]));
-  const optionOf = (remedy: RemedyModel, at: number): readonly Option[] => {
-    if (gates.isDone({ kind: "remedy", key: remedy.key }) || !gates.isFeasible(remedy)) return [];
-    if (standing.mayNotStart && remedy.remedy.tryOut.minutes > 0) return [];
-    const gate = gates.gateOf(remedy);
-    if (!gate.open && gate.shut) return [];
-    const links = [...remedy.linkedAt].flatMap((index, link) => {
-      const place = placeOf.get(index);
-      return place === undefined ? [] : [{ place, cure: (remedy.linkedCure[link] ?? 0) * remedy.share * (gate.open ? 1 : gate.pass) }];
-    });
-    if (links.length === 0) return [];
-    return [
-      {
-        at,
-        minutes: remedy.minutes + standingMinutes(remedy.remedy, standing) + (gate.open ? 0 : gate.minutes),
-        held: remedy.remedy.temporary ? COSTS.heldOnly[model.setting.situation] : 0,
-        linkedAt: Int32Array.from(links, ({ place }) => place),
-        cure: Float64Array.from(links, ({ cure }) => cure),
-      },
-    ];
-  };
-  const keyOf = (option: Option): string => model.remedies[option.at]?.key ?? "";
-  return model.remedies.flatMap(optionOf).sort((a, b) => (keyOf(a) < keyOf(b) ? -1 : 1));
-}

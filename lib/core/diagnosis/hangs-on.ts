@@ -1,6 +1,8 @@
 import type { Cause } from "../tree/schema";
 import type { FindingLink, Strength } from "../tree/finding-link";
+import { BASE_RATES, type BaseRate } from "../tree/strength";
 import { believe } from "./believe";
+import { factorOf } from "./cause-row";
 import { compile } from "./compile";
 import { compileCheck } from "./compile-check";
 import type { Evidence } from "./evidence";
@@ -41,7 +43,7 @@ export function hangsOn(model: Model, evidence: Evidence): readonly HangsOn[] {
   const [leader] = ranked;
   if (leader === undefined) return [];
   return ranked
-    .flatMap((index) => movesOf(model, evidence, index))
+    .flatMap((index) => movesOf(model, evidence, index, index === leader))
     .flatMap(({ model: moved, ...move }): HangsOn[] => {
       const then = believe(moved(), evidence).shares;
       const first = model.causes.reduce((best, _, index) => (then[index]! > then[best]! ? index : best), leader);
@@ -52,7 +54,7 @@ export function hangsOn(model: Model, evidence: Evidence): readonly HangsOn[] {
     .sort((a, b) => b.lead - a.lead || (a.cause < b.cause ? -1 : 1));
 }
 
-function movesOf(model: Model, evidence: Evidence, index: number): readonly Move[] {
+function movesOf(model: Model, evidence: Evidence, index: number, leads: boolean): readonly Move[] {
   const cause = model.causes[index]!;
   const findings = evidence.findings.flatMap(({ check: key, finding }) => {
     const link = finding === null ? undefined : cause.gives[key]?.[finding];
@@ -71,31 +73,44 @@ function movesOf(model: Model, evidence: Evidence, index: number): readonly Move
       model: () => withSymptom(model, key, changed(model, index, { shows: { ...cause.shows, [key]: moved as Strength } })),
     }));
   });
-  const rates = ratesBeside(cause.base).map((moved): Move => ({
-    ...{
-      cause: cause.key,
-      to: { kind: "base", key: cause.key, finding: null },
-      from: cause.base as Strength,
-      moved: moved as unknown as Strength,
-    },
-    model: () => compile(withBase(model, cause, moved), model.setting),
-  }));
+  // Only the leader made rarer, or another made commoner, can change who is first; each costs compiling the tree.
+  const turns = (base: BaseRate): boolean => rateOf(base) < rateOf(cause.base) === leads;
+  const rates = ratesBeside(cause.base)
+    .filter(turns)
+    .map((moved): Move => ({
+      ...{
+        cause: cause.key,
+        to: { kind: "base", key: cause.key, finding: null },
+        from: cause.base as Strength,
+        moved: moved as unknown as Strength,
+      },
+      model: () => compile(withBase(model, cause, moved), model.setting),
+    }));
   return [...findings, ...symptoms, ...rates];
 }
 
+const rateOf = (base: Cause["base"]): number => (typeof base === "number" ? base : BASE_RATES[base]);
+
 const quoted = (title: string): string => `\u201c${title}\u201d`;
+
+/** "usually", "in 27 of 100", "20 times as often as a sound engine". */
+function linkSaid(link: FindingLink): string {
+  if (typeof link === "number") return `in ${Math.round(link * 100)} of 100`;
+  if (factorOf(link) === null) return link;
+  return link === "x1" ? "as often as a sound engine" : `${link.slice(1)} times as often as a sound engine`;
+}
 
 function said(model: Model, { cause, to, from, moved }: Omit<Move, "model">, first: Cause): string {
   const title = quoted(model.causes.find(({ key }) => key === cause)?.title ?? cause);
   const then = `${quoted(first.title)} would stand first`;
-  if (to.kind === "base") return `Were ${title} ${moved} and not ${from}, ${then}.`;
+  if (to.kind === "base") return `Were ${title} ${moved} and not ${typeof from === "number" ? `of weight ${from}` : from}, ${then}.`;
   if (to.kind === "symptom") {
     const symptom = model.tree.symptoms.find(({ key }) => key === to.key)?.title ?? to.key;
-    return `Did ${title} show ${quoted(symptom)} ${moved} and not ${from}, ${then}.`;
+    return `Did ${title} show ${quoted(symptom)} ${linkSaid(moved)} and not ${linkSaid(from)}, ${then}.`;
   }
   const check = model.checks[model.checkAt.get(to.key) ?? -1]?.check;
   const finding = check?.findings.find(({ key }) => key === to.finding)?.title ?? to.finding ?? "";
-  return `Did ${title} give ${quoted(finding)} at ${quoted(check?.title ?? to.key)} ${moved} and not ${from}, ${then}.`;
+  return `Did ${title} give ${quoted(finding)} at ${quoted(check?.title ?? to.key)} ${linkSaid(moved)} and not ${linkSaid(from)}, ${then}.`;
 }
 
 const changed = (model: Model, index: number, over: Partial<Cause>): readonly Cause[] =>

@@ -87,4 +87,8 @@ export type Model = {
   readonly callMinutes: number;
   /** Minutes of work that is left to whoever is called, for each hypothesis. */
   readonly helpersMinutes: Float64Array;
+  /** Minutes that whoever is called needs for each nat that is open. */
+  readonly helperFinds: number;
+  /** How sure it is beforehand that this person can tell what is asked: so many of so many. */
+  readonly tells: { readonly told: number; readonly asked: number };
 };

@@ -26,20 +26,32 @@ export function outcomesOf(model: Model, check: CheckModel, reported: ReadonlySe
   return seen ? { ...plain, weigh: insteadOf(seen, check, plain.weigh, reported), negEntropy: null } : plain;
 }
 
+/** Rows of checks that restate a symptom, made once for each set of findings that do. */
+const kept = new WeakMap<CheckModel, Map<string, Outcomes>>();
+
 function reportedOutcomes(model: Model, check: CheckModel, reported: ReadonlySet<string>): Outcomes {
   const again = restating(check, reported);
   if (again.length === 0) return { predict: check.rows, weigh: check.rows, negEntropy: check.negEntropy };
-  const sum = (findings: readonly number[], index: number): number =>
-    findings.reduce((all, finding) => all + (check.rows[finding]?.[index] ?? 0), 0);
+  const ofCheck = kept.get(check) ?? new Map<string, Outcomes>();
+  kept.set(check, ofCheck);
+  const key = again.join();
+  const outcomes = ofCheck.get(key) ?? restated(model, check, again);
+  ofCheck.set(key, outcomes);
+  return outcomes;
+}
+
+function restated(model: Model, check: CheckModel, again: readonly number[]): Outcomes {
+  const sums = new Float64Array(check.rows[0]?.length ?? 0);
+  for (const finding of again) check.rows[finding]!.forEach((share, index) => (sums[index] = sums[index]! + share));
   const linked = model.causes.map((cause) => cause.gives[check.key] !== undefined);
-  const predict = check.rows.map((row, finding) =>
-    row.map((share, index) => {
+  const predict = check.rows.map((row, finding) => {
+    const says = again.includes(finding);
+    return row.map((share, index) => {
       if (linked[index]) return share;
-      const restates = sum(again, index);
-      return again.includes(finding) ? (SHOWS_AGAIN * share) / restates : ((1 - SHOWS_AGAIN) * share) / (1 - restates);
-    }),
-  );
-  const weigh = check.rows.map((row, finding) => (again.includes(finding) ? row.map((share, index) => share / sum(again, index)) : row));
+      return says ? (SHOWS_AGAIN * share) / sums[index]! : ((1 - SHOWS_AGAIN) * share) / (1 - sums[index]!);
+    });
+  });
+  const weigh = check.rows.map((row, finding) => (again.includes(finding) ? row.map((share, index) => share / sums[index]!) : row));
   return { predict, weigh, negEntropy: null };
 }
 
@@ -83,14 +95,21 @@ function quickInformation(rows: readonly Float64Array[], negEntropy: Float64Arra
 }
 
 function slowInformation({ predict, weigh }: Outcomes, shares: Float64Array): number {
-  let left = 0;
-  predict.forEach((row, finding) => {
+  let told = entropyOf(shares);
+  for (let finding = 0; finding < predict.length; finding++) {
+    const [shown, weighs] = [predict[finding]!, weigh[finding]!];
     let chance = 0;
-    for (let index = 0; index < shares.length; index++) chance += shares[index]! * row[index]!;
-    const then = shares.map((share, index) => share * (weigh[finding]?.[index] ?? 0));
-    left += chance * entropyOf(then);
-  });
-  return Math.max(0, entropyOf(shares) - left);
+    let total = 0;
+    let logs = 0;
+    for (let index = 0; index < shares.length; index++) {
+      const then = shares[index]! * weighs[index]!;
+      chance += shares[index]! * shown[index]!;
+      total += then;
+      if (then > 0) logs += then * Math.log(then);
+    }
+    if (total > 0) told -= chance * (Math.log(total) - logs / total);
+  }
+  return Math.max(0, told);
 }
 
 /** Entropy in nats of weights that need not sum to 1. */

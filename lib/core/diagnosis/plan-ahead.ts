@@ -1,31 +1,16 @@
-import { TELLS_NOTHING, type Candidate } from "./candidates";
-import type { BestTry, ExpectedCost } from "./expected-cost";
-import { informationOf, type Outcomes } from "./outcomes";
-
-/** A check of the plan, over the hypotheses that are reckoned with. */
-type Asked = { readonly minutes: number; readonly learns: number; readonly outcomes: Outcomes; readonly sight: string | undefined };
+import { TELLS_NOTHING } from "./candidates";
+import type { ExpectedCost } from "./expected-cost";
+import type { PlanChecks } from "./plan-checks";
 
 /** What the plan can do next, by place among the candidates or among the options. */
 export type Act = { readonly kind: "check" | "remedy"; readonly place: number };
-
-type Branch = Act & { readonly minutes: number; readonly then: readonly { readonly chance: number; readonly node: Node }[] };
-
-/** A belief that the plan may come to. */
-type Node = {
-  readonly weights: Float64Array;
-  /** Chance to come here, if what leads here is done. */
-  readonly reach: number;
-  readonly asked: readonly number[];
-  readonly tried: readonly number[];
-  readonly trying: BestTry;
-  /** null while nobody has looked further. */
-  branches: readonly Branch[] | null;
-};
 
 /** Within the plan a remedy less likely than this is left to the order of cure chance per minute. */
 const WORTH_A_BRANCH = 0.15;
 /** A belief come to less often than this is not followed. */
 const HARDLY_EVER = 1e-4;
+/** Ways that are followed from one belief: a check, and a remedy. */
+const WAYS = 2;
 
 /**
  * Thinks ahead on a tree of beliefs. Each belief has its most telling check for
@@ -34,20 +19,62 @@ const HARDLY_EVER = 1e-4;
  * wherever that is cheaper, the value is what a real way of going on costs, so
  * it can be trusted against "call now". Beliefs likely to be met are followed
  * first. Rules [N3], [N5].
+ *
+ * Beliefs lie one after the other in arrays that are made once; each has its
+ * children behind it, so folding back is one walk from the end.
  */
 export class PlanAhead {
   readonly #cost: ExpectedCost;
-  readonly #checks: readonly Asked[];
+  readonly #checks: PlanChecks;
+  readonly #size: number;
+  /** So many beliefs are there. */
+  #count = 0;
+  readonly #weights: Float64Array;
+  /** Chance to come here, if what the plan begins with is done; and from the belief before. */
+  readonly #reach: Float64Array;
+  readonly #chance: Float64Array;
+  /** What stopping to ask costs here, and the remedy that is then tried first. */
+  readonly #trying: Float64Array;
+  readonly #first: Int32Array;
+  readonly #before: Int32Array;
+  /** What led here: a check's place, or a remedy's counted down from -1. */
+  readonly #by: Int32Array;
+  readonly #followed: Uint8Array;
+  /** For each belief and way: what it costs, and its children. */
+  readonly #minutes: Float64Array;
+  readonly #from: Int32Array;
+  readonly #to: Int32Array;
+  readonly #worth: Float64Array;
+  readonly #seen: Uint8Array;
+  readonly #tried: Uint8Array;
 
-  /** @param kept the hypotheses reckoned with, by their index in the model. */
-  constructor(candidates: readonly Candidate[], cost: ExpectedCost, kept: readonly number[]) {
+  /**
+   * @param weights of the hypotheses reckoned with; they sum to 1.
+   * @param beliefs the most that will be followed for one act.
+   */
+  constructor(checks: PlanChecks, cost: ExpectedCost, weights: Float64Array, beliefs: number) {
     this.#cost = cost;
-    this.#checks = candidates.map(({ check, minutes, learns, outcomes }) => ({
-      minutes,
-      learns,
-      outcomes: compact(outcomes, kept),
-      sight: check.check.sameSight,
-    }));
+    this.#checks = checks;
+    this.#size = weights.length;
+    const children = checks.mostRows + WAYS;
+    const room = 1 + (1 + children + beliefs) * children;
+    this.#weights = new Float64Array(room * weights.length);
+    this.#weights.set(weights);
+    this.#reach = new Float64Array(room);
+    this.#chance = new Float64Array(room);
+    this.#trying = new Float64Array(room);
+    this.#worth = new Float64Array(room);
+    this.#first = new Int32Array(room);
+    this.#before = new Int32Array(room);
+    this.#by = new Int32Array(room);
+    this.#followed = new Uint8Array(room);
+    this.#minutes = new Float64Array(room * WAYS);
+    this.#from = new Int32Array(room * WAYS);
+    this.#to = new Int32Array(room * WAYS);
+    this.#seen = new Uint8Array(checks.count);
+    this.#tried = new Uint8Array(cost.options.length);
+    this.#reach[0] = 1;
+    this.#before[0] = -1;
   }
 
   /**
@@ -55,106 +82,141 @@ export class PlanAhead {
    *
    * @param second what is then done first, instead of what the plan would do.
    */
-  worthOf(act: Act, weights: Float64Array, beliefs: number, second?: Act): number {
-    const root: Node = { weights, reach: 1, asked: [], tried: [], trying: this.#cost.from(weights), branches: null };
-    root.branches = [this.#branch(root, act)];
-    if (second) for (const { node } of root.branches[0]!.then) node.branches = [this.#branch(node, second)];
-    const ends = root.branches.flatMap(({ then }) => then.map(({ node }) => node));
-    for (let done = 0; done < beliefs && ends.length > 0; done++) {
-      const [node] = ends.splice(likeliest(ends), 1);
-      if (!node || node.reach < HARDLY_EVER) break;
-      node.branches = this.#branchesOf(node);
-      for (const branch of node.branches) for (const { node: next } of branch.then) ends.push(next);
+  worthOf(act: Act, beliefs: number, second?: Act): number {
+    this.#count = 1;
+    this.#begin(0);
+    this.#follow(0, 0, act);
+    const ends = this.#count;
+    if (second)
+      for (let node = 1; node < ends; node++) {
+        this.#begin(node);
+        this.#follow(node, 0, second);
+      }
+    for (let done = 0; done < beliefs; done++) {
+      const node = this.#likeliestEnd();
+      if (node < 0 || this.#reach[node]! < HARDLY_EVER) break;
+      this.#begin(node);
+      const check = this.#mostTelling(node);
+      if (check >= 0) this.#ask(node, 0, check);
+      const first = this.#first[node]!;
+      if (first >= 0 && this.#cost.chanceOf(first, this.#weights, node * this.#size) > WORTH_A_BRANCH) this.#try(node, 1, first);
     }
-    return valueOf(root.branches[0]!);
+    return this.#folded();
   }
 
-  #branch(node: Node, act: Act): Branch {
-    return act.kind === "check" ? this.#asking(node, act.place) : this.#attempt(node, act.place);
+  /** What has been asked and tried on the way to a belief that is about to be followed. */
+  #begin(node: number): void {
+    this.#followed[node] = 1;
+    for (let way = 0; way < WAYS; way++) this.#from[node * WAYS + way] = this.#to[node * WAYS + way] = 0;
+    this.#seen.fill(0);
+    this.#tried.fill(0);
+    for (let at = node; this.#before[at]! >= 0; at = this.#before[at]!) {
+      const by = this.#by[at]!;
+      if (by >= 0) this.#checks.mark(by, this.#seen);
+      else this.#tried[-1 - by] = 1;
+    }
   }
 
-  #branchesOf(node: Node): readonly Branch[] {
-    const branches: Branch[] = [];
-    const check = this.#mostTelling(node);
-    if (check !== null) branches.push(this.#asking(node, check));
-    const { first } = node.trying;
-    if (first !== null && this.#cost.chanceOf(first, node.weights) > WORTH_A_BRANCH) branches.push(this.#attempt(node, first));
-    return branches;
+  #follow(node: number, way: number, act: Act): void {
+    if (act.kind === "check") this.#ask(node, way, act.place);
+    else this.#try(node, way, act.place);
   }
 
-  #mostTelling(node: Node): number | null {
-    let best: number | null = null;
+  #likeliestEnd(): number {
+    let best = -1;
+    let most = -1;
+    for (let node = 1; node < this.#count; node++) {
+      if (this.#followed[node] === 1 || this.#reach[node]! <= most) continue;
+      most = this.#reach[node]!;
+      best = node;
+    }
+    return best;
+  }
+
+  #mostTelling(node: number): number {
+    const checks = this.#checks;
+    let best = -1;
     let most = 0;
-    for (let place = 0; place < this.#checks.length; place++) {
-      const check = this.#checks[place]!;
-      if (this.#isSeen(check, place, node.asked)) continue;
-      const information = informationOf(check.outcomes, node.weights) * check.learns;
-      if (information < TELLS_NOTHING || information <= most * check.minutes) continue;
-      most = information / check.minutes;
+    for (let place = 0; place < checks.count; place++) {
+      if (this.#seen[place] === 1) continue;
+      const information = checks.information(place, this.#weights, node * this.#size);
+      if (information < TELLS_NOTHING || information <= most * checks.minutes[place]!) continue;
+      most = information / checks.minutes[place]!;
       best = place;
     }
     return best;
   }
 
-  #isSeen({ sight }: Asked, place: number, asked: readonly number[]): boolean {
-    for (const one of asked) if (one === place || (sight !== undefined && this.#checks[one]!.sight === sight)) return true;
-    return false;
-  }
-
-  #asking(node: Node, place: number): Branch {
-    const { outcomes, minutes, learns } = this.#checks[place]!;
-    const asked = [...node.asked, place];
-    const then = outcomes.predict.map((row, finding) => {
-      const weigh = outcomes.weigh[finding]!;
-      const weights = new Float64Array(row.length);
+  #ask(node: number, way: number, place: number): void {
+    const size = this.#size;
+    const weights = this.#weights;
+    const { predict, weigh, rowFrom, learns, minutes } = this.#checks;
+    const at = node * size;
+    this.#minutes[node * WAYS + way] = minutes[place]!;
+    this.#from[node * WAYS + way] = this.#count;
+    for (let row = rowFrom[place]!; row < rowFrom[place + 1]!; row++) {
+      const to = this.#count * size;
       let chance = 0;
-      for (let index = 0; index < row.length; index++) {
-        chance += node.weights[index]! * row[index]!;
-        weights[index] = node.weights[index]! * weigh[index]!;
+      for (let index = 0; index < size; index++) {
+        const weight = weights[at + index]!;
+        chance += weight * predict[row * size + index]!;
+        weights[to + index] = weight * weigh[row * size + index]!;
       }
-      return this.#come(node, weights, chance * learns, asked, node.tried);
-    });
-    if (learns < 1) then.push(this.#come(node, Float64Array.from(node.weights), 1 - learns, asked, node.tried));
-    return { kind: "check", place, minutes, then };
+      this.#come(node, place, chance * learns[place]!);
+    }
+    if (learns[place]! < 1) {
+      weights.copyWithin(this.#count * size, at, at + size);
+      this.#come(node, place, 1 - learns[place]!);
+    }
+    this.#to[node * WAYS + way] = this.#count;
   }
 
-  #attempt(node: Node, place: number): Branch {
-    const { minutes, held, linkedAt, cure } = this.#cost.options[place]!;
-    const weights = Float64Array.from(node.weights);
-    linkedAt.forEach((at, link) => (weights[at] = weights[at]! * (1 - cure[link]!)));
-    const chance = this.#cost.chanceOf(place, node.weights);
-    const then = [this.#come(node, weights, 1 - chance, node.asked, [...node.tried, place])];
-    return { kind: "remedy", place, minutes: minutes + held * chance, then };
+  #try(node: number, way: number, option: number): void {
+    const size = this.#size;
+    const { minutes, held } = this.#cost.options[option]!;
+    const cured = this.#cost.chanceOf(option, this.#weights, node * size);
+    this.#minutes[node * WAYS + way] = minutes + held * cured;
+    this.#from[node * WAYS + way] = this.#count;
+    this.#weights.copyWithin(this.#count * size, node * size, (node + 1) * size);
+    this.#cost.fail(option, this.#weights, this.#count * size);
+    this.#tried[option] = 1;
+    this.#come(node, -1 - option, 1 - cured);
+    this.#to[node * WAYS + way] = this.#count;
   }
 
-  /** A belief come to with `chance`; its weights are made to sum to 1, in place. */
-  #come(from: Node, weights: Float64Array, chance: number, asked: readonly number[], tried: readonly number[]) {
+  /** The next belief, whose weights lie there already: made to sum to 1, and what stopping there costs. */
+  #come(before: number, by: number, chance: number): void {
+    const node = this.#count++;
+    const weights = this.#weights;
+    const at = node * this.#size;
     let total = 0;
-    for (let index = 0; index < weights.length; index++) total += weights[index]!;
-    if (total > 0) for (let index = 0; index < weights.length; index++) weights[index] = weights[index]! / total;
-    const trying = this.#cost.from(weights, tried);
-    return { chance, node: { weights, reach: from.reach * chance, asked, tried, trying, branches: null } };
+    for (let index = at; index < at + this.#size; index++) total += weights[index]!;
+    if (total > 0) for (let index = at; index < at + this.#size; index++) weights[index] = weights[index]! / total;
+    this.#before[node] = before;
+    this.#by[node] = by;
+    this.#chance[node] = chance;
+    this.#reach[node] = this.#reach[before]! * chance;
+    this.#followed[node] = 0;
+    for (let way = 0; way < WAYS; way++) this.#from[node * WAYS + way] = this.#to[node * WAYS + way] = 0;
+    this.#cost.reckon(weights, at, this.#tried);
+    this.#trying[node] = this.#cost.minutes;
+    this.#first[node] = this.#cost.first;
   }
-}
 
-const valueOf = (branch: Branch): number => branch.then.reduce((sum, { chance, node }) => sum + chance * worth(node), branch.minutes);
+  #folded(): number {
+    const worth = this.#worth;
+    for (let node = this.#count - 1; node > 0; node--) {
+      worth[node] = this.#trying[node]!;
+      for (let way = 0; way < WAYS; way++)
+        if (this.#to[node * WAYS + way]! > this.#from[node * WAYS + way]!) worth[node] = Math.min(worth[node]!, this.#wayOf(node, way));
+    }
+    return this.#wayOf(0, 0);
+  }
 
-const worth = (node: Node): number => Math.min(node.trying.minutes, ...(node.branches ?? []).map(valueOf));
-
-function likeliest(nodes: readonly Node[]): number {
-  let best = 0;
-  for (let place = 1; place < nodes.length; place++) if (nodes[place]!.reach > nodes[best]!.reach) best = place;
-  return best;
-}
-
-const pick = (row: Float64Array, kept: readonly number[]): Float64Array => Float64Array.from(kept, (index) => row[index] ?? 0);
-
-/** The same outcomes over fewer hypotheses. */
-function compact({ predict, weigh, negEntropy }: Outcomes, kept: readonly number[]): Outcomes {
-  const rows = predict.map((row) => pick(row, kept));
-  return {
-    predict: rows,
-    weigh: weigh === predict ? rows : weigh.map((row) => pick(row, kept)),
-    negEntropy: negEntropy && pick(negEntropy, kept),
-  };
+  #wayOf(node: number, way: number): number {
+    let sum = this.#minutes[node * WAYS + way]!;
+    for (let child = this.#from[node * WAYS + way]!; child < this.#to[node * WAYS + way]!; child++)
+      sum += this.#chance[child]! * this.#worth[child]!;
+    return sum;
+  }
 }

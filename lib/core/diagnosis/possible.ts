@@ -13,7 +13,7 @@ const NAMED_FROM = 0.01;
 const NAMED_MOST = 12;
 const NOT_CHECKED_MOST = 4;
 /** Two faults are said to be possible from over this share. */
-const TWO_FROM = 0.3;
+export const TWO_FROM = 0.3;
 
 /** What is still possible, as counts out of 100, with what speaks for and against each. Rules [X1]-[X3], [X8]. */
 export function possible(model: Model, evidence: Evidence, belief: Belief): Possible {

@@ -127,7 +127,7 @@ describe("the next step", () => {
     expect(after(null).kind).toBe("remedy");
   });
 
-  it("[N5] asks on where no single answer would change the plan but many would settle it", () => {
+  it("[N12] asks on where no single answer would change the plan but many would settle it", () => {
     const bits = [0, 1, 2, 3, 4, 5];
     const causes = Array.from({ length: 64 }, (_, index) =>
       cause(`c-${index}`, {

@@ -23,7 +23,7 @@ const small = tree({
   remedies: [
     remedy("mend-a", { minutes: 50 }),
     remedy("mend-b", { minutes: 50 }),
-    remedy("can", { minutes: 1, temporary: true, tryOut: { minutes: 0 } }),
+    remedy("can", { minutes: 10, temporary: true, tryOut: { minutes: 0 } }),
   ],
   causes: [
     cause("a", {
