@@ -25,9 +25,9 @@ export default defineConfig({
     env: { TZ: "Asia/Kathmandu" },
     reporters: ["default", ["json", { outputFile: `${run}/vitest.json` }]],
     projects: [
-      pure("core", { testTimeout: 15_000 }),
-      pure("trees", { testTimeout: 30_000 }),
-      pure("reference", { testTimeout: 30_000 }),
+      pure("core", { testTimeout: 30_000, hookTimeout: 30_000 }),
+      pure("trees", { testTimeout: 60_000, hookTimeout: 60_000 }),
+      pure("reference", { testTimeout: 60_000, hookTimeout: 60_000 }),
       pure("architecture", { testTimeout: 60_000, hookTimeout: 120_000 }),
       pure("server", withDatabase),
       pure("api", withDatabase),

@@ -12,6 +12,7 @@ import { FindNode } from "./find-node";
 import { Head } from "./head";
 import { NodeSheet } from "./node-sheet";
 import { Notices } from "./notices";
+import { symptomToShow } from "./symptom-to-show";
 import { usePlace, type Place } from "./place";
 import { SoundBar } from "./sound-bar";
 import { SymptomList } from "./symptom-list";
@@ -35,7 +36,13 @@ export function Bench({ fleetId, bench, current, newestShipped, onGone }: Props)
   const checked = useChecked(useDeferredValue(tree));
   useUndoKeys(bench);
   const symptom = place.symptom ?? tree.symptoms[0]?.key ?? "";
-  const openNode = useCallback((node: Place["node"]) => go({ node }), [go]);
+  const openNode = useCallback(
+    (node: Place["node"]) => {
+      const elsewhere = node === null ? null : symptomToShow(bench.session.get().tree, node, symptom);
+      go(elsewhere === null ? { node } : { node, symptom: elsewhere });
+    },
+    [go, bench, symptom],
+  );
   const change = useCallback(
     (list: ListName) => (node: TreeNode, says: string) => {
       const { tree } = bench.session.get();

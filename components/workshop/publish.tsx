@@ -70,7 +70,7 @@ function PublishForm({ fleetId, bench, checked, current }: Props) {
     try {
       await sendJson(
         `/api/v1/fleets/${fleetId}/trees/draft/publication`,
-        { draft: saved.id, note: note.trim(), accept: [...accepted] },
+        { draft: saved.id, note: note.trim(), failing, accept: failing.filter((key) => accepted.has(key)) },
         { version: saved.version },
       );
       dropNote();

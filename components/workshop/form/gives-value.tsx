@@ -44,8 +44,9 @@ export function GivesValue({ name, path, value = {}, onChange }: Editing<Gives>)
           value={undefined}
           choices={checks.filter(({ key }) => value[key] === undefined)}
           onChange={(key) => {
-            const first = key === undefined ? undefined : findingsOf(tree, key)[0];
-            if (key !== undefined && first) put(key, { [first.key]: "x5" });
+            // What a sound engine shows tells nothing of a cause.
+            const unusual = tree.checks.find((check) => check.key === key)?.findings.find(({ usual }) => usual !== true);
+            if (key !== undefined && unusual) put(key, { [unusual.key]: "x20" });
           }}
         />
       }
@@ -93,7 +94,7 @@ function CheckRow({ path, title, findings, row, onChange }: RowProps) {
           path={`${path}-add`}
           value={undefined}
           choices={free}
-          onChange={(key) => key !== undefined && onChange({ ...row, [key]: "x5" })}
+          onChange={(key) => key !== undefined && onChange({ ...row, [key]: "x20" })}
         />
       )}
     </div>

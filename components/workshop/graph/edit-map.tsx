@@ -106,7 +106,7 @@ function Canvas({ bench, graph, symptom, node: open, onOpen }: Props) {
       const { tree } = bench.session.get();
       const cause = tree.causes.find(({ key }) => key === made.cause);
       if (cause && linkStrength(cause, made.link) === null)
-        bench.edit(setLink(tree, made.cause, made.link, "gives" in made.link ? "x5" : "often"), "Linked");
+        bench.edit(setLink(tree, made.cause, made.link, "gives" in made.link ? "x20" : "often"), "Linked");
       setChosenLink(linkId(source, sourceHandle ?? null, target));
     },
     [bench, symptom],

@@ -2,7 +2,7 @@
 
 import dynamic from "next/dynamic";
 import { useMemo, useState } from "react";
-import { graphOf } from "@/components/tree/tree-graph";
+import { graphOf, type TreeGraph } from "@/components/tree/tree-graph";
 import { Button } from "@/components/ui/button";
 import type { Workbench } from "@/lib/client/workshop/workbench";
 import type { FaultTree } from "@/lib/core/tree/schema";
@@ -28,7 +28,8 @@ type Props = { bench: Workbench; tree: FaultTree; symptom: string; node: Place["
 /** One symptom's part of the draft: the likeliest causes, what tells them, what cures them. */
 export function GraphView({ bench, tree, symptom, node, onOpen }: Props) {
   const [all, setAll] = useState(false);
-  const graph = useMemo(() => graphOf(tree, symptom, all ? Infinity : LIKELIEST), [tree, symptom, all]);
+  const openCause = node?.list === "causes" ? node.key : null;
+  const graph = useMemo(() => graphWith(tree, symptom, all ? Infinity : LIKELIEST, openCause), [tree, symptom, all, openCause]);
   if (!graph) return <p className="py-6">This symptom is no longer in the draft. Choose another at the left.</p>;
   const total = graph.causes.length + graph.folded;
   return (
@@ -45,4 +46,11 @@ export function GraphView({ bench, tree, symptom, node, onOpen }: Props) {
       <EditMap key={`${symptom} ${all}`} bench={bench} graph={graph} symptom={symptom} node={node} onOpen={onOpen} />
     </div>
   );
+}
+
+/** The likeliest causes; all of them where the one that is open would be folded. */
+function graphWith(tree: FaultTree, symptom: string, limit: number, openCause: string | null): TreeGraph | null {
+  const graph = graphOf(tree, symptom, limit);
+  const hangsHere = openCause !== null && tree.causes.find(({ key }) => key === openCause)?.shows[symptom] !== undefined;
+  return hangsHere && graph && !graph.causes.some(({ key }) => key === openCause) ? graphOf(tree, symptom, Infinity) : graph;
 }

@@ -1,14 +1,14 @@
-import type { FaultTree, KnownCase, Who } from "../tree/schema";
+import type { FaultTree, KnownCase, StopRule, Who } from "../tree/schema";
 import { answerOf, settingFor } from "./case-evidence";
 import { probabilityOf } from "./cause-row";
 import { CORE_VERSION } from "./core-version";
 import { evidenceOf } from "./evidence-of";
-import { fold } from "./fold";
+import { fold, type DiagnosisState } from "./fold";
 import { keepModels } from "./keep-models";
 import { logOf, type Payload } from "./log-of";
 import { nextStep } from "./next-step";
 import { settingOf } from "./setting-of";
-import { rulesToAsk } from "./stop-rules";
+import { rulesInForce, rulesToAsk } from "./stop-rules";
 
 export type Played = {
   readonly minutes: number;
@@ -16,6 +16,9 @@ export type Played = {
   /** Kind and key of each step, in order. */
   readonly steps: readonly { readonly kind: "check" | "remedy" | "call"; readonly key: string; readonly minutes: number }[];
 };
+
+/** Somebody who is as sure as this of one cause puts it right, and says that the rule's reason is found. */
+const SETTLED = 0.5;
 
 /** More steps than any sound tree has. */
 const STEPS_MOST = 1000;
@@ -30,11 +33,19 @@ export function playCase(tree: FaultTree, known: KnownCase, person: Who): Played
   const log = startOf(known, person);
   for (const rule of rulesToAsk(tree, fold(logOf(log)))) log.push({ kind: "rule-answered", payload: { rule: rule.key, answer: "no" } });
   const open = new Set(known.causes);
+  const lifted = new Set<string>();
   const steps: { kind: "check" | "remedy" | "call"; key: string; minutes: number }[] = [];
   const minutes = (): number => steps.reduce((sum, step) => sum + step.minutes, 0);
   while (steps.length < STEPS_MOST) {
     const state = fold(logOf(log));
-    const step = nextStep(models(tree, settingOf(tree, state)), evidenceOf(tree, state));
+    const model = models(tree, settingOf(tree, state));
+    const step = nextStep(model, evidenceOf(tree, state));
+    const lift = step.kind === "call" && likeliestShare(step.shares, model.unknownAt) > SETTLED ? liftable(tree, state, lifted) : undefined;
+    if (lift) {
+      lifted.add(lift.key);
+      log.push({ kind: "rule-answered", payload: { rule: lift.key, answer: "cleared" } });
+      continue;
+    }
     steps.push({ kind: step.kind, key: step.key, minutes: step.minutes });
     if (step.kind === "call") return { minutes: minutes(), end: "called", steps };
     if (step.kind === "check") {
@@ -56,6 +67,12 @@ function ofWhatIsLeft(tree: FaultTree, known: KnownCase, open: ReadonlySet<strin
   const links = (keys: Iterable<string>): boolean => [...keys].some((key) => tree.causes.find((one) => one.key === key)?.gives[check]);
   return open.size === known.causes.length || links(open) || !links(known.causes);
 }
+
+const likeliestShare = (shares: Float64Array, unknownAt: number): number => Math.max(0, ...shares.subarray(0, unknownAt));
+
+/** A rule in force that says how it is lifted by hand, and has not been yet. */
+const liftable = (tree: FaultTree, state: DiagnosisState, lifted: ReadonlySet<string>): StopRule | undefined =>
+  rulesInForce(tree, state).find(({ key, clearedWhen }) => clearedWhen !== undefined && !lifted.has(key));
 
 /** Causes still open that the remedy rather cures than not. */
 export const curedBy = (tree: FaultTree, open: ReadonlySet<string>, remedy: string): readonly string[] =>
