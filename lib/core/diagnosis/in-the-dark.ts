@@ -7,8 +7,8 @@ import { entropyOf } from "./outcomes";
 /** From so much that is open, in nats, and while no remedy is likelier than this to cure, it may be dark. */
 const OPEN = 1;
 const LIKELY = 0.5;
-/** As many hypotheses as this, each of at least such a share, can be thought through to the end. */
-const FEW = { count: 8, share: 0.01 };
+/** No more hypotheses than this, each of at least such a share and together holding so much, can be thought through to the end. */
+const FEW = { count: 8, share: 0.01, together: 0.9 };
 /** A hypothesis under this share is left out. */
 const COUNTED_FROM = 1e-4;
 
@@ -23,7 +23,7 @@ const COUNTED_FROM = 1e-4;
  */
 export function inTheDark(model: Model, options: readonly Option[], shares: Float64Array, candidates: readonly Candidate[]): number | null {
   const open = entropyOf(shares);
-  if (open < OPEN || shares.reduce((count, share) => count + (share >= FEW.share ? 1 : 0), 0) <= FEW.count) return null;
+  if (open < OPEN || areFew(shares)) return null;
   const finding = minutesToTell(open, candidates);
   if (finding === Infinity) return null;
   const kept: number[] = [];
@@ -40,6 +40,17 @@ export function inTheDark(model: Model, options: readonly Option[], shares: Floa
   }
   const asking = mending / total + finding;
   return asking < cost.from(weights).minutes ? asking : null;
+}
+
+function areFew(shares: Float64Array): boolean {
+  let count = 0;
+  let together = 0;
+  for (const share of shares) {
+    if (share < FEW.share) continue;
+    count++;
+    together += share;
+  }
+  return count <= FEW.count && together >= FEW.together;
 }
 
 /** Minutes of the most telling checks that together tell so many nats, each taken to tell what it would tell now. */
