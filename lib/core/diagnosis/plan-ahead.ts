@@ -135,11 +135,12 @@ export class PlanAhead {
 
   #mostTelling(node: number): number {
     const checks = this.#checks;
+    checks.tell(this.#weights, node * this.#size, this.#seen);
     let best = -1;
     let most = 0;
     for (let place = 0; place < checks.count; place++) {
       if (this.#seen[place] === 1) continue;
-      const information = checks.information(place, this.#weights, node * this.#size);
+      const information = checks.told[place]!;
       if (information < TELLS_NOTHING || information <= most * checks.minutes[place]!) continue;
       most = information / checks.minutes[place]!;
       best = place;

@@ -14,6 +14,7 @@ export class PlanChecks {
   readonly weigh: Float64Array;
   /** The most children a check can have. */
   readonly mostRows: number;
+  readonly told: Float64Array;
   readonly #size: number;
   readonly #sight: Int32Array;
   /** 1 where predict and weigh are the same: then `negEntropy` holds the sums of P ln P. */
@@ -33,6 +34,7 @@ export class PlanChecks {
     this.predict = new Float64Array(this.rowFrom[count]! * size);
     const same = candidates.every(({ outcomes }) => outcomes.weigh === outcomes.predict);
     this.weigh = same ? this.predict : new Float64Array(this.predict.length);
+    this.told = new Float64Array(count);
     this.#plain = new Uint8Array(count);
     this.#negEntropy = new Float64Array(count * size);
     const sights = [...new Set(candidates.map(({ check }) => check.check.sameSight))].filter((sight) => sight !== undefined);
@@ -59,12 +61,19 @@ export class PlanChecks {
     for (let other = 0; other < this.count; other++) if (this.#sight[other] === sight) seen[other] = 1;
   }
 
-  /** How much a check is expected to tell, in nats, under weights that sum to 1 and begin at `at`. */
-  information(place: number, weights: Float64Array, at: number): number {
-    return this.learns[place]! * (this.#plain[place] === 1 ? this.#quick(place, weights, at) : this.#slow(place, weights, at));
+  /**
+   * Leaves in `told` how much each check that is not seen yet is expected to tell, in nats, under weights that sum to 1 and begin at `at`.
+   * Numbers are left in the array, not returned: a fraction returned by a function takes room on the heap.
+   */
+  tell(weights: Float64Array, at: number, seen: Uint8Array): void {
+    for (let place = 0; place < this.count; place++) {
+      if (seen[place] === 1) continue;
+      if (this.#plain[place] === 1) this.#quick(place, weights, at);
+      else this.#slow(place, weights, at);
+    }
   }
 
-  #quick(place: number, weights: Float64Array, at: number): number {
+  #quick(place: number, weights: Float64Array, at: number): void {
     const size = this.#size;
     const own = place * size;
     let sum = 0;
@@ -74,10 +83,10 @@ export class PlanChecks {
       for (let index = 0; index < size; index++) chance += weights[at + index]! * this.predict[row * size + index]!;
       if (chance > 0) sum -= chance * Math.log(chance);
     }
-    return Math.max(0, sum);
+    this.told[place] = this.learns[place]! * Math.max(0, sum);
   }
 
-  #slow(place: number, weights: Float64Array, at: number): number {
+  #slow(place: number, weights: Float64Array, at: number): void {
     const size = this.#size;
     let told = 0;
     for (let index = 0; index < size; index++) told -= xLogX(weights[at + index]!);
@@ -94,7 +103,7 @@ export class PlanChecks {
       }
       if (total > 0) told -= chance * (Math.log(total) - logs / total);
     }
-    return Math.max(0, told);
+    this.told[place] = this.learns[place]! * Math.max(0, told);
   }
 }
 
