@@ -76,13 +76,19 @@ export function NodeForm({ tree, list, node, draftId, onChange }: Props) {
 
   // Closed, or the page left, before the quiet was over: nothing typed is lost.
   useEffect(() => {
-    const leaving = () => void settle();
+    const leaving = () => {
+      const typed = getValues();
+      const waits = !sameValue(typed, lastPut.current);
+      settle();
+      // The draft's own keeping takes a moment that a page on its way out may not have.
+      if (waits) keepUnfinished(draftId, list, node.key, typed);
+    };
     window.addEventListener("pagehide", leaving);
     return () => {
       window.removeEventListener("pagehide", leaving);
-      leaving();
+      settle();
     };
-  }, [settle]);
+  }, [settle, getValues, draftId, list, node.key]);
 
   return (
     <Edited value={{ tree, node: values as Partial<TreeNode> }}>
